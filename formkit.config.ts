@@ -1,0 +1,9 @@
+import { en } from '@formkit/i18n'
+import { defineFormKitConfig } from '@formkit/vue'
+
+export default defineFormKitConfig({
+  locale: 'en',
+  locales: { en },
+  icons: {},
+  iconLoader: () => undefined, // the default one reaches for another site
+})

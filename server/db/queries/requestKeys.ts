@@ -1,0 +1,21 @@
+import { refuse } from '#shared/errors'
+import type { Trx } from '../writer'
+
+export interface Once { personId: string, key: string, route: string, bodySha256: Buffer, now: number }
+
+/**
+ * Does a piece of work once per request key: a repetition with the same body gets the stored answer,
+ * another body under the same key is refused.
+ */
+export async function once<T>(trx: Trx, request: Once, work: () => Promise<T>): Promise<T> {
+  const earlier = await trx.selectFrom('request_key').selectAll().where('person_id', '=', request.personId).where('key', '=', request.key).executeTakeFirst()
+  if (earlier) {
+    if (earlier.route !== request.route || !earlier.body_sha256.equals(request.bodySha256)) refuse('request_key_reused')
+    return JSON.parse(earlier.response_json) as T
+  }
+  const answer = await work()
+  await trx.insertInto('request_key').values({
+    person_id: request.personId, key: request.key, route: request.route, body_sha256: request.bodySha256, status: 200, response_json: JSON.stringify(answer), at: request.now,
+  }).execute()
+  return answer
+}

@@ -1,0 +1,27 @@
+import type { Read } from '../../db/writer'
+import type { Actor } from './actor'
+
+/** Finds who a session belongs to, with roles as they are now; null when the session has ended in any way. */
+export async function loadActor(read: Read, tokenSha256: Buffer, now: number): Promise<Actor | null> {
+  const session = await read.selectFrom('session').innerJoin('person', 'person.id', 'session.person_id')
+    .select(['person.id as personId', 'person.display_name as displayName', 'person.email_norm as email', 'person.state as state', 'person.credential_epoch as epoch', 'session.credential_epoch as sessionEpoch', 'session.ends_at as endsAt', 'session.ended_at as endedAt'])
+    .where('session.token_sha256', '=', tokenSha256).executeTakeFirst()
+  if (!session || session.state !== 'active' || session.endedAt !== null || session.endsAt <= now || session.epoch !== session.sessionEpoch) return null
+  const [memberships, taSections, departmentRoles] = await Promise.all([
+    read.selectFrom('membership').select(['id', 'course_id', 'role', 'section_id']).where('person_id', '=', session.personId).where('state', '=', 'active').execute(),
+    read.selectFrom('ta_section').innerJoin('membership', 'membership.id', 'ta_section.membership_id').select(['ta_section.membership_id as id', 'ta_section.section_id as sectionId']).where('membership.person_id', '=', session.personId).execute(),
+    read.selectFrom('department_role').select(['id', 'role', 'scope_json', 'until_at']).where('person_id', '=', session.personId).where('state', '=', 'active').execute(),
+  ])
+  return {
+    personId: session.personId,
+    displayName: session.displayName ?? '',
+    email: session.email ?? '',
+    sessionId: tokenSha256.toString('hex'),
+    memberships: memberships.map(row => ({
+      id: row.id, courseId: row.course_id, role: row.role,
+      sectionIds: row.role === 'student' ? (row.section_id === null ? [] : [row.section_id]) : taSections.filter(ta => ta.id === row.id).map(ta => ta.sectionId),
+    })),
+    departmentRoles: departmentRoles.filter(row => row.until_at === null || row.until_at > now)
+      .map(row => ({ id: row.id, role: row.role, scopeJson: row.scope_json, untilAt: row.until_at })),
+  }
+}

@@ -1,0 +1,93 @@
+import type { Inputs, TraceStep } from '../thermo/definition'
+
+/** A named, versioned, sourced set of constants and variants that a course teaches with. One that does not close (cp − cv = R) is refused. */
+export interface Convention {
+  key: string
+  title: string
+  source: string
+  constants: Readonly<Record<string, number>>
+  /** Which variant of a quantity is taught; the first of its definition where it is not named. */
+  variants: Readonly<Record<string, string>>
+  /** Constants and variants that earn the marks as well: the hull of their values is the formula part of the band. */
+  accepted: readonly { label: string, constants?: Readonly<Record<string, number>>, variants?: Readonly<Record<string, string>> }[]
+}
+
+/** A typed value as it was read. `valueSi` is in the SI unit of the asked quantity. */
+export interface ReadAnswer {
+  typed: string
+  reading: 'ok' | 'none' | 'not_reached' | 'not_defined' | 'empty' | 'unreadable' | 'wrong_dimension' | 'ambiguous'
+  valueSi: number | null
+  /** The typed number converted to `bandUnit` as an exact decimal, so that a band's edge is compared in decimals. */
+  decimal: string | null
+  unitUcum: string | null
+  /** Significant digits as typed, in the student's favor. */
+  digits: number | null
+  /** Half a unit of the last typed digit, SI. Never widens the student's own band; is carried into later ones. */
+  halfUnitSi: number | null
+  /** "read as −9.6 K km⁻¹", or what is wrong and what is asked. */
+  message: string
+}
+
+export interface Granted { absoluteSi?: number, relative?: number }
+
+/** Everything that a judgement rests on: kept with the mark, so that it can be made again. */
+export interface StepQuestion {
+  quantity: string
+  /** Pins a variant; otherwise the convention's. */
+  variant?: string
+  /** From the share, the text and constants; SI. */
+  inputs: Inputs
+  convention: Convention
+  granted: Granted
+  /** Significant digits asked for. */
+  digits: number
+  /** UCUM code in which the step asks. */
+  unit: string
+  maxMilli: number
+  /** Part of the marks for a named slip, in thousandths; 0 unless the author grants it. */
+  slipMilli?: number
+  /** Inputs that come from the student's own earlier steps. Judged on the true value and on this, the better counts. */
+  carried?: Readonly<Record<string, { valueSi: number, halfUnitSi: number } | { notCarried: string }>>
+  /** What rulings have added: a slip that counts as right here, an interval, or a variant. */
+  accepted?: readonly Accepted[]
+}
+
+export type Accepted =
+  | { kind: 'slip', slip: string, ruling: string }
+  | { kind: 'value', lowSi: number, highSi: number, ruling: string }
+  | { kind: 'variant', variant: string, ruling: string }
+
+/** One contribution to the band's width, named, with what it adds below and above the reference (SI, both ≥ 0). */
+export interface BandPart { key: 'granted' | 'formulae' | 'rounding' | 'carried' | 'reading' | 'accepted', label: string, below: number, above: number }
+
+export interface Band {
+  /** SI doubles. */
+  center: number
+  low: number
+  high: number
+  /** Decimals in `unit`, rounded outwards to 1e-9 relative: what the typed decimal is compared with, edge included. */
+  lowDecimal: string
+  highDecimal: string
+  unit: string
+  parts: readonly BandPart[]
+}
+
+export interface Judgement {
+  outcome: 'value' | 'none' | 'not_reached' | 'not_defined' | 'refused'
+  refusalCode: string | null
+  /** The band of the true value; null unless outcome is value. */
+  band: Band | null
+  /** The band of the value that follows from the student's own earlier one, where it was carried. */
+  carriedBand: Band | null
+  carriedNote: string | null
+  isAccepted: boolean
+  /** Which of the two bands (or a ruling) the value lies in. */
+  acceptedBy: 'band' | 'carried' | 'ruling' | 'word' | null
+  /** The one slip that alone explains the value; null where two do equally, or the band does. */
+  slip: { key: string, label: string, sentence: string, value: number } | null
+  /** Values of every slip that can be made here, for the height bar and the proof run. */
+  slipValues: readonly { key: string, label: string, value: number }[]
+  pointsMilli: number
+  trace: readonly TraceStep[]
+  notes: readonly string[]
+}

@@ -1,0 +1,92 @@
+/**
+ * The form of every quantity: one definition that marking, authoring, the handbook and the evaluator read.
+ * SI inside. Numbers carry their unit by the definition: `unit` is the UCUM code of the SI value.
+ */
+
+/** How a quantity's numbers behave. A temperature has an arbitrary zero, a difference has not; near zero only absolute widths make sense. */
+export type NumberKind = 'temperature' | 'difference' | 'ratio' | 'fraction'
+
+export interface InputDefinition {
+  name: string
+  /** As printed in an ask and in a form: "air temperature". */
+  label: string
+  symbol: string
+  /** UCUM code of the SI value: K, Pa, m, J/kg … */
+  unit: string
+  /** UCUM code in which people meet it: Cel, hPa, km … */
+  shownUnit: string
+  kind: NumberKind
+  shape: 'number' | 'series'
+  /** Inclusive, in SI. */
+  range: readonly [number, number]
+  isOptional?: true
+  /** What a series must satisfy: a fit needs no order, an integration does. */
+  needs?: { least: number, order?: 'none' | 'ascending' | 'descending' }
+}
+
+export type InputValue = number | readonly number[]
+export type Inputs = Readonly<Record<string, InputValue>>
+
+/** Constants by the convention's names, SI: cp, cv, R, g, p0, zeroCelsius … */
+export type Constants = Readonly<Record<string, number>>
+
+/** "None", "not reached" and "not defined" are answers in their own right. */
+export type Outcome =
+  | { is: 'value', value: number, notes?: readonly string[], more?: Readonly<Record<string, number>> }
+  | { is: 'none' | 'not_reached' | 'not_defined', why: string }
+
+export interface Source {
+  /** With equation or table number: "AMS Glossary, potential temperature". */
+  text: string
+  status: 'verified' | 'common practice' | 'from memory'
+}
+
+export interface Variant {
+  key: string
+  label: string
+  source: Source
+  /** Where it holds, and its known error, in words. */
+  validity: string
+  knownError: string
+  /** @throws {OutOfRangeError | MissingInputError | SeriesError} */
+  evaluate: (inputs: Inputs, constants: Constants) => Outcome
+}
+
+/** One line of the working: what is done, the formula, and the same with numbers put in. TeX. */
+export interface TraceStep { text: string, formula: string, filled: string, value?: number, unit?: string }
+
+/** A known way to go wrong that reproduces a value. */
+export interface Slip {
+  key: string
+  /** For the class view: "sign turned round". */
+  label: string
+  /** For the student, in a sentence; may use {value} and {unit}. */
+  sentence: string
+  /** What one gets by this slip, SI; null where it makes no difference or cannot be made. */
+  apply: (inputs: Inputs, constants: Constants, right: number) => number | null
+}
+
+export interface QuantityDefinition {
+  /** kebab-case, American spelling. */
+  key: string
+  name: string
+  symbol: string
+  /** UCUM code of the SI result. */
+  unit: string
+  /** UCUM code in which it is asked and shown unless an author says otherwise. */
+  shownUnit: string
+  kind: NumberKind
+  inputs: readonly InputDefinition[]
+  /** The first is the default. */
+  variants: readonly Variant[]
+  /** Constants of the convention that enter. */
+  constants: readonly string[]
+  /** Values at which the answer's class changes, SI, from the convention: Γd, Γm. */
+  classLimits?: (inputs: Inputs, constants: Constants) => readonly { label: string, value: number }[]
+  /** The classes of an answer that is a class and not a number (static stability). */
+  classes?: readonly { key: string, label: string }[]
+  /** What is asked, with sign and method, in a sentence without the inputs: "The lapse rate Γ = −∂T/∂z, positive where temperature falls with height, …" */
+  ask: string
+  trace: (inputs: Inputs, constants: Constants, variant: string) => readonly TraceStep[]
+  slips: readonly Slip[]
+}

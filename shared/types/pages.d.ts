@@ -1,0 +1,4 @@
+declare module '#app' {
+  interface PageMeta { isPublic?: boolean }
+}
+export {}

@@ -1,0 +1,3 @@
+declare module '#routes' {
+  export const routes: readonly { method: string, path: string, handler: unknown }[]
+}
