@@ -76,3 +76,17 @@ export const lateRule = z.discriminatedUnion('kind', [
   z.object({ kind: z.literal('of_maximum'), percent: z.number().min(0).max(100), closesAfterDays: z.number().int().min(1).max(400) }),
 ])
 export type LateRule = z.infer<typeof lateRule>
+
+/** A wall time to the minute, in the term's zone. */
+export const wallTime = z.string().regex(/^\d{4}-\d{2}-\d{2}T\d{2}:\d{2}$/, 'A date and a time, to the minute.')
+
+/** A lab given to sections: their dates, one late rule, attempts and feedback. */
+export const postingBody = z.object({
+  sections: z.array(z.object({ sectionId: z.string().min(1), opensLocal: wallTime, dueLocal: wallTime })).min(1, 'Choose at least one section.').max(100),
+  /** The course's own rule where it is left out. */
+  lateRule: lateRule.optional(),
+  attempts: z.number().int().min(1).max(20).default(3),
+  keep: z.enum(['last', 'best']).default('best'),
+  feedback: z.enum(['at_once', 'after_release']).default('after_release'),
+})
+export type PostingBody = z.infer<typeof postingBody>
