@@ -1,23 +1,15 @@
+import type { Convention } from '../thermo/convention'
 import type { Inputs, TraceStep } from '../thermo/definition'
 
-/** A named, versioned, sourced set of constants and variants that a course teaches with. One that does not close (cp − cv = R) is refused. */
-export interface Convention {
-  key: string
-  title: string
-  source: string
-  constants: Readonly<Record<string, number>>
-  /** Which variant of a quantity is taught; the first of its definition where it is not named. */
-  variants: Readonly<Record<string, string>>
-  /** Constants and variants that earn the marks as well: the hull of their values is the formula part of the band. */
-  accepted: readonly { label: string, constants?: Readonly<Record<string, number>>, variants?: Readonly<Record<string, string>> }[]
-}
+export type { Alternative, Convention } from '../thermo/convention'
 
 /** A typed value as it was read. `valueSi` is in the SI unit of the asked quantity. */
 export interface ReadAnswer {
   typed: string
-  reading: 'ok' | 'none' | 'not_reached' | 'not_defined' | 'empty' | 'unreadable' | 'wrong_dimension' | 'ambiguous'
+  reading: 'ok' | 'class' | 'none' | 'not_reached' | 'not_defined' | 'empty' | 'unreadable' | 'wrong_dimension' | 'ambiguous'
+  /** For a class: its place in the quantity's `classes`. */
   valueSi: number | null
-  /** The typed number converted to `bandUnit` as an exact decimal, so that a band's edge is compared in decimals. */
+  /** The typed number converted to the asked unit as an exact decimal, so that a band's edge is compared in decimals. */
   decimal: string | null
   unitUcum: string | null
   /** Significant digits as typed, in the student's favor. */
@@ -73,8 +65,12 @@ export interface Band {
 }
 
 export interface Judgement {
-  outcome: 'value' | 'none' | 'not_reached' | 'not_defined' | 'refused'
+  outcome: 'value' | 'class' | 'none' | 'not_reached' | 'not_defined' | 'refused'
   refusalCode: string | null
+  /** What was refused and why, or why there is no value; for the author, and for the worked value. */
+  reason: string | null
+  /** Classes that earn the marks, by key, the reference's own first; empty unless outcome is class. */
+  classes: readonly string[]
   /** The band of the true value; null unless outcome is value. */
   band: Band | null
   /** The band of the value that follows from the student's own earlier one, where it was carried. */

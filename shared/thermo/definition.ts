@@ -3,8 +3,8 @@
  * SI inside. Numbers carry their unit by the definition: `unit` is the UCUM code of the SI value.
  */
 
-/** How a quantity's numbers behave. A temperature has an arbitrary zero, a difference has not; near zero only absolute widths make sense. */
-export type NumberKind = 'temperature' | 'difference' | 'ratio' | 'fraction'
+/** How a quantity's numbers behave. A temperature has an arbitrary zero, a difference has not; near zero only absolute widths make sense. A class is no number. */
+export type NumberKind = 'temperature' | 'difference' | 'ratio' | 'fraction' | 'class'
 
 export interface InputDefinition {
   name: string
@@ -22,17 +22,20 @@ export interface InputDefinition {
   isOptional?: true
   /** What a series must satisfy: a fit needs no order, an integration does. */
   needs?: { least: number, order?: 'none' | 'ascending' | 'descending' }
+  /** A student's own earlier value that is at most this far from zero makes the rest trivial (a lapse rate of 0) and is not carried. */
+  trivialWithin?: number
 }
 
 export type InputValue = number | readonly number[]
 export type Inputs = Readonly<Record<string, InputValue>>
 
-/** Constants by the convention's names, SI: cp, cv, R, g, p0, zeroCelsius … */
+/** Constants by the convention's names, SI: cp, cv, R, g, p0, zeroCelsius, neutralTolerance; kappa where it is not R/cp. */
 export type Constants = Readonly<Record<string, number>>
 
 /** "None", "not reached" and "not defined" are answers in their own right. */
 export type Outcome =
   | { is: 'value', value: number, notes?: readonly string[], more?: Readonly<Record<string, number>> }
+  | { is: 'class', key: string, notes?: readonly string[], more?: Readonly<Record<string, number>> }
   | { is: 'none' | 'not_reached' | 'not_defined', why: string }
 
 export interface Source {
@@ -52,12 +55,17 @@ export interface Variant {
   evaluate: (inputs: Inputs, constants: Constants) => Outcome
 }
 
-/** One line of the working: what is done, the formula, and the same with numbers put in. TeX. */
+/** One line of the working: what is done, the formula, and the same with numbers put in. TeX. `value` is in `unit`; the last line's is the value in SI. */
 export interface TraceStep { text: string, formula: string, filled: string, value?: number, unit?: string }
 
 /** A known way to go wrong that reproduces a value. */
 export interface Slip {
   key: string
+  /**
+   * A gross slip always differs (a sign, a unit). A fine one shrinks to nothing with good data (a fit turned round): where it comes within
+   * one unit of the last digit asked, it makes no difference and says nothing against the band.
+   */
+  weight: 'gross' | 'fine'
   /** For the class view: "sign turned round". */
   label: string
   /** For the student, in a sentence; may use {value} and {unit}. */
@@ -76,6 +84,8 @@ export interface QuantityDefinition {
   /** UCUM code in which it is asked and shown unless an author says otherwise. */
   shownUnit: string
   kind: NumberKind
+  /** Below this size (SI) digits are counted as if the value had it, and a relative width is refused. For quantities that pass through zero. */
+  nearZero?: number
   inputs: readonly InputDefinition[]
   /** The first is the default. */
   variants: readonly Variant[]
@@ -89,4 +99,6 @@ export interface QuantityDefinition {
   ask: string
   trace: (inputs: Inputs, constants: Constants, variant: string) => readonly TraceStep[]
   slips: readonly Slip[]
+  /** One worked example in SI with the default convention, repeated by a test: the handbook's calculator starts from it. */
+  example: { inputs: Inputs, gives: number | string, within: number }
 }

@@ -417,7 +417,7 @@ export interface AnswerTable {
   submission_id: string
   step_key: string
   typed: string
-  reading: 'ok' | 'none' | 'not_reached' | 'not_defined' | 'empty' | 'unreadable' | 'wrong_dimension' | 'ambiguous'
+  reading: 'ok' | 'class' | 'none' | 'not_reached' | 'not_defined' | 'empty' | 'unreadable' | 'wrong_dimension' | 'ambiguous'
   value_si: number | null
   unit_ucum: string | null
   digits: number | null
@@ -443,7 +443,7 @@ export interface EvaluationTable {
   slips_json: string
   trace_json: string
   digest: Buffer
-  outcome: 'value' | 'none' | 'not_reached' | 'not_defined' | 'refused'
+  outcome: 'value' | 'class' | 'none' | 'not_reached' | 'not_defined' | 'refused'
   refusal_code: string | null
 }
 

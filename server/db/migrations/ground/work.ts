@@ -13,7 +13,7 @@ create table submission (
 ) strict;
 create table answer (
   submission_id text not null references submission, step_key text not null, typed text not null, reading text not null
-    check (reading in ('ok','none','not_reached','not_defined','empty','unreadable','wrong_dimension','ambiguous')),
+    check (reading in ('ok','class','none','not_reached','not_defined','empty','unreadable','wrong_dimension','ambiguous')),
   value_si real, unit_ucum text, digits integer, resolution_si real,
   private_digest blob,                  -- free text, working, picture: in private_body / work_file, erasable
   primary key (submission_id, step_key), check (reading <> 'ok' or value_si is not null or private_digest is not null or typed <> '')
@@ -24,7 +24,7 @@ create table evaluation (                     -- everything that is needed to ju
   lab_revision_id text not null references lab_revision, inputs_json text not null, carried_json text not null, accepted_json text not null,
   center_bits blob check (length(center_bits) = 8), low_bits blob check (length(low_bits) = 8), high_bits blob check (length(high_bits) = 8),
   parts_json text not null, slips_json text not null, trace_json text not null, digest blob not null,
-  outcome text not null check (outcome in ('value','none','not_reached','not_defined','refused')), refusal_code text,
+  outcome text not null check (outcome in ('value','class','none','not_reached','not_defined','refused')), refusal_code text,
   foreign key (submission_id, step_key) references answer (submission_id, step_key),
   check ((center_bits is not null) = (outcome = 'value')), check ((refusal_code is not null) = (outcome = 'refused'))
 ) strict;
