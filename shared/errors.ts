@@ -9,7 +9,7 @@ export const refusalCodes = [
   // people
   'sign_in_failed', 'token_invalid', 'passphrase_too_short', 'passphrase_too_common', 'already_exists',
   // terms and rosters
-  'term_closed', 'plan_changed', 'roster_unreadable', 'last_lead',
+  'term_closed', 'plan_changed', 'roster_unreadable', 'last_lead', 'last_admin',
   // data
   'file_empty', 'file_header_only', 'file_binary', 'file_wrong_delimiter', 'file_line_too_long', 'file_not_gzip', 'file_cut', 'no_time_column', 'no_height_column',
   'column_missing', 'zone_unknown', 'nothing_taken', 'import_cancelled', 'import_running', 'import_failed', 'too_many_stations',

@@ -31,6 +31,7 @@ export const refusalWords: Record<RefusalCode, Words> = {
   plan_changed: plain('The plan is out of date', 'Something changed since the plan was made. Read the new one.'),
   roster_unreadable: { title: 'Roster not read', detail: f => String(f.reason ?? 'The file is not a table with e-mail, name and section.') },
   last_lead: plain('The last lead', 'A course keeps at least one lead. Appoint another first.'),
+  last_admin: plain('The last admin', 'The department keeps at least one admin who can sign in. Appoint another first.'),
   file_empty: plain('The file is empty', 'There is nothing in it. Check the logger and upload again.'),
   file_header_only: plain('A header and no rows', 'The file has column names but no readings.'),
   file_binary: { title: 'Not a text file', detail: f => `Line ${f.line ?? 1} holds bytes that no text table has. Export the record as CSV and upload that.` },

@@ -1,0 +1,56 @@
+import { refuse } from '#shared/errors'
+import type { Stores, Trx } from '../../db/writer'
+import { doOnce, type Asked } from '../asked'
+import type { DepartmentRoleName } from '../policies'
+import { newId } from '../ids'
+import { appendEntry, departmentChain } from '../ledger/appendEntry'
+import { drawPseudonym } from './pseudonym'
+
+export interface DepartmentRoleGrant { personId: string, role: DepartmentRoleName, courseIds: readonly string[], untilAt: number | null }
+
+/** Gives a person a role in the department. A visitor reads stated courses until a stated day. */
+export function setDepartmentRole({ write }: Stores, input: Asked & DepartmentRoleGrant, now: number): Promise<{ id: string }> {
+  return write(trx => doOnce(trx, input, async () => {
+    const person = await trx.selectFrom('person').select('state').where('id', '=', input.personId).executeTakeFirst()
+    if (!person || person.state === 'erased' || person.state === 'closed') refuse('not_found')
+    if (input.role === 'visitor' && (input.untilAt === null || input.courseIds.length === 0)) refuse('invalid', {}, [{ path: 'until', message: 'A visitor reads stated courses until a stated day.' }])
+    const held = await trx.selectFrom('department_role').select('id').where('person_id', '=', input.personId).where('role', '=', input.role).where('state', '=', 'active').executeTakeFirst()
+    if (held) refuse('already_exists', { what: `The role of ${input.role}` })
+    const id = newId(now)
+    await trx.insertInto('actor').values({ id, kind: 'department_role' }).execute()
+    await trx.insertInto('department_role').values({
+      id, person_id: input.personId, pseudonym: await freeDepartmentPseudonym(trx), role: input.role,
+      scope_json: input.role === 'visitor' ? JSON.stringify({ courseIds: input.courseIds }) : null, until_at: input.untilAt, state: 'active', created_at: now,
+    }).execute()
+    await appendEntry(trx, { chain: departmentChain, at: now, actor: input.actorId, action: 'department_role.given', facts: { personId: input.personId, roleId: id, role: input.role, untilAt: input.untilAt, courseIds: input.courseIds } })
+    return { id }
+  }))
+}
+
+/** Ends a role in the department. The last admin stays: somebody must be able to open the door. */
+export function endDepartmentRole({ write }: Stores, input: Asked & { roleId: string }, now: number): Promise<{ id: string }> {
+  return write(trx => doOnce(trx, input, async () => {
+    const held = await trx.selectFrom('department_role').select(['id', 'person_id', 'role', 'state']).where('id', '=', input.roleId).executeTakeFirst()
+    if (!held) refuse('not_found')
+    if (held.state === 'ended') return { id: held.id }
+    if (held.role === 'admin' && held.person_id !== null) await assertOtherAdmin(trx, held.person_id, now)
+    await trx.updateTable('department_role').set({ state: 'ended' }).where('id', '=', held.id).execute()
+    await appendEntry(trx, { chain: departmentChain, at: now, actor: input.actorId, action: 'department_role.ended', facts: { roleId: held.id, role: held.role } })
+    return { id: held.id }
+  }))
+}
+
+/** Refuses when this person is the only one left who can act as admin. */
+export async function assertOtherAdmin(trx: Trx, personId: string, now: number): Promise<void> {
+  const admins = await trx.selectFrom('department_role').innerJoin('person', 'person.id', 'department_role.person_id').select(['person.id', 'department_role.until_at as untilAt'])
+    .where('department_role.role', '=', 'admin').where('department_role.state', '=', 'active').where('person.state', '=', 'active').execute()
+  const able = admins.filter(admin => admin.untilAt === null || admin.untilAt > now)
+  if (able.some(admin => admin.id === personId) && !able.some(admin => admin.id !== personId)) refuse('last_admin')
+}
+
+async function freeDepartmentPseudonym(trx: Trx): Promise<string> {
+  for (;;) {
+    const pseudonym = drawPseudonym()
+    if (!await trx.selectFrom('department_role').select('id').where('pseudonym', '=', pseudonym).executeTakeFirst()) return pseudonym
+  }
+}
