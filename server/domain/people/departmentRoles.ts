@@ -4,25 +4,27 @@ import { doOnce, type Asked } from '../asked'
 import type { DepartmentRoleName } from '../policies'
 import { newId } from '../ids'
 import { appendEntry, departmentChain } from '../ledger/appendEntry'
+import { resolveWallTime } from '../terms/wallClock'
 import { drawPseudonym } from './pseudonym'
 
-export interface DepartmentRoleGrant { personId: string, role: DepartmentRoleName, courseIds: readonly string[], untilAt: number | null }
+export interface DepartmentRoleGrant { personId: string, role: DepartmentRoleName, courseIds: readonly string[], /** Last day of it, on the department's wall. */ until: string | null }
 
 /** Gives a person a role in the department. A visitor reads stated courses until a stated day. */
 export function setDepartmentRole({ write }: Stores, input: Asked & DepartmentRoleGrant, now: number): Promise<{ id: string }> {
   return write(trx => doOnce(trx, input, async () => {
     const person = await trx.selectFrom('person').select('state').where('id', '=', input.personId).executeTakeFirst()
     if (!person || person.state === 'erased' || person.state === 'closed') refuse('not_found')
-    if (input.role === 'visitor' && (input.untilAt === null || input.courseIds.length === 0)) refuse('invalid', {}, [{ path: 'until', message: 'A visitor reads stated courses until a stated day.' }])
+    if (input.role === 'visitor' && (input.until === null || input.courseIds.length === 0)) refuse('invalid', {}, [{ path: 'until', message: 'A visitor reads stated courses until a stated day.' }])
     const held = await trx.selectFrom('department_role').select('id').where('person_id', '=', input.personId).where('role', '=', input.role).where('state', '=', 'active').executeTakeFirst()
     if (held) refuse('already_exists', { what: `The role of ${input.role}` })
+    const untilAt = input.until === null ? null : await endOfDay(trx, input.until)
     const id = newId(now)
     await trx.insertInto('actor').values({ id, kind: 'department_role' }).execute()
     await trx.insertInto('department_role').values({
       id, person_id: input.personId, pseudonym: await freeDepartmentPseudonym(trx), role: input.role,
-      scope_json: input.role === 'visitor' ? JSON.stringify({ courseIds: input.courseIds }) : null, until_at: input.untilAt, state: 'active', created_at: now,
+      scope_json: input.role === 'visitor' ? JSON.stringify({ courseIds: input.courseIds }) : null, until_at: untilAt, state: 'active', created_at: now,
     }).execute()
-    await appendEntry(trx, { chain: departmentChain, at: now, actor: input.actorId, action: 'department_role.given', facts: { personId: input.personId, roleId: id, role: input.role, untilAt: input.untilAt, courseIds: input.courseIds } })
+    await appendEntry(trx, { chain: departmentChain, at: now, actor: input.actorId, action: 'department_role.given', facts: { personId: input.personId, roleId: id, role: input.role, untilAt, courseIds: input.courseIds } })
     return { id }
   }))
 }
@@ -53,4 +55,10 @@ async function freeDepartmentPseudonym(trx: Trx): Promise<string> {
     const pseudonym = drawPseudonym()
     if (!await trx.selectFrom('department_role').select('id').where('pseudonym', '=', pseudonym).executeTakeFirst()) return pseudonym
   }
+}
+
+/** The end of a day where the department's newest term keeps its clock. */
+async function endOfDay(trx: Trx, date: string): Promise<number> {
+  const term = await trx.selectFrom('term').select('zone').orderBy('starts_on', 'desc').limit(1).executeTakeFirst()
+  return resolveWallTime(`${date}T23:59`, term?.zone ?? 'UTC').at + 60_000
 }
