@@ -2,7 +2,7 @@ import type { TermDates } from '#shared/schemas/department'
 import type { DateNote, PlannedPosting } from '#shared/schemas/rollOver'
 import type { TermCalendar } from '#shared/schemas/calendar'
 import { holidayOn, moveDay, teachingDayOf } from '../calendar'
-import { resolveWallTime, tellShift } from '../wallClock'
+import { endOfMinute, resolveWallTime, tellShift } from '../wallClock'
 
 type Which = 'opens' | 'due'
 interface SaidTimes { opensLocal: string, dueLocal: string }
@@ -34,7 +34,7 @@ export function moveDates(from: TermCalendar, to: TermDates, was: SaidTimes, cho
   const problem = resolved.due.at > resolved.opens.at ? null : 'It would be due before it opens.'
   return {
     was: { ...was, dueWeek: teachingDayOf(from, was.dueLocal.slice(0, 10)).week },
-    becomes: { opensLocal, dueLocal, opensAt: resolved.opens.at, dueAt: resolved.due.at, dueWeek: teachingDayOf(to.calendar, dueLocal.slice(0, 10)).week },
+    becomes: { opensLocal, dueLocal, opensAt: resolved.opens.at, dueAt: endOfMinute(resolved.due.at), dueWeek: teachingDayOf(to.calendar, dueLocal.slice(0, 10)).week },
     notes, problem,
   }
 }
