@@ -20,7 +20,7 @@ export default defineNuxtConfig({
   telemetry: { enabled: false },
   typescript: { strict: true, tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true }, exclude: ['../.output', '../.data'] } },
   css: ['~/assets/css/paper.css'],
-  components: [{ path: '~/components', pathPrefix: false }],
+  components: [{ path: '~/components', pathPrefix: false, extensions: ['vue'] }],
   app: {
     head: {
       htmlAttrs: { lang: 'en' },
@@ -35,6 +35,7 @@ export default defineNuxtConfig({
     sessionRefresh: { enablePeriodically: false, enableOnWindowFocus: false },
   },
   formkit: { autoImport: false },
+  vite: { build: { assetsInlineLimit: 0 } }, // fonts come as files: the content policy allows no data: fonts
   eslint: { config: { stylistic: false, standalone: true } },
   tailwindcss: { cssPath: '~/assets/css/paper.css', viewer: false },
   nitro: {

@@ -1,0 +1,51 @@
+/** A piece of a line: raised where it is an exponent. No text face here carries U+207B, so exponents are set, never typed. */
+export interface TextPart { text: string, raised: boolean }
+
+const raisedDigits: Record<string, string> = { '⁻': '−', '⁺': '+', '⁰': '0', '¹': '1', '²': '2', '³': '3', '⁴': '4', '⁵': '5', '⁶': '6', '⁷': '7', '⁸': '8', '⁹': '9' }
+const raised = /[⁻⁺⁰¹²³⁴-⁹]+|\^[-−+]?\d+/g
+
+/** Cuts a line into plain and raised pieces: "K km⁻¹" and "K km^-1" give "K km" and, raised, "−1". */
+export function supParts(line: string): TextPart[] {
+  const parts: TextPart[] = []
+  let from = 0
+  for (const found of line.matchAll(raised)) {
+    if (found.index > from) parts.push({ text: line.slice(from, found.index), raised: false })
+    const text = found[0].startsWith('^') ? found[0].slice(1).replace('-', '−') : [...found[0]].map(sign => raisedDigits[sign] ?? sign).join('')
+    parts.push({ text, raised: true })
+    from = found.index + found[0].length
+  }
+  if (from < line.length) parts.push({ text: line.slice(from), raised: false })
+  return parts
+}
+
+const ucumNames: Record<string, string> = { 'Cel': '°C', '[degF]': '°F', 'deg': '°', '[kn_i]': 'kn', '[ft_i]': 'ft', '[in_i]': 'in', '[in_i\'Hg]': 'inHg', '1': '', 'm[H2O]': 'mH2O', 'um': 'µm', 'us': 'µs' }
+
+/**
+ * A unit as it is written in the field, from UCUM: "K/km" → "K km^-1", "Cel" → "°C", "m2.s-2" → "m^2 s^-2".
+ * What is already written that way ("K km^-1", "°C") stays. Pieces are joined by U+202F.
+ */
+export function unitText(unit: string): string {
+  const named = ucumNames[unit]
+  if (named !== undefined) return named
+  if (/[\^⁻ \u202f°]/.test(unit)) return unit.replaceAll(' ', '\u202f')
+  return unit.split('/').flatMap((side, at) => side.split('.').map((factor) => {
+    const read = /^(.*?)([-+]?\d+)?$/.exec(factor)
+    const symbol = read?.[1] ?? factor
+    const power = Number(read?.[2] ?? 1) * (at === 0 ? 1 : -1)
+    const name = ucumNames[symbol] ?? symbol
+    return name === '' ? '' : power === 1 ? name : `${name}^${power}`
+  })).filter(Boolean).join('\u202f')
+}
+
+/** A number with the true minus and, from five digits on, groups of three: −9.6, 12 480. */
+export function numberText(value: number, digits: number): string {
+  const [whole = '', decimals] = Math.abs(value).toFixed(digits).split('.')
+  const grouped = whole.length >= 5 ? whole.replace(/\B(?=(\d{3})+$)/g, '\u202f') : whole
+  const text = decimals === undefined ? grouped : `${grouped}.${decimals}`
+  return value < 0 && /[1-9]/.test(text) ? `−${text}` : text
+}
+
+/** Marks are integer thousandths: 2500 → "2.5", 3000 → "3". */
+export function marksText(pointsMilli: number): string {
+  return (pointsMilli / 1000).toFixed(3).replace(/\.?0+$/, '').replace('-', '−')
+}
