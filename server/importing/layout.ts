@@ -47,7 +47,7 @@ export function guessLayout(bytes: Buffer, isWhole: boolean, title: string): Gue
   const decimal = decimalOf(data, sample.delimiter)
   const unitRow = head.slice(1).find(row => row.cells.filter(cell => unitFromText(cell) !== null).length >= 1)
   const cellsOf = (at: number) => data.map(row => row.cells[at] ?? '')
-  const times = guessTimes(names.map((name, at) => ({ name, at, cells: cellsOf(at).slice(0, 400) })))
+  const times = guessTimes(names.map((name, at) => ({ name, at, unit: unitRow?.cells[at] ?? '', cells: cellsOf(at).slice(0, 400) })))
   const chosen = times[0]
   const timeColumns = new Set(chosen ? refsOf(chosen.time) : [])
   const columns = names.map((name, at) => guessColumn(name, at, cellsOf(at), unitRow?.cells[at] ?? '', decimal, times, timeColumns))

@@ -1,7 +1,7 @@
 import type { ColumnRef, DateOrder, TimeRecipe } from '#shared/schemas/data'
 import { headWords } from './words'
 
-export interface SampleColumn extends ColumnRef { cells: readonly string[] }
+export interface SampleColumn extends ColumnRef { unit: string, cells: readonly string[] }
 
 /** A way to read time from this file. `zone` is what the file itself says, where it does. */
 export interface TimeCandidate {
@@ -20,7 +20,7 @@ const clock = /^\d{1,2}:\d{2}(:\d{2})?(\s*[ap]\.?\s*m\.?)?$/i
 const zoned = /(Z|UTC|GMT|[+-]\d{2}:?\d{2})$/
 
 const zones: Readonly<Record<string, string>> = { utc: 'UTC', gmt: 'UTC', z: 'UTC', est: 'UTC-05:00', cst: 'UTC-06:00', mst: 'UTC-07:00', pst: 'UTC-08:00', akst: 'UTC-09:00', hst: 'UTC-10:00', cet: 'UTC+01:00' }
-const zoneOfHead = (name: string): string | null => headWords(name).split(' ').map(word => zones[word]).find(zone => zone !== undefined) ?? null
+const zoneOfHead = ({ name, unit }: SampleColumn): string | null => headWords(`${name} ${unit}`).split(' ').map(word => zones[word]).find(zone => zone !== undefined) ?? null
 
 /** All ways found, the surest first: with an offset in the cells, then epoch seconds, then wall times. */
 export function guessTimes(columns: readonly SampleColumn[]): TimeCandidate[] {
@@ -34,7 +34,7 @@ export function guessTimes(columns: readonly SampleColumn[]): TimeCandidate[] {
     if (all(column, stamp)) {
       const { order, isOpen } = orderOf(column.cells)
       const hasZone = all(column, zoned)
-      add(hasZone ? 0 : 2, { label: column.name, time: { form: 'stamp', column: ref(column), dateOrder: order }, hasZone, zone: zoneOfHead(column.name), isOrderOpen: isOpen })
+      add(hasZone ? 0 : 2, { label: column.name, time: { form: 'stamp', column: ref(column), dateOrder: order }, hasZone, zone: zoneOfHead(column), isOrderOpen: isOpen })
     }
     if (all(column, /^\d{10}(\.\d+)?$/) && /time|stamp|epoch|unix|sec/.test(headWords(column.name))) {
       add(1, { label: `${column.name}, seconds since 1970`, time: { form: 'epoch', column: ref(column), unit: 's' }, hasZone: true, zone: 'UTC', isOrderOpen: false })
@@ -49,7 +49,7 @@ export function guessTimes(columns: readonly SampleColumn[]): TimeCandidate[] {
   const clocks = columns.find(column => column !== dates && all(column, clock))
   if (dates && clocks) {
     const { order, isOpen } = orderOf(dates.cells)
-    add(3, { label: `${dates.name} and ${clocks.name}`, time: { form: 'split', date: ref(dates), time: ref(clocks), dateOrder: order }, hasZone: false, zone: zoneOfHead(clocks.name) ?? zoneOfHead(dates.name), isOrderOpen: isOpen })
+    add(3, { label: `${dates.name} and ${clocks.name}`, time: { form: 'split', date: ref(dates), time: ref(clocks), dateOrder: order }, hasZone: false, zone: zoneOfHead(clocks) ?? zoneOfHead(dates), isOrderOpen: isOpen })
   }
   const [year, month, day, hour] = [named(/^(yr|year|yyyy|yy)$/), named(/^(mo|mon|month|mm)$/), named(/^(day|dd|dy)$/), named(/^(hr|hour|hh)$/)]
   if (year && month && day && hour) {
@@ -58,7 +58,7 @@ export function guessTimes(columns: readonly SampleColumn[]): TimeCandidate[] {
   }
   const dayOfYear = named(/^(doy|jday|julian day|day of year|jul)$/)
   const hhmm = named(/^(hhmm|time|cst|mst|est|pst|utc)$/)
-  if (year && dayOfYear && hhmm) add(5, { label: `${year.name}, day of year and ${hhmm.name}`, time: { form: 'dayOfYear', year: ref(year), day: ref(dayOfYear), time: ref(hhmm) }, hasZone: false, zone: zoneOfHead(hhmm.name), isOrderOpen: false })
+  if (year && dayOfYear && hhmm) add(5, { label: `${year.name}, day of year and ${hhmm.name}`, time: { form: 'dayOfYear', year: ref(year), day: ref(dayOfYear), time: ref(hhmm) }, hasZone: false, zone: zoneOfHead(hhmm), isOrderOpen: false })
   return found.sort((a, b) => a.rank - b.rank).map(entry => entry.candidate)
 }
 
