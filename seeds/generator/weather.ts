@@ -4,7 +4,19 @@ import type { Place } from './place'
 import { clearSky } from './sun'
 
 /** A change of air mass: cooler, drier, the wind veering, pressure rising behind it. */
-export interface Front { at: number, coolingK: number, dewpointDropK: number, veerDeg: number, riseHpa: number, rainMm: number }
+export interface Front {
+  at: number
+  coolingK: number
+  dewpointDropK: number
+  veerDeg: number
+  riseHpa: number
+  rainMm: number
+  /** How long its air mass lasts before the weather is itself again; for ever where not said. */
+  lastsMs?: number
+}
+
+/** Weather that changes from day to day. */
+export type Sky = (at: number) => Weather
 
 /** What the weather is like from `from` on; the station follows with its own inertia. */
 export interface Weather {
@@ -49,16 +61,18 @@ const square = (x: number) => x * x
  * Temperature relaxes toward the air mass, warmed by the sun and cooled by a clear sky; humidity, dewpoint and temperature
  * agree with one another by Bolton's formula; pressure carries the twice-daily tide.
  */
-export function stationRecord(place: Place, weather: Weather, span: { from: number, to: number, everyMinutes: number }, seed: string): StationReading[] {
+export function stationRecord(place: Place, sky: Weather | Sky, span: { from: number, to: number, everyMinutes: number }, seed: string): StationReading[] {
   const random = randomFrom(`station ${seed}`)
   const readings: StationReading[] = []
   const spinUp = span.from - 24 * 3_600_000
   const noise = { air: 0, vapor: 0, speed: 0, turn: 0, cloud: 0, pressure: 0 }
-  let air = weather.settlesAtC
+  const weatherAt = typeof sky === 'function' ? sky : () => sky
+  let air = weatherAt(spinUp).settlesAtC
   let interval = new Interval()
   for (let at = spinUp; at < span.to; at += step) {
+    const weather = weatherAt(at)
     const sun = clearSky(at, place.latitude, place.longitude)
-    const passed = weather.fronts.map(front => ({ front, share: 1 / (1 + exp(-(at - front.at) / 600_000)) }))
+    const passed = weather.fronts.map(front => ({ front, share: passedBy(front, at) }))
     const sum = (of: (front: Front) => number) => passed.reduce((total, { front, share }) => total + share * of(front), 0)
     noise.cloud = ar(random, noise.cloud, 0.97)
     const nearFront = Math.min(1, passed.reduce((total, { front }) => total + exp(-square((at - front.at) / 5_400_000)), 0))
@@ -68,7 +82,7 @@ export function stationRecord(place: Place, weather: Weather, span: { from: numb
     const goal = weather.settlesAtC - sum(front => front.coolingK) - nightCoolingK * (1 - 0.8 * cloud) + (weather.sunWarmingK * 1.55 * global) / 700
     air += ((goal - air) * step) / (sun > 30 ? relaxation.day : relaxation.night)
     // A front comes faster than the slow relaxation: the air itself is exchanged.
-    for (const { front, share } of passed) air -= (front.coolingK * 0.7 * share * (1 - share) * step) / 600_000
+    for (const { front } of passed) air -= front.coolingK * 0.7 * Math.max(0, passedBy(front, at + step) - passedBy(front, at))
     noise.air = ar(random, noise.air, 0.86)
     noise.vapor = ar(random, noise.vapor, 0.95)
     const day = ((at - span.from) / 86_400_000)
@@ -97,6 +111,12 @@ export function stationRecord(place: Place, weather: Weather, span: { from: numb
     interval = new Interval()
   }
   return readings
+}
+
+/** How much of a front's change is there: it comes within a half hour and fades over days. */
+function passedBy(front: Front, at: number): number {
+  const since = at - front.at
+  return (1 / (1 + exp(-since / 600_000))) * (front.lastsMs === undefined || since < 0 ? 1 : exp(-since / front.lastsMs))
 }
 
 /** One step of a first-order autoregression with unit variance. */
