@@ -50,7 +50,7 @@ export async function assertOtherAdmin(trx: Trx, personId: string, now: number):
   if (able.some(admin => admin.id === personId) && !able.some(admin => admin.id !== personId)) refuse('last_admin')
 }
 
-async function freeDepartmentPseudonym(trx: Trx): Promise<string> {
+export async function freeDepartmentPseudonym(trx: Trx): Promise<string> {
   for (;;) {
     const pseudonym = drawPseudonym()
     if (!await trx.selectFrom('department_role').select('id').where('pseudonym', '=', pseudonym).executeTakeFirst()) return pseudonym
