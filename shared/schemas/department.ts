@@ -14,6 +14,7 @@ export const emailAddress = z.string().transform(text => text.trim().normalize('
 
 export const invitation = z.object({ name: personName, email: emailAddress })
 
+export const courseRole = z.enum(['lead', 'instructor', 'ta', 'student'])
 export const departmentRoleName = z.enum(['admin', 'technician', 'visitor'])
 export const departmentRoleGrant = z.object({
   role: departmentRoleName,
@@ -88,3 +89,15 @@ export const rosterChoices = z.object({
 export const rosterAsked = rosterFile.extend({ choices: rosterChoices.prefault({}) })
 export const rosterCarriedOut = rosterAsked.extend({ digest: z.string().regex(/^[0-9a-f]{64}$/) })
 export type RosterChoices = z.infer<typeof rosterChoices>
+
+const refusedLine = z.object({ line: z.number().int(), text: z.string(), reason: z.string() })
+export const rosterPreview = z.object({
+  delimiter: z.enum([',', ';', '\t', '|']), header: z.array(z.string()), columns: rosterColumns, isGuess: z.boolean(), sample: z.array(z.array(z.string())), count: z.number().int(), rows: z.number().int(),
+  course: z.object({ code: z.string(), title: z.string(), term: z.string() }),
+  sections: z.array(z.object({ id: z.string(), name: z.string() })),
+  adds: z.array(z.object({ line: z.number().int(), email: z.string(), name: z.string(), section: z.string(), isNew: z.boolean(), isBack: z.boolean() })),
+  moves: z.array(z.object({ line: z.number().int(), membershipId: z.string(), email: z.string(), name: z.string(), from: z.string(), to: z.string() })),
+  absent: z.array(z.object({ membershipId: z.string(), email: z.string(), name: z.string(), section: z.string(), ends: z.boolean() })),
+  same: z.number().int(), newSections: z.array(z.string()), unknownSections: z.array(z.string()), refused: z.array(refusedLine), digest: z.string(),
+})
+export type RosterPreview = z.infer<typeof rosterPreview>

@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto'
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import type { TermDates } from '../../../shared/schemas/department'
+import type { RollOverChoices } from '../../../shared/schemas/rollOver'
 import { groupWriter } from '../../../server/db/writer'
 import { closeAccount } from '../../../server/domain/people/closeAccount'
 import { teachingWeeksBetween } from '../../../server/domain/terms/calendar'
@@ -13,7 +14,7 @@ import { inTerm, postedLab, smallDepartment, zone } from '../../fixtures/smallDe
 
 const holidays = [{ from: '2027-03-22', to: '2027-03-26', name: 'Spring break' }, { from: '2027-04-02', to: '2027-04-02', name: 'Good Friday' }]
 const spring: TermDates = { name: 'Spring 2027', zone, startsOn: '2027-01-11', endsOn: '2027-04-30', calendar: { weeks: teachingWeeksBetween('2027-01-11', '2027-04-30', holidays), holidays } }
-const noChoices = { leaveOut: [], dates: [] }
+const noChoices: RollOverChoices = { leaveOut: [], dates: [] }
 
 let db: Awaited<ReturnType<typeof openTemporary>>
 let house: Awaited<ReturnType<typeof smallDepartment>>
@@ -55,11 +56,11 @@ describe('a plan of the next term', () => {
     expect(night.notes).toEqual([{ kind: 'clock', which: 'due', told: 'The clocks skip 02:30 on 2027-03-14: 03:30 is taken.' }])
   })
   it('stops at dates that cannot stand until they are chosen', async () => {
-    const bad = { leaveOut: [], dates: [{ postingId: lapse.postings[house.sectionA]!, opensLocal: '2027-03-17T23:00', dueLocal: '2027-03-10T08:00' }] }
+    const bad: RollOverChoices = { leaveOut: [], dates: [{ postingId: lapse.postings[house.sectionA]!, opensLocal: '2027-03-17T23:00', dueLocal: '2027-03-10T08:00' }] }
     const planned = await plan(bad)
     expect(planned.counts.problems).toBe(1)
     await expect(start(planned.digest, bad)).rejects.toMatchObject({ code: 'dates_invalid' })
-    const good = { leaveOut: [], dates: [{ ...bad.dates[0]!, opensLocal: '2027-03-11T08:00', dueLocal: '2027-03-18T23:00' }] }
+    const good: RollOverChoices = { leaveOut: [], dates: [{ ...bad.dates[0]!, opensLocal: '2027-03-11T08:00', dueLocal: '2027-03-18T23:00' }] }
     await start((await plan(good)).digest, good)
     expect(await db.read.selectFrom('posting').select('due_local').where('state', '=', 'planned').orderBy('due_local').execute()).toEqual([{ due_local: '2027-03-18T23:00' }, { due_local: '2027-04-05T17:00' }])
   })
@@ -157,7 +158,7 @@ describe('starting it', () => {
     expect(digestOfRows(allRows(db.raw))).not.toBe(before) // the same digest does see the term once it starts
   })
   it('leaves out what was chosen to stay', async () => {
-    const choices = { leaveOut: [lapse.labId], dates: [] }
+    const choices: RollOverChoices = { leaveOut: [lapse.labId], dates: [] }
     const { termId, labs } = await start((await plan(choices)).digest, choices)
     expect(labs).toBe(0)
     expect(await labsOf(termId)).toEqual([])
