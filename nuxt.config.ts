@@ -64,6 +64,7 @@ export default defineNuxtConfig({
       crossOriginEmbedderPolicy: false,
       strictTransportSecurity: false,
       referrerPolicy: 'same-origin',
+      xFrameOptions: 'DENY',
     },
     corsHandler: false,
     xssValidator: false,

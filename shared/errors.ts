@@ -5,7 +5,7 @@
 export const refusalCodes = [
   // asking
   'not_signed_in', 'not_found', 'not_allowed', 'invalid', 'too_large', 'too_many_requests', 'wrong_content_type', 'wrong_origin',
-  'request_key_missing', 'request_key_reused', 'version_missing', 'changed_meanwhile', 'no_room', 'read_only', 'busy',
+  'request_key_missing', 'request_key_reused', 'version_missing', 'changed_meanwhile', 'no_room', 'read_only', 'busy', 'failed',
   // people
   'sign_in_failed', 'token_invalid', 'passphrase_too_short', 'passphrase_too_common', 'already_exists',
   // terms and rosters

@@ -22,6 +22,7 @@ export const refusalWords: Record<RefusalCode, Words> = {
   no_room: plain('The disk is full', 'Nothing was stored. Reading and signing in still work; tell the department admin.'),
   read_only: plain('The disk cannot be written', 'Nothing was stored. Tell the department admin.'),
   busy: plain('Busy', 'Too much at once. Try again in a moment.'),
+  failed: { title: 'Something went wrong here', detail: f => `It is noted under ${f.request ?? 'no number'}. Nothing was half stored; try again, and tell the department admin if it stays.` },
   sign_in_failed: plain('Not signed in', 'E-mail and passphrase do not go together.'),
   token_invalid: plain('Link no longer good', 'The link was used, or is too old. Ask for a new one.'),
   passphrase_too_short: { title: 'Passphrase too short', detail: f => `Use at least ${f.least ?? 15} characters; a few words are good.` },

@@ -8,8 +8,10 @@ import { authorize, type Place } from '../domain/authorize'
 import { locate } from '../domain/locate'
 import type { Acting, Actor } from '../domain/people/actor'
 import { policies, type Action } from '../domain/policies'
+import { answerProblem } from './answerProblem'
+import { logLine } from './logLine'
 import { now } from './now'
-import { problemOf, type Problem } from './problem'
+import { problemOf } from './problem'
 import { findActor } from './requireActor'
 import { assertOwnOrigin } from './origin'
 import { openStores, useStores } from './useStores'
@@ -91,19 +93,13 @@ export function defineApiHandler<R extends z.ZodType, P extends z.ZodType | unde
     }
     catch (error) {
       const refused = error instanceof DomainError ? error : isOutOfRoom(error) ? new DomainError('no_room') : null
-      if (!refused) throw error
-      return answerProblem(event, problemOf(refused)) as never
+      if (!refused) {
+        logLine('error', { event: 'failed', request: event.context.requestId, action: route.action, error: error instanceof Error ? error.name : typeof error, stack: error instanceof Error ? error.stack : String(error) })
+      }
+      return answerProblem(event, problemOf(refused ?? new DomainError('failed', { request: event.context.requestId ?? null }))) as never
     }
   })
   return Object.assign(handler, { described: route as unknown as DescribedRoute }) as ApiHandler<z.output<R>>
-}
-
-function answerProblem(event: H3Event, problem: Problem): Problem {
-  setResponseStatus(event, problem.status)
-  setResponseHeader(event, 'Content-Type', 'application/problem+json; charset=utf-8')
-  setResponseHeader(event, 'Cache-Control', 'no-store')
-  if (problem.code === 'too_many_requests' && typeof problem.facts?.seconds === 'number') setResponseHeader(event, 'Retry-After', problem.facts.seconds)
-  return problem
 }
 
 const emptyDigest = createHash('sha256').update('').digest()
@@ -111,6 +107,8 @@ const emptyDigest = createHash('sha256').update('').digest()
 async function readJson(event: H3Event, schema: z.ZodType): Promise<{ body: unknown, bodySha256: Buffer }> {
   const type = getHeader(event, 'content-type') ?? ''
   if (!/^application\/json\b/i.test(type)) refuse('wrong_content_type', { expected: 'application/json' })
+  // The body is read whole: its length must be told beforehand, and then it cannot grow.
+  if (getHeader(event, 'transfer-encoding') !== undefined) refuse('invalid', {}, [{ path: '', message: 'Send a Content-Length.' }])
   if (Number(getHeader(event, 'content-length') ?? 0) > largestJsonBody) refuse('too_large', { limit: '2 MB' })
   const text = (await readRawBody(event, 'utf8')) ?? ''
   if (text.length > largestJsonBody) refuse('too_large', { limit: '2 MB' })

@@ -1,8 +1,9 @@
 import { createHash } from 'node:crypto'
 import type { H3Event } from 'h3'
 import { getToken } from '#auth'
-import { loadActor } from '../domain/people/loadActor'
 import type { Actor } from '../domain/people/actor'
+import { resumeSession } from '../domain/people/resumeSession'
+import { sessionCookie } from './sessionCookie'
 import { useStores } from './useStores'
 
 /**
@@ -10,7 +11,7 @@ import { useStores } from './useStores'
  * or a changed passphrase takes effect with the next request. Null when nobody is signed in.
  */
 export async function findActor(event: H3Event, now: number): Promise<Actor | null> {
-  const token = await getToken({ event })
+  const token = await getToken({ event, cookieName: sessionCookie().name })
   if (!token || typeof token.sid !== 'string' || typeof token.uid !== 'string') return null
-  return loadActor(useStores().read, createHash('sha256').update(token.sid).digest(), now)
+  return resumeSession(useStores(), createHash('sha256').update(token.sid).digest(), now)
 }

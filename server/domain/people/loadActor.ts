@@ -1,12 +1,27 @@
 import type { Read } from '../../db/writer'
 import type { Actor } from './actor'
+import { sessionLimits } from './sessionLimits'
+
+export interface LiveSession { personId: string, displayName: string, email: string, seenAt: number }
 
 /** Finds who a session belongs to, with roles as they are now; null when the session has ended in any way. */
 export async function loadActor(read: Read, tokenSha256: Buffer, now: number): Promise<Actor | null> {
+  const session = await findSession(read, tokenSha256, now)
+  return session && loadRoles(read, session, tokenSha256, now)
+}
+
+/** The session behind a token, unless it was ended, ran out, lay idle too long, or its person was closed or changed the passphrase since. */
+export async function findSession(read: Read, tokenSha256: Buffer, now: number): Promise<LiveSession | null> {
   const session = await read.selectFrom('session').innerJoin('person', 'person.id', 'session.person_id')
-    .select(['person.id as personId', 'person.display_name as displayName', 'person.email_norm as email', 'person.state as state', 'person.credential_epoch as epoch', 'session.credential_epoch as sessionEpoch', 'session.ends_at as endsAt', 'session.ended_at as endedAt'])
+    .select(['person.id as personId', 'person.display_name as displayName', 'person.email_norm as email', 'person.state as state', 'person.credential_epoch as epoch',
+      'session.credential_epoch as sessionEpoch', 'session.ends_at as endsAt', 'session.ended_at as endedAt', 'session.seen_at as seenAt'])
     .where('session.token_sha256', '=', tokenSha256).executeTakeFirst()
   if (!session || session.state !== 'active' || session.endedAt !== null || session.endsAt <= now || session.epoch !== session.sessionEpoch) return null
+  if (session.seenAt + sessionLimits().idleMs <= now) return null
+  return { personId: session.personId, displayName: session.displayName ?? '', email: session.email ?? '', seenAt: session.seenAt }
+}
+
+export async function loadRoles(read: Read, session: LiveSession, tokenSha256: Buffer, now: number): Promise<Actor> {
   const [memberships, taSections, departmentRoles] = await Promise.all([
     read.selectFrom('membership').select(['id', 'course_id', 'role', 'section_id']).where('person_id', '=', session.personId).where('state', '=', 'active').execute(),
     read.selectFrom('ta_section').innerJoin('membership', 'membership.id', 'ta_section.membership_id').select(['ta_section.membership_id as id', 'ta_section.section_id as sectionId']).where('membership.person_id', '=', session.personId).execute(),
@@ -14,8 +29,8 @@ export async function loadActor(read: Read, tokenSha256: Buffer, now: number): P
   ])
   return {
     personId: session.personId,
-    displayName: session.displayName ?? '',
-    email: session.email ?? '',
+    displayName: session.displayName,
+    email: session.email,
     sessionId: tokenSha256.toString('hex'),
     memberships: memberships.map(row => ({
       id: row.id, courseId: row.course_id, role: row.role,

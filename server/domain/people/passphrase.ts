@@ -1,3 +1,4 @@
+import { randomBytes } from 'node:crypto'
 import { hash, verify } from '@node-rs/argon2'
 import { refuse } from '#shared/errors'
 
@@ -10,15 +11,18 @@ let running = 0
 const queue: (() => void)[] = []
 
 async function inTurn<T>(work: () => Promise<T>): Promise<T> {
-  if (queue.length >= longestQueue) refuse('busy')
-  if (running >= atOnce) await new Promise<void>(resolve => queue.push(resolve))
-  running++
+  if (running >= atOnce) {
+    if (queue.length >= longestQueue) refuse('busy')
+    await new Promise<void>(resolve => queue.push(resolve)) // the place is handed over, never free in between
+  }
+  else running++
   try {
     return await work()
   }
   finally {
-    running--
-    queue.shift()?.()
+    const next = queue.shift()
+    if (next) next()
+    else running--
   }
 }
 
@@ -28,7 +32,12 @@ export const matchesPassphrase = (stored: string, passphrase: string): Promise<b
 /** A hash of nothing anyone knows: an unknown account takes as long as a known one. */
 let decoy: Promise<string> | undefined
 export async function matchNothing(passphrase: string): Promise<false> {
-  decoy ??= hashPassphrase('an account that does not exist')
-  await matchesPassphrase(await decoy, passphrase)
+  await matchesPassphrase(await prepareDecoy(), passphrase)
   return false
+}
+
+/** Called at the start, so that the first unknown account does not take twice as long. */
+export function prepareDecoy(): Promise<string> {
+  decoy ??= hashPassphrase(randomBytes(32).toString('base64url'))
+  return decoy
 }

@@ -1,0 +1,8 @@
+import type { Stores } from '../../db/writer'
+
+/** At start: one server serves a data folder, so whatever is still leased was left by one that died. */
+export async function releaseLeftOvers({ read, write }: Stores, now: number): Promise<void> {
+  const left = await read.selectFrom('job').select('id').where('state', '=', 'leased').execute()
+  if (left.length === 0) return
+  await write(trx => trx.updateTable('job').set({ state: 'waiting', lease_owner: null, leased_until: null, run_after: now }).where('state', '=', 'leased').where('id', 'in', left.map(row => row.id)).execute())
+}
