@@ -10,8 +10,8 @@ const label = z.string().max(300)
  */
 export const noticeFacts = {
   receipt: z.object({ course: label, lab: label, receiptNo: z.string(), at: z.int(), zone: z.string(), digest: z.string().regex(/^[0-9a-f]{64}$/), chain: z.string(), seq: z.int(), path: ownPath }),
-  dispute_opened: z.object({ course: label, lab: label, step: label, path: ownPath }),
-  dispute_ruled: z.object({ course: label, lab: label, step: label, kind: z.enum(['uphold', 'change', 'accept', 'fault']), path: ownPath }),
+  dispute_opened: z.object({ course: label, lab: label, step: label.optional(), path: ownPath }),
+  dispute_ruled: z.object({ course: label, lab: label, step: label.optional(), kind: z.enum(['uphold', 'change', 'accept', 'fault']).optional(), path: ownPath }),
   marks_released: z.object({ course: label, lab: label, path: ownPath }),
   invitation: z.object({ tokenId: z.string() }),
   passphrase_reset: z.object({ tokenId: z.string() }),

@@ -1,12 +1,9 @@
-import { createHash, randomBytes } from 'node:crypto'
 import { refuse } from '#shared/errors'
 import type { Stores, Trx } from '../../db/writer'
 import { doOnce, type Asked } from '../asked'
 import { newId } from '../ids'
 import { appendEntry, departmentChain } from '../ledger/appendEntry'
-import { queueNotice } from '../notices/queueNotice'
-
-const invitationDays = 14
+import { queueInvitation } from './queueInvitation'
 
 /** Adds a person, who gets a mail with a link to choose a passphrase. The link works once. */
 export function invitePerson({ write }: Stores, input: Asked & { name: string, email: string }, now: number): Promise<{ id: string }> {
@@ -22,11 +19,10 @@ export function invitePerson({ write }: Stores, input: Asked & { name: string, e
 /** Sends a new link; earlier ones stop working. */
 export function inviteAgain({ write }: Stores, input: Asked & { personId: string }, now: number): Promise<{ id: string }> {
   return write(trx => doOnce(trx, input, async () => {
-    const person = await trx.selectFrom('person').select(['id', 'state', 'display_name']).where('id', '=', input.personId).executeTakeFirst()
+    const person = await trx.selectFrom('person').select(['id', 'state']).where('id', '=', input.personId).executeTakeFirst()
     if (!person) refuse('not_found')
     if (person.state !== 'invited') refuse('already_exists', { what: 'The account' })
-    await trx.updateTable('one_time_token').set({ used_at: now }).where('person_id', '=', person.id).where('purpose', '=', 'invite').where('used_at', 'is', null).execute()
-    await sendInvitation(trx, { personId: person.id, name: person.display_name ?? '' }, now)
+    await queueInvitation(trx, { personId: person.id, now })
     return { id: person.id }
   }))
 }
@@ -35,13 +31,6 @@ export function inviteAgain({ write }: Stores, input: Asked & { personId: string
 export async function addInvited(trx: Trx, person: { name: string, email: string }, now: number): Promise<string> {
   const id = newId(now)
   await trx.insertInto('person').values({ id, display_name: person.name, email_norm: person.email, campus_issuer: null, campus_subject: null, state: 'invited', created_at: now, erased_at: null }).execute()
-  await sendInvitation(trx, { personId: id, name: person.name }, now)
+  await queueInvitation(trx, { personId: id, now })
   return id
-}
-
-async function sendInvitation(trx: Trx, { personId, name }: { personId: string, name: string }, now: number): Promise<void> {
-  const token = randomBytes(32).toString('base64url')
-  const digest = createHash('sha256').update(token).digest()
-  await trx.insertInto('one_time_token').values({ token_sha256: digest, purpose: 'invite', person_id: personId, ends_at: now + invitationDays * 86_400_000, used_at: null }).execute()
-  await queueNotice(trx, { eventKey: `invitation:${digest.toString('hex').slice(0, 32)}`, template: 'invitation', facts: { name, token }, toPersonId: personId, now })
 }
