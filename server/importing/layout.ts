@@ -33,7 +33,7 @@ export interface Guess {
 }
 
 const wordCodes = ['NA', 'NaN', 'NAN']
-const otherWordCodes = new Set(['N/A', 'n/a', 'na', 'nan', 'M', 'MM', '/', '//', '///', '-', '--', '*', 'null', 'None', 'missing', 'T'])
+const otherWordCodes = new Set(['N/A', 'n/a', 'na', 'nan', 'M', 'MM', 'null', 'None', 'missing'])
 const numberCodes = new Set([-99, -99.9, -999, -999.9, -9999, -9999.9, -8888, -7999, 6999, 7999, 999, 999.9, 9999, 9999.9, 99999])
 
 export const sampleBytes = 262_144
@@ -70,6 +70,8 @@ export function guessLayout(bytes: Buffer, isWhole: boolean, title: string): Gue
   }
 }
 
+/** Dashes, strokes and the like in place of a number. */
+const isSign = (cell: string): boolean => /^[-/*.?#]+$/.test(cell)
 const isNumber = (cell: string): boolean => /^[+-]?(\d+([.,]\d*)?|[.,]\d+)(e[+-]?\d+)?$/i.test(cell)
 const isTime = (cell: string): boolean => /^\d{1,4}[-/.]\d{1,2}[-/.]\d{1,4}/.test(cell) || /^\d{1,2}:\d{2}/.test(cell)
 
@@ -102,7 +104,7 @@ function decimalOf(data: readonly SampleRow[], delimiter: Recipe['delimiter']): 
 function guessColumn(name: string, at: number, cells: readonly string[], unitCell: string, decimal: '.' | ',', times: readonly TimeCandidate[], timeColumns: ReadonlySet<number>): GuessedColumn {
   const filled = cells.filter(cell => cell !== '')
   const numbers = filled.filter(isNumber)
-  const words = new Set(filled.filter(cell => !isNumber(cell) && (otherWordCodes.has(cell) || wordCodes.includes(cell))))
+  const words = new Set(filled.filter(cell => !isNumber(cell) && (otherWordCodes.has(cell) || wordCodes.includes(cell) || isSign(cell))))
   const readable = numbers.length + filled.filter(cell => words.has(cell)).length
   const kind = filled.length === 0 ? 'empty' : numbers.length > 0 && readable >= 0.8 * filled.length ? 'number' : 'text'
   const base = { name, at, kind, samples: filled.slice(0, 3) } as const
