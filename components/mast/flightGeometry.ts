@@ -17,17 +17,20 @@ const heightTop = 1040
 export const yOf = (height: number): number => size.ground - (height / heightTop) * (size.ground - size.top)
 export const xOf = (temperature: number): number => 350 + (temperature - 4) * 40
 
-/** A reading every 10 m: straight between knots, with the small unrest that a sonde shows. The same at each call. */
+/** A reading every 10 m: straight between knots, with the small unrest that a sonde shows. The same at each call and on every engine. */
 export function drawnReadings(): { height: number, temperature: number }[] {
   const readings: { height: number, temperature: number }[] = []
+  let seed = 31
+  let unrest = 0
   for (let height = 0; height <= heightTop; height += 10) {
     const above = knots.findIndex(knot => knot.height >= height)
     const upper = knots[above] ?? knots[knots.length - 1]!
     const lower = knots[Math.max(0, above - 1)]!
     const share = upper.height === lower.height ? 1 : (height - lower.height) / (upper.height - lower.height)
-    const isKnot = knots.some(knot => knot.height === height)
-    const unrest = isKnot || height < 130 ? 0 : 0.11 * Math.sin(height * 0.131) + 0.09 * Math.sin(height * 0.047 + 1.7)
-    readings.push({ height, temperature: lower.temperature + share * (upper.temperature - lower.temperature) + unrest })
+    seed = (seed * 1103515245 + 12345) % 2147483648
+    unrest = 0.6 * unrest + 0.26 * (seed / 2147483648 - 0.5)
+    const isStill = height < 130 || knots.some(knot => knot.height === height)
+    readings.push({ height, temperature: lower.temperature + share * (upper.temperature - lower.temperature) + (isStill ? 0 : unrest) })
   }
   return readings
 }

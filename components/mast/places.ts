@@ -1,7 +1,8 @@
 /** Where a person may go, by role: the booms of the mast. */
 export type PlaceKey = 'work' | 'marks' | 'disputes' | 'labs' | 'data' | 'people' | 'terms' | 'courses' | 'ledger' | 'mail' | 'jobs'
 
-export interface MastPlace { key: PlaceKey, word: string, to: string }
+/** `key` tells what a count belongs to; a place without one has none. */
+export interface MastPlace { key: PlaceKey | null, word: string, to: string }
 export interface PlaceCounts { due: number, open: number, fresh: number }
 
 const words: Record<PlaceKey, string> = {
@@ -31,8 +32,14 @@ export function departmentPlaces(roles: readonly (keyof typeof byDepartmentRole)
   return keys.map(key => ({ key, word: words[key], to: `/department/${key}` }))
 }
 
+/** Outside a course the booms are the courses that run, and the list of all. */
+export function outerPlaces(courses: readonly { id: string, code: string, role: keyof typeof byCourseRole, termState: string }[]): MastPlace[] {
+  const running = courses.filter(course => course.termState !== 'closed').slice(0, 4)
+  return [{ key: null, word: 'All courses', to: '/' }, ...running.map(course => ({ key: null, word: course.code, to: coursePlaces(course.id, course.role)[0]?.to ?? '/' }))]
+}
+
 /** What stands beside a place: a count as words, or nothing. */
-export function countWord(key: PlaceKey, counts: PlaceCounts | null): string | null {
+export function countWord(key: PlaceKey | null, counts: PlaceCounts | null): string | null {
   if (!counts) return null
   if (key === 'work' && counts.due > 0) return `${counts.due} due`
   if (key === 'disputes' && counts.open > 0) return `${counts.open} open`

@@ -28,13 +28,23 @@ export function unitText(unit: string): string {
   const named = ucumNames[unit]
   if (named !== undefined) return named
   if (/[\^⁻ \u202f°]/.test(unit)) return unit.replaceAll(' ', '\u202f')
-  return unit.split('/').flatMap((side, at) => side.split('.').map((factor) => {
-    const read = /^(.*?)([-+]?\d+)?$/.exec(factor)
-    const symbol = read?.[1] ?? factor
-    const power = Number(read?.[2] ?? 1) * (at === 0 ? 1 : -1)
+  const pieces: string[] = []
+  const outer = [1] // what a bracket stands under
+  let sign = 1
+  for (const token of unit.match(/\[[^\]]*\]|[./()]|[^./()[\]]+(?:\[[^\]]*\])?/g) ?? []) {
+    if (token === '(') outer.push(outer[outer.length - 1]! * sign)
+    else if (token === ')') outer.pop()
+    if (token === '/' || token === '.' || token === '(' || token === ')') {
+      sign = token === '/' ? -1 : 1
+      continue
+    }
+    const read = /^(.*?)([-+]?\d+)?$/.exec(token)
+    const symbol = read?.[1] || token
+    const power = Number(read?.[1] ? read[2] ?? 1 : 1) * sign * outer[outer.length - 1]!
     const name = ucumNames[symbol] ?? symbol
-    return name === '' ? '' : power === 1 ? name : `${name}^${power}`
-  })).filter(Boolean).join('\u202f')
+    if (name !== '') pieces.push(power === 1 ? name : `${name}^${power}`)
+  }
+  return pieces.join('\u202f')
 }
 
 /** A number with the true minus and, from five digits on, groups of three: −9.6, 12 480. */

@@ -1,0 +1,82 @@
+import { tickStep } from 'd3-array'
+import { scaleLinear } from 'd3-scale'
+import { numberText } from '../sheet/unitText'
+import { extentOf, padded, pathOf, valueAt, type PlottedSeries, type Point } from './series'
+
+export interface ProfileInput {
+  width: number
+  height: number
+  heights: readonly (number | null)[]
+  /** Drawn on one axis: they share a unit. */
+  main: readonly PlottedSeries[]
+  /** Drawn on an axis of its own at the right, where there is room. */
+  side?: PlottedSeries | null
+}
+
+export interface AxisTick { at: number, text: string }
+export interface ProfileScale {
+  left: number
+  right: number
+  top: number
+  bottom: number
+  sideLeft: number
+  y: (height: number) => number
+  x: (value: number) => number
+  sideX: (value: number) => number
+  heightTicks: AxisTick[]
+  mainTicks: AxisTick[]
+  sideTicks: AxisTick[]
+  /** Row numbers from the lowest level to the highest: the order in which a cursor walks. */
+  order: number[]
+  hasDots: boolean
+}
+
+/** Above this many levels the line stands without its dots. */
+const mostDots = 90
+
+/** Height upward, the quantity across; drawn for the width it is given. */
+export function profileScale({ width, height, heights, main, side }: ProfileInput): ProfileScale {
+  const isNarrow = width < 420
+  const [left, top, bottom] = [52, 14, height - 46]
+  const order = heights.map((_, at) => at).filter(at => heights[at] !== null).toSorted((a, b) => heights[a]! - heights[b]!)
+  const sideWidth = side ? Math.round((width - left - 10) * (isNarrow ? 0.24 : 0.27)) : 0
+  const right = width - 10 - sideWidth - (side ? 22 : 0)
+  const lowest = order.length > 0 ? heights[order[0]!]! : 0
+  const highest = order.length > 0 ? heights[order[order.length - 1]!]! : 100
+  const y = scaleLinear().domain([Math.min(0, lowest), highest - Math.min(0, lowest) < 1 ? lowest + 10 : highest]).nice(8).range([bottom, top])
+  const x = scaleLinear().domain(padded(extentOf(main) ?? [0, 1])).nice(6).range([left, right])
+  const sideDomain = side?.unit === '%' ? [Math.min(40, (extentOf([side]) ?? [40, 100])[0]), Math.max(100, (extentOf([side]) ?? [40, 100])[1])] : padded(side ? extentOf([side]) ?? [0, 1] : [0, 1])
+  const sideX = scaleLinear().domain(sideDomain).nice(3).range([right + 22, width - 10])
+  return {
+    left, right, top, bottom, sideLeft: right + 22, order, hasDots: heights.length <= mostDots,
+    y: value => y(value), x: value => x(value), sideX: value => sideX(value),
+    heightTicks: ticksOf(y, Math.max(3, Math.floor((bottom - top) / 64))),
+    mainTicks: ticksOf(x, Math.max(2, Math.floor((right - left) / 62))),
+    sideTicks: side ? ticksOf(sideX, isNarrow ? 2 : 3) : [],
+  }
+}
+
+/** Ticks with as many decimals as their step has. */
+export function ticksOf(scale: { ticks: (count: number) => number[], domain: () => number[], (value: number): number }, count: number): AxisTick[] {
+  const [from = 0, to = 1] = scale.domain()
+  const decimals = Math.max(0, -Math.floor(Math.log10(Math.abs(tickStep(from, to, count))) + 1e-9))
+  return scale.ticks(count).map(value => ({ at: scale(value), text: numberText(value, decimals) }))
+}
+
+/** The line of one quantity: it breaks where a height or a value is missing. */
+export function profilePoints(heights: readonly (number | null)[], values: PlottedSeries['values'], x: (value: number) => number, y: (height: number) => number): (Point | null)[] {
+  return heights.map((height, at) => {
+    const value = valueAt(values, at)
+    return height === null || value === null ? null : { x: x(value), y: y(height) }
+  })
+}
+
+export const profilePath = (points: readonly (Point | null)[]): string => pathOf(points)
+
+/** The level that a step up or down leads to, from the row where the cursor is. */
+export function stepLevel(order: readonly number[], from: number | null, step: number): number | null {
+  if (order.length === 0) return null
+  if (from === null) return step > 0 ? order[0]! : order[order.length - 1]!
+  const at = Math.max(0, order.indexOf(from))
+  return order[Math.max(0, Math.min(order.length - 1, at + step))]!
+}
