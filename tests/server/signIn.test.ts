@@ -70,7 +70,7 @@ describe('signing in', () => {
       return performance.now() - began
     }
     const median = (list: number[]) => list.toSorted((a, b) => a - b)[Math.floor(list.length / 2)]!
-    // Measured in turns, so that a busy machine slows both; a second round where the first misses.
+    // Measured in turns, so that a busy machine slows both.
     const ratio = async () => {
       const known: number[] = []
       const unknown: number[] = []
@@ -80,10 +80,12 @@ describe('signing in', () => {
       }
       return median(known) / median(unknown)
     }
-    let seen = await ratio()
-    if (Math.abs(seen - 1) > 0.1) seen = await ratio()
-    expect(Math.abs(seen - 1)).toBeLessThan(0.15)
-  })
+    // Three further rounds where a busy machine spoils one; leaving out the hash would show in each, at some hundred percent.
+    const seen: number[] = []
+    do seen.push(Math.abs(await ratio() - 1))
+    while (Math.min(...seen) > 0.1 && seen.length < 4)
+    expect(Math.min(...seen)).toBeLessThan(0.1)
+  }, 120_000)
 
   it('refuses after ten wrong tries with 429 and Retry-After, there and not elsewhere, and says so to a page', async () => {
     for (let n = 0; n < 10; n++) expect((await from('10.0.0.3').trySignIn('ben@department.example', 'wrong')).status).toBe(302)
