@@ -94,7 +94,7 @@ export interface QuantityDefinition {
   /** Values at which the answer's class changes, SI, from the convention: Γd, Γm. */
   classLimits?: (inputs: Inputs, constants: Constants) => readonly { label: string, value: number }[]
   /** The classes of an answer that is a class and not a number (static stability). */
-  classes?: readonly { key: string, label: string }[]
+  classes?: readonly { key: string, label: string, alsoTyped?: readonly string[] }[]
   /** What is asked, with sign and method, in a sentence without the inputs: "The lapse rate Γ = −∂T/∂z, positive where temperature falls with height, …" */
   ask: string
   trace: (inputs: Inputs, constants: Constants, variant: string) => readonly TraceStep[]

@@ -21,3 +21,11 @@ export class SeriesError extends Error {
     super(`${input}: ${reason}`)
   }
 }
+
+/** A name that is none of the quantity's inputs. */
+export class UnknownInputError extends Error {
+  override readonly name = 'UnknownInputError'
+  constructor(readonly input: string, readonly known: readonly string[]) {
+    super(`${input} is not an input here; there ${known.length === 1 ? 'is' : 'are'} ${known.join(', ') || 'none'}`)
+  }
+}

@@ -1,0 +1,159 @@
+/** The only entry of marking: one step, one answer, one judgement. Total: what cannot be judged is said, not thrown. */
+import type { Inputs, QuantityDefinition } from '../thermo/definition'
+import { MissingInputError, OutOfRangeError, SeriesError, UnknownInputError } from '../thermo/errors'
+import { evaluateQuantity } from '../thermo/evaluate'
+import { findQuantity } from '../thermo/registry'
+import { formatQuantity } from '../units/formatQuantity'
+import { findUnit, getUnit, isCommensurable, type Unit } from '../units/ucum'
+import { acceptedWays } from './alternatives'
+import { makeBand, QuestionFault, referenceOf, type CarriedHalfUnits } from './band'
+import { liesWithin, outwardDecimals } from './decimalEdges'
+import { withCarried, type CarriedInputs } from './graph'
+import { withinStep } from './points'
+import { explainingSlip, sentenceOf, slipRanges, type SlipRange } from './slips'
+import type { Accepted, Band, Judgement, ReadAnswer, StepQuestion } from './types'
+
+export { judgeInterface, referenceVersion } from './version'
+
+export function judgeStep(question: StepQuestion, answer: ReadAnswer): Judgement {
+  try {
+    return judged(question, answer)
+  }
+  catch (error) {
+    return refused(faultCode(error), error instanceof Error ? error.message : 'not judged')
+  }
+}
+
+/** The code of what made a question impossible to judge. */
+function faultCode(error: unknown): string {
+  if (error instanceof OutOfRangeError) return 'out_of_range'
+  if (error instanceof MissingInputError) return 'missing_input'
+  if (error instanceof UnknownInputError) return 'unknown_input'
+  if (error instanceof SeriesError) return 'series_unusable'
+  if (error instanceof QuestionFault) return error.code
+  return 'not_judged'
+}
+
+const blank: Omit<Judgement, 'outcome'> = {
+  refusalCode: null, reason: null, classes: [], band: null, carriedBand: null, carriedNote: null, isAccepted: false, acceptedBy: null, slip: null, slipValues: [], pointsMilli: 0, trace: [], notes: [],
+}
+
+const refused = (refusalCode: string, reason: string): Judgement => ({ ...blank, outcome: 'refused', refusalCode, reason })
+
+function judged(question: StepQuestion, answer: ReadAnswer): Judgement {
+  const definition = findQuantity(question.quantity)
+  if (!definition) return refused('unknown_quantity', `There is no quantity ${question.quantity}.`)
+  const unit = checkedUnit(definition, question)
+  const { outcome, way } = referenceOf(definition, question, question.inputs)
+  const carried = withCarried(definition, question)
+  const carriedNote = carried.notes.length > 0 ? carried.notes.join(' ') : null
+  const trace = definition.trace(question.inputs, way.constants, way.variant)
+  const notes = 'notes' in outcome ? outcome.notes ?? [] : []
+
+  if (outcome.is === 'class') return judgedClass(definition, question, answer, carried, { ...blank, outcome: 'class', carriedNote, trace, notes })
+  if (outcome.is !== 'value') {
+    const isAccepted = answer.reading === outcome.is
+    return { ...blank, outcome: outcome.is, reason: outcome.why, carriedNote, trace, notes, isAccepted, acceptedBy: isAccepted ? 'word' : null, pointsMilli: isAccepted ? withinStep(question.maxMilli, question.maxMilli) : 0 }
+  }
+  return judgedValue(definition, question, answer, unit, outcome.value, carried, { ...blank, outcome: 'value', carriedNote, trace, notes })
+}
+
+/** @throws {QuestionFault} */
+function checkedUnit(definition: QuantityDefinition, question: StepQuestion): Unit {
+  const unit = findUnit(question.unit)
+  if (!unit || !isCommensurable(unit, getUnit(definition.unit))) throw new QuestionFault('unit_invalid', `The ${definition.name} cannot be asked in ${question.unit}.`)
+  if (!(Number.isInteger(question.digits) && question.digits >= 1 && question.digits <= 15)) throw new QuestionFault('digits_invalid', `Cannot ask for ${question.digits} digits.`)
+  return unit
+}
+
+function judgedValue(definition: QuantityDefinition, question: StepQuestion, answer: ReadAnswer, unit: Unit, center: number, carried: CarriedInputs, base: Judgement): Judgement {
+  const band = makeBand(definition, question, question.inputs, center, unit)
+  const carriedBand = carried.inputs && bandOfCarried(definition, question, carried.inputs, unit, carried.halfUnits)
+  const ranges = slipRanges(definition, question, question.inputs, center)
+  const typed = answer.reading === 'ok' ? answer.decimal : null
+  const slip = typed === null || isIn(band, typed) || (carriedBand && isIn(carriedBand, typed)) ? null : explainingSlip(definition, question, answer, ranges, unit)
+  const acceptedBy = typed === null ? null : isIn(band, typed) ? 'band' : carriedBand && isIn(carriedBand, typed) ? 'carried' : isRuledIn(definition, question, typed, unit, ranges, answer) ? 'ruling' : null
+  const isAccepted = acceptedBy !== null
+  const notes = [...base.notes]
+  if (acceptedBy === 'carried') notes.push('Right by the value that follows from your own earlier one.')
+  return {
+    ...base,
+    band, carriedBand, acceptedBy, isAccepted, notes,
+    slip: slip && acceptedBy === null ? named(slip, unit, question, definition) : null,
+    slipValues: ranges.map(({ slip: { key, label }, value }) => ({ key, label, value })),
+    pointsMilli: withinStep(isAccepted ? question.maxMilli : slip ? question.slipMilli ?? 0 : 0, question.maxMilli),
+  }
+}
+
+const isIn = (band: Band, decimal: string): boolean => liesWithin(decimal, band.lowDecimal, band.highDecimal)
+
+function named(range: SlipRange, unit: Unit, question: StepQuestion, definition: QuantityDefinition): Judgement['slip'] {
+  const inUnit = (range.value - (definition.kind === 'temperature' ? Number(unit.offset.numerator) / Number(unit.offset.denominator) : 0)) / (Number(unit.factor.numerator) / Number(unit.factor.denominator))
+  const shown = formatQuantity(inUnit, question.unit, Math.max(question.digits, 3))
+  return { key: range.slip.key, label: range.slip.label, sentence: sentenceOf(range, { value: shown.number, unit: shown.text.slice(shown.number.length).trim() }), value: range.value }
+}
+
+/** The band of what follows from the student's own earlier value; null where nothing does. */
+function bandOfCarried(definition: QuantityDefinition, question: StepQuestion, inputs: Inputs, unit: Unit, halfUnits: CarriedHalfUnits): Band | null {
+  try {
+    const { outcome } = referenceOf(definition, question, inputs)
+    return outcome.is === 'value' ? makeBand(definition, question, inputs, outcome.value, unit, halfUnits) : null
+  }
+  catch (error) {
+    // together with the other inputs the carried value leads out of the range: judged on the true value alone
+    if (error instanceof OutOfRangeError || error instanceof SeriesError || error instanceof RangeError) return null
+    throw error
+  }
+}
+
+/** What rulings have added to this step: a slip that counts here, an interval, or another variant. */
+function isRuledIn(definition: QuantityDefinition, question: StepQuestion, typed: string, unit: Unit, ranges: readonly SlipRange[], answer: ReadAnswer): boolean {
+  const isDifference = definition.kind !== 'temperature'
+  return (question.accepted ?? []).some((accepted: Accepted) => {
+    if (accepted.kind === 'slip') return explainingSlip(definition, question, answer, ranges.filter(range => range.slip.key === accepted.slip), unit) !== null
+    if (accepted.kind === 'value') {
+      if (!(accepted.lowSi <= accepted.highSi) || !Number.isFinite(accepted.highSi - accepted.lowSi)) return false
+      const { lowDecimal, highDecimal } = outwardDecimals(accepted.lowSi, accepted.highSi, unit, isDifference)
+      return liesWithin(typed, lowDecimal, highDecimal)
+    }
+    if (!definition.variants.some(variant => variant.key === accepted.variant)) return false
+    const outcome = evaluateQuantity(definition, question.inputs, question.convention.constants, accepted.variant)
+    if (outcome.is !== 'value') return false
+    return isIn(makeBand(definition, { ...question, variant: accepted.variant }, question.inputs, outcome.value, unit), typed)
+  })
+}
+
+function judgedClass(definition: QuantityDefinition, question: StepQuestion, answer: ReadAnswer, carried: CarriedInputs, base: Judgement): Judgement {
+  const classes = classesOf(definition, question, question.inputs)
+  const carriedClasses = carried.inputs ? tryClasses(definition, question, carried.inputs) : []
+  const typed = answer.reading === 'class' && answer.valueSi !== null ? definition.classes?.[answer.valueSi]?.key ?? null : null
+  const isRight = typed !== null && classes.includes(typed)
+  const isCarried = typed !== null && !isRight && carriedClasses.includes(typed)
+  return {
+    ...base,
+    classes,
+    isAccepted: isRight || isCarried,
+    acceptedBy: isRight ? 'word' : isCarried ? 'carried' : null,
+    notes: isCarried ? [...base.notes, 'Right by the value that follows from your own earlier one.'] : base.notes,
+    pointsMilli: isRight || isCarried ? withinStep(question.maxMilli, question.maxMilli) : 0,
+  }
+}
+
+/** Classes that accepted ways give, the convention's own first. */
+function classesOf(definition: QuantityDefinition, question: StepQuestion, inputs: Inputs): string[] {
+  const found: string[] = []
+  for (const way of acceptedWays(definition, question.convention, question.variant)) {
+    const outcome = evaluateQuantity(definition, inputs, way.constants, way.variant)
+    if (outcome.is === 'class' && !found.includes(outcome.key)) found.push(outcome.key)
+  }
+  return found
+}
+
+function tryClasses(definition: QuantityDefinition, question: StepQuestion, inputs: Inputs): string[] {
+  try {
+    return classesOf(definition, question, inputs)
+  }
+  catch {
+    return []
+  }
+}

@@ -1,0 +1,33 @@
+import type { Alternative, Convention } from '../convention'
+
+const heats: readonly Alternative[] = [
+  { label: 'cp 1004, R 287 J kg⁻¹ K⁻¹', constants: { cp: 1004, cv: 717, R: 287 } },
+  { label: 'cp 1004.67, R 287.05 J kg⁻¹ K⁻¹', constants: { cp: 1004.67, cv: 717.62, R: 287.05 } },
+  { label: 'cp 1005, R 287 J kg⁻¹ K⁻¹', constants: { cp: 1005, cv: 718, R: 287 } },
+  { label: 'cp 1005, R 287.05 J kg⁻¹ K⁻¹', constants: { cp: 1005, cv: 717.95, R: 287.05 } },
+  { label: 'cp 1005.7, R 287.04 J kg⁻¹ K⁻¹', constants: { cp: 1005.7, cv: 718.66, R: 287.04 } },
+  { label: 'cp 1004, R 287.05 J kg⁻¹ K⁻¹', constants: { cp: 1004, cv: 716.95, R: 287.05 } },
+]
+const gravities: readonly Alternative[] = [
+  { label: 'g 9.81 m s⁻²', constants: { g: 9.81 } },
+  { label: 'g 9.80665 m s⁻²', constants: { g: 9.80665 } },
+]
+const exponents: readonly Alternative[] = [
+  { label: 'κ 2/7', constants: { kappa: 2 / 7 } },
+  { label: 'κ 0.2854', constants: { kappa: 0.2854 } },
+  { label: 'κ 0.286', constants: { kappa: 0.286 } },
+]
+
+/** The default convention. It closes: 1004 − 717 = 287. */
+export const closed1004: Convention = {
+  key: 'closed-1004',
+  title: 'cp 1004, cv 717, R 287, g 9.81',
+  source: 'common practice; alternatives from AMS Glossary of Meteorology, Bolton (1980), WMO and MetPy documentation',
+  constants: { cp: 1004, cv: 717, R: 287, g: 9.81, p0: 100_000, zeroCelsius: 273.15, neutralTolerance: 0.0001 },
+  variants: {},
+  accepted: [
+    ...heats.flatMap(heat => gravities.map(gravity => ({ label: `${heat.label}, ${gravity.label}`, constants: { ...heat.constants, ...gravity.constants } }))),
+    ...exponents,
+    { label: 'Γd as usually printed, 9.8 K km⁻¹', variants: { 'dry-adiabatic-lapse-rate': 'as-printed', 'parcel-temperature-by-height': 'printed-rate' } },
+  ],
+}

@@ -1,0 +1,172 @@
+/**
+ * The first law for dry air, per kilogram and for a given mass: the definitions of one process differ by a coefficient and a sign.
+ *
+ *   q = Δu + w     w is the work done by the air, q the heat that it takes up
+ *   isobaric:   q = Δh = cp ΔT,  w = R ΔT,  Δu = cv ΔT
+ *   adiabatic:  q = 0,  Δu = cv ΔT,  Δh = cp ΔT,  w = −cv ΔT,  T₂ = T₁ (p₂/p₁)^κ
+ *
+ * Source: AMS Glossary of Meteorology, "first law of thermodynamics"; coefficients by common practice.
+ * Valid where the specific heats are constant (200–350 K, to 0.3 %). Limits: no water vapor, no phase change.
+ */
+import { pow } from '../numerics/elementary'
+import { kelvin, pascal } from '../units/brands'
+import { constant, kappaOf } from './constants'
+import type { Constants, InputDefinition, Inputs, QuantityDefinition, Slip, TraceStep } from './definition'
+import { numberOf } from './inputs'
+import { poissonTemperature } from './poisson'
+import { joulesSlip, kilojoulesSlip, signSlip, slip, zeroCelsius } from './slips'
+import { texFactor, texNumber, texQuantity } from './tex'
+
+type Coefficient = 'cp' | 'cv' | 'R'
+const texOf: Readonly<Record<Coefficient, string>> = { cp: 'c_p', cv: 'c_v', R: 'R' }
+const printed: Readonly<Record<Coefficient, string>> = { cp: 'cp', cv: 'cv', R: 'R' }
+
+export interface ProcessQuantity {
+  key: string
+  name: string
+  symbol: string
+  /** TeX of the symbol. */
+  tex: string
+  process: 'isobaric' | 'adiabatic'
+  coefficient: Coefficient
+  /** −1 for the work of an adiabatic process: w = −cv ΔT. */
+  sign: 1 | -1
+  ask: string
+  /** For the sign slip: what the other sign means. */
+  signSentence: string
+  example: QuantityDefinition['example']
+}
+
+const temperature = (name: string, label: string, symbol: string): InputDefinition =>
+  ({ name, label, symbol, unit: 'K', shownUnit: 'Cel', kind: 'temperature', shape: 'number', range: [100, 1000] })
+const pressure = (name: string, label: string, symbol: string): InputDefinition =>
+  ({ name, label, symbol, unit: 'Pa', shownUnit: 'hPa', kind: 'ratio', shape: 'number', range: [1000, 1_000_000] })
+
+export const processInputs: Readonly<Record<ProcessQuantity['process'], readonly InputDefinition[]>> = {
+  isobaric: [temperature('temperatureStart', 'temperature at the start', 'T₁'), temperature('temperatureEnd', 'temperature at the end', 'T₂')],
+  adiabatic: [temperature('temperatureStart', 'temperature at the start', 'T₁'), pressure('pressureStart', 'pressure at the start', 'p₁'), pressure('pressureEnd', 'pressure at the end', 'p₂')],
+}
+
+const start = (inputs: Inputs) => numberOf(inputs, 'temperatureStart')
+
+function endOf(process: ProcessQuantity['process'], inputs: Inputs, constants: Constants): number {
+  if (process === 'isobaric') return numberOf(inputs, 'temperatureEnd')
+  return poissonTemperature(kelvin(start(inputs)), pascal(numberOf(inputs, 'pressureStart')), pascal(numberOf(inputs, 'pressureEnd')), constants)
+}
+
+/** ΔT of the process, K. */
+export const changeOf = (process: ProcessQuantity['process'], inputs: Inputs, constants: Constants): number => endOf(process, inputs, constants) - start(inputs)
+
+/** The definition per kilogram, J kg⁻¹. */
+export function perKilogram(of: ProcessQuantity): QuantityDefinition {
+  const value = (inputs: Inputs, constants: Constants) => of.sign * constant(constants, of.coefficient) * changeOf(of.process, inputs, constants)
+  return {
+    key: of.key,
+    name: of.name,
+    symbol: of.symbol,
+    unit: 'J/kg',
+    shownUnit: 'kJ/kg',
+    kind: 'difference',
+    nearZero: 1000,
+    inputs: processInputs[of.process],
+    variants: [{
+      key: 'first-law',
+      label: `${of.sign < 0 ? '−' : ''}${printed[of.coefficient]} ΔT`,
+      source: { text: 'AMS Glossary of Meteorology, "first law of thermodynamics"', status: 'common practice' },
+      validity: '200–350 K, where the specific heats of dry air are constant',
+      knownError: 'cp 1004 to 1005.7: 0.17 %',
+      evaluate: (inputs, constants) => ({ is: 'value', value: value(inputs, constants) }),
+    }],
+    constants: of.process === 'adiabatic' ? ['cp', 'cv', 'R', 'kappa'] : [of.coefficient],
+    ask: of.ask,
+    trace: (inputs, constants) => processTrace(of, inputs, constants, value(inputs, constants)),
+    slips: processSlips(of),
+    example: of.example,
+  }
+}
+
+/** The same for a given mass, J: another dimension, and so another quantity. */
+export function forGivenMass(base: QuantityDefinition, name: string, example: QuantityDefinition['example']): QuantityDefinition {
+  const withoutMass = (inputs: Inputs): Inputs => Object.fromEntries(Object.entries(inputs).filter(([key]) => key !== 'mass'))
+  const mass = (inputs: Inputs) => numberOf(inputs, 'mass')
+  return {
+    ...base,
+    key: `${base.key}-of-mass`,
+    name,
+    symbol: base.symbol.replace('q', 'Q').replace('w', 'W').replace('u', 'U').replace('h', 'H'),
+    unit: 'J',
+    shownUnit: 'kJ',
+    inputs: [{ name: 'mass', label: 'mass of air', symbol: 'm', unit: 'kg', shownUnit: 'kg', kind: 'ratio', shape: 'number', range: [1e-6, 1e9] }, ...base.inputs],
+    variants: base.variants.map(variant => ({
+      ...variant,
+      label: `mass times ${variant.label}`,
+      evaluate: (inputs, constants) => {
+        const outcome = variant.evaluate(withoutMass(inputs), constants)
+        return outcome.is === 'value' ? { ...outcome, value: mass(inputs) * outcome.value } : outcome
+      },
+    })),
+    ask: base.ask.replace(' per kilogram of dry air', ' for the whole mass of dry air, not per kilogram'),
+    trace(inputs, constants, variant) {
+      const steps = base.trace(withoutMass(inputs), constants, variant)
+      const last = steps[steps.length - 1]
+      const perKg = last?.value ?? 0
+      const total = mass(inputs) * perKg
+      return [...steps, { text: 'For the whole mass', formula: 'm \\cdot (\\text{value per kilogram})', filled: `${texNumber(mass(inputs))} \\cdot ${texFactor(perKg / 1000)}\\,\\mathrm{kJ} = ${texQuantity(total / 1000, 'kJ')}`, value: total, unit: 'J' }]
+    },
+    slips: [
+      ...base.slips.map(one => ({
+        ...one,
+        apply: (inputs: Inputs, constants: Constants, right: number) => {
+          const perKg = one.apply(withoutMass(inputs), constants, right / mass(inputs))
+          return perKg === null ? null : perKg * mass(inputs)
+        },
+      })),
+      slip('mass-left-out', 'mass left out', 'This is the value for one kilogram: multiply it by the mass.', (inputs, _c, right) => mass(inputs) === 1 || right === 0 ? null : right / mass(inputs)),
+      slip('mass-divided', 'divided by the mass', 'This is divided by the mass where it has to be multiplied.', (inputs, _c, right) => mass(inputs) === 1 || right === 0 ? null : right / mass(inputs) / mass(inputs)),
+    ],
+    example,
+  }
+}
+
+function processTrace(of: ProcessQuantity, inputs: Inputs, constants: Constants, value: number): TraceStep[] {
+  const steps: TraceStep[] = []
+  const end = endOf(of.process, inputs, constants)
+  if (of.process === 'adiabatic') {
+    const kappa = kappaOf(constants)
+    steps.push({
+      text: 'Temperature at the end, by Poisson’s relation', formula: 'T_2 = T_1 \\left(\\frac{p_2}{p_1}\\right)^{\\kappa}',
+      filled: `T_2 = ${texNumber(start(inputs))} \\left(\\frac{${texNumber(numberOf(inputs, 'pressureEnd') / 100)}}{${texNumber(numberOf(inputs, 'pressureStart') / 100)}}\\right)^{${texNumber(kappa)}} = ${texQuantity(end, 'K', 6)}`, value: end, unit: 'K',
+    })
+  }
+  const change = end - start(inputs)
+  steps.push({ text: 'Change of temperature', formula: '\\Delta T = T_2 - T_1', filled: `\\Delta T = ${texNumber(end, 6)} - ${texNumber(start(inputs), 6)} = ${texQuantity(change, 'K')}`, value: change, unit: 'K' })
+  const minus = of.sign < 0 ? '-' : ''
+  steps.push({
+    text: 'First law', formula: `${of.tex} = ${minus}${texOf[of.coefficient]}\\,\\Delta T`,
+    filled: `${of.tex} = ${minus}${texNumber(constant(constants, of.coefficient), 6)} \\cdot ${texFactor(change)} = ${texQuantity(value / 1000, 'kJ/kg')}`, value, unit: 'J/kg',
+  })
+  return steps
+}
+
+function processSlips(of: ProcessQuantity): Slip[] {
+  const other = (coefficient: Coefficient) => slip(`${coefficient.toLowerCase()}-for-${of.coefficient.toLowerCase()}`, `${printed[coefficient]} for ${printed[of.coefficient]}`,
+    `This comes from ${printed[coefficient]} ΔT in place of ${printed[of.coefficient]} ΔT.`,
+    (inputs, constants) => of.sign * constant(constants, coefficient) * changeOf(of.process, inputs, constants))
+  const slips = [signSlip(of.signSentence), ...(['cp', 'cv', 'R'] as const).filter(one => one !== of.coefficient).map(other), joulesSlip, kilojoulesSlip]
+  if (of.process === 'isobaric') {
+    slips.push(slip('difference-as-temperature', '273.15 added to a difference', 'A difference of temperatures is the same in °C and in K: 273.15 is not added to it.', (inputs, constants, right) =>
+      right + of.sign * constant(constants, of.coefficient) * zeroCelsius))
+    return slips
+  }
+  const along = (end: (inputs: Inputs, constants: Constants) => number | null) => (inputs: Inputs, constants: Constants) => {
+    const value = end(inputs, constants)
+    return value === null || !Number.isFinite(value) ? null : of.sign * constant(constants, of.coefficient) * (value - start(inputs))
+  }
+  const ratio = (inputs: Inputs) => numberOf(inputs, 'pressureEnd') / numberOf(inputs, 'pressureStart')
+  slips.push(
+    slip('celsius-for-kelvin', 'Celsius put in for kelvin', 'This is what comes out with the temperature in °C in Poisson’s relation, which takes kelvin.', along((inputs, constants) => zeroCelsius + (start(inputs) - zeroCelsius) * pow(ratio(inputs), kappaOf(constants)))),
+    slip('inverted-ratio', 'ratio of pressures turned round', 'This comes from p₁/p₂ in place of p₂/p₁.', along((inputs, constants) => start(inputs) * pow(ratio(inputs), -kappaOf(constants)))),
+    slip('inverted-exponent', 'exponent turned round', 'This comes from the exponent cp/R in place of R/cp.', along((inputs, constants) => start(inputs) * pow(ratio(inputs), 1 / kappaOf(constants)))),
+  )
+  return slips
+}

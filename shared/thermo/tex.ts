@@ -1,0 +1,31 @@
+/** Numbers and units as TeX, for a trace. */
+export function texNumber(value: number, digits = 5): string {
+  if (value === 0) return '0'
+  const text = value.toPrecision(digits)
+  const [mantissa = '0', exponent] = text.split('e')
+  const short = mantissa.includes('.') ? mantissa.replace(/0+$/, '').replace(/\.$/, '') : mantissa
+  if (exponent !== undefined) return `${short} \\times 10^{${Number(exponent)}}`
+  const size = Math.abs(value)
+  if (size < 1e-3) {
+    const [small = '0', power = '0'] = value.toExponential(digits - 1).split('e')
+    return `${small.includes('.') ? small.replace(/0+$/, '').replace(/\.$/, '') : small} \\times 10^{${Number(power)}}`
+  }
+  return short
+}
+
+/** In brackets where it is negative, so that a product or a difference can be read. */
+export const texFactor = (value: number, digits = 5): string => (value < 0 ? `(${texNumber(value, digits)})` : texNumber(value, digits))
+
+const units: Readonly<Record<string, string>> = {
+  'K': 'K', 'Pa': 'Pa', 'hPa': 'hPa', 'm': 'm', 'km': 'km', 'kg': 'kg', '1': '', 'Cel': '{}^{\\circ}C',
+  'J': 'J', 'kJ': 'kJ', 'J/kg': 'J\\,kg^{-1}', 'kJ/kg': 'kJ\\,kg^{-1}', 'K/m': 'K\\,m^{-1}', 'K/km': 'K\\,km^{-1}',
+  'kg/m3': 'kg\\,m^{-3}', 'J/(kg.K)': 'J\\,kg^{-1}\\,K^{-1}', 'm/s2': 'm\\,s^{-2}',
+}
+
+export function texUnit(code: string): string {
+  const known = units[code]
+  if (known === undefined) throw new Error(`no TeX for the unit ${code}`)
+  return known === '' ? '' : `\\,\\mathrm{${known}}`
+}
+
+export const texQuantity = (value: number, unit: string, digits = 5): string => `${texNumber(value, digits)}${texUnit(unit)}`
