@@ -40,15 +40,15 @@ export function profileScale({ width, height, heights, main, side }: ProfileInpu
   const [left, top, bottom] = [52, 14, height - 46]
   const order = heights.map((_, at) => at).filter(at => heights[at] !== null).toSorted((a, b) => heights[a]! - heights[b]!)
   const sideWidth = side ? Math.round((width - left - 10) * (isNarrow ? 0.24 : 0.27)) : 0
-  const right = width - 10 - sideWidth - (side ? 22 : 0)
+  const right = width - 10 - sideWidth - (side ? 28 : 0)
   const lowest = order.length > 0 ? heights[order[0]!]! : 0
   const highest = order.length > 0 ? heights[order[order.length - 1]!]! : 100
   const y = scaleLinear().domain([Math.min(0, lowest), highest - Math.min(0, lowest) < 1 ? lowest + 10 : highest]).nice(8).range([bottom, top])
   const x = scaleLinear().domain(padded(extentOf(main) ?? [0, 1])).nice(6).range([left, right])
   const sideDomain = side?.unit === '%' ? [Math.min(40, (extentOf([side]) ?? [40, 100])[0]), Math.max(100, (extentOf([side]) ?? [40, 100])[1])] : padded(side ? extentOf([side]) ?? [0, 1] : [0, 1])
-  const sideX = scaleLinear().domain(sideDomain).nice(3).range([right + 22, width - 10])
+  const sideX = scaleLinear().domain(sideDomain).nice(3).range([right + 28, width - 10])
   return {
-    left, right, top, bottom, sideLeft: right + 22, order, hasDots: heights.length <= mostDots,
+    left, right, top, bottom, sideLeft: right + 28, order, hasDots: heights.length <= mostDots,
     y: value => y(value), x: value => x(value), sideX: value => sideX(value),
     heightTicks: ticksOf(y, Math.max(3, Math.floor((bottom - top) / 64))),
     mainTicks: ticksOf(x, Math.max(2, Math.floor((right - left) / 62))),
@@ -72,6 +72,16 @@ export function profilePoints(heights: readonly (number | null)[], values: Plott
 }
 
 export const profilePath = (points: readonly (Point | null)[]): string => pathOf(points)
+
+/** On which side of the plot a layer's bracket and name hide fewer readings. */
+export function layerSide(points: readonly (Point | null)[], [top, bottom]: readonly [number, number], { left, right }: { left: number, right: number }): 'left' | 'right' {
+  const middle = (top + bottom) / 2
+  const words = 120
+  const hidden = points.filter(point => point !== null && Math.abs(point.y - middle) < 26)
+  const atLeft = hidden.filter(point => point !== null && point.x < left + words).length
+  const atRight = hidden.filter(point => point !== null && point.x > right - words).length
+  return atLeft < atRight ? 'left' : 'right'
+}
 
 /** The level that a step up or down leads to, from the row where the cursor is. */
 export function stepLevel(order: readonly number[], from: number | null, step: number): number | null {

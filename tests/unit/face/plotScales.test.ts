@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { profilePoints, profileScale, stepLevel } from '../../../components/plot/profileScale'
+import { layerSide, profilePoints, profileScale, stepLevel } from '../../../components/plot/profileScale'
 import { extentOf, nearestAt, pathOf, thinned, type Point } from '../../../components/plot/series'
 import { instantText, rowsWithin, seriesPoints, timeTicks, turnedWindow, usualGap } from '../../../components/plot/timeScale'
 
@@ -34,6 +34,14 @@ describe('a profile', () => {
       const drawn = profileScale({ width, height: 400, heights: rows.map(row => row[1]), main: [series(rows.map(row => row[0]))], side: { ...series(rows.map(() => 50)), unit: '%' } })
       return rows.every(([value, height]) => drawn.x(value) >= drawn.left - 0.5 && drawn.x(value) <= drawn.right + 0.5 && drawn.y(height) >= drawn.top - 0.5 && drawn.y(height) <= drawn.bottom + 0.5)
     }))
+  })
+})
+
+describe('the name of a layer', () => {
+  it('stands where it hides fewer readings', () => {
+    const line = Array.from({ length: 40 }, (_, at) => ({ x: 420, y: 10 * at }))
+    expect(layerSide(line, [100, 200], { left: 50, right: 450 })).toBe('left')
+    expect(layerSide(line.map(point => ({ ...point, x: 80 })), [100, 200], { left: 50, right: 450 })).toBe('right')
   })
 })
 
