@@ -45,6 +45,7 @@ export const policies = {
   'passphrase:askReset': { scope: 'public', roles: [] },
   'passphrase:reset': { scope: 'public', roles: [] },
   'invitation:accept': { scope: 'public', roles: [] },
+  'reference:read': { scope: 'session', roles: [] },
   // courses
   'course:read': { scope: 'course', roles: [...everyone, 'admin'] },
   'course:people': { scope: 'course', roles: [...staff, 'admin'] },
@@ -61,12 +62,14 @@ export const policies = {
   'lab:list': { scope: 'course', roles: everyone, hides: { student: ['drafts', 'reference'] } },
   'lab:write': { scope: 'course', roles: teachers, openTerm: true },
   'lab:edit': { scope: 'course', roles: [...teachers, 'ta'] },
+  'lab:flights': { scope: 'course', roles: [...teachers, 'ta'] },
   'lab:preview': { scope: 'course', roles: [...teachers, 'ta'] },
   'lab:post': { scope: 'course', roles: teachers, openTerm: true },
   'lab:release': { scope: 'course', roles: teachers },
   'lab:class': { scope: 'course', roles: staff },
   'lab:work': { scope: 'own', roles: ['student'], opened: true, hides: { student: ['reference', 'band', 'derived'] } },
   'share:data': { scope: 'own', roles: everyone, opened: true, hides: { student: ['derived'] } },
+  'share:redraw': { scope: 'course', roles: teachers, openTerm: true },
   'allowance:grant': { scope: 'course', roles: teachers, openTerm: true },
   // work
   'draft:save': { scope: 'own', roles: ['student'], opened: true, openTerm: true },

@@ -25,11 +25,19 @@ export interface ServedRows {
   count: number
 }
 
-/** What a share was drawn from: frozen in the draw, with the digest of the bytes that were served. */
+/** What a share was drawn from: frozen in the draw, with the printed words and the digest of the bytes that were served. */
 export interface DrawnItem extends SupplyItem {
   no: number
+  versionNo: number
   dataSetTitle: string
+  /** Hex. */
   rootSha256: string
+  heightDatum: string
+  /** The ask of each step with this share's bounds, rows and columns, by step key. */
+  asks: Readonly<Record<string, string>>
+  /** The comment lines at the head of the file that is served. */
+  head: readonly string[]
+  /** Hex. */
   servedSha256: string
 }
 

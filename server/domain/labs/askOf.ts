@@ -1,0 +1,116 @@
+import type { Convention } from '#shared/marking/types'
+import type { InputSource, NumberStep, SupplyItem } from '#shared/schemas/lab'
+import type { InputDefinition, QuantityDefinition } from '#shared/thermo/definition'
+import { constantDefinitions } from '#shared/thermo/constants'
+import { findMeasuredQuantity } from '#shared/schemas/measured'
+import { formatUnit } from '#shared/units/formatQuantity'
+import { legWords } from '../shares/legs'
+import { columnOf } from '../shares/servedData'
+import type { ServedRows } from '../shares/loadedShare'
+
+/** What the ask says beyond the step once a share is known. */
+export interface AskedShare {
+  item: Pick<SupplyItem, 'leg' | 'lowM' | 'highM'>
+  heightDatum: string
+  rows: ServedRows
+}
+
+const decimal = (value: number): string => String(value).replace('-', '−')
+
+/** What the heights of a flight are counted from, as words in a sentence. */
+export function datumWords(datum: string): string {
+  if (datum === 'sea level') return 'above mean sea level'
+  if (datum === 'ground') return 'above the ground'
+  if (datum === 'roof') return 'above the roof'
+  if (datum === 'launch point') return 'above the launch point'
+  return 'as given in the file (datum not stated)'
+}
+
+/**
+ * The line above an entry: exactly what is asked, so that everything it pins is a definition and never a matter of width.
+ * Quantity and sign, method, inputs with their bounds and rows, height datum, constants of the convention, digits.
+ */
+export function askOf(step: NumberStep, definition: QuantityDefinition, convention: Convention, titles: Readonly<Record<string, string>>, share: AskedShare | null): string {
+  return [
+    sentence(definition.ask),
+    methodOf(step, definition, convention),
+    ...definition.inputs.flatMap(input => inputOf(step.inputs[input.name], input, titles, share)),
+    share ? boundsOf(share, step) : generalBounds(step),
+    constantsOf(definition, convention, step),
+    answerOf(step, definition),
+  ].filter(part => part !== '').join(' ')
+}
+
+const sentence = (text: string): string => /[.:!?]$/.test(text.trim()) ? text.trim() : `${text.trim()}.`
+
+function methodOf(step: NumberStep, definition: QuantityDefinition, convention: Convention): string {
+  if (definition.variants.length < 2) return ''
+  const key = step.variant ?? convention.variants[definition.key] ?? definition.variants[0]?.key
+  const variant = definition.variants.find(entry => entry.key === key)
+  return variant ? `Formula taught: ${sentence(variant.label)}` : ''
+}
+
+function inputOf(source: InputSource | undefined, input: InputDefinition, titles: Readonly<Record<string, string>>, share: AskedShare | null): string[] {
+  if (!source) return []
+  const name = `${input.label[0]?.toUpperCase() ?? ''}${input.label.slice(1)} ${input.symbol}`
+  switch (source.from) {
+    case 'text': return [`${name}: ${decimal(source.value)} ${formatUnit(source.unit)}.`]
+    case 'constant': return [`${name}: the constant ${source.name}.`]
+    case 'step': return [`${name}: your result of “${titles[source.key] ?? source.key}”.`]
+    case 'share': return [`${name}: ${readingWords(source.column, source.read, share)}.`]
+  }
+}
+
+function readingWords(column: string, read: Extract<InputSource, { from: 'share' }>['read'], share: AskedShare | null): string {
+  if (read === 'lowBound') return share ? `the layer’s base, ${decimal(share.item.lowM)} m` : 'the layer’s base'
+  if (read === 'highBound') return share ? `the layer’s top, ${decimal(share.item.highM)} m` : 'the layer’s top'
+  const served = share ? columnOf(share.rows, column) : undefined
+  const named = served ? `column ${served.name}` : (findMeasuredQuantity(column)?.label ?? column)
+  if (read === 'layer') return `${named}, every row with use = 1`
+  if (read === 'mean') return `mean of ${named} over the rows with use = 1`
+  const row = share ? edgeRow(share.rows, read) : null
+  const which = read === 'lowest' ? 'the lowest' : 'the highest'
+  return `${named} in ${which} row with use = 1${row === null ? '' : ` (row ${row + 1})`}`
+}
+
+/** The row that stands lowest or highest among those in use; the earlier one where two stand equally. */
+export function edgeRow(rows: ServedRows, read: 'lowest' | 'highest'): number | null {
+  const heights = columnOf(rows, 'height')?.values
+  let found: { row: number, height: number } | null = null
+  for (let row = 0; row < rows.count; row++) {
+    const height = heights?.[row]
+    if (height === undefined || height === null || rows.use[row] !== true) continue
+    if (found === null || (read === 'lowest' ? height < found.height : height > found.height)) found = { row, height }
+  }
+  return found?.row ?? null
+}
+
+const takesRows = (step: NumberStep): boolean => Object.values(step.inputs).some(source => source.from === 'share')
+
+function boundsOf(share: AskedShare, step: NumberStep): string {
+  if (!takesRows(step)) return ''
+  const used = share.rows.use.filter(Boolean).length
+  return `Layer: ${decimal(share.item.lowM)} m to ${decimal(share.item.highM)} m ${datumWords(share.heightDatum)}, both bounds included, ${legWords[share.item.leg]}; ${used} of ${share.rows.count} rows.`
+}
+
+function generalBounds(step: NumberStep): string {
+  return takesRows(step) ? 'Layer: the one of your data, both bounds included; only rows with use = 1.' : ''
+}
+
+function constantsOf(definition: QuantityDefinition, convention: Convention, step: NumberStep): string {
+  const named = [...definition.constants, ...Object.values(step.inputs).flatMap(source => source.from === 'constant' ? [source.name] : [])]
+  const listed = [...new Set(named)].flatMap(name => constantWords(name, convention.constants[name]) ?? [])
+  return listed.length === 0 ? '' : `Constants (${convention.title}): ${listed.join(', ')}.`
+}
+
+/** "cp = 1004 J kg⁻¹ K⁻¹"; null where the convention does not set it. */
+export function constantWords(name: string, value: number | undefined): string | null {
+  if (value === undefined) return null
+  const unit = formatUnit(constantDefinitions.find(definition => definition.name === name)?.unit ?? '1')
+  return `${name} = ${decimal(value)}${unit === '' ? '' : ` ${unit}`}`
+}
+
+function answerOf(step: NumberStep, definition: QuantityDefinition): string {
+  if (definition.classes) return `Answer with one of: ${definition.classes.map(entry => entry.label).join(', ')}.`
+  return `Answer in ${formatUnit(step.unit)}, to at least ${step.digits} significant digit${step.digits === 1 ? '' : 's'}.`
+}

@@ -1,0 +1,87 @@
+import type { FieldProblem } from '#shared/errors'
+import { findMeasuredQuantity } from '#shared/schemas/measured'
+import type { InputSource, LabBody, NumberStep } from '#shared/schemas/lab'
+import type { InputDefinition, QuantityDefinition } from '#shared/thermo/definition'
+import { findQuantity } from '#shared/thermo/registry'
+import type { Convention } from '#shared/marking/types'
+import { isSameDimension } from '../shares/units'
+import { columnOf, type Flight } from '../shares/servedData'
+import type { PreparedLab } from './prepareLab'
+
+/** What stops a lab from being asked, each with the field in which it stands. Empty where every step is bound and every flight has what the steps need. */
+export function bindingProblems(lab: PreparedLab): FieldProblem[] {
+  const { body } = lab.revision
+  return [
+    ...(body.steps.length === 0 ? [{ path: 'steps', message: 'A lab asks at least one step.' }] : []),
+    ...(body.supply.length === 0 ? [{ path: 'supply', message: 'Choose at least one flight and layer: shares are drawn from them.' }] : []),
+    ...body.steps.flatMap((step, at) => stepProblems(body, step, lab.convention).map(problem => ({ path: `steps.${at}.${problem.path}`, message: problem.message }))),
+    ...supplyProblems(lab),
+  ]
+}
+
+function stepProblems(body: LabBody, step: NumberStep, convention: Convention): FieldProblem[] {
+  const definition = findQuantity(step.quantity)
+  if (!definition) return [{ path: 'quantity', message: `The reference has no quantity "${step.quantity}".` }]
+  const problems: FieldProblem[] = []
+  if (step.variant !== null && !definition.variants.some(variant => variant.key === step.variant)) problems.push({ path: 'variant', message: `${definition.name} has no formula "${step.variant}".` })
+  if (definition.kind !== 'class' && !isSameDimension(step.unit, definition.unit)) problems.push({ path: 'unit', message: `${definition.name} is not measured in "${step.unit}".` })
+  if (definition.kind === 'temperature' && step.granted.relative) problems.push({ path: 'granted.relative', message: 'A temperature takes an absolute width: a part of it depends on where the scale has its zero.' })
+  if (step.slipMilli > step.pointsMilli) problems.push({ path: 'slipMilli', message: 'A slip cannot earn more than the step holds.' })
+  for (const name of Object.keys(step.inputs)) {
+    if (!definition.inputs.some(input => input.name === name)) problems.push({ path: `inputs.${name}`, message: `${definition.name} takes no "${name}".` })
+  }
+  for (const input of definition.inputs) {
+    const source = step.inputs[input.name]
+    const message = source ? sourceProblem(body, definition, input, source, convention) : input.isOptional ? null : `Say where ${input.label} comes from.`
+    if (message) problems.push({ path: `inputs.${input.name}`, message })
+  }
+  return problems
+}
+
+function sourceProblem(body: LabBody, definition: QuantityDefinition, input: InputDefinition, source: InputSource, convention: Convention): string | null {
+  switch (source.from) {
+    case 'text':
+      if (input.shape === 'series') return `${input.label} is a series: take it from the share.`
+      return isSameDimension(source.unit, input.unit) ? null : `${input.label} is not measured in "${source.unit}".`
+    case 'constant':
+      if (input.shape === 'series') return `${input.label} is a series: take it from the share.`
+      return convention.constants[source.name] === undefined ? `The convention has no constant "${source.name}".` : null
+    case 'step': {
+      if (input.shape === 'series') return `${input.label} is a series: take it from the share.`
+      const earlier = body.steps.find(step => step.key === source.key)
+      const from = earlier ? findQuantity(earlier.quantity) : undefined
+      if (!from) return 'The earlier step is not bound yet.'
+      if (from.kind === 'class' || from.kind === 'temperature' !== (input.kind === 'temperature') || !isSameDimension(from.unit, input.unit)) return `${from.name} cannot stand for ${input.label}.`
+      return null
+    }
+    case 'share': return shareSourceProblem(definition, input, source)
+  }
+}
+
+function shareSourceProblem(definition: QuantityDefinition, input: InputDefinition, source: Extract<InputSource, { from: 'share' }>): string | null {
+  const isBound = source.read === 'lowBound' || source.read === 'highBound'
+  const isSeries = source.read === 'layer'
+  if (isSeries !== (input.shape === 'series')) return input.shape === 'series' ? `${definition.name} takes ${input.label} as the whole layer.` : `${definition.name} takes one value for ${input.label}, not the whole layer.`
+  if (isBound) return isSameDimension('m', input.unit) ? null : `A bound of the layer is a height; ${input.label} is not.`
+  const column = findMeasuredQuantity(source.column)
+  if (!column) return `"${source.column}" is not a quantity that a column can be.`
+  if (column.key === definition.key) return 'A step cannot take its own answer as its input.'
+  return isSameDimension(column.canonical, input.unit) ? null : `A column of ${column.label} cannot stand for ${input.label}.`
+}
+
+function supplyProblems(lab: PreparedLab): FieldProblem[] {
+  const { body } = lab.revision
+  const needed = new Set(['height', ...body.steps.flatMap(step => Object.values(step.inputs).flatMap(source => source.from === 'share' && source.read !== 'lowBound' && source.read !== 'highBound' ? [source.column] : []))])
+  return body.supply.flatMap((item, at): FieldProblem[] => {
+    // A flight of another course reads like one that does not exist.
+    if (!lab.flights.has(item.versionId)) return [{ path: `supply.${at}.versionId`, message: 'Not a flight of this course.' }]
+    const { flight } = lab.flightOf(item.versionId)
+    const missing = [...needed].filter(quantity => !columnOf({ columns: flight.columns.filter(isValue) }, quantity))
+    return [
+      ...missing.map(quantity => ({ path: `supply.${at}.versionId`, message: `${flight.title} has no column of ${findMeasuredQuantity(quantity)?.label ?? quantity}.` })),
+      ...(item.lowM < 0 && flight.heightDatum !== 'sea level' && flight.heightDatum !== 'unknown' ? [{ path: `supply.${at}.lowM`, message: 'Below the ground.' }] : []),
+    ]
+  })
+}
+
+const isValue = (column: Flight['columns'][number]): boolean => column.role === 'value'

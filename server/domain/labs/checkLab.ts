@@ -1,0 +1,103 @@
+import { DomainError, type FieldProblem } from '#shared/errors'
+import { judgeStep } from '#shared/marking/judge'
+import { checkBand } from '#shared/marking/proof'
+import type { Judgement, ReadAnswer } from '#shared/marking/types'
+import type { NumberStep, SupplyItem } from '#shared/schemas/lab'
+import { findQuantity } from '#shared/thermo/registry'
+import { formatUnit } from '#shared/units/formatQuantity'
+import type { Read } from '../../db/writer'
+import type { Observations } from '../../observations/chunks'
+import { legNames } from '../shares/legs'
+import { askedQuestion } from '../shares/questionFor'
+import { bindingProblems } from './bindingProblems'
+import { prepareLab, type PreparedLab } from './prepareLab'
+import { renderInline } from './renderLabText'
+import { shownBand, type ShownBand } from './shownBand'
+
+export interface CheckedStep {
+  key: string
+  title: string
+  ok: boolean
+  code: 'band_too_wide' | 'share_degenerate' | null
+  reason: string | null
+  ask: string
+  outcome: Judgement['outcome']
+  /** The reference's answer in words: "6.48 K km⁻¹", "stable", "not defined". */
+  words: string
+  unit: string
+  band: ShownBand | null
+  trace: { text: string, formulaHtml: string, filledHtml: string }[]
+}
+export interface CheckedShare { no: number, title: string, versionId: string, leg: SupplyItem['leg'], lowM: number, highM: number, used: number, rows: number, steps: CheckedStep[] }
+export interface CheckedLab { version: number, isReady: boolean, problems: FieldProblem[], shares: CheckedShare[] }
+
+const nothing: ReadAnswer = { typed: '', reading: 'empty', valueSi: null, decimal: null, unitUcum: null, digits: null, halfUnitSi: null, message: '' }
+
+/** Works every share of a lab as it stands: nothing is written. */
+export async function checkLab(read: Read, observations: Observations, labId: string): Promise<CheckedLab> {
+  const lab = await prepareLab(read, observations, labId)
+  const problems = bindingProblems(lab)
+  const shares = problems.length > 0 ? [] : await checkPrepared(lab)
+  return { version: lab.lab.version, isReady: problems.length === 0 && shares.every(share => share.steps.every(step => step.ok)), problems, shares }
+}
+
+/** Every share of a lab that is bound, one after the other; other requests get their turn between two. */
+export async function checkPrepared(lab: PreparedLab): Promise<CheckedShare[]> {
+  const shares: CheckedShare[] = []
+  for (const item of lab.items) {
+    shares.push(checkShare(lab, item))
+    await new Promise(setImmediate)
+  }
+  return shares
+}
+
+/** The first thing that stops a posting, as a refusal that names share and step; null where nothing does. */
+export function firstRefusal(lab: PreparedLab, shares: readonly CheckedShare[]): DomainError | null {
+  const [open] = bindingProblems(lab)
+  if (open) return new DomainError('binding_invalid', { step: open.path, reason: open.message }, bindingProblems(lab))
+  for (const share of shares) {
+    const step = share.steps.find(entry => !entry.ok)
+    if (step) return new DomainError(step.code ?? 'share_degenerate', { share: share.no, shareTitle: share.title, step: step.title, stepKey: step.key, reason: step.reason })
+  }
+  return null
+}
+
+export function shareTitle(lab: PreparedLab, item: SupplyItem): string {
+  return `${lab.flightOf(item.versionId).flight.title}, ${legNames[item.leg]}, ${String(item.lowM).replace('-', '−')}–${item.highM} m`
+}
+
+export function checkShare(lab: PreparedLab, item: SupplyItem): CheckedShare {
+  const { rows, asks } = lab.serve(item)
+  const ground = { rows, convention: lab.convention, share: { item }, revision: { body: lab.revision.body } }
+  return {
+    no: lab.items.indexOf(item) + 1, title: shareTitle(lab, item), versionId: item.versionId, leg: item.leg, lowM: item.lowM, highM: item.highM, used: rows.use.filter(Boolean).length, rows: rows.count,
+    steps: lab.revision.body.steps.map(step => checkStep(step, asks[step.key] ?? '', askedQuestion(ground, step.key, {}))),
+  }
+}
+
+function checkStep(step: NumberStep, ask: string, asked: ReturnType<typeof askedQuestion>): CheckedStep {
+  const bare = { key: step.key, title: step.title, ask, unit: step.unit, band: null, trace: [] }
+  if (!('question' in asked)) return { ...bare, ok: false, code: 'share_degenerate', reason: asked.reason, outcome: 'refused', words: 'not computed' }
+  const judgement = judgeStep(asked.question, nothing)
+  const { ok, reasons } = checkBand(asked.question)
+  return {
+    ...bare, ok, code: ok ? null : judgement.outcome === 'value' ? 'band_too_wide' : 'share_degenerate', reason: ok ? null : reasons.join(' '), outcome: judgement.outcome, words: wordsOf(step, judgement),
+    band: judgement.band ? shownBand(judgement.band, step.digits, judgement.slipValues) : null,
+    trace: judgement.trace.map(line => ({ text: line.text, formulaHtml: texLine(line.formula), filledHtml: texLine(line.filled) })),
+  }
+}
+
+const texLine = (formula: string): string => formula === '' ? '' : renderInline(`$${formula}$`)
+
+function wordsOf(step: NumberStep, judgement: Judgement): string {
+  if (judgement.band) {
+    const shown = shownBand(judgement.band, step.digits, [])
+    const unit = formatUnit(step.unit)
+    return `${shown.center.toFixed(shown.digits).replace('-', '−')}${unit === '' ? '' : ` ${unit}`}`
+  }
+  const classes = findQuantity(step.quantity)?.classes ?? []
+  const named: Record<Judgement['outcome'], string> = {
+    value: '', class: judgement.classes.map(key => classes.find(entry => entry.key === key)?.label ?? key).join(' or '), none: 'none', not_reached: 'not reached', not_defined: 'not defined', refused: 'not computed',
+  }
+  return named[judgement.outcome]
+}

@@ -1,0 +1,48 @@
+import { z } from 'zod'
+import { refuse } from '#shared/errors'
+import type { Convention } from '#shared/marking/types'
+import { conventionFaults } from '#shared/thermo/conventions/closes'
+import type { Read, Trx } from '../../db/writer'
+import { newId } from '../ids'
+import { digestOf } from '../ledger/appendEntry'
+
+const constants = z.record(z.string().min(1), z.number())
+const variants = z.record(z.string().min(1), z.string().min(1))
+
+export const conventionBody = z.object({
+  key: z.string().regex(/^[a-z][a-z0-9-]{0,39}$/),
+  title: z.string().min(1).max(120),
+  source: z.string().min(1).max(400),
+  constants,
+  variants,
+  accepted: z.array(z.object({ label: z.string().min(1).max(120), constants: constants.optional(), variants: variants.optional() })),
+})
+
+/**
+ * The row of a convention: found by its digest, or written as the next revision of its key.
+ * @throws {DomainError} `convention_open` when cp − cv is not R, or a constant is no constant of air
+ */
+export async function ensureConvention(trx: Trx, given: Convention, now: number): Promise<{ id: string }> {
+  const convention = conventionBody.parse(given)
+  const faults = conventionFaults(convention)
+  if (faults.length > 0) refuse('convention_open', { reason: faults.join(' ') })
+  const digest = digestOf(convention)
+  const known = await trx.selectFrom('convention_revision').select('id').where('digest', '=', digest).executeTakeFirst()
+  if (known) return known
+  const last = await trx.selectFrom('convention_revision').select('no').where('convention_key', '=', convention.key).orderBy('no', 'desc').limit(1).executeTakeFirst()
+  const id = newId(now)
+  await trx.insertInto('convention_revision').values({ id, convention_key: convention.key, no: (last?.no ?? 0) + 1, body_json: JSON.stringify(convention), digest }).execute()
+  return { id }
+}
+
+export async function getConvention(db: Read | Trx, revisionId: string): Promise<Convention> {
+  const row = await db.selectFrom('convention_revision').select('body_json').where('id', '=', revisionId).executeTakeFirstOrThrow()
+  return conventionBody.parse(JSON.parse(row.body_json))
+}
+
+/** The convention that a course teaches with now. */
+export async function conventionOfCourse(db: Read | Trx, courseId: string): Promise<{ id: string, convention: Convention }> {
+  const row = await db.selectFrom('course').innerJoin('convention_revision', 'convention_revision.id', 'course.convention_revision_id')
+    .select(['convention_revision.id', 'convention_revision.body_json as body']).where('course.id', '=', courseId).executeTakeFirstOrThrow()
+  return { id: row.id, convention: conventionBody.parse(JSON.parse(row.body)) }
+}

@@ -1,0 +1,74 @@
+import { refuse } from '#shared/errors'
+import { carriedFrom } from '#shared/marking/graph'
+import { judgeStep } from '#shared/marking/judge'
+import type { Granted, ReadAnswer, StepQuestion } from '#shared/marking/types'
+import type { NumberStep } from '#shared/schemas/lab'
+import type { InputDefinition } from '#shared/thermo/definition'
+import { findQuantity } from '#shared/thermo/registry'
+import type { EarlierReadings, LoadedShare } from './loadedShare'
+import { stepInputs, type InputGround } from './stepInputs'
+import { siWidth } from './units'
+
+/** Asked for the reference's value alone. */
+const nothing: ReadAnswer = { typed: '', reading: 'empty', valueSi: null, decimal: null, unitUcum: null, digits: null, halfUnitSi: null, message: '' }
+
+export type ShareGround = Pick<LoadedShare, 'rows' | 'convention'> & { share: { item: LoadedShare['share']['item'] | { lowM: number, highM: number } }, revision: { body: LoadedShare['revision']['body'] } }
+export type AskedQuestion = { question: StepQuestion } | { missing: string, reason: string }
+
+/**
+ * The question that a step puts to a share: inputs from the served digits, and beside the true value of each earlier step
+ * the student's own reading of it, where that can be carried.
+ */
+export function questionFor(loaded: ShareGround, stepKey: string, earlier: EarlierReadings): StepQuestion {
+  const asked = askedQuestion(loaded, stepKey, earlier)
+  return 'question' in asked ? asked.question : refuse('share_degenerate', { step: stepKey, reason: asked.reason })
+}
+
+/** As `questionFor`, with a missing input told and not refused: for the check before posting. */
+export function askedQuestion(loaded: ShareGround, stepKey: string, earlier: EarlierReadings): AskedQuestion {
+  const step = loaded.revision.body.steps.find(entry => entry.key === stepKey)
+  const definition = step ? findQuantity(step.quantity) : undefined
+  if (!step || !definition) return { missing: 'quantity', reason: `There is no step "${stepKey}" with a quantity of the reference.` }
+  const resolved = stepInputs(step, groundOf(loaded))
+  if (!('inputs' in resolved)) return resolved
+  const carried = carriedInputs(step, definition.inputs, earlier)
+  return {
+    question: {
+      quantity: step.quantity, ...(step.variant === null ? {} : { variant: step.variant }), inputs: resolved.inputs, convention: loaded.convention,
+      granted: grantedSi(step), digits: step.digits, unit: step.unit, maxMilli: step.pointsMilli, slipMilli: step.slipMilli,
+      ...(Object.keys(carried).length > 0 ? { carried } : {}),
+    },
+  }
+}
+
+function groundOf(loaded: ShareGround): InputGround {
+  const known = new Map<string, number | null>()
+  const ground: InputGround = {
+    body: loaded.revision.body, item: loaded.share.item, rows: loaded.rows, convention: loaded.convention,
+    valueOf(key) {
+      const value = known.get(key)
+      if (value !== undefined) return value
+      const asked = askedQuestion(loaded, key, {})
+      const found = 'question' in asked ? judgeStep(asked.question, nothing).band?.center ?? null : null
+      known.set(key, found)
+      return found
+    },
+  }
+  return ground
+}
+
+function grantedSi(step: NumberStep): Granted {
+  return {
+    ...(step.granted.absolute === undefined ? {} : { absoluteSi: siWidth(step.granted.absolute, step.unit) }),
+    ...(step.granted.relative === undefined ? {} : { relative: step.granted.relative }),
+  }
+}
+
+/** A blank or unread earlier step carries nothing: the later one is judged on the true value, and nothing is lost twice. */
+function carriedInputs(step: NumberStep, inputs: readonly InputDefinition[], earlier: EarlierReadings): NonNullable<StepQuestion['carried']> {
+  return Object.fromEntries(inputs.flatMap((input) => {
+    const source = step.inputs[input.name]
+    const carried = source?.from === 'step' ? carriedFrom(input, earlier[source.key]) : null
+    return carried === null ? [] : [[input.name, carried]]
+  }))
+}

@@ -1,0 +1,68 @@
+import type { Convention } from '#shared/marking/types'
+import type { InputSource, LabBody, NumberStep, SupplyItem } from '#shared/schemas/lab'
+import type { InputDefinition, Inputs, InputValue } from '#shared/thermo/definition'
+import { findQuantity } from '#shared/thermo/registry'
+import { edgeRow } from '../labs/askOf'
+import type { ServedRows } from './loadedShare'
+import { columnOf } from './servedData'
+import { siFromText } from './units'
+
+/** What a step's inputs are taken from. */
+export interface InputGround {
+  body: LabBody
+  item: Pick<SupplyItem, 'lowM' | 'highM'>
+  rows: ServedRows
+  convention: Convention
+  /** The true value of an earlier step, SI; null where it has none. */
+  valueOf: (stepKey: string) => number | null
+}
+
+export type ResolvedInputs = { inputs: Inputs } | { missing: string, reason: string }
+
+/** The inputs of a step in SI, from the digits that were served. A missing one is told with its reason and is never filled in. */
+export function stepInputs(step: NumberStep, ground: InputGround): ResolvedInputs {
+  const definition = findQuantity(step.quantity)
+  if (!definition) return { missing: 'quantity', reason: `The reference has no quantity "${step.quantity}".` }
+  const inputs: Record<string, InputValue> = {}
+  for (const input of definition.inputs) {
+    const source = step.inputs[input.name]
+    if (!source) {
+      if (input.isOptional) continue
+      return { missing: input.name, reason: `${input.label} is bound to nothing.` }
+    }
+    const value = inputValue(input, source, ground)
+    if (value === null) return { missing: input.name, reason: whyMissing(input, source) }
+    inputs[input.name] = value
+  }
+  return { inputs }
+}
+
+function inputValue(input: InputDefinition, source: InputSource, ground: InputGround): InputValue | null {
+  switch (source.from) {
+    case 'text': return siFromText(String(source.value), source.unit, input.kind)
+    case 'constant': return ground.convention.constants[source.name] ?? null
+    case 'step': return ground.valueOf(source.key)
+    case 'share': return readShare(input, source, ground)
+  }
+}
+
+function readShare(input: InputDefinition, source: Extract<InputSource, { from: 'share' }>, { item, rows }: InputGround): InputValue | null {
+  if (source.read === 'lowBound') return siFromText(String(item.lowM), 'm', input.kind)
+  if (source.read === 'highBound') return siFromText(String(item.highM), 'm', input.kind)
+  const column = columnOf(rows, source.column)
+  if (!column) return null
+  const inSi = (row: number) => siFromText(column.texts[row] ?? '', column.unit, input.kind)
+  if (source.read === 'lowest' || source.read === 'highest') {
+    const row = edgeRow(rows, source.read)
+    return row === null ? null : inSi(row)
+  }
+  const series = rows.use.flatMap((isUsed, row) => isUsed ? inSi(row) ?? [] : [])
+  if (series.length === 0) return null
+  return source.read === 'layer' ? series : series.reduce((sum, value) => sum + value, 0) / series.length
+}
+
+function whyMissing(input: InputDefinition, source: InputSource): string {
+  if (source.from === 'step') return `${input.label} comes from an earlier step that has no value here.`
+  if (source.from === 'constant') return `The convention has no constant "${source.name}".`
+  return `No row of this layer and leg gives ${input.label}.`
+}
