@@ -1,10 +1,21 @@
-import type { Kysely, Transaction } from 'kysely'
-import { sql } from 'kysely'
+import { sql, SqliteAdapter, SqliteDialect, type Kysely, type Transaction } from 'kysely'
 
 /**
  * What this database says in its own words stands here and nowhere else.
  * Another database needs its own version of this file and of `open.ts`; queries are Kysely's and stay.
  */
+
+/** SQLite's tables are made and changed inside transactions like any rows, so a migration is done whole or not at all. Kysely's own adapter denies it. */
+class TransactionalAdapter extends SqliteAdapter {
+  override get supportsTransactionalDdl(): boolean {
+    return true
+  }
+}
+export class HouseDialect extends SqliteDialect {
+  override createAdapter(): SqliteAdapter {
+    return new TransactionalAdapter()
+  }
+}
 
 /** Runs a text of several statements, triggers included: statements end with a semicolon at the end of a line. */
 export async function runStatements<T>(db: Kysely<T> | Transaction<T>, text: string): Promise<void> {

@@ -1,8 +1,8 @@
 import { mkdirSync } from 'node:fs'
 import { join } from 'node:path'
 import SQLite from 'better-sqlite3'
-import { Kysely, Migrator, SqliteDialect } from 'kysely'
-import { oldestDatabaseEngine, readingPragmas, writingPragmas } from './dialect'
+import { Kysely, Migrator } from 'kysely'
+import { HouseDialect, oldestDatabaseEngine, readingPragmas, writingPragmas } from './dialect'
 import { migrations } from './migrations'
 import type { Database } from './schema/tables'
 import { groupWriter, type Stores } from './writer'
@@ -27,14 +27,14 @@ export async function openDatabase(dataDir: string, onFailedSync?: (error: unkno
   const raw = new SQLite(file)
   for (const pragma of writingPragmas) raw.pragma(pragma)
   assertEngine(raw)
-  const connection = new Kysely<Database>({ dialect: new SqliteDialect({ database: raw }) })
+  const connection = new Kysely<Database>({ dialect: new HouseDialect({ database: raw }) })
   await migrate(connection)
   // A fresh WAL file answers 2 before its first transaction whatever was set; after one the answer is true.
   raw.exec('begin immediate; create table if not exists sync_probe (n integer) strict; drop table sync_probe; commit')
   if (raw.pragma('synchronous', { simple: true }) !== 2) throw new Error('The database does not keep synchronous = FULL; acknowledged work could be lost. Not starting.')
   const reading = new SQLite(file, { readonly: true, fileMustExist: true })
   for (const pragma of readingPragmas) reading.pragma(pragma)
-  const read = new Kysely<Database>({ dialect: new SqliteDialect({ database: reading }) })
+  const read = new Kysely<Database>({ dialect: new HouseDialect({ database: reading }) })
   return {
     connection, raw, read,
     write: groupWriter(connection, { onFailedSync }),
