@@ -1,63 +1,7 @@
-import { createReadStream } from 'node:fs'
 import { parentPort, workerData } from 'node:worker_threads'
-import type { Recipe, RefusedRow } from '#shared/schemas/data'
-import { ImportCancelled, importFile, NothingTaken, type ImportedFile } from '../importing/importFile'
-import { UnreadableFile } from '../importing/unreadable'
-import { openObservationsWriter } from '../observations/chunks'
-import { sweepChunks } from '../observations/sweep'
-
-export type ImportTask =
-  | { kind: 'import', dataDir: string, file: string, recipe: Recipe, mostBytes: number, cancel: SharedArrayBuffer }
-  | { kind: 'sweep', dataDir: string, roots: Uint8Array[], refusals: Uint8Array[] }
-
-export type ImportMessage =
-  | { is: 'progress', rows: number, readBytes: number }
-  | { is: 'done', file: ImportedFile }
-  | { is: 'swept', chunks: number }
-  | { is: 'refused', code: UnreadableFile['code'], facts: UnreadableFile['facts'], first: readonly RefusedRow[] }
-  | { is: 'cancelled' }
-
-const progressEveryMs = 200
+import { runImportTask, type ImportTask } from '../importing/importTask'
 
 /** Reads a source file into chunks beside the server's own thread. */
-async function runImport(task: Extract<ImportTask, { kind: 'import' }>, tell: (message: ImportMessage) => void): Promise<void> {
-  const cancel = new Int32Array(task.cancel)
-  const observations = openObservationsWriter(task.dataDir)
-  try {
-    let readBytes = 0
-    let toldAt = 0
-    const counted = async function* () {
-      for await (const chunk of createReadStream(task.file, { highWaterMark: 65_536 })) {
-        readBytes += (chunk as Buffer).length
-        yield chunk as Buffer
-      }
-    }
-    const file = await importFile({
-      source: counted(), recipe: task.recipe, mostBytes: task.mostBytes, observations,
-      isCancelled: () => Atomics.load(cancel, 0) === 1,
-      onProgress: ({ rows }) => {
-        const at = Date.now()
-        if (at - toldAt < progressEveryMs) return
-        toldAt = at
-        tell({ is: 'progress', rows, readBytes })
-      },
-    })
-    tell({ is: 'done', file })
-  }
-  catch (error) {
-    if (error instanceof ImportCancelled) tell({ is: 'cancelled' })
-    else if (error instanceof UnreadableFile) tell({ is: 'refused', code: error.code, facts: error.facts, first: error instanceof NothingTaken ? error.first : [] })
-    else throw error
-  }
-  finally {
-    observations.close()
-  }
-}
-
 const port = parentPort
-if (port) {
-  const task = workerData as ImportTask
-  const tell = (message: ImportMessage) => port.postMessage(message)
-  if (task.kind === 'sweep') tell({ is: 'swept', chunks: sweepChunks(task.dataDir, { roots: task.roots.map(root => Buffer.from(root)), refusals: task.refusals.map(chunk => Buffer.from(chunk)) }) })
-  else await runImport(task, tell)
-}
+if (!port) throw new Error('This is a worker: it is started, not imported.')
+await runImportTask(workerData as ImportTask, message => port.postMessage(message))

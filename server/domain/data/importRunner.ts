@@ -3,9 +3,9 @@ import { DomainError, type RefusalCode } from '#shared/errors'
 import type { Stores } from '../../db/writer'
 import type { FileStore } from '../../files/store'
 import type { ImportedFile } from '../../importing/importFile'
-import type { ImportMessage } from '../../workers/importRecord'
+import type { ImportMessage, ImportTask } from '../../importing/importTask'
 import { getUpload } from './describeUpload'
-import { startImportWorker, type RunningWorker } from './importWorker'
+import { runInThisThread, startImportWorker, type RunningWorker } from './importWorker'
 import { liveChunks } from './liveChunks'
 import { publishVersions } from './publishVersions'
 import { importJobKind, type ImportPayload } from './startImport'
@@ -18,6 +18,8 @@ export interface ImportRunnerParts {
   now: () => number
   /** Another worker than the product's own: for tests of its death. */
   workerFile?: URL
+  /** Import in this thread instead of a worker: for making the demo. */
+  isInThisThread?: boolean
 }
 
 export interface LiveImport { rows: number, fraction: number, startedAt: number }
@@ -77,7 +79,8 @@ export class ImportRunner {
     const upload = await getUpload(stores.read, payload.uploadId)
     const cancel = new Int32Array(new SharedArrayBuffer(4))
     let notedAt = now()
-    const worker = startImportWorker({ kind: 'import', dataDir, file: files.pathOf(upload.sha256), recipe: payload.recipe, mostBytes, cancel: cancel.buffer }, (progress) => {
+    const task: ImportTask = { kind: 'import', dataDir, file: files.pathOf(upload.sha256), recipe: payload.recipe, mostBytes, cancel: cancel.buffer }
+    const worker = this.parts.isInThisThread ? runInThisThread(task) : startImportWorker(task, (progress) => {
       const running = this.live.get(jobId)
       if (!running) return
       running.rows = progress.rows
@@ -140,7 +143,8 @@ export class ImportRunner {
 
   private async sweep(): Promise<void> {
     const { roots, refusals } = await liveChunks(this.parts.stores.read)
-    const worker = startImportWorker({ kind: 'sweep', dataDir: this.parts.dataDir, roots, refusals }, () => {})
+    const task: ImportTask = { kind: 'sweep', dataDir: this.parts.dataDir, roots, refusals }
+    const worker = this.parts.isInThisThread ? runInThisThread(task) : startImportWorker(task, () => {})
     await worker.ended.finally(worker.kill)
   }
 }
