@@ -78,8 +78,9 @@ const finders: Record<PlaceParam, Finder> = {
   },
 }
 
+/** A lab that was withdrawn while it was open stays in sight: its students are told so instead of finding nothing. */
 async function openSections(read: Read, labId: string, now: number): Promise<string[]> {
-  const rows = await read.selectFrom('posting').select('section_id').where('lab_id', '=', labId).where('state', '=', 'posted').where('opens_at', '<=', now).execute()
+  const rows = await read.selectFrom('posting').select('section_id').where('lab_id', '=', labId).where('state', 'in', ['posted', 'withdrawn']).where('opens_at', '<=', now).execute()
   return rows.map(row => row.section_id)
 }
 

@@ -1,5 +1,5 @@
 import { refuse } from '#shared/errors'
-import type { Trx } from '../writer'
+import type { Read, Trx } from '../writer'
 
 export interface Once { personId: string, key: string, route: string, bodySha256: Buffer, now: number }
 
@@ -8,14 +8,19 @@ export interface Once { personId: string, key: string, route: string, bodySha256
  * another body under the same key is refused.
  */
 export async function once<T>(trx: Trx, request: Once, work: () => Promise<T>): Promise<T> {
-  const earlier = await trx.selectFrom('request_key').selectAll().where('person_id', '=', request.personId).where('key', '=', request.key).executeTakeFirst()
-  if (earlier) {
-    if (earlier.route !== request.route || !earlier.body_sha256.equals(request.bodySha256)) refuse('request_key_reused')
-    return JSON.parse(earlier.response_json) as T
-  }
+  const earlier = await findAnswer<T>(trx, request)
+  if (earlier) return earlier.answer
   const answer = await work()
   await trx.insertInto('request_key').values({
     person_id: request.personId, key: request.key, route: request.route, body_sha256: request.bodySha256, status: 200, response_json: JSON.stringify(answer), at: request.now,
   }).execute()
   return answer
+}
+
+/** The answer that this request was given before, if it was; another body under its key is refused. */
+export async function findAnswer<T>(db: Read | Trx, request: Once): Promise<{ answer: T } | null> {
+  const earlier = await db.selectFrom('request_key').selectAll().where('person_id', '=', request.personId).where('key', '=', request.key).executeTakeFirst()
+  if (!earlier) return null
+  if (earlier.route !== request.route || !earlier.body_sha256.equals(request.bodySha256)) refuse('request_key_reused')
+  return { answer: JSON.parse(earlier.response_json) as T }
 }

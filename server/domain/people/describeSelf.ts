@@ -13,6 +13,7 @@ export async function describeSelf(read: Read, actor: Actor) {
         read.selectFrom('section').select(['id', 'name', 'course_id']).where('course_id', 'in', courseIds).orderBy('name').execute(),
       ])
   return {
+    id: actor.personId,
     name: actor.displayName,
     email: actor.email,
     courses: courses.map((course) => {

@@ -1,0 +1,49 @@
+import { refuse } from '#shared/errors'
+import { constantDefinitions } from '#shared/thermo/constants'
+import type { Work } from '#shared/schemas/work'
+import type { Read } from '../../db/writer'
+import { renderLabText } from '../labs/renderLabText'
+import type { LoadedShare } from '../shares/loadedShare'
+import { postedGround, readGround, type PostedGround } from './ground'
+import { listSubmissions } from './listSubmissions'
+import { closingOf, decideLateness, personalDue } from './lateness'
+import { readDrafts } from './readDrafts'
+
+/**
+ * Everything on a student's work page: the lab's text, the asks, the share's rows, what is saved and what was handed in.
+ * Nothing of it comes from the reference: no worked value, no band, no slip.
+ */
+export async function readWork(read: Read, loadShare: (shareId: string) => Promise<LoadedShare>, who: { membershipId: string, shareId: string }, now: number): Promise<Work> {
+  const ground = postedGround(await readGround(read, who.shareId, who.membershipId), now)
+  const loaded = await loadShare(who.shareId)
+  const [drafts, made, dataSet] = await Promise.all([
+    readDrafts(read, who.shareId),
+    listSubmissions(read, who.shareId),
+    read.selectFrom('data_set_version').innerJoin('data_set', 'data_set.id', 'data_set_version.data_set_id').select(['data_set.title', 'data_set_version.no']).where('data_set_version.id', '=', ground.dataSetVersionId).executeTakeFirst(),
+  ])
+  if (!dataSet) return refuse('not_found')
+  const { body } = loaded.revision
+  const closesAt = closingOf(ground)
+  const numberOf = new Map(body.steps.map((step, at) => [step.key, at + 1]))
+  return {
+    share: { id: who.shareId, no: loaded.share.ordinal + 1, lowM: loaded.share.item.lowM, highM: loaded.share.item.highM, leg: loaded.share.item.leg, dataSet: `${dataSet.title}, version ${dataSet.no}` },
+    lab: { id: ground.labId, title: ground.labTitle, revisionNo: loaded.revision.no, textHtml: renderLabText(body.text), maxMilli: body.steps.reduce((sum, step) => sum + step.pointsMilli, 0) },
+    convention: { title: loaded.convention.title, constants: constantDefinitions.flatMap(({ name, label, unit }) => loaded.convention.constants[name] === undefined ? [] : [{ name, label, unit, value: loaded.convention.constants[name] }]) },
+    opensAt: new Date(ground.opensAt).toISOString(), dueAt: new Date(personalDue(ground)).toISOString(), isOwnDue: personalDue(ground) > ground.dueAt, closesAt: closesAt === null ? null : new Date(closesAt).toISOString(),
+    zone: ground.zone, lateRule: ground.lateRule, attempts: ground.attempts, keep: ground.keep, feedback: ground.feedback, isReleased: ground.releasedAt !== null,
+    steps: body.steps.map((step, at) => ({
+      key: step.key, no: at + 1, title: step.title, ask: loaded.asks[step.key] ?? step.title, textHtml: step.text === '' ? '' : renderLabText(step.text), pointsMilli: step.pointsMilli, unit: step.unit, digits: step.digits,
+      from: [...new Set(Object.values(step.inputs).flatMap(source => source.from === 'step' ? numberOf.get(source.key) ?? [] : []))].sort((a, b) => a - b),
+    })),
+    rows: { times: [...loaded.rows.times], use: [...loaded.rows.use], columns: loaded.rows.columns.map(column => ({ name: column.name, quantity: column.quantity, unit: column.unit, texts: [...column.texts], values: [...column.values] })) },
+    drafts,
+    made,
+    stopped: stoppedBy(ground, now), now: new Date(now).toISOString(),
+  }
+}
+
+function stoppedBy(ground: PostedGround, now: number): Work['stopped'] {
+  if (ground.termState === 'closed' && (ground.allowedUntil ?? 0) < now) return 'term_closed'
+  if (decideLateness(ground, now).isClosed) return 'lab_closed'
+  return ground.attemptsMade >= ground.attempts ? 'attempts_used' : null
+}
