@@ -5,7 +5,7 @@ import { defineApiHandler } from '../utils/defineApiHandler'
 import { useStores } from '../utils/useStores'
 
 export const selfReply = z.object({
-  name: z.string(), email: z.string(),
+  id: z.string(), name: z.string(), email: z.string(),
   courses: z.array(z.object({
     id: z.string(), code: z.string(), title: z.string(), term: z.string(), termState: z.enum(['planned', 'running', 'closed']), zone: z.string(),
     role: z.enum(['lead', 'instructor', 'ta', 'student']), sections: z.array(z.object({ id: z.string(), name: z.string() })),

@@ -33,6 +33,8 @@ export interface Asked<Params, Query, Body> {
   /** The version in If-Match, where the route says `guards: true`. */
   seenVersion: number | null
   now: number
+  /** The instant at which the complete request had arrived: what lateness is decided from. */
+  receivedAt: number
   event: H3Event
 }
 
@@ -80,10 +82,11 @@ export function defineApiHandler<R extends z.ZodType, P extends z.ZodType | unde
       const params = readPart(route.params, rawParams, 'not_found')
       const query = readPart(route.query, singleValues(getQuery(event)))
       const { body, bodySha256 } = route.raw === 'body' || !route.body ? { body: undefined, bodySha256: emptyDigest } : await readJson(event, route.body)
+      const receivedAt = now()
       const request = route.makes ? { key: requestKeyOf(event), route: `${event.method} ${event.path.split('?')[0]}`, bodySha256 } : null
       const seenVersion = route.guards ? seenVersionOf(event) : null
       const result = await route.handle({
-        actor, acting, place, request, seenVersion, now: at, event,
+        actor, acting, place, request, seenVersion, now: at, receivedAt, event,
         params: params as Output<P, Record<string, never>>, query: query as Output<Q, Record<string, never>>, body: body as Output<B, undefined>,
       })
       setResponseHeader(event, 'Cache-Control', 'no-store')
