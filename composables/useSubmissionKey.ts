@@ -18,7 +18,7 @@ export function useSubmissionKey() {
     catch {
       // a damaged or forbidden storage: a new key
     }
-    const key = crypto.randomUUID()
+    const key = Array.from(crypto.getRandomValues(new Uint8Array(16)), byte => byte.toString(16).padStart(2, '0')).join('')
     try {
       localStorage.setItem(placeOf(shareId), JSON.stringify({ key, answers: said, firstAt: new Date().toISOString() }))
     }

@@ -1,26 +1,43 @@
-import type { AnswerTable, EvaluationTable, MarkTable, SubmissionTable } from '../../db/schema/tables'
+import { createHash } from 'node:crypto'
+import type { AnswerTable, EvaluationTable, MarkTable, RulingTable, SubmissionTable } from '../../db/schema/tables'
 import { digestOf } from './appendEntry'
 
 /**
- * Digests of the rows that an entry of the ledger covers. They are kept in the entry's facts as hex and computed again by `audit`:
- * a column that was changed behind the product's back no longer gives the digest that the chain holds.
+ * Digests of the rows that an entry of the ledger covers: one for each column, over all covered rows in order. They are kept in
+ * the entry's facts and computed again by `audit`: a value that was changed behind the product's back no longer gives the digest
+ * that the chain holds, and the column in which it stands has a name.
  * Left out are only the columns that point back at the entry, which are not known before it.
  */
+export type ColumnDigests = Readonly<Record<string, string>>
+
+type Unlinked<T> = Omit<T, 'ledger_chain' | 'ledger_seq'>
+
+/** A third of a SHA-256 is plenty for finding a column; the entry's own digest over all of them is whole. */
+const kept = 20
+
+function columnDigests<T extends object>(rows: readonly T[], columns: readonly (keyof T & string)[], key: (row: T) => string): ColumnDigests {
+  const inOrder = [...rows].sort((a, b) => (key(a) < key(b) ? -1 : key(a) > key(b) ? 1 : 0))
+  const keys = inOrder.map(key)
+  return Object.fromEntries(columns.map((column) => {
+    const values = inOrder.map((row, at) => [keys[at], plain(row[column])])
+    return [column, createHash('sha256').update(JSON.stringify(values)).digest('hex').slice(0, kept)]
+  }))
+}
+
+const plain = (value: unknown): unknown => Buffer.isBuffer(value) ? value.toString('hex') : value ?? null
 const hex = (bytes: Buffer | null): string | null => bytes?.toString('hex') ?? null
 
-export function submissionDigest(row: Omit<SubmissionTable, 'ledger_chain' | 'ledger_seq'>): string {
-  return digestOf({
-    id: row.id, seq: row.seq, share: row.share_id, attempt: row.attempt, by: row.by_membership_id, revision: row.lab_revision_id, receivedAt: row.received_at,
-    dueAt: row.due_at_applied, lateUnits: row.late_units, lateRule: row.late_rule_json, lateReason: row.late_reason, claimedSentAt: row.claimed_sent_at,
-    requestKey: row.request_key, body: hex(row.body_sha256), receipt: row.receipt_no,
-  }).toString('hex')
-}
+const submissionColumns = ['id', 'seq', 'share_id', 'attempt', 'by_membership_id', 'lab_revision_id', 'received_at', 'due_at_applied', 'late_units', 'late_rule_json', 'late_reason', 'claimed_sent_at', 'request_key', 'body_sha256', 'receipt_no'] as const
+const answerColumns = ['step_key', 'typed', 'reading', 'value_si', 'unit_ucum', 'digits', 'resolution_si', 'private_digest'] as const
+const evaluationColumns = ['id', 'step_key', 'reference_digest', 'convention_revision_id', 'data_set_version_id', 'lab_revision_id', 'inputs_json', 'carried_json', 'accepted_json', 'center_bits', 'low_bits', 'high_bits', 'parts_json', 'slips_json', 'trace_json', 'digest', 'outcome', 'refusal_code'] as const
+const markColumns = ['id', 'submission_id', 'step_key', 'version', 'points_milli', 'max_milli', 'evaluation_id', 'cause'] as const
+const rulingColumns = ['id', 'dispute_id', 'level', 'kind', 'reason', 'by_actor_id', 'at'] as const
 
-export function answersDigest(rows: readonly AnswerTable[]): string {
-  return digestOf(inOrder(rows, row => row.step_key).map(row => ({
-    step: row.step_key, typed: row.typed, reading: row.reading, valueSi: row.value_si, unit: row.unit_ucum, digits: row.digits, resolutionSi: row.resolution_si, private: hex(row.private_digest),
-  }))).toString('hex')
-}
+export const submissionDigest = (row: Unlinked<SubmissionTable>): ColumnDigests => columnDigests([row], submissionColumns, each => each.id)
+export const answersDigest = (rows: readonly AnswerTable[]): ColumnDigests => columnDigests(rows, answerColumns, row => `${row.submission_id} ${row.step_key}`)
+export const evaluationsDigest = (rows: readonly EvaluationTable[]): ColumnDigests => columnDigests(rows, evaluationColumns, row => row.id)
+export const marksDigest = (rows: readonly Unlinked<MarkTable>[]): ColumnDigests => columnDigests(rows, markColumns, row => `${row.submission_id} ${row.step_key} ${row.version}`)
+export const rulingDigest = (row: Unlinked<RulingTable>): ColumnDigests => columnDigests([row], rulingColumns, each => each.id)
 
 /** Of one evaluation: also the value of its own `digest` column. */
 export function evaluationDigest(row: Omit<EvaluationTable, 'id' | 'digest'>): Buffer {
@@ -29,20 +46,6 @@ export function evaluationDigest(row: Omit<EvaluationTable, 'id' | 'digest'>): B
     revision: row.lab_revision_id, inputs: row.inputs_json, carried: row.carried_json, accepted: row.accepted_json, center: hex(row.center_bits), low: hex(row.low_bits), high: hex(row.high_bits),
     parts: row.parts_json, slips: row.slips_json, trace: row.trace_json, outcome: row.outcome, refusal: row.refusal_code,
   })
-}
-
-export function evaluationsDigest(rows: readonly EvaluationTable[]): string {
-  return digestOf(inOrder(rows, row => `${row.step_key} ${row.id}`).map(row => ({ id: row.id, step: row.step_key, digest: evaluationDigest(row).toString('hex') }))).toString('hex')
-}
-
-export function marksDigest(rows: readonly Omit<MarkTable, 'ledger_chain' | 'ledger_seq'>[]): string {
-  return digestOf(inOrder(rows, row => `${row.step_key} ${row.version}`).map(row => ({
-    id: row.id, submission: row.submission_id, step: row.step_key, version: row.version, points: row.points_milli, max: row.max_milli, evaluation: row.evaluation_id, cause: row.cause,
-  }))).toString('hex')
-}
-
-function inOrder<T>(rows: readonly T[], key: (row: T) => string): T[] {
-  return [...rows].sort((a, b) => (key(a) < key(b) ? -1 : key(a) > key(b) ? 1 : 0))
 }
 
 /** How every entry that touches marks tells of them, in thousandths: what the ledger adds up to is the last `after` of each step. */

@@ -58,12 +58,12 @@ describe('a submission', () => {
     await make()
     const { submissionId, receipt } = await submit(0, 'key-00000001')
     const entry = await stores.read.selectFrom('ledger_entry').selectAll().where('chain_id', '=', receipt.ledger.chain).where('seq', '=', receipt.ledger.seq).executeTakeFirstOrThrow()
-    const facts = JSON.parse(entry.facts_json) as { covers: Record<string, string>, marks: { step: string, after: number }[] }
+    const facts = JSON.parse(entry.facts_json) as { covers: Record<string, Record<string, string>>, marks: { step: string, after: number }[] }
     const row = await stores.read.selectFrom('submission').selectAll().where('id', '=', submissionId).executeTakeFirstOrThrow()
     const marks = await stores.read.selectFrom('mark').selectAll().where('submission_id', '=', submissionId).execute()
-    expect(facts.covers.submission).toBe(submissionDigest(row))
-    expect(facts.covers.marks).toBe(marksDigest(marks))
-    expect(facts.covers.marks).not.toBe(marksDigest(marks.map(mark => mark.step_key === 'rate' ? { ...mark, points_milli: mark.points_milli - 1 } : mark)))
+    expect(facts.covers.submission).toEqual(submissionDigest(row))
+    expect(facts.covers.marks).toEqual(marksDigest(marks))
+    expect(facts.covers.marks).not.toEqual(marksDigest(marks.map(mark => mark.step_key === 'rate' ? { ...mark, points_milli: mark.points_milli - 1 } : mark)))
     expect(Object.fromEntries(facts.marks.map(mark => [mark.step, mark.after]))).toEqual(Object.fromEntries(marks.map(mark => [mark.step_key, mark.points_milli])))
     expect(receipt.digest).toBe(entry.digest.toString('hex'))
   })
