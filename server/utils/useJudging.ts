@@ -1,7 +1,7 @@
 import { loadShare } from '../domain/shares/loadShare'
 import type { LoadedShare } from '../domain/shares/loadedShare'
 import type { Judging } from '../domain/submissions/submitLab'
-import { useObservations } from './useObservations'
+import { useObservations } from './useImports'
 import { useReference } from './useReference'
 import { useStores } from './useStores'
 

@@ -1,4 +1,5 @@
 import type { SubmissionReply } from '#shared/schemas/work'
+import type { Once } from '../../db/queries/requestKeys'
 import type { AnswerTable, MarkTable, SubmissionTable } from '../../db/schema/tables'
 import type { Trx } from '../../db/writer'
 import { newId } from '../ids'
@@ -9,7 +10,16 @@ import { queueNotice } from '../notices/queueNotice'
 import type { LoadedShare } from '../shares/loadedShare'
 import type { PostedGround } from './ground'
 import type { DecidedLateness } from './lateness'
-import type { SubmitLab } from './submitLab'
+
+/** What a student hands in, and under which request key. */
+export interface SubmitLab {
+  personId: string
+  membershipId: string
+  shareId: string
+  request: Omit<Once, 'personId' | 'now'>
+  answers: Readonly<Record<string, string>>
+  claimedSentAt: number | null
+}
 
 export interface NewSubmission {
   ground: PostedGround

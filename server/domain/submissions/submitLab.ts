@@ -7,16 +7,9 @@ import type { Reference } from '../marking/reference'
 import type { LoadedShare } from '../shares/loadedShare'
 import { isSameGround, postedGround, readGround, type PostedGround } from './ground'
 import { decideLateness } from './lateness'
-import { insertSubmission } from './insertSubmission'
+import { insertSubmission, type SubmitLab } from './insertSubmission'
 
-export interface SubmitLab {
-  personId: string
-  membershipId: string
-  shareId: string
-  request: Omit<Once, 'personId' | 'now'>
-  answers: Readonly<Record<string, string>>
-  claimedSentAt: number | null
-}
+export type { SubmitLab }
 
 /** What judging needs beside the database: the build that judges, and the share with its rows. */
 export interface Judging {
