@@ -88,7 +88,7 @@ export function startRunner({ stores, handlers, now, atOnce = 2, pollMs = 1000, 
     turning = turn().catch(() => {}).finally(() => { turning = undefined })
   }
 
-  void releaseLeftOvers(stores, now()).catch(() => {}).finally(() => {
+  void releaseLeftOvers(stores, Object.keys(handlers), now()).catch(() => {}).finally(() => {
     wake()
     if (!isStopping) timer = setInterval(wake, pollMs)
   })
