@@ -20,7 +20,7 @@ export const layersOf = (versionId: string, bounds: readonly (readonly [number, 
 
 /** In the inversion of the early flights; in what floats of it on the middle ones; above it, where the residual layer ends under the cap. */
 export const layers = {
-  inversion: [[0, 80], [0, 100], [10, 100], [10, 120], [20, 110], [20, 90]],
-  deep: [[10, 210], [20, 260], [40, 300], [60, 280], [100, 340], [120, 380]],
-  floating: [[60, 120], [65, 130], [60, 130], [70, 125]],
+  inversion: [[0, 80], [0, 100], [10, 120], [20, 110], [20, 90]],
+  deep: [[10, 210], [20, 260], [40, 300], [100, 340]],
+  floating: [[60, 120], [65, 130], [70, 125]],
 } as const

@@ -1,4 +1,4 @@
-/** Where the invented department stands: a river town on the plains. No such town, hall or field exists. */
+/** Where the invented department stands: a town on a ridge above a river. No such town, hall or field exists. */
 export interface Place {
   station: string
   field: string
@@ -17,6 +17,6 @@ export const place: Place = {
   zone: 'America/Chicago',
   latitude: 43.86,
   longitude: -91.42,
-  fieldElevationM: 214,
-  barometerElevationM: 236,
+  fieldElevationM: 392,
+  barometerElevationM: 414,
 }

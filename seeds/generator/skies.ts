@@ -27,7 +27,7 @@ export function skyOver(span: { from: number, to: number }, clearDays: readonly 
     const settlesAtC = seasonalMean(midnight) + 1.5 + 3.6 * memory.air
     anchors.push({
       settlesAtC, sunWarmingK: 10, dewpointC: settlesAtC - 6.6 - 1.2 * Math.abs(memory.cloud), trendHpaPerDay: 0,
-      pressureHpa: 986 + 5 * memory.pressure - 1.4 * memory.air + (isClear ? 4 : 0),
+      pressureHpa: 964.5 + 5 * memory.pressure - 1.4 * memory.air + (isClear ? 4 : 0),
       windMs: isClear ? 2.1 : 3 + 1.1 * Math.abs(memory.turn), windFromDeg: 235 + 40 * memory.turn,
       cloud: isClear ? 0.04 : Math.min(1, Math.max(0.05, 0.5 + 0.33 * memory.cloud)),
     })

@@ -7,8 +7,10 @@ const words = [
   'pillar', 'quarry', 'quiver', 'ribbon', 'saddle', 'shingle', 'sparrow', 'spruce', 'thimble', 'timber', 'turnip', 'velvet', 'walnut', 'willow', 'window', 'wicker',
 ] as const
 
-/** The passphrase of one of the demo's people: four words and a number, made from the demo's secret, which each installation draws for itself. */
+/** The passphrase of one of the demo's people: four different words and a number, made from the demo's secret, which each installation draws for itself. */
 export function demoPassphrase(secret: string, email: string): string {
   const drawn = createHmac('sha256', secret).update(email).digest()
-  return [0, 1, 2, 3].map(at => words[(drawn[at] ?? 0) % words.length]).join('-') + `-${10 + (drawn[4] ?? 0) % 90}`
+  const left: string[] = [...words]
+  const taken = [0, 1, 2, 3].flatMap(at => left.splice((drawn[at] ?? 0) % left.length, 1))
+  return `${taken.join('-')}-${10 + (drawn[4] ?? 0) % 90}`
 }
