@@ -45,6 +45,14 @@ export async function openDatabase(dataDir: string, onFailedSync?: (error: unkno
   }
 }
 
+/** Opens `main.db` for a command that only reads, also beside a running server. Nothing is migrated. */
+export function openForReading(dataDir: string): { read: Kysely<Database>, close: () => Promise<void> } {
+  const reading = new SQLite(join(dataDir, 'main.db'), { readonly: true, fileMustExist: true })
+  for (const pragma of readingPragmas) reading.pragma(pragma)
+  const read = new Kysely<Database>({ dialect: new SqliteDialect({ database: reading }) })
+  return { read, close: () => read.destroy() }
+}
+
 /** Brings the schema up to date, or refuses a database that a newer version made. */
 export async function migrate(connection: Kysely<Database>): Promise<void> {
   const migrator = new Migrator({ db: connection, provider: { getMigrations: async () => migrations } })

@@ -86,6 +86,7 @@ export const policies = {
   'dispute:open': { scope: 'own', roles: ['student'], openTerm: true },
   'dispute:list': { scope: 'course', roles: everyone },
   'dispute:read': { scope: 'own', roles: everyone, hides: { student: ['likeCases', 'staffNotes'] } },
+  'dispute:withdraw': { scope: 'own', roles: ['student'], openTerm: true },
   'dispute:take': { scope: 'section', roles: staff, openTerm: true },
   'dispute:rule': { scope: 'section', roles: staff, openTerm: true },
   'dispute:file': { scope: 'own', roles: everyone },
