@@ -1,4 +1,5 @@
 import { refuse } from '#shared/errors'
+import { once, type Once } from '../../db/queries/requestKeys'
 import type { Stores } from '../../db/writer'
 import type { FileStore } from '../../files/store'
 import { newId } from '../ids'
@@ -8,7 +9,7 @@ import { disputeGround } from './disputeGround'
 /** A photograph or a scan of working fits; a data file belongs elsewhere. */
 export const largestDisputeFile = 10 * 1_048_576
 
-export interface AttachFile { disputeId: string, actorId: string, isStudent: boolean, name: string, body: AsyncIterable<Uint8Array>, expectedBytes?: number }
+export interface AttachFile { disputeId: string, actorId: string, name: string, body: AsyncIterable<Uint8Array>, expectedBytes?: number, request: Omit<Once, 'bodySha256'> }
 
 /**
  * Adds a file to a dispute. It is kept as it came, by its digest, and is only ever handed out for download.
@@ -20,23 +21,24 @@ export async function attachFile({ write }: Stores, files: FileStore, input: Att
     await received.discard()
     return refuse('file_empty')
   }
+  const reply = { digest: received.sha256.toString('hex'), size: received.size }
   try {
     await received.keep()
-    await write(async (trx) => {
+    return await write(trx => once(trx, { ...input.request, bodySha256: received.sha256 }, async () => {
       const ground = await disputeGround(trx, input.disputeId)
       if (ground.state === 'ruled' || ground.state === 'closed' || ground.state === 'withdrawn') refuse('dispute_closed')
       const about = ground.studentIds.includes(input.actorId) ? input.actorId : ground.studentIds[0] ?? refuse('not_found')
       await trx.insertInto('work_file').values({ digest: received.sha256, about_membership_id: about, size: received.size, original_name: input.name }).onConflict(conflict => conflict.column('digest').doNothing()).execute()
       const privateDigest = await keepPrivateText(trx, about, `Added a file: ${input.name}`)
       await trx.insertInto('dispute_note').values({ id: newId(now), dispute_id: ground.id, by_actor_id: input.actorId, audience: 'all', private_digest: privateDigest, file_digest: received.sha256, at: now }).execute()
-      await appendEntry(trx, { chain: courseChain(ground.courseId), at: now, actor: input.actorId, action: 'dispute.file_added', privateDigest, facts: { dispute: ground.id, file: received.sha256.toString('hex'), size: received.size } })
-    })
+      await appendEntry(trx, { chain: courseChain(ground.courseId), at: now, actor: input.actorId, action: 'dispute.file_added', privateDigest, facts: { dispute: ground.id, file: reply.digest, size: reply.size } })
+      return reply
+    }))
   }
   catch (error) {
     await received.discard()
     throw error
   }
-  return { digest: received.sha256.toString('hex'), size: received.size }
 }
 
 /** A file of this dispute by its digest; another dispute's is not there. */
