@@ -14,8 +14,7 @@ import type { Judging } from '../../../server/domain/submissions/submitLab'
 import { addTas } from '../../fixtures/courseWithTas'
 import { openTemporary } from '../../fixtures/openTemporary'
 import { referenceIn } from '../../fixtures/reference'
-import { handIn, rateOf, rightAnswers } from '../../fixtures/submitting'
-import { bodyDigest } from '../../fixtures/submitting'
+import { handIn, rateOf, rightAnswers, bodyDigest } from '../../fixtures/submitting'
 import { workingCourse, type WorkingCourse } from '../../fixtures/workingCourse'
 
 const onTime = Date.parse('2026-10-15T20:00:00Z')
