@@ -49,7 +49,7 @@ export async function openDatabase(dataDir: string, onFailedSync?: (error: unkno
 export function openForReading(dataDir: string): { read: Kysely<Database>, close: () => Promise<void> } {
   const reading = new SQLite(join(dataDir, 'main.db'), { readonly: true, fileMustExist: true })
   for (const pragma of readingPragmas) reading.pragma(pragma)
-  const read = new Kysely<Database>({ dialect: new SqliteDialect({ database: reading }) })
+  const read = new Kysely<Database>({ dialect: new HouseDialect({ database: reading }) })
   return { read, close: () => read.destroy() }
 }
 
