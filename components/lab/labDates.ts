@@ -10,10 +10,3 @@ export function proposeLocal(now: Date, zone: string, days: number, time: string
   const parts = new Intl.DateTimeFormat('en-CA', { year: 'numeric', month: '2-digit', day: '2-digit', timeZone: zone }).format(new Date(now.getTime() + days * 86_400_000))
   return `${parts}T${time}`
 }
-
-export const lateRuleWords: Record<string, string> = {
-  none: 'Late work is kept and earns nothing unless you accept it.',
-  open: 'No loss until the closing day.',
-  of_earned: 'A part of what was earned is lost for each started day, until the closing day.',
-  of_maximum: 'A part of the lab’s maximum is lost for each started day, until the closing day.',
-}

@@ -20,6 +20,8 @@ export interface InputDefinition {
   /** Inclusive, in SI. */
   range: readonly [number, number]
   isOptional?: true
+  /** Enters no value, only what a slip would give: an ask does not name it. */
+  isForSlips?: true
   /** What a series must satisfy: a fit needs no order, an integration does. */
   needs?: { least: number, order?: 'none' | 'ascending' | 'descending' }
   /** A student's own earlier value that is at most this far from zero makes the rest trivial (a lapse rate of 0) and is not carried. */

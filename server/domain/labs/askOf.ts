@@ -34,7 +34,7 @@ export function askOf(step: NumberStep, definition: QuantityDefinition, conventi
   return [
     sentence(definition.ask),
     methodOf(step, definition, convention),
-    ...definition.inputs.flatMap(input => inputOf(step.inputs[input.name], input, titles, share)),
+    ...definition.inputs.filter(input => !input.isForSlips).flatMap(input => inputOf(step.inputs[input.name], input, titles, share)),
     share ? boundsOf(share, step) : generalBounds(step),
     constantsOf(definition, convention, step),
     answerOf(step, definition),
@@ -103,11 +103,14 @@ function constantsOf(definition: QuantityDefinition, convention: Convention, ste
   return listed.length === 0 ? '' : `Constants (${convention.title}): ${listed.join(', ')}.`
 }
 
-/** "cp = 1004 J kg⁻¹ K⁻¹"; null where the convention does not set it. */
+/** "cp = 1004 J kg⁻¹ K⁻¹", "p₀ = 1000 hPa"; null where the convention does not set it. */
 export function constantWords(name: string, value: number | undefined): string | null {
   if (value === undefined) return null
+  if (name === 'p0') return `p₀ = ${decimal(value / 100)} hPa`
+  if (name === 'zeroCelsius') return `0 °C = ${decimal(value)} K`
+  if (name === 'neutralTolerance') return `neutral within ${decimal(Number((value * 1000).toPrecision(6)))} K km⁻¹ of Γd`
   const unit = formatUnit(constantDefinitions.find(definition => definition.name === name)?.unit ?? '1')
-  return `${name} = ${decimal(value)}${unit === '' ? '' : ` ${unit}`}`
+  return `${name === 'kappa' ? 'κ' : name} = ${decimal(value)}${unit === '' ? '' : ` ${unit}`}`
 }
 
 function answerOf(step: NumberStep, definition: QuantityDefinition): string {

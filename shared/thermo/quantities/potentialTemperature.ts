@@ -34,7 +34,7 @@ export const potentialTemperatureDefinition: QuantityDefinition = {
   inputs: [
     { name: 'pressure', label: 'pressure', symbol: 'p', unit: 'Pa', shownUnit: 'hPa', kind: 'ratio', shape: 'number', range: [1000, 120_000] },
     { name: 'temperature', label: 'air temperature', symbol: 'T', unit: 'K', shownUnit: 'Cel', kind: 'temperature', shape: 'number', range: [150, 400] },
-    { name: 'stationPressure', label: 'station pressure, for the slip of taking it for 1000 hPa', symbol: 'p_s', unit: 'Pa', shownUnit: 'hPa', kind: 'ratio', shape: 'number', range: [40_000, 120_000], isOptional: true },
+    { name: 'stationPressure', label: 'station pressure, to know the slip of taking it for 1000 hPa', symbol: 'p_s', unit: 'Pa', shownUnit: 'hPa', kind: 'ratio', shape: 'number', range: [40_000, 120_000], isOptional: true, isForSlips: true },
   ],
   variants: [{
     key: 'poisson',
