@@ -91,12 +91,16 @@ export function readDraft(draft: LabDraft): ReadDraft {
   return { body: null, problems: read.error.issues.map(issue => ({ path: issue.path.join('.'), message: wordsOf(issue) })) }
 }
 
+const choices: Readonly<Record<string, string>> = { title: 'Give it a title.', quantity: 'Choose a quantity.', unit: 'Choose a unit.', versionId: 'Choose a flight.', column: 'Choose a column.', name: 'Choose a constant.' }
+const numbers = ['lowM', 'highM', 'value', 'digits', 'absolute', 'relative']
+
 function wordsOf(issue: { code?: string, message: string, path: PropertyKey[] }): string {
   const field = String(issue.path.at(-1))
-  if (issue.code === 'invalid_type' && ['lowM', 'highM', 'value', 'digits', 'pointsMilli', 'slipMilli', 'absolute', 'relative'].includes(field)) return 'A number, such as 100 or 0.5.'
-  if (field === 'key') return 'A short name in small letters, digits and hyphens, beginning with a letter.'
-  if (field === 'title' && issue.code === 'too_small') return 'Give it a title.'
   if (field === 'pointsMilli' || field === 'slipMilli') return 'Marks from 0 to 1000, at most three decimals.'
+  if (field === 'digits') return 'A whole number from 1 to 10.'
+  if (issue.code === 'invalid_type' && numbers.includes(field)) return 'A number, such as 100 or 0.5.'
+  if (field === 'key' && issue.path.includes('inputs')) return 'Choose a step.'
+  if (issue.code === 'too_small' || issue.code === 'invalid_type') return choices[field] ?? issue.message
   return issue.message
 }
 

@@ -26,7 +26,6 @@ export function useLabEditor(lab: Ref<EditedLab>) {
       const told = await $fetch<Preview>(`/api/labs/${lab.value.id}/preview`, { method: 'POST', body: { text: draft.value.text.slice(0, 40_000), body: read.value.body } })
       if (mine !== asked) return
       preview.value = read.value.body ? told : { ...preview.value, html: told.html }
-      if (failure.value === 'preview') failure.value = null
     }
     catch {
       // the next key asks again; keeping says what is wrong
