@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { inputSource, labBody, lateRule, leg } from './lab'
+import { heightBar } from './marks'
 
 /** Answers of the lab routes. Rows count epoch milliseconds; JSON says ISO 8601 with Z: the one converter of these routes is here. */
 const instant = z.number().transform(at => new Date(at).toISOString()).pipe(z.string())
@@ -34,15 +35,9 @@ export const labEditReply = z.object({
   })),
 })
 
-const bandReply = z.object({
-  unit: z.string(), low: z.number(), center: z.number(), high: z.number(), lowText: z.string(), highText: z.string(), value: z.null(), digits: z.number(),
-  parts: z.array(z.object({ key: z.enum(['granted', 'formulae', 'rounding', 'carried', 'reading', 'accepted']), label: z.string(), below: z.number(), above: z.number() })),
-  ghosts: z.array(z.object({ label: z.string(), value: z.number() })),
-})
-
 export const checkedStepReply = z.object({
   key: z.string(), title: z.string(), ok: z.boolean(), code: z.string().nullable(), reason: z.string().nullable(), ask: z.string(),
-  outcome: z.string(), words: z.string(), unit: z.string(), band: bandReply.nullable(),
+  outcome: z.string(), words: z.string(), unit: z.string(), band: heightBar.nullable(),
   trace: z.array(z.object({ text: z.string(), formulaHtml: z.string(), filledHtml: z.string() })),
 })
 export const checkedShareReply = z.object({

@@ -1,18 +1,19 @@
 import { DomainError, type FieldProblem } from '#shared/errors'
 import { judgeStep } from '#shared/marking/judge'
 import { checkBand } from '#shared/marking/proof'
-import type { Judgement, ReadAnswer } from '#shared/marking/types'
+import type { Band, Judgement, ReadAnswer } from '#shared/marking/types'
 import type { NumberStep, SupplyItem } from '#shared/schemas/lab'
+import type { HeightBar } from '#shared/schemas/marks'
 import { findQuantity } from '#shared/thermo/registry'
 import { formatUnit } from '#shared/units/formatQuantity'
 import type { Read } from '../../db/writer'
 import type { Observations } from '../../observations/chunks'
 import { legNames } from '../shares/legs'
+import { heightBarOf, shownScale } from '../marking/heightBar'
 import { askedQuestion } from '../shares/questionFor'
 import { bindingProblems } from './bindingProblems'
 import { prepareLab, type PreparedLab } from './prepareLab'
 import { renderInline } from './renderLabText'
-import { shownBand, type ShownBand } from './shownBand'
 
 export interface CheckedStep {
   key: string
@@ -25,7 +26,7 @@ export interface CheckedStep {
   /** The reference's answer in words: "6.48 K km⁻¹", "stable", "not defined". */
   words: string
   unit: string
-  band: ShownBand | null
+  band: HeightBar | null
   trace: { text: string, formulaHtml: string, filledHtml: string }[]
 }
 export interface CheckedShare { no: number, title: string, versionId: string, leg: SupplyItem['leg'], lowM: number, highM: number, used: number, rows: number, steps: CheckedStep[] }
@@ -82,16 +83,22 @@ function checkStep(step: NumberStep, ask: string, asked: ReturnType<typeof asked
   const { ok, reasons } = checkBand(asked.question)
   return {
     ...bare, ok, code: ok ? null : judgement.outcome === 'value' ? 'band_too_wide' : 'share_degenerate', reason: ok ? null : reasons.join(' '), outcome: judgement.outcome, words: wordsOf(step, judgement),
-    band: judgement.band ? shownBand(judgement.band, step.digits, judgement.slipValues) : null,
+    band: judgement.band ? barWithSlips(judgement.band, judgement.slipValues) : null,
     trace: judgement.trace.map(line => ({ text: line.text, formulaHtml: texLine(line.formula), filledHtml: texLine(line.filled) })),
   }
+}
+
+/** The band as it is drawn, with the value of every slip that can be made here beside it. */
+function barWithSlips(band: Band, slips: Judgement['slipValues']): HeightBar {
+  const shown = shownScale(band)
+  return { ...heightBarOf(band, { decimal: null }), ghosts: slips.map(slip => ({ label: slip.label, value: shown(slip.value) })) }
 }
 
 const texLine = (formula: string): string => formula === '' ? '' : renderInline(`$${formula}$`)
 
 function wordsOf(step: NumberStep, judgement: Judgement): string {
   if (judgement.band) {
-    const shown = shownBand(judgement.band, step.digits, [])
+    const shown = heightBarOf(judgement.band, { decimal: null })
     const unit = formatUnit(step.unit)
     return `${shown.center.toFixed(shown.digits).replace('-', '−')}${unit === '' ? '' : ` ${unit}`}`
   }

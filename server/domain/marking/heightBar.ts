@@ -5,7 +5,7 @@ import type { HeightBar, JudgedAs } from '#shared/schemas/marks'
  * A band in the unit of its step, for drawing. Its edges are stored in both units, and every conversion is affine,
  * so the two edges carry the others over.
  */
-function shownScale(band: Band): (valueSi: number) => number {
+export function shownScale(band: Band): (valueSi: number) => number {
   const low = Number(band.lowDecimal)
   const high = Number(band.highDecimal)
   const perSi = band.high === band.low ? 1 : (high - low) / (band.high - band.low)
