@@ -47,7 +47,12 @@ const nextAuth = NuxtAuthHandler({
         if (!event) throw new Error('A sign-in without a request.')
         const email = String(given?.email ?? '')
         const address = addressOf(event)
-        const signedIn = await signIn(useStores(), useLimits(), { email, passphrase: String(given?.password ?? ''), address, browser: knownBrowser(event, email) }, now())
+        const signedIn = await signIn(useStores(), useLimits(), { email, passphrase: String(given?.password ?? ''), address, browser: knownBrowser(event, email) }, now()).catch((error: unknown) => {
+          // next-auth writes what is thrown into an address: only our own codes may stand there.
+          if (error instanceof DomainError) throw error
+          logLine('error', { event: 'sign-in failed', request: event.context.requestId, stack: error instanceof Error ? error.stack : String(error) })
+          throw new DomainError('failed')
+        })
         logLine('info', { event: signedIn ? 'signed in' : 'sign-in refused', person: signedIn?.personId ?? null, address })
         if (!signedIn) return null
         markBrowser(event, email)

@@ -1,5 +1,6 @@
 import type { Read } from '../../db/writer'
 import type { Actor } from './actor'
+import { heldSessions } from './heldSessions'
 import { sessionLimits } from './sessionLimits'
 
 export interface LiveSession { personId: string, displayName: string, email: string, seenAt: number }
@@ -15,10 +16,17 @@ export async function findSession(read: Read, tokenSha256: Buffer, now: number):
   const session = await read.selectFrom('session').innerJoin('person', 'person.id', 'session.person_id')
     .select(['person.id as personId', 'person.display_name as displayName', 'person.email_norm as email', 'person.state as state', 'person.credential_epoch as epoch',
       'session.credential_epoch as sessionEpoch', 'session.ends_at as endsAt', 'session.ended_at as endedAt', 'session.seen_at as seenAt'])
-    .where('session.token_sha256', '=', tokenSha256).executeTakeFirst()
+    .where('session.token_sha256', '=', tokenSha256).executeTakeFirst() ?? await findHeld(read, tokenSha256)
   if (!session || session.state !== 'active' || session.endedAt !== null || session.endsAt <= now || session.epoch !== session.sessionEpoch) return null
   if (session.seenAt + sessionLimits().idleMs <= now) return null
   return { personId: session.personId, displayName: session.displayName ?? '', email: session.email ?? '', seenAt: session.seenAt }
+}
+
+async function findHeld(read: Read, tokenSha256: Buffer) {
+  const held = heldSessions.find(tokenSha256)
+  if (!held) return undefined
+  const person = await read.selectFrom('person').select(['id as personId', 'display_name as displayName', 'email_norm as email', 'state', 'credential_epoch as epoch']).where('id', '=', held.personId).executeTakeFirst()
+  return person && { ...person, sessionEpoch: held.credentialEpoch, endsAt: held.endsAt, endedAt: null, seenAt: held.seenAt }
 }
 
 export async function loadRoles(read: Read, session: LiveSession, tokenSha256: Buffer, now: number): Promise<Actor> {

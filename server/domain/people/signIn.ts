@@ -1,5 +1,7 @@
 import { createHash, randomBytes } from 'node:crypto'
+import { isOutOfRoom } from '../../db/dialect'
 import type { Stores } from '../../db/writer'
+import { heldSessions } from './heldSessions'
 import { normalEmail } from './normalEmail'
 import { matchesPassphrase, matchNothing } from './passphrase'
 import { sessionLimits } from './sessionLimits'
@@ -31,9 +33,16 @@ export async function signIn({ read, write }: Stores, limits: SignInLimits, give
   })
   if (!right) return null
   const token = randomBytes(32).toString('base64url')
-  await write(trx => trx.insertInto('session').values({
-    token_sha256: createHash('sha256').update(token).digest(), person_id: right.id, credential_epoch: right.credential_epoch,
-    created_at: now, seen_at: now, ends_at: now + sessionLimits().longestMs, ended_at: null, ended_why: null,
-  }).execute())
+  const tokenSha256 = createHash('sha256').update(token).digest()
+  const endsAt = now + sessionLimits().longestMs
+  try {
+    await write(trx => trx.insertInto('session').values({
+      token_sha256: tokenSha256, person_id: right.id, credential_epoch: right.credential_epoch, created_at: now, seen_at: now, ends_at: endsAt, ended_at: null, ended_why: null,
+    }).execute())
+  }
+  catch (error) {
+    if (!isOutOfRoom(error)) throw error
+    heldSessions.hold(tokenSha256, { personId: right.id, credentialEpoch: right.credential_epoch, createdAt: now, seenAt: now, endsAt })
+  }
   return { personId: right.id, displayName: right.display_name ?? '', email, token }
 }

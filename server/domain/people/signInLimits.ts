@@ -21,7 +21,7 @@ export interface SignInLimits {
    */
   attempt: <T>(who: Trying, judge: () => Promise<T | null>) => Promise<T | null>
   /** The owner proved to hold the mailbox: every count against the account ends. */
-  clearAccount: (account: string) => Promise<void>
+  clearAccount: (who: { account: string, address: string, browser: string | null }) => Promise<void>
   askReset: (who: { account: string, address: string }) => Promise<{ waitS: number | null, isOneTooMany: boolean }>
 }
 
@@ -70,7 +70,11 @@ export function signInLimits(counters: Counters): SignInLimits {
       }
       return null
     }),
-    clearAccount: name => account.clear(keyOf(name)),
+    async clearAccount({ account: name, address: from, browser }) {
+      await account.clear(keyOf(name))
+      await place.clear(keyOf(name, `address ${from}`))
+      if (browser !== null) await place.clear(keyOf(name, `browser ${browser}`))
+    },
     async askReset(who) {
       const waitS = await resetsOfAddress.take(keyOf(who.address))
       if (waitS !== null) return { waitS, isOneTooMany: true }

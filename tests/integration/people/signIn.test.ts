@@ -86,8 +86,9 @@ describe('the limits of signing in', () => {
     expect(await attempt('ada@department.example', goodPassphrase, '10.0.0.1')).toBe('too_many_requests')
     expect(await attempt('ada@department.example', goodPassphrase, '10.0.0.77')).toBe('too_many_requests') // a new browser: guessing from everywhere is over for today
     expect(await attempt('ada@department.example', goodPassphrase, '10.0.0.1', 'her own browser')).toBe('in')
-    await limits.clearAccount('ada@department.example') // what a reset by mail does
+    await limits.clearAccount({ account: 'ada@department.example', address: '10.0.0.1', browser: null }) // what a reset by mail does
     expect(await attempt('ada@department.example', goodPassphrase, '10.0.0.77')).toBe('in')
+    expect(await attempt('ada@department.example', goodPassphrase, '10.0.0.1')).toBe('in')
   })
 
   it('remembers the count over a restart and holds no address in clear', async () => {
@@ -128,6 +129,19 @@ describe('a session', () => {
       await stores.write(async () => {})
     }
     expect(await resumeSession(stores, token, start + 12 * hour)).toBeNull()
+  })
+
+  it('is held in memory where the disk is full, so that signing in and reading go on, and ends like any other', async () => {
+    await addPerson(stores, { email: 'ada@department.example' }, start)
+    const full = { read: stores.read, write: () => Promise.reject(Object.assign(new Error('database or disk is full'), { code: 'SQLITE_FULL' })) }
+    const signedIn = await signIn(full, limits, { email: 'ada@department.example', passphrase: goodPassphrase, address: '10.0.0.1', browser: null }, start)
+    const token = createHash('sha256').update(signedIn!.token).digest()
+    expect((await resumeSession(full, token, start + hour))?.email).toBe('ada@department.example')
+    expect(await loadActor(stores.read, token, start + 8 * hour)).not.toBeNull()
+    expect(await loadActor(stores.read, token, start + 9 * hour)).toBeNull()
+    await endAllSessions(stores, signedIn!.personId, 'signed out everywhere', start)
+    expect(await loadActor(stores.read, token, start + hour)).toBeNull()
+    await expect(signIn({ read: stores.read, write: () => Promise.reject(new Error('something else')) }, limits, { email: 'ada@department.example', passphrase: goodPassphrase, address: '10.0.0.1', browser: null }, start)).rejects.toThrow('something else')
   })
 
   it('ends with the account’s closing, and with signing out everywhere', async () => {
