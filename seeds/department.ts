@@ -12,9 +12,13 @@ import { endMembership, setTaSections } from '../server/domain/terms/memberships
 import { planTerm } from '../server/domain/terms/rollOver/planTerm'
 import { startTerm } from '../server/domain/terms/rollOver/startTerm'
 import { setTermState } from '../server/domain/terms/setTermState'
+import type { Acting } from '../server/domain/people/actor'
 import type { Stores } from '../server/db/writer'
 import type { DemoCalendar } from './calendar'
 import { emailOf, staff, type SeedPerson } from './people'
+
+/** A student of a course, as the demo's stories name them. */
+export interface Member { key: string, membershipId: string, personId: string, sectionId: string }
 
 export const lateRules = {
   earned: { kind: 'of_earned', percent: 10, closesAfterDays: 7 },
@@ -53,7 +57,7 @@ export class Department {
   /** People follow the link in their mail and choose a passphrase. */
   async acceptAll(seeds: readonly SeedPerson[], now: number): Promise<void> {
     const waiting = await this.stores.read.selectFrom('person').select('id').where('state', '=', 'invited').execute()
-    await Promise.all(seeds.filter(seed => waiting.some(person => person.id === this.personId(seed))).map(seed => this.accept(seed, now)))
+    await Promise.all(seeds.filter(seed => this.people.has(seed.key)).filter(seed => waiting.some(person => person.id === this.personId(seed))).map(seed => this.accept(seed, now)))
   }
 
   private async accept(seed: SeedPerson, now: number): Promise<void> {
@@ -125,8 +129,8 @@ export class Department {
     await enrol(this.stores, { ...this.admin, courseId, enrolment: { role: 'ta', personId: this.personId(seed), sectionIds } }, now)
   }
 
-  /** Between the terms one TA leaves and two come; the one who stays takes a section together with a new one. */
-  async changeTas(termId: string, now: number): Promise<void> {
+  /** Between the terms one TA goes over to the smaller course and two come; the one who stays takes both sections beside the new ones. */
+  async changeStaff(termId: string, now: number): Promise<void> {
     const { id: courseId, sections } = await this.course(termId, 'main')
     const [a, b] = sections.map(section => section.id)
     if (a === undefined || b === undefined) throw new Error('The main course has two sections.')
@@ -134,11 +138,33 @@ export class Department {
     await this.addTa(courseId, staff.ta, [a], now)
     await this.addTa(courseId, staff.otherTa, [b], now)
     await setTaSections(this.stores, { ...this.admin, membershipId: await this.membershipId(courseId, staff.taAndStudent), sectionIds: [a, b] }, now)
+    const small = await this.course(termId, 'small')
+    await this.addTa(small.id, staff.formerTa, small.sections.map(section => section.id), now)
   }
 
   /** Somebody's membership of a course: in whose name they act there. */
   async membershipId(courseId: string, seed: SeedPerson): Promise<string> {
     const row = await this.stores.read.selectFrom('membership').select('id').where('course_id', '=', courseId).where('person_id', '=', this.personId(seed)).executeTakeFirstOrThrow()
     return row.id
+  }
+
+  /** Students of a course who are there at this moment, in the order of the roster. */
+  async members(courseId: string, seeds: readonly SeedPerson[]): Promise<Member[]> {
+    const rows = await this.stores.read.selectFrom('membership').select(['id', 'person_id as personId', 'section_id as sectionId']).where('course_id', '=', courseId).where('role', '=', 'student').where('state', '=', 'active').execute()
+    return seeds.flatMap((seed) => {
+      const row = rows.find(known => known.personId === this.people.get(seed.key))
+      return row && row.personId !== null && row.sectionId !== null ? [{ key: seed.key, membershipId: row.id, personId: row.personId, sectionId: row.sectionId }] : []
+    })
+  }
+
+  async drop(courseId: string, seed: SeedPerson, now: number): Promise<void> {
+    await endMembership(this.stores, { ...this.admin, membershipId: await this.membershipId(courseId, seed) }, now)
+  }
+
+  /** The technician, in whose name files come in. */
+  async technician(): Promise<{ acting: Acting, personId: string }> {
+    const personId = this.personId(staff.technician)
+    const role = await this.stores.read.selectFrom('department_role').select('id').where('person_id', '=', personId).where('role', '=', 'technician').executeTakeFirstOrThrow()
+    return { acting: { actorId: role.id, role: 'technician', courseId: null, sectionIds: [] }, personId }
   }
 }
