@@ -11,6 +11,8 @@ export interface ProfileInput {
   main: readonly PlottedSeries[]
   /** Drawn on an axis of its own at the right, where there is room. */
   side?: PlottedSeries | null
+  /** Heights that are shown; the whole profile unless said. */
+  range?: readonly [number, number] | null
 }
 
 export interface AxisTick { at: number, text: string }
@@ -35,16 +37,19 @@ export interface ProfileScale {
 const mostDots = 90
 
 /** Height upward, the quantity across; drawn for the width it is given. */
-export function profileScale({ width, height, heights, main, side }: ProfileInput): ProfileScale {
+export function profileScale({ width, height, heights: all, main, side, range = null }: ProfileInput): ProfileScale {
   const isNarrow = width < 420
+  const heights = range ? all.map(level => level !== null && level >= range[0] && level <= range[1] ? level : null) : all
   const [left, top, bottom] = [52, 14, height - 46]
   const order = heights.map((_, at) => at).filter(at => heights[at] !== null).toSorted((a, b) => heights[a]! - heights[b]!)
   const sideWidth = side ? Math.round((width - left - 10) * (isNarrow ? 0.24 : 0.27)) : 0
   const right = width - 10 - sideWidth - (side ? 28 : 0)
   const lowest = order.length > 0 ? heights[order[0]!]! : 0
   const highest = order.length > 0 ? heights[order[order.length - 1]!]! : 100
-  const y = scaleLinear().domain([Math.min(0, lowest), highest - Math.min(0, lowest) < 1 ? lowest + 10 : highest]).nice(8).range([bottom, top])
-  const x = scaleLinear().domain(padded(extentOf(main) ?? [0, 1])).nice(6).range([left, right])
+  const whole = scaleLinear().domain([Math.min(0, lowest), highest - Math.min(0, lowest) < 1 ? lowest + 10 : highest]).nice(8)
+  const y = (range ? scaleLinear().domain(range) : whole).range([bottom, top])
+  const shown = range ? main.map(series => ({ ...series, values: heights.map((level, at) => level === null ? null : valueAt(series.values, at)) })) : main
+  const x = scaleLinear().domain(padded(extentOf(shown) ?? [0, 1])).nice(6).range([left, right])
   const sideDomain = side?.unit === '%' ? [Math.min(40, (extentOf([side]) ?? [40, 100])[0]), Math.max(100, (extentOf([side]) ?? [40, 100])[1])] : padded(side ? extentOf([side]) ?? [0, 1] : [0, 1])
   const sideX = scaleLinear().domain(sideDomain).nice(3).range([right + 28, width - 10])
   return {
@@ -81,6 +86,15 @@ export function layerSide(points: readonly (Point | null)[], [top, bottom]: read
   const atLeft = hidden.filter(point => point !== null && point.x < left + words).length
   const atRight = hidden.filter(point => point !== null && point.x > right - words).length
   return atLeft < atRight ? 'left' : 'right'
+}
+
+/** A window of heights made closer or wider around a level, or moved by a share of itself, kept inside the whole. */
+export function turnedRange(range: readonly [number, number], whole: readonly [number, number], turn: { zoom?: number, by?: number, around?: number }, least = 10): [number, number] {
+  const span = Math.max(Math.min(least, whole[1] - whole[0]), Math.min(whole[1] - whole[0], (range[1] - range[0]) * (turn.zoom ?? 1)))
+  const middle = turn.around ?? (range[0] + range[1]) / 2
+  const share = range[1] > range[0] ? (middle - range[0]) / (range[1] - range[0]) : 0.5
+  const low = Math.max(whole[0], Math.min(whole[1] - span, middle - share * span + (range[1] - range[0]) * (turn.by ?? 0)))
+  return [low, low + span]
 }
 
 /** The level that a step up or down leads to, from the row where the cursor is. */

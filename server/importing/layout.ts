@@ -38,13 +38,17 @@ const numberCodes = new Set([-99, -99.9, -999, -999.9, -9999, -9999.9, -8888, -7
 
 export const sampleBytes = 262_144
 
+/** What a person has said already; the rest is guessed. */
+export type SaidOfLayout = Partial<Pick<Recipe, 'delimiter' | 'decimal' | 'skipLines' | 'headerRows'>>
+
 /** @throws {UnreadableFile} where it is no table at all, or a table without rows */
-export function guessLayout(bytes: Buffer, isWhole: boolean, title: string): Guess {
-  const sample = readSample(bytes, isWhole)
-  const { head, data, skipLines } = splitHead(sample)
+export function guessLayout(bytes: Buffer, isWhole: boolean, title: string, said: SaidOfLayout = {}): Guess {
+  const sample = readSample(bytes, isWhole, said.delimiter)
+  if (sample.width < 2) throw new UnreadableFile('file_wrong_delimiter', { delimiter: said.delimiter === '\t' ? 'a tab' : said.delimiter ?? ',' })
+  const { head, data, skipLines } = said.skipLines === undefined && said.headerRows === undefined ? splitHead(sample) : saidHead(sample, said)
   if (data.length === 0) throw new UnreadableFile('file_header_only')
   const names = Array.from({ length: sample.width }, (_, at) => head[0]?.cells[at] ?? (head.length > 0 ? '' : `column ${at + 1}`))
-  const decimal = decimalOf(data, sample.delimiter)
+  const decimal = said.decimal ?? decimalOf(data, sample.delimiter)
   const unitRow = head.slice(1).find(row => row.cells.filter(cell => unitFromText(cell) !== null).length >= 1)
   const cellsOf = (at: number) => data.map(row => row.cells[at] ?? '')
   const times = guessTimes(names.map((name, at) => ({ name, at, unit: unitRow?.cells[at] ?? '', cells: cellsOf(at).slice(0, 400) })))
@@ -87,6 +91,13 @@ function splitHead({ rows, width }: Sample): { head: SampleRow[], data: SampleRo
   while (from > 0 && rows[from - 1]!.cells.length === width) from -= 1
   const head = rows.slice(from, first)
   return { head, data: rows.slice(first).filter(row => row.cells.length === width), skipLines: from === 0 ? 0 : rows[from]!.line - 1 }
+}
+
+function saidHead({ rows, width }: Sample, said: SaidOfLayout): { head: SampleRow[], data: SampleRow[], skipLines: number } {
+  const skipLines = said.skipLines ?? 0
+  const kept = rows.filter(row => row.line > skipLines)
+  const headerRows = said.headerRows ?? 1
+  return { head: kept.slice(0, headerRows), data: kept.slice(headerRows).filter(row => row.cells.length === width), skipLines }
 }
 
 function decimalOf(data: readonly SampleRow[], delimiter: Recipe['delimiter']): '.' | ',' {

@@ -13,9 +13,10 @@ export interface Sample {
 }
 
 /** The start of a file, cut to whole lines unless it is all of it, split with the delimiter that fits best. */
-export function readSample(bytes: Buffer, isWhole: boolean): Sample {
+export function readSample(bytes: Buffer, isWhole: boolean, said?: Recipe['delimiter']): Sample {
   const encoding = encodingOf(bytes, isWhole)
   const text = isWhole ? bytes : wholeLines(bytes, encoding)
+  if (said !== undefined) return split(text, encoding, said)
   let best: { sample: Sample, share: number } | null = null
   let reason: UnreadableFile | null = null
   for (const delimiter of [';', '\t', '|', ',', ' '] as const) {

@@ -55,7 +55,8 @@ export const heightDatums = ['sea level', 'ground', 'roof', 'launch point', 'unk
 /** `UTC`, `UTC-07:00`, or a name of the zone database. */
 export const zoneName = z.string().min(1).max(60).regex(/^[A-Za-z0-9_+\-/:]+$/, 'Not a time zone.')
 
-export const recipe = z.object({
+/** A recipe as it is drafted: nothing may be taken yet. */
+export const recipeDraft = z.object({
   title: z.string().trim().min(1).max(120),
   kind: z.enum(['station', 'flight']),
   encoding: z.enum(encodings),
@@ -67,7 +68,7 @@ export const recipe = z.object({
   /** Lines above the head. */
   skipLines: z.number().int().min(0).max(1000),
   headerRows: z.number().int().min(0).max(20),
-  columns: z.array(columnRecipe).min(1, 'Take at least one column.').max(200),
+  columns: z.array(columnRecipe).max(200),
   time: timeRecipe,
   /** Zone of the stamps where the cells carry none, or where what they carry is not believed. */
   zone: zoneName,
@@ -81,7 +82,10 @@ export const recipe = z.object({
   stationColumn: columnRef.nullable(),
   /** What heights in this record are counted from. */
   heightDatum: z.enum(heightDatums),
-}).superRefine((body, context) => {
+})
+
+export const recipe = recipeDraft.superRefine((body, context) => {
+  if (body.columns.length === 0) context.addIssue({ code: 'custom', path: ['columns'], message: 'Take at least one column.' })
   if (body.stampMeans !== 'instant' && body.intervalS === null) context.addIssue({ code: 'custom', path: ['intervalS'], message: 'Say how long the interval is that a stamp starts or ends.' })
   const seen = new Set<number>()
   body.columns.forEach((column, at) => {

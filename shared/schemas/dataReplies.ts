@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { columnRecipe, recipe, refusedRow, timeRecipe } from './data'
+import { columnRecipe, recipe, recipeDraft, refusedRow, timeRecipe } from './data'
 
 /** What the data routes answer. Instants are ISO 8601 in UTC; digests are hex. */
 
@@ -10,7 +10,7 @@ export const guessReply = z.object({
   })),
   times: z.array(z.object({ label: z.string(), time: timeRecipe, hasZone: z.boolean(), zone: z.string().nullable(), isOrderOpen: z.boolean() })),
   /** Complete, and wrong where the file does not say: a person confirms it. */
-  recipe: z.unknown(),
+  recipe: recipeDraft,
   isZoneOpen: z.boolean(),
   head: z.array(z.array(z.string())),
 })
@@ -68,15 +68,18 @@ export const dataSetReply = z.object({
   versions: z.array(versionFacts),
 })
 
-/** A line to draw: `null` values break it. */
+export const flagRule = z.enum(['range', 'step', 'order', 'duplicate'])
+
+/** A window of a record as a plot of some width needs it: instants in order, and a value or null of each column at each. */
 export const seriesReply = z.object({
   fromMs: z.number(), toMs: z.number(),
-  /** True where every row is there; false where buckets keep first, least, greatest and last. */
+  /** True where every row of the window is there; false where buckets keep their first, last, least and greatest. */
   isWhole: z.boolean(),
-  columns: z.array(z.object({
-    no: z.number().int(), t: z.array(z.number()), v: z.array(z.number().nullable()),
-    flagged: z.array(z.object({ t: z.number(), v: z.number(), flags: z.array(z.string()) })),
-  })),
+  /** Rows further apart than this are not joined by a line. */
+  gapMs: z.number(),
+  t: z.array(z.number()),
+  columns: z.array(z.object({ no: z.number().int(), v: z.array(z.number().nullable()) })),
+  flagged: z.array(z.object({ fromMs: z.number(), toMs: z.number(), rule: flagRule, no: z.number().int(), rows: z.number().int() })),
 })
 export type SeriesReply = z.infer<typeof seriesReply>
 
@@ -105,3 +108,12 @@ export const seriesQuery = z.object({
   fromMs: z.coerce.number().optional(), toMs: z.coerce.number().optional(),
   buckets: z.coerce.number().int().min(10).max(4000).default(1000),
 })
+
+/** What a person says about a file's layout; the rest is guessed anew. A tab and a blank are written as words, so that an address can carry them. */
+export const layoutQuery = z.object({
+  delimiter: z.enum([',', ';', 'tab', '|', 'blank']).transform(word => word === 'tab' ? '\t' as const : word === 'blank' ? ' ' as const : word).optional(),
+  decimal: z.enum(['.', ',']).optional(),
+  skipLines: z.coerce.number().int().min(0).max(1000).optional(),
+  headerRows: z.coerce.number().int().min(0).max(20).optional(),
+})
+export type SaidLayout = z.output<typeof layoutQuery>

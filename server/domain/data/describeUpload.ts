@@ -1,7 +1,8 @@
 import { refuse } from '#shared/errors'
 import type { Read } from '../../db/writer'
 import type { FileStore } from '../../files/store'
-import { guessLayout, sampleBytes, type Guess } from '../../importing/layout'
+import { UnreadableFile } from '../../importing/unreadable'
+import { guessLayout, sampleBytes, type Guess, type SaidOfLayout } from '../../importing/layout'
 import { titleOf } from '../../importing/inspect'
 import { readHeadOf } from './readHeadOf'
 
@@ -14,8 +15,14 @@ export async function getUpload(read: Read, uploadId: string): Promise<UploadRow
 }
 
 /** An upload with the guess at its layout, made anew from the kept bytes. */
-export async function describeUpload(read: Read, files: FileStore, uploadId: string): Promise<Omit<UploadRow, 'sha256'> & { sha256: string, guess: Guess }> {
+export async function describeUpload(read: Read, files: FileStore, uploadId: string, said: SaidOfLayout = {}): Promise<Omit<UploadRow, 'sha256'> & { sha256: string, guess: Guess }> {
   const upload = await getUpload(read, uploadId)
   const { bytes, isWhole } = await readHeadOf(files, upload.sha256, sampleBytes)
-  return { ...upload, sha256: upload.sha256.toString('hex'), guess: guessLayout(bytes, isWhole, titleOf(upload.name)) }
+  try {
+    return { ...upload, sha256: upload.sha256.toString('hex'), guess: guessLayout(bytes, isWhole, titleOf(upload.name), said) }
+  }
+  catch (error) {
+    if (error instanceof UnreadableFile) return refuse(error.code, error.facts)
+    throw error
+  }
 }

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { uploadReply } from '#shared/schemas/dataReplies'
+import { layoutQuery, uploadReply } from '#shared/schemas/dataReplies'
 import { describeUpload } from '../../../../../../domain/data/describeUpload'
 import { defineApiHandler } from '../../../../../../utils/defineApiHandler'
 import { useFiles } from '../../../../../../utils/useImports'
@@ -9,9 +9,10 @@ export default defineApiHandler({
   action: 'data:upload',
   summary: 'An uploaded file with a guess at its layout',
   params: z.object({ courseId: z.string(), uploadId: z.string() }),
+  query: layoutQuery,
   reply: uploadReply,
-  handle: async ({ params }) => {
-    const upload = await describeUpload(useStores().read, useFiles(), params.uploadId)
+  handle: async ({ params, query }) => {
+    const upload = await describeUpload(useStores().read, useFiles(), params.uploadId, query)
     return { ...upload, at: new Date(upload.at).toISOString() }
   },
 })
