@@ -15,6 +15,17 @@ export function taughtVariant(definition: QuantityDefinition, convention: Conven
  * and stays; constants may still differ.
  */
 export function acceptedWays(definition: QuantityDefinition, convention: Convention, pinned: string | undefined): readonly Way[] {
+  // a judgement asks for them several times, with one convention in hand
+  const last = lastFound
+  if (last && last.definition === definition && last.convention === convention && last.pinned === pinned) return last.ways
+  const ways = findWays(definition, convention, pinned)
+  lastFound = { definition, convention, pinned, ways }
+  return ways
+}
+
+let lastFound: { definition: QuantityDefinition, convention: Convention, pinned: string | undefined, ways: readonly Way[] } | null = null
+
+function findWays(definition: QuantityDefinition, convention: Convention, pinned: string | undefined): readonly Way[] {
   const own: Way = { label: convention.title, constants: convention.constants, variant: taughtVariant(definition, convention, pinned) }
   const seen = new Set([fingerprint(definition, own)])
   const ways = [own]

@@ -40,6 +40,7 @@ function bandFaults(definition: QuantityDefinition, question: StepQuestion, band
   const unseen = 2 * halfUnitAsked(definition, center, unit, question.digits)
   for (const { slip, value } of slipRanges(definition, question, question.inputs, center)) {
     const distance = Math.abs(value - center)
+    if (slip.weight === 'constant') continue
     if (slip.weight === 'fine' && distance <= unseen * (1 + 1e-9)) continue
     const width = value > center ? band.high - center : center - band.low
     if (width > distance / 2) reasons.push(`The band reaches ${show(value > center ? band.high : band.low)}, more than half the way from ${show(center)} to ${show(value)}, which is the slip “${slip.label}”.`)

@@ -26,5 +26,6 @@ export function digitsInWords(definition: QuantityDefinition, digits: number): s
   if (definition.kind === 'class') return 'one of the classes'
   if (definition.kind !== 'temperature') return `${digits} significant digits`
   const place = 2 - digits
-  return place >= 0 ? `to ${place === 1 ? 10 : 1} degree${place > 0 ? 's' : ''}` : `to ${(1 / Number(tenTo(-place))).toFixed(-place)} degree`
+  if (place > 0) return `to ${place === 1 ? 10 : 100} degrees`
+  return `to ${place === 0 ? '1' : `0.${'1'.padStart(-place, '0')}`} degree`
 }

@@ -57,6 +57,11 @@ function fits(definition: QuantityDefinition, question: StepQuestion, answer: Re
   const asked = halfUnitAsked(definition, range.value, unit, question.digits)
   const most = Math.max(asked, widest * Math.abs(isDifference ? range.value : range.value - toDouble(unit.offset)))
   const room = Math.min(Math.max(answer.halfUnitSi ?? 0, asked), most)
+  // most slips are far away: doubles are enough to see that
+  if (answer.valueSi !== null) {
+    const far = 1.01 * room + 1e-6 * Math.abs(range.value)
+    if (answer.valueSi < range.low - far || answer.valueSi > range.high + far) return false
+  }
   // and 1e-9 outwards, as with a band's edges
   const around = plus(exactInUnit(room, unit, true), times(absolute(exactInUnit(range.value, unit, true)), rational(1n, 1_000_000_000n)))
   const low = minus(exactInUnit(range.low, unit, isDifference), around)

@@ -60,16 +60,19 @@ export function fromDecimal(text: string): Rational | null {
   return shift >= 0 ? rational(digits * tenTo(shift)) : rational(digits, tenTo(-shift))
 }
 
+const view = new DataView(new ArrayBuffer(8))
+
 /** The exact value of a double. */
 export function fromDouble(value: number): Rational {
   if (!Number.isFinite(value)) throw new Error(`${String(value)} is no fraction`)
-  let mantissa = value
-  let exponent = 0
-  while (Math.floor(mantissa) !== mantissa) {
-    mantissa *= 2
-    exponent++
-  }
-  return rational(BigInt(mantissa), 1n << BigInt(exponent))
+  view.setFloat64(0, value)
+  const bits = view.getBigUint64(0)
+  const exponent = Number((bits >> 52n) & 0x7FFn)
+  const fraction = bits & 0xFFFFFFFFFFFFFn
+  const mantissa = exponent === 0 ? fraction : fraction | 0x10000000000000n
+  const shift = Math.max(exponent, 1) - 1075
+  const signed = value < 0 ? -mantissa : mantissa
+  return shift >= 0 ? rational(signed << BigInt(shift)) : rational(signed, 1n << BigInt(-shift))
 }
 
 /** The nearest double. */

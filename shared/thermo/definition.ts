@@ -65,9 +65,10 @@ export interface Slip {
   key: string
   /**
    * A gross slip always differs (a sign, a unit). A fine one shrinks to nothing with good data (a fit turned round): where it comes within
-   * one unit of the last digit asked, it makes no difference and says nothing against the band.
+   * one unit of the last digit asked, it makes no difference and says nothing against the band. A constant's (273 for 273.15) is as small as
+   * the spread of accepted constants: it is named where it alone explains a value, and says nothing against the band.
    */
-  weight: 'gross' | 'fine'
+  weight: 'gross' | 'fine' | 'constant'
   /** For the class view: "sign turned round". */
   label: string
   /** For the student, in a sentence; may use {value} and {unit}. */

@@ -5,6 +5,7 @@ type Apply = (inputs: Inputs, constants: Constants, right: number) => number | n
 
 export const slip = (key: string, label: string, sentence: string, apply: Apply): Slip => ({ key, weight: 'gross', label, sentence, apply })
 export const fineSlip = (key: string, label: string, sentence: string, apply: Apply): Slip => ({ key, weight: 'fine', label, sentence, apply })
+export const constantSlip = (key: string, label: string, sentence: string, apply: Apply): Slip => ({ key, weight: 'constant', label, sentence, apply })
 
 const times = (factor: number): Apply => (_inputs, _constants, right) => right * factor
 

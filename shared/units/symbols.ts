@@ -21,7 +21,7 @@ const written: Readonly<Record<string, string>> = {
   '%': '%', 'percent': '%', 'pct': '%', '‰': '[ppth]', 'permille': '[ppth]', 'ppm': '[ppm]', '°': 'deg', 'deg': 'deg', 'degree': 'deg', 'degrees': 'deg', 'radian': 'rad', 'radians': 'rad',
 }
 
-const shortCodes = ['m', 'km', 'hm', 'dam', 'dm', 'cm', 'mm', 'um', 'kg', 'g', 'mg', 'ug', 's', 'ms', 'min', 'h', 'd', 'K', 'mK', 'Pa', 'hPa', 'kPa', 'MPa', 'daPa', 'bar', 'mbar', 'atm', 'J', 'kJ', 'MJ', 'GJ', 'mJ', 'cal', 'kcal', 'W', 'kW', 'MW', 'mW', 'N', 'kN', 'Hz', 'L', 'mL', 'mol', 'kmol', 'rad', 'mm[Hg]', '[in_i\'Hg]', '[ft_i]', '[kn_i]', '[ppth]', '[psi]']
+const shortCodes = ['m', 'km', 'hm', 'dam', 'dm', 'cm', 'mm', 'um', 'kg', 'g', 'mg', 'ug', 's', 'ms', 'min', 'h', 'd', 'K', 'mK', 'Pa', 'hPa', 'kPa', 'MPa', 'mPa', 'daPa', 'bar', 'mbar', 'atm', 'J', 'kJ', 'MJ', 'GJ', 'mJ', 'cal', 'kcal', 'W', 'kW', 'MW', 'mW', 'N', 'kN', 'Hz', 'L', 'mL', 'mol', 'kmol', 'rad', 'mm[Hg]', '[in_i\'Hg]', '[ft_i]', '[kn_i]', '[ppth]', '[psi]']
 
 const exact = new Map<string, string>(shortCodes.map(code => [code, code]))
 for (const [text, code] of Object.entries(written)) exact.set(text, code)

@@ -47,7 +47,7 @@ export const parcelTemperatureByHeightDefinition: QuantityDefinition = {
   inputs: [
     { name: 'temperature', label: 'temperature at the start', symbol: 'T₀', unit: 'K', shownUnit: 'Cel', kind: 'temperature', shape: 'number', range: [150, 350] },
     { name: 'heightDifference', label: 'height above the start, negative where the parcel is lowered', symbol: 'Δz', unit: 'm', shownUnit: 'm', kind: 'difference', shape: 'number', range: [-12_000, 12_000] },
-    { name: 'lapseRate', label: 'dry adiabatic lapse rate from an earlier step', symbol: 'Γd', unit: 'K/m', shownUnit: 'K/km', kind: 'difference', shape: 'number', range: [0.001, 0.02], isOptional: true, trivialWithin: 0.0001 },
+    { name: 'lapseRate', label: 'dry adiabatic lapse rate from an earlier step', symbol: 'Γd', unit: 'K/m', shownUnit: 'K/km', kind: 'difference', shape: 'number', range: [-0.1, 0.1], isOptional: true, trivialWithin: 0.0001 },
   ],
   variants: [
     variantWith('g-over-cp', 'Γd = g/cp', 'verified', '0.05 K per km of height by the constants taught'),

@@ -4,7 +4,7 @@ import { constant, kappaOf } from '../constants'
 import type { Constants, Inputs, QuantityDefinition } from '../definition'
 import { numberOf } from '../inputs'
 import { poissonTemperature } from '../poisson'
-import { fineSlip, slip, zeroCelsius } from '../slips'
+import { constantSlip, slip, zeroCelsius } from '../slips'
 import { texNumber, texQuantity } from '../tex'
 
 /**
@@ -15,7 +15,7 @@ import { texNumber, texQuantity } from '../tex'
  * Source: AMS Glossary of Meteorology, "potential temperature".
  * Valid: 150–400 K, 10–1200 hPa. Limits: no water vapor, cp constant.
  *
- * @example potentialTemperature(kelvin(293.15), pascal(85000), closed1004.constants) // 307.08 K
+ * @example potentialTemperature(kelvin(293.15), pascal(85000), closed1004.constants) // 307.09 K
  */
 export function potentialTemperature(temperature: Kelvin, pressure: Pascal, constants: Constants): Kelvin {
   return poissonTemperature(temperature, pressure, pascal(constant(constants, 'p0')), constants)
@@ -76,7 +76,7 @@ export const potentialTemperatureDefinition: QuantityDefinition = {
     }),
     slip('cv-for-cp', 'cv for cp', 'This comes from the exponent R/cv in place of R/cp.', (inputs, constants) => T(inputs) * pow(ratio(inputs, constants), constant(constants, 'R') / constant(constants, 'cv'))),
     slip('end-unit', '°C given as kelvin', 'Your number is the temperature in °C; the unit beside it says kelvin.', (_i, _c, right) => right > zeroCelsius ? right - zeroCelsius : null),
-    fineSlip('zero-273', '273 for 273.15', 'This comes from 273 in place of 273.15 between °C and kelvin.', (inputs, constants) => (T(inputs) - 0.15) * pow(ratio(inputs, constants), kappaOf(constants))),
+    constantSlip('zero-273', '273 for 273.15', 'This comes from 273 in place of 273.15 between °C and kelvin.', (inputs, constants) => (T(inputs) - 0.15) * pow(ratio(inputs, constants), kappaOf(constants))),
   ],
-  example: { inputs: { pressure: 85_000, temperature: 293.15 }, gives: 307.08, within: 0.01 },
+  example: { inputs: { pressure: 85_000, temperature: 293.15 }, gives: 307.0902, within: 0.0001 },
 }
