@@ -71,7 +71,8 @@ function judgedValue(definition: QuantityDefinition, question: StepQuestion, ans
   const carriedBand = carried.inputs && bandOfCarried(definition, question, carried.inputs, unit, carried.halfUnits)
   const ranges = slipRanges(definition, question, question.inputs, center)
   const typed = answer.reading === 'ok' ? answer.decimal : null
-  const slip = typed === null || isIn(band, typed) || (carriedBand && isIn(carriedBand, typed)) ? null : explainingSlip(definition, question, answer, ranges, unit)
+  const isExplained = typed === null || isNear(band, answer) || (carriedBand && isNear(carriedBand, answer))
+  const slip = isExplained ? null : explainingSlip(definition, question, answer, ranges, unit)
   const acceptedBy = typed === null ? null : isIn(band, typed) ? 'band' : carriedBand && isIn(carriedBand, typed) ? 'carried' : isRuledIn(definition, question, typed, unit, ranges, answer) ? 'ruling' : null
   const isAccepted = acceptedBy !== null
   const notes = [...base.notes]
@@ -83,6 +84,12 @@ function judgedValue(definition: QuantityDefinition, question: StepQuestion, ans
     slipValues: ranges.map(({ slip: { key, label }, value }) => ({ key, label, value })),
     pointsMilli: withinStep(isAccepted ? question.maxMilli : slip ? question.slipMilli ?? 0 : 0, question.maxMilli),
   }
+}
+
+/** Whether the band explains a typed value within the rounding of its own digits: "307" for 307.1 is short of digits, and no slip. */
+function isNear(band: Band, answer: ReadAnswer): boolean {
+  const half = answer.halfUnitSi ?? 0
+  return answer.decimal !== null && (isIn(band, answer.decimal) || (answer.valueSi !== null && answer.valueSi >= band.low - half && answer.valueSi <= band.high + half))
 }
 
 const isIn = (band: Band, decimal: string): boolean => liesWithin(decimal, band.lowDecimal, band.highDecimal)

@@ -10,7 +10,7 @@ import type { Constants } from './definition'
  *
  * Source: AMS Glossary of Meteorology, "Poisson equation". Valid where cp is constant (150–400 K, to 0.3 %).
  *
- * @example poissonTemperature(kelvin(293.15), pascal(100000), pascal(70000), { R: 287, cp: 1004 }) // 264.74 K
+ * @example poissonTemperature(kelvin(293.15), pascal(100000), pascal(70000), { R: 287, cp: 1004 }) // 264.73 K
  */
 export function poissonTemperature(temperature: Kelvin, from: Pascal, to: Pascal, constants: Constants): Kelvin {
   return kelvin(temperature * pow(to / from, kappaOf(constants)))

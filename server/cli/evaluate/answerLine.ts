@@ -10,7 +10,9 @@ import { findQuantity, quantities } from '#shared/thermo/registry'
 import { fromDecimal, fromDouble, toDouble } from '#shared/numerics/rational'
 import { describeDimension } from '#shared/units/dimension'
 import { readClass } from '#shared/units/readClass'
+import { plainText } from '#shared/units/plainText'
 import { readQuantity } from '#shared/units/readQuantity'
+import { readUnit } from '#shared/units/readUnit'
 import { findUnit, fromSi, getUnit, isCommensurable, toSi, type Unit } from '#shared/units/ucum'
 
 export type Json = null | boolean | number | string | readonly Json[] | { readonly [key: string]: Json | undefined }
@@ -98,8 +100,10 @@ function unitOf(question: Fields, definition: QuantityDefinition): Unit {
 
 function commensurable(code: unknown, like: string, input: string | undefined): Unit {
   if (typeof code !== 'string') throw new Refusal('bad_unit', 'a unit is a text, its UCUM code', input)
-  const unit = findUnit(code)
-  if (!unit) throw new Refusal('unknown_unit', `${code.slice(0, 60)} is not a UCUM code that is known here`, input)
+  // UCUM codes; and what people write (degC, mb), where it is no code
+  const written = findUnit(code) === null && code.length <= 60 ? readUnit(plainText(code), getUnit(like)) : null
+  const unit = written?.ok ? written.unit : findUnit(code)
+  if (!unit) throw new Refusal('unknown_unit', `${code.slice(0, 60)} is not a unit that is known here`, input)
   const wanted = getUnit(like)
   if (!isCommensurable(unit, wanted)) throw new Refusal('wrong_dimension', `${code} is ${describeDimension(unit.dimension)}; ${describeDimension(wanted.dimension)} is needed, such as ${like}`, input)
   return unit

@@ -19,7 +19,7 @@ import { texNumber, texQuantity } from '../tex'
  * @example hypsometricThickness(pascal(100000), pascal(50000), kelvin(273.15), closed1004.constants) // 5539.1 m
  */
 export function hypsometricThickness(bottom: Pascal, top: Pascal, meanVirtualTemperature: Kelvin, constants: Constants): Meter {
-  if (!(top < bottom)) throw new OutOfRangeError('pressureTop', top, `below the pressure at the bottom, ${bottom} Pa`)
+  if (!(top < bottom)) throw new OutOfRangeError('pressureTop', top, `the pressures below that of the bottom, ${bottom} Pa`)
   return meter(constant(constants, 'R') * meanVirtualTemperature / constant(constants, 'g') * log(bottom / top))
 }
 

@@ -117,6 +117,11 @@ describe('naming slips', () => {
     console.info(`falsely named: ${named} of ${wrong} (${(100 * named / wrong).toFixed(2)} %)`)
     expect(named / wrong).toBeLessThanOrEqual(0.02)
   }, 60_000)
+  it('is silent where the right value explains few digits as well', () => {
+    const theta = stepOf('potential-temperature', { temperature: 293.15, pressure: 85_000 })
+    expect(judgeTyped(theta, '307 K')).toMatchObject({ isAccepted: false, slip: null })
+    expect(judgeTyped(theta, '306.9 K').slip?.key).toBe('zero-273')
+  })
   it('is silent where two slips explain a value', () => {
     const step = stepOf('isobaric-heat-of-mass', { mass: 2, temperatureStart: 283.15, temperatureEnd: 308.15 })
     const alone = judgeTyped(step, '25.1')
