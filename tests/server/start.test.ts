@@ -52,7 +52,8 @@ describe('a start that cannot be', () => {
   it('refuses a moved clock outside of tests, and anywhere but on a loopback host', async () => {
     const now = join(folder, 'now')
     writeFileSync(now, '2026-10-14T16:00:00Z')
-    for (const env of [{}, { NODE_ENV: 'production' }, { NODE_ENV: 'test', HOST: '0.0.0.0' }]) {
+    const settings: Record<string, string>[] = [{}, { NODE_ENV: 'production' }, { NODE_ENV: 'test', HOST: '0.0.0.0' }]
+    for (const env of settings) {
       const { code, lines } = await refused({ NOW_FILE: now, ...env })
       expect([code, lines.length]).toEqual([1, 1])
       expect(lines[0]).toContain('NOW_FILE')
