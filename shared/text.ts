@@ -47,7 +47,7 @@ export const refusalWords: Record<RefusalCode, Words> = {
   no_height_column: plain('No height or pressure', 'A flight needs a column of height or of pressure.'),
   column_missing: { title: 'Column not found', detail: f => `The file has no column "${f.column ?? ''}".` },
   zone_unknown: { title: 'Time zone unknown', detail: f => `"${f.zone ?? ''}" is not a time zone. Use a name such as UTC or America/Denver.` },
-  nothing_taken: plain('No row could be taken', 'Every row was refused. Look at the reasons and change the recipe.'),
+  nothing_taken: { title: 'No row could be taken', detail: f => `All ${f.rows ?? ''} rows were refused, the first in line ${f.line ?? '?'}${f.column ? `, column "${f.column}"` : ''}: ${f.reason ?? ''}. Change what you said about the file.` },
   import_cancelled: plain('Import cancelled', 'Nothing was kept of it.'),
   import_running: plain('Import is running', 'Wait until it ends, or cancel it.'),
   import_failed: { title: 'Import failed', detail: f => String(f.reason ?? 'Nothing was kept of it.') },

@@ -1,4 +1,4 @@
-import { RowSplitter } from './bytes'
+import { longestLine, RowSplitter } from './bytes'
 import { guessLayout, sampleBytes, type Guess } from './layout'
 import { unpacked } from './unpack'
 import { UnreadableFile } from './unreadable'
@@ -11,6 +11,7 @@ import { UnreadableFile } from './unreadable'
 export async function inspectFile(source: AsyncIterable<Buffer>, limits: { mostBytes: number, limitLabel: string }, name: string): Promise<Guess> {
   let head: Buffer[] | null = []
   let headBytes = 0
+  let hasLineEnd = false
   let look: Look | null = null
   for await (const chunk of unpacked(source, limits)) {
     if (look) {
@@ -19,7 +20,9 @@ export async function inspectFile(source: AsyncIterable<Buffer>, limits: { mostB
     }
     head!.push(chunk)
     headBytes += chunk.length
-    if (headBytes >= sampleBytes) {
+    hasLineEnd ||= chunk.includes(0x0A) || chunk.includes(0x0D)
+    if (!hasLineEnd && headBytes > longestLine) throw new UnreadableFile('file_line_too_long', { line: 1, limit: '1 MiB' })
+    if (headBytes >= sampleBytes && hasLineEnd) {
       look = new Look(Buffer.concat(head!), false, name)
       head = null
     }

@@ -23,7 +23,9 @@ export function readSample(bytes: Buffer, isWhole: boolean, said?: Recipe['delim
     try {
       const sample = split(text, encoding, delimiter)
       const share = shareOfWidth(sample)
-      if (sample.width >= 2 && share > (best?.share ?? 0) + 0.1) best = { sample, share }
+      // Blanks stand in dates and texts as well: they part the fields only where nothing else does.
+      const isLikelier = delimiter === ' ' ? best === null || best.share < 0.4 : share > (best?.share ?? 0) + 0.1
+      if (sample.width >= 2 && isLikelier) best = { sample, share }
     }
     catch (error) {
       if (!(error instanceof UnreadableFile)) throw error
@@ -31,7 +33,7 @@ export function readSample(bytes: Buffer, isWhole: boolean, said?: Recipe['delim
       reason ??= error
     }
   }
-  if (best) return best.sample
+  if (best && !(reason && best.sample.delimiter === ' ')) return best.sample
   if (reason) throw reason
   const sample = split(text, encoding, ',')
   if (sample.rows.length === 0) throw new UnreadableFile('file_empty')

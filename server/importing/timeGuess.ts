@@ -27,7 +27,11 @@ export function guessTimes(columns: readonly SampleColumn[]): TimeCandidate[] {
   const found: { rank: number, candidate: TimeCandidate }[] = []
   const add = (rank: number, candidate: TimeCandidate) => found.push({ rank, candidate })
   const ref = ({ name, at }: SampleColumn): ColumnRef => ({ name, at })
-  const all = (column: SampleColumn, pattern: RegExp) => column.cells.length > 0 && column.cells.every(cell => pattern.test(cell))
+  /** Nearly all: a broken cell here and there is refused later, with its line. */
+  const all = (column: SampleColumn, pattern: RegExp) => {
+    const filled = column.cells.filter(cell => cell !== '')
+    return filled.length > 0 && filled.filter(cell => pattern.test(cell)).length >= 0.9 * filled.length
+  }
   const named = (pattern: RegExp) => columns.find(column => pattern.test(headWords(column.name)) && column.cells.some(cell => cell !== ''))
 
   for (const column of columns) {

@@ -37,7 +37,7 @@ const quantities: readonly (readonly [RegExp, string])[] = [
   [/\b(visib|visibility|vis)\b/, 'visibility'],
   [/\b(press|pressure|baro|barometer|mslp|pres|p|slp)\b/, 'pressure'],
   [/\b(alt|altitude|height|z|hgt|gpsalt|hght)\b/, 'height'],
-  [/\b(air ?temp(erature)?|temp|temperature|tair|t|ta|t\d?m?|tmpf|tmpc)\b/, 'air-temperature'],
+  [/\b(air ?temp(erature)?|temp|temperature|tair|t|ta|t\d?m?|tmpf|tmpc|atmp)\b/, 'air-temperature'],
 ]
 
 const units: readonly (readonly [RegExp, string])[] = [
