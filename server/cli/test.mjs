@@ -1,8 +1,9 @@
 // `npm test`: installs what the tests need, runs everything, and closes with one plain line.
 //   npm test                    all of it
 //   npm test -- --only unit     one part: lint rooms types unit integration server browser
-import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs'
+import { existsSync, mkdirSync, mkdtempSync, readFileSync, rmSync } from 'node:fs'
 import { spawnSync } from 'node:child_process'
+import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { assertNode, installEnvironment, stop } from './check.mjs'
 import { buildWhenNeeded, installWhenNeeded, root } from './prepare.mjs'
@@ -31,8 +32,10 @@ if (wants('integration')) suite('integration')
 if (wants('server') || wants('browser')) {
   const tools = findTools()
   buildWhenNeeded()
+  tools.DEMO_WORLD = demoWorld()
   if (wants('server')) suite('server', tools)
   if (wants('browser')) suite('browser', tools)
+  rmSync(tools.DEMO_WORLD, { recursive: true, force: true })
 }
 
 say('')
@@ -75,6 +78,14 @@ function suite(name, extra = {}) {
   }
   else failed++
   say(`${name} took ${seconds(started)}`)
+}
+
+/** The demo, made once: tests that walk through a lived-in department take copies of it. */
+function demoWorld() {
+  const dir = mkdtempSync(join(tmpdir(), 'tetherhouse-demo-'))
+  const made = spawnSync(process.execPath, ['--import', 'tsx', join(root, 'server/cli/seed.ts')], { cwd: root, env: { ...process.env, DATA_DIR: dir, DEMO: '1' }, encoding: 'utf8' })
+  if (made.status !== 0) stop(`The demo could not be made:\n${made.stdout}\n${made.stderr}`)
+  return dir
 }
 
 function seconds(started) {

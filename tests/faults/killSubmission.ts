@@ -2,7 +2,7 @@ import { spawn } from 'node:child_process'
 import { rmSync } from 'node:fs'
 import { startBuiltServer } from '../fixtures/builtServer'
 import { checkStore, countSubmissions } from './checkStore'
-import { copyOf, demoWorld } from './demoWorld'
+import { copyOf, demoWorld } from '../fixtures/demoWorld'
 import { findOpenWork } from './openWork'
 
 export interface KillReport {
