@@ -4,7 +4,7 @@ import type { Read } from '../../db/writer'
 
 /**
  * What a submission stands on and what may change under it: read before judging and again inside the storing
- * transaction. Two readings that are the same text rest on the same ground.
+ * transaction.
  */
 export interface Ground {
   shareId: string
@@ -70,7 +70,8 @@ export async function readGround(db: Read, shareId: string, membershipId: string
   return { ...row, newestRedraw: row.newestRedraw ?? row.redraw, attemptsMade: row.attemptsMade ?? 0, acceptedIds: accepted.map(each => each.id) }
 }
 
-export const isSameGround = (a: Ground, b: Ground): boolean => JSON.stringify(a) === JSON.stringify(b)
+/** True when a judgement made on one ground holds on the other. How many attempts were made is no part of it: it is counted anew. */
+export const isSameGround = (a: Ground, b: Ground): boolean => JSON.stringify({ ...a, attemptsMade: 0 }) === JSON.stringify({ ...b, attemptsMade: 0 })
 
 /** A ground on which work is under way: the lab is posted to the section. */
 export interface PostedGround extends Ground {

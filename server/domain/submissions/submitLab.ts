@@ -44,8 +44,8 @@ export async function submitLab({ read, write }: Stores, judging: Judging, input
       try {
         return await write(trx => once(trx, request, async () => {
           const again = await readGround(trx, input.shareId, input.membershipId)
-          if (!again || !ground || !isSameGround(ground, again)) throw new StaleGround()
-          return insertSubmission(trx, { ground: posted, loaded, judged, referenceDigest: judging.reference.digest, input, lateness: decideLateness(posted, receivedAt), receivedAt })
+          if (!again || !ground || !isSameGround(ground, again) || again.attemptsMade >= posted.attempts) throw new StaleGround()
+          return insertSubmission(trx, { ground: { ...posted, attemptsMade: again.attemptsMade }, loaded, judged, referenceDigest: judging.reference.digest, input, lateness: decideLateness(posted, receivedAt), receivedAt })
         }))
       }
       catch (error) {
