@@ -55,6 +55,12 @@ export function numberText(value: number, digits: number): string {
   return value < 0 && /[1-9]/.test(text) ? `−${text}` : text
 }
 
+/** Marks of one column with as many decimals as the finest of them needs, so that they stand under each other. */
+export function alignedMarks(all: readonly (number | null)[]): (pointsMilli: number) => string {
+  const decimals = Math.max(0, ...all.map(points => points === null ? 0 : marksText(points).split('.')[1]?.length ?? 0))
+  return points => (points / 1000).toFixed(decimals).replace('-', '−')
+}
+
 /** Marks are integer thousandths: 2500 → "2.5", 3000 → "3". */
 export function marksText(pointsMilli: number): string {
   return (pointsMilli / 1000).toFixed(3).replace(/\.?0+$/, '').replace('-', '−')

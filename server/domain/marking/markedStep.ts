@@ -29,7 +29,7 @@ export function markedStep(step: NumberStep, no: number, ask: string, stored: St
 }
 
 /** A line of TeX; an empty one stays empty. */
-const texLine = (formula: string): string => formula === '' ? '' : renderInline(`$${formula}$`)
+const texLine = (formula: string): string => formula === '' ? '' : renderInline(`$\\displaystyle ${formula}$`)
 
 /** A number has one digit more than was asked, so that rounding can be followed. */
 function workedValue(step: NumberStep, judgement: Judgement): { value: string, unit: string } {
