@@ -66,6 +66,8 @@ export type MyLabMarks = z.infer<typeof myLabMarks>
 export const submissionMarks = z.object({
   submissionId: z.string(), labId: z.string(), labTitle: z.string(), revisionNo: z.number().int(), receiptNo: z.string(), attempt: z.number().int(), counts: z.boolean(),
   submittedAt: instant, zone: z.string(), lateDays: z.number().int(), lateWords: z.string(), releasedAt: instant.nullable(),
+  /** False where only right or not is told yet: feedback at once, before release. */
+  isWhole: z.boolean(),
   /** Until then a step can be objected to; null while marks are not released. */
   objectUntil: instant.nullable(),
   earnedMilli: z.number().int(), maxMilli: z.number().int(), totalMilli: z.number().int(),

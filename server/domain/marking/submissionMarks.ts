@@ -1,6 +1,6 @@
 import { refuse } from '#shared/errors'
 import { lateRule } from '#shared/schemas/lab'
-import type { SubmissionMarks } from '#shared/schemas/marks'
+import type { MarkedStep, SubmissionMarks } from '#shared/schemas/marks'
 import type { Read } from '../../db/writer'
 import { getDraw, itemOf } from '../shares/draws'
 import { attemptsOfShares } from './attemptsOf'
@@ -12,8 +12,8 @@ import { objectUntil } from './objectUntil'
 import { currentSteps } from './readEvaluations'
 
 /**
- * Everything about the marks of one submission. A student gets it only once marks are released to their section;
- * staff look at it at any time.
+ * Everything about the marks of one submission. A student gets it once marks are released to their section; before that, where
+ * the lab gives feedback at once, only whether each step is right and its marks. Staff look at it at any time.
  * @throws {DomainError} `not_found`, `not_released`
  */
 export async function submissionMarks(read: Read, who: { isStaff: boolean, membershipId: string }, submissionId: string): Promise<SubmissionMarks> {
@@ -23,11 +23,12 @@ export async function submissionMarks(read: Read, who: { isStaff: boolean, membe
     .leftJoin('posting', join => join.onRef('posting.lab_id', '=', 'share.lab_id').onRef('posting.section_id', '=', 'membership.section_id'))
     .select(['submission.id', 'submission.share_id', 'submission.receipt_no', 'submission.attempt', 'submission.received_at', 'submission.due_at_applied', 'submission.late_units', 'submission.late_rule_json',
       'lab.id as labId', 'lab.title', 'lab_revision.no as revisionNo', 'lab_revision.body_json', 'share.ordinal', 'share.draw_id', 'membership.id as membershipId',
-      'posting.released_at', 'posting.zone', 'posting.keep'])
+      'posting.released_at', 'posting.feedback', 'posting.zone', 'posting.keep'])
     .where('submission.id', '=', submissionId).execute()
   const submission = who.isStaff ? row[0] : row.find(each => each.membershipId === who.membershipId)
   if (!submission) return refuse('not_found')
-  if (!who.isStaff && submission.released_at === null) return refuse('not_released')
+  const isWhole = who.isStaff || submission.released_at !== null
+  if (!isWhole && submission.feedback !== 'at_once') return refuse('not_released')
   const [steps, attempts, history, draw] = await Promise.all([
     currentSteps(read, [submissionId]), attemptsOfShares(read, [submission.share_id]), markHistory(read, submissionId), getDraw(read, submission.draw_id),
   ])
@@ -44,13 +45,20 @@ export async function submissionMarks(read: Read, who: { isStaff: boolean, membe
     counts: labTotal(made, submission.keep ?? 'best')?.submissionId === submissionId,
     submittedAt: new Date(submission.received_at).toISOString(), zone: submission.zone ?? 'UTC', lateDays: submission.late_units, lateWords: lateWords(rule, submission.late_units),
     releasedAt: submission.released_at === null ? null : new Date(submission.released_at).toISOString(),
-    objectUntil: submission.released_at === null || submission.zone === null ? null : new Date(objectUntil(submission.released_at, submission.zone)).toISOString(),
+    isWhole, objectUntil: submission.released_at === null || submission.zone === null ? null : new Date(objectUntil(submission.released_at, submission.zone)).toISOString(),
     earnedMilli: total.earnedMilli, maxMilli: total.maxMilli, totalMilli: total.totalMilli,
     reference: build.version, convention: `${build.convention_key}, revision ${build.no}`, shareNo: submission.ordinal + 1,
     steps: stepsOfBody(submission.body_json).flatMap((step, at) => {
       const stored = steps.find(each => each.stepKey === step.key)
-      return stored ? [markedStep(step, at + 1, asks[step.key] ?? step.title, stored)] : []
+      const marked = stored ? markedStep(step, at + 1, asks[step.key] ?? step.title, stored) : null
+      return marked ? [isWhole ? marked : rightOrNot(marked)] : []
     }),
     history,
   }
+}
+
+/** Feedback at once: right or not, and the marks. No band, no worked value, no slip and no direction, which further attempts could search. */
+function rightOrNot(step: MarkedStep): MarkedStep {
+  const isWrong = step.judged === 'above' || step.judged === 'below'
+  return { ...step, judged: isWrong ? 'wrong' : step.judged, bar: null, carriedBar: null, carriedNote: null, slip: null, worked: { value: '', unit: '', reason: null, lines: [] }, notes: [] }
 }

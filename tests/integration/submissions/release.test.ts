@@ -70,6 +70,16 @@ describe('before release', () => {
   })
 })
 
+describe('feedback at once', () => {
+  it('tells right or not and the marks, and nothing by which the band could be searched', async () => {
+    await stores.write(trx => trx.updateTable('posting').set({ feedback: 'at_once' }).execute())
+    const marks = await submissionMarks(stores.read, student(1), submissions[1]!)
+    expect(marks.isWhole).toBe(false)
+    expect(marks.steps.map(step => [step.judged, step.pointsMilli, step.bar, step.slip, step.worked.value, step.worked.lines.length])).toEqual([['wrong', 0, null, null, '', 0], ['within', 2000, null, null, '', 0], ['within', 1000, null, null, '', 0]])
+    expect((await mine(1))[0]).toMatchObject({ standing: 'submitted', totalMilli: 3000 })
+  })
+})
+
 describe('release', () => {
   it('happens once, by the version that was seen, with an entry and a mail to each who handed in', async () => {
     expect(await codeOf(release(7))).toBe('changed_meanwhile')
