@@ -1,6 +1,6 @@
 import { dirname, join } from 'node:path'
 import { fileURLToPath } from 'node:url'
-import { openDatabase } from '../db/open'
+import { openForReading } from '../db/open'
 import { isSound, recheckMarks } from '../domain/marking/recheckMarks'
 import { bundleReference } from './bundleReference'
 
@@ -9,7 +9,7 @@ import { bundleReference } from './bundleReference'
  * Last line: evaluations=… builds=… same=… newest_differs=… findings=…; exit code 0 only when all came out the same.
  */
 const root = join(dirname(fileURLToPath(import.meta.url)), '../..')
-const database = await openDatabase(process.env.DATA_DIR || join(root, '.data'))
+const database = openForReading(process.env.DATA_DIR || join(root, '.data'))
 try {
   const { bundle } = await bundleReference(root)
   const report = await recheckMarks(database.read, bundle, (finding) => {

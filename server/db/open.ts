@@ -3,6 +3,7 @@ import { join } from 'node:path'
 import SQLite from 'better-sqlite3'
 import { Kysely, Migrator } from 'kysely'
 import { HouseDialect, oldestDatabaseEngine, readingPragmas, writingPragmas } from './dialect'
+import { keptStatements } from './keptStatements'
 import { migrations } from './migrations'
 import type { Database } from './schema/tables'
 import { groupWriter, type Stores } from './writer'
@@ -27,14 +28,14 @@ export async function openDatabase(dataDir: string, onFailedSync?: (error: unkno
   const raw = new SQLite(file)
   for (const pragma of writingPragmas) raw.pragma(pragma)
   assertEngine(raw)
-  const connection = new Kysely<Database>({ dialect: new HouseDialect({ database: raw }) })
+  const connection = new Kysely<Database>({ dialect: new HouseDialect({ database: keptStatements(raw) }) })
   await migrate(connection)
   // A fresh WAL file answers 2 before its first transaction whatever was set; after one the answer is true.
   raw.exec('begin immediate; create table if not exists sync_probe (n integer) strict; drop table sync_probe; commit')
   if (raw.pragma('synchronous', { simple: true }) !== 2) throw new Error('The database does not keep synchronous = FULL; acknowledged work could be lost. Not starting.')
   const reading = new SQLite(file, { readonly: true, fileMustExist: true })
   for (const pragma of readingPragmas) reading.pragma(pragma)
-  const read = new Kysely<Database>({ dialect: new HouseDialect({ database: reading }) })
+  const read = new Kysely<Database>({ dialect: new HouseDialect({ database: keptStatements(reading) }) })
   return {
     connection, raw, read,
     write: groupWriter(connection, { onFailedSync }),
@@ -49,7 +50,7 @@ export async function openDatabase(dataDir: string, onFailedSync?: (error: unkno
 export function openForReading(dataDir: string): { read: Kysely<Database>, close: () => Promise<void> } {
   const reading = new SQLite(join(dataDir, 'main.db'), { readonly: true, fileMustExist: true })
   for (const pragma of readingPragmas) reading.pragma(pragma)
-  const read = new Kysely<Database>({ dialect: new HouseDialect({ database: reading }) })
+  const read = new Kysely<Database>({ dialect: new HouseDialect({ database: keptStatements(reading) }) })
   return { read, close: () => read.destroy() }
 }
 
