@@ -100,7 +100,7 @@ export const classView = z.object({
   meanMilli: z.number().int().nullable(), maxMilli: z.number().int(),
   steps: z.array(classStep),
   slips: z.array(z.object({ key: z.string(), label: z.string(), stepNo: z.number().int(), students: z.number().int() })),
-  people: z.array(z.object({ membershipId: z.string(), name: z.string(), standing: labStanding, submissionId: z.string().nullable(), totalMilli: z.number().int().nullable(), lateDays: z.number().int().nullable() })),
+  people: z.array(z.object({ membershipId: z.string(), name: z.string(), standing: labStanding, submissionId: z.string().nullable(), totalMilli: z.number().int().nullable(), lateDays: z.number().int().nullable(), claimedSentAt: instant.nullable() })),
 })
 export type ClassView = z.infer<typeof classView>
 

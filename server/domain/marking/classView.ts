@@ -4,9 +4,9 @@ import type { ClassStep, ClassView } from '#shared/schemas/marks'
 import type { Read } from '../../db/writer'
 import { closingOf, personalDue } from '../submissions/lateness'
 import { standingOf } from '../submissions/workList'
-import { attemptsOfShares } from './attemptsOf'
+import { attemptsOfShares, type StoredAttempt } from './attemptsOf'
 import { heightBarOf, judgedAs, offsetInHalfWidths } from './heightBar'
-import { labTotal } from './labTotal'
+import { labTotal, type LabTotal } from './labTotal'
 import { stepsOfBody } from './markedStep'
 import { currentSteps, type StoredStep } from './readEvaluations'
 import { judgementOfRow, questionOfRow } from './storedEvaluation'
@@ -35,7 +35,7 @@ export async function classView(read: Read, postingId: string, now: number): Pro
     const terms = { dueAt: posting.due_at, allowedUntil: student.allowedUntil, zone: posting.zone, lateRule: rule }
     const closesAt = closingOf(terms)
     const standing = standingOf({ isWithdrawn: posting.state === 'withdrawn', standing: student.standing, hasSubmission: made.length > 0, releasedAt: posting.released_at, dueAt: personalDue(terms), closesAt, now })
-    return { membershipId: student.id, name: student.display_name ?? student.pseudonym, standing, submissionId: counts?.submissionId ?? null, totalMilli: counts?.totalMilli ?? null, lateDays: counts?.lateDays ?? null, maySubmit: made.length < posting.attempts && (closesAt === null || now <= closesAt) }
+    return { membershipId: student.id, name: student.display_name ?? student.pseudonym, standing, submissionId: counts?.submissionId ?? null, totalMilli: counts?.totalMilli ?? null, lateDays: counts?.lateDays ?? null, claimedSentAt: claimOf(made, counts), maySubmit: made.length < posting.attempts && (closesAt === null || now <= closesAt) }
   })
   const counted = people.filter(person => person.submissionId !== null && person.standing !== 'excused' && person.standing !== 'not_counted')
   const stored = await currentSteps(read, people.flatMap(person => person.submissionId ?? []))
@@ -51,6 +51,12 @@ export async function classView(read: Read, postingId: string, now: number): Pro
     steps, slips: slipsOf(steps, stored),
     people: people.map(({ maySubmit: _maySubmit, ...person }) => person),
   }
+}
+
+/** A late submission's claim to have been sent earlier, for staff to look at; the server's receipt decides. */
+function claimOf(made: readonly StoredAttempt[], counts: LabTotal | null): string | null {
+  const claimed = counts !== null && counts.lateDays > 0 ? made.find(attempt => attempt.submissionId === counts.submissionId)?.claimedSentAt ?? null : null
+  return claimed === null ? null : new Date(claimed).toISOString()
 }
 
 async function sharesOfMembers(read: Read, labId: string, membershipIds: readonly string[]): Promise<Map<string, string>> {

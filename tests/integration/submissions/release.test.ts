@@ -30,7 +30,7 @@ beforeEach(async () => {
   submissions = [
     (await handIn(stores, judging, course, { no: 0, key: 'key-00000000', at: onTime })).submissionId,
     (await handIn(stores, judging, course, { no: 1, key: 'key-00000001', at: onTime, answers: turned })).submissionId,
-    (await handIn(stores, judging, course, { no: 2, key: 'key-00000002', at: Date.parse('2026-10-17T20:00:00Z'), answers: { rate: '17 K/km' } })).submissionId,
+    (await handIn(stores, judging, course, { no: 2, key: 'key-00000002', at: Date.parse('2026-10-17T20:00:00Z'), claimedSentAt: onTime, answers: { rate: '17 K/km' } })).submissionId,
   ]
   await stores.write(trx => trx.insertInto('standing').values({ id: 's-1', membership_id: 'm-3', lab_id: 'lab-1', kind: 'excused', reason: 'ill', by_actor_id: 'm-lead', seq: 1 }).execute())
 })
@@ -65,6 +65,7 @@ describe('before release', () => {
     expect(view.slips[0]).toMatchObject({ stepNo: 1, students: 1 })
     expect(view.slips[0]?.key).not.toBe('unexplained')
     expect(view.slips.at(-1)).toMatchObject({ key: 'unexplained', stepNo: 1, students: 1 })
+    expect(view.people.map(person => person.claimedSentAt)).toEqual([null, null, new Date(onTime).toISOString(), null, null]) // K6
     const within = view.steps[0]?.dots.find(dot => dot.judged === 'within')
     expect(Math.abs(within?.offset ?? 9)).toBeLessThanOrEqual(1)
   })
