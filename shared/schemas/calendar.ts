@@ -1,11 +1,11 @@
 import { z } from 'zod'
 
 /** A date on the wall, `2026-10-28`, that exists. */
-export const localDate = z.string().regex(/^\d{4}-\d{2}-\d{2}$/, 'A date is written 2026-10-28.').refine(isDate, 'There is no such day.')
+export const localDate = z.string().regex(/^\d{4}-\d{2}-\d{2}$/, 'A date is written 2026-10-28.').refine(exists, 'There is no such day.')
 
 /** A date and a time of day on the wall, `2026-10-28T23:00`; which instant it is depends on the zone. */
 export const localDateTime = z.string().regex(/^\d{4}-\d{2}-\d{2}T([01]\d|2[0-3]):[0-5]\d$/, 'A time is written 2026-10-28T23:00.')
-  .refine(text => isDate(text.slice(0, 10)), 'There is no such day.')
+  .refine(text => exists(text.slice(0, 10)), 'There is no such day.')
 
 export const zoneName = z.string().trim().min(1).max(60).refine(isZone, 'Use the name of a time zone, such as America/Denver.')
 
@@ -26,10 +26,13 @@ export const termCalendar = z.object({
 })
 export type TermCalendar = z.infer<typeof termCalendar>
 
-function isDate(text: string): boolean {
+function exists(text: string): boolean {
   const instant = Date.parse(`${text}T00:00:00Z`)
   return !Number.isNaN(instant) && new Date(instant).toISOString().slice(0, 10) === text
 }
+
+/** True for a whole date that exists, such as a date field gives once it is filled. */
+export const isDateText = (text: string): boolean => /^\d{4}-\d{2}-\d{2}$/.test(text) && exists(text)
 
 /** 1 Monday … 7 Sunday. */
 export function weekdayOf(date: string): number {

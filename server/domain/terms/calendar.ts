@@ -53,13 +53,3 @@ export function moveDay(from: TermCalendar, to: TermCalendar, date: string): Mov
   }
   return { date: moved, from: place, to: teachingDayOf(to, moved), skipped, isPastEnd }
 }
-
-/** Teaching weeks between two dates: every week of which at least one weekday has classes. */
-export function teachingWeeksBetween(startsOn: string, endsOn: string, holidays: readonly Holiday[]): string[] {
-  const weeks: string[] = []
-  for (let monday = daysAfter(startsOn, 1 - day(startsOn).dayOfWeek); monday <= endsOn; monday = daysAfter(monday, 7)) {
-    const weekdays = [0, 1, 2, 3, 4].map(days => daysAfter(monday, days)).filter(date => date >= startsOn && date <= endsOn)
-    if (weekdays.some(date => !holidays.some(holiday => holiday.from <= date && date <= holiday.to))) weeks.push(monday)
-  }
-  return weeks
-}

@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { allowanceGrant } from '#shared/schemas/department'
+import { allowanceTold } from '#shared/schemas/departmentReplies'
 import { grantAllowance } from '../../../domain/terms/grantAllowance'
 import { askedBy } from '../../../utils/askedBy'
 import { defineApiHandler } from '../../../utils/defineApiHandler'
@@ -10,7 +11,7 @@ export default defineApiHandler({
   summary: 'Give a student a later due in one posting',
   params: z.object({ postingId: z.string() }),
   body: allowanceGrant,
-  reply: z.object({ dueAt: z.number().transform(at => new Date(at).toISOString()), told: z.string().nullable() }),
+  reply: allowanceTold,
   makes: true,
   status: 201,
   handle: asked => grantAllowance(useStores(), { ...askedBy(asked), postingId: asked.params.postingId, ...asked.body }, asked.now),

@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { enrolment } from '#shared/schemas/department'
+import { lateAddTold } from '#shared/schemas/departmentReplies'
 import { enrol } from '../../../../domain/terms/enrol'
 import { askedBy } from '../../../../utils/askedBy'
 import { defineApiHandler } from '../../../../utils/defineApiHandler'
@@ -10,10 +11,7 @@ export default defineApiHandler({
   summary: 'Take a person into a course in a role',
   params: z.object({ courseId: z.string() }),
   body: enrolment,
-  reply: z.object({
-    id: z.string(), notCounted: z.array(z.object({ labId: z.string(), title: z.string() })),
-    personalDue: z.array(z.object({ labId: z.string(), title: z.string(), dueAt: z.number().transform(at => new Date(at).toISOString()) })),
-  }),
+  reply: lateAddTold,
   makes: true,
   status: 201,
   handle: asked => enrol(useStores(), { ...askedBy(asked), courseId: asked.params.courseId, enrolment: asked.body }, asked.now),

@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { moveTold } from '#shared/schemas/departmentReplies'
 import { moveSection } from '../../../../domain/terms/memberships'
 import { askedBy } from '../../../../utils/askedBy'
 import { defineApiHandler } from '../../../../utils/defineApiHandler'
@@ -9,9 +10,7 @@ export default defineApiHandler({
   summary: 'Move a student to another section; the share stays and the later due counts',
   params: z.object({ membershipId: z.string() }),
   body: z.object({ sectionId: z.string() }),
-  reply: z.object({
-    keptDue: z.array(z.object({ labId: z.string(), title: z.string(), dueAt: z.number().transform(at => new Date(at).toISOString()) })), notPosted: z.array(z.object({ labId: z.string(), title: z.string() })),
-  }),
+  reply: moveTold,
   makes: true,
   handle: asked => moveSection(useStores(), { ...askedBy(asked), membershipId: asked.params.membershipId, sectionId: asked.body.sectionId }, asked.now),
 })

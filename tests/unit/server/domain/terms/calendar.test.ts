@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
-import { moveDay, teachingDayOf, teachingWeeksBetween } from '../../../../../server/domain/terms/calendar'
+import { moveDay, teachingDayOf } from '../../../../../server/domain/terms/calendar'
+import { teachingWeeksBetween } from '../../../../../shared/schemas/teachingWeeks'
 
 const fallBreak = { from: '2026-11-23', to: '2026-11-27', name: 'Fall break' }
 const fall = { weeks: teachingWeeksBetween('2026-08-24', '2026-12-11', [fallBreak]), holidays: [fallBreak] }
