@@ -1,0 +1,37 @@
+/** What each action of the ledger means, in words. One that is not here shows as it is written in the chain. */
+const words: Readonly<Record<string, string>> = {
+  'department.founded': 'The department was founded',
+  'person.invited': 'A person was invited',
+  'account.closed': 'An account was closed',
+  'account.reopened': 'An account was opened again',
+  'department_role.given': 'A role in the department was given',
+  'department_role.ended': 'A role in the department ended',
+  'term.created': 'A term was added',
+  'term.edited': 'A term’s dates were changed',
+  'term.opened': 'A term was opened',
+  'term.closed': 'A term was closed',
+  'term.rolled_over': 'A term was started from an earlier one',
+  'course.created': 'The course was added',
+  'course.edited': 'The course was changed',
+  'course.rolled_over': 'The course came along into a new term',
+  'section.created': 'A section was added',
+  'membership.started': 'Somebody came into the course',
+  'membership.moved': 'A student changed section',
+  'membership.sections': 'A TA’s sections changed',
+  'membership.ended': 'A membership ended',
+  'membership.late_add': 'A late start was settled',
+  'roster.carried_out': 'A roster was brought in',
+  'allowance.granted': 'A later due was given',
+  'lab.posted': 'A lab was posted',
+  'lab.withdrawn': 'A lab was withdrawn',
+  'share.redrawn': 'A share was drawn anew',
+  'submission.stored': 'Work was handed in and marked',
+  'marks.released': 'Marks were released',
+  'dispute.opened': 'A mark was disputed',
+  'dispute.file_added': 'A file was added to a dispute',
+  'dispute.taken': 'A dispute was taken up',
+  'dispute.ruled': 'A dispute was ruled on',
+}
+
+export const actionText = (action: string): string => words[action] ?? action
+export const isKnownAction = (action: string): boolean => action in words
