@@ -6,6 +6,7 @@ import { newId } from '../ids'
 import { appendEntry, courseChain } from '../ledger/appendEntry'
 import { freePseudonym } from '../people/pseudonym'
 import type { CourseRole } from '../policies'
+import { ensureShares } from '../shares/ensureShares'
 import { assertOpenTerm } from './assertOpenTerm'
 import { settleLateAdd, type LateAdd } from './settleLateAdd'
 
@@ -36,7 +37,9 @@ export async function startMembership(trx: Trx, membership: NewMembership, actor
     chain: courseChain(membership.courseId), at: now, actor: actorId, action: 'membership.started',
     facts: { membershipId: id, role: membership.role, sectionId: membership.sectionId, sectionIds: membership.sectionIds },
   })
-  const late = membership.sectionId === null ? { notCounted: [], personalDue: [] } : await settleLateAdd(trx, { membershipId: id, courseId: membership.courseId, sectionId: membership.sectionId, actorId }, now)
+  if (membership.sectionId === null) return { id, notCounted: [], personalDue: [] }
+  await ensureShares(trx, id, now)
+  const late = await settleLateAdd(trx, { membershipId: id, courseId: membership.courseId, sectionId: membership.sectionId, actorId }, now)
   return { id, ...late }
 }
 

@@ -4,6 +4,7 @@ import type { Stores, Trx } from '../../db/writer'
 import { doOnce, type Asked } from '../asked'
 import { newId } from '../ids'
 import { appendEntry, courseChain } from '../ledger/appendEntry'
+import { ensureShares } from '../shares/ensureShares'
 import { assertOpenTerm } from './assertOpenTerm'
 import { assertSection, replaceTaSections } from './enrol'
 
@@ -26,6 +27,7 @@ export async function moveStudent(trx: Trx, { membershipId, sectionId, actorId }
   if (from === null || from === sectionId) return { keptDue: [], notPosted: [] }
   await assertSection(trx, member.course_id, sectionId)
   await trx.updateTable('membership').set({ section_id: sectionId, version: member.version + 1 }).where('id', '=', member.id).execute()
+  await ensureShares(trx, member.id, now) // of labs that only the new section has; a share once given stays
   const moved = await keepLaterDues(trx, { membershipId: member.id, from, to: sectionId, actorId }, now)
   await appendEntry(trx, {
     chain: courseChain(member.course_id), at: now, actor: actorId, action: 'membership.moved',
