@@ -16,6 +16,7 @@ import { questionFor } from '../../../server/domain/shares/questionFor'
 import { redraw } from '../../../server/domain/shares/redraw'
 import { sha256Hex } from '../../../server/domain/shares/servedData'
 import { enrol } from '../../../server/domain/terms/enrol'
+import { moveSection } from '../../../server/domain/terms/memberships'
 import { newId } from '../../../server/domain/ids'
 import { openObservations, type Observations } from '../../../server/observations/chunks'
 import { climb, smallFlight } from '../../fixtures/smallFlight'
@@ -116,12 +117,23 @@ describe('a lab is written, checked and posted', () => {
     for (const member of members.toReversed()) await stores.write(trx => ensureShares(trx, member, now + 1))
     expect(await sharesOf(lab.id)).toEqual(before)
     const late = await student('Late Comer', department.sectionA)
-    const given = await stores.write(trx => ensureShares(trx, late, now + 2))
     const after = await sharesOf(lab.id)
     expect(after.filter(share => share.membershipId !== late)).toEqual(before)
-    const own = after.find(share => share.membershipId === late)
-    expect(own?.ordinal).toBe(before.length)
-    expect(given).toBeGreaterThanOrEqual(0)
+    expect(after.find(share => share.membershipId === late)?.ordinal).toBe(before.length)
+    expect(await stores.write(trx => ensureShares(trx, late, now + 2))).toBe(0)
+  })
+
+  it('gives who moves to another section a share of what only that section has, and leaves the others alone', async () => {
+    const mover = await student('Moving Student', department.sectionA)
+    await post(lab.id, 1, dates([department.sectionB]))
+    const before = await sharesOf(lab.id)
+    expect(before.some(share => share.membershipId === mover)).toBe(false)
+    await moveSection(stores, { ...department.asked, membershipId: mover, sectionId: department.sectionB }, now)
+    const after = await sharesOf(lab.id)
+    expect(after.slice(0, before.length)).toEqual(before)
+    expect(after.at(-1)?.membershipId).toBe(mover)
+    await moveSection(stores, { ...department.asked, membershipId: mover, sectionId: department.sectionA }, now)
+    expect(await sharesOf(lab.id)).toEqual(after)
   })
 
   it('keeps the shares of the first section when a second one joins', async () => {
