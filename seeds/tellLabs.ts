@@ -6,10 +6,11 @@ import type { CourseKey, Member } from './department'
 import { randomFrom } from './generator/arithmetic'
 import { LabRun, type LabDates } from './labRun'
 import { layers, layersOf, readyLab, type ReadyLab } from './labs'
+import { tellObjection } from './objecting'
 import { mainStudents, pastStudents, smallStudents, staff, type SeedPerson } from './people'
 import { termId, type Stage, type TermKey } from './stage'
 import { habitsOf } from './students'
-import { told, type StoriedLab } from './stories'
+import { objections, told, type StoriedLab } from './stories'
 
 const hour = 3_600_000
 const day = 24 * hour
@@ -86,6 +87,11 @@ function tellLab(stage: Stage, lab: Told): void {
     timeline.at(releasedAt, async (now) => {
       const { id, sections } = await course()
       for (const section of sections) await run.release(section.id, await department.membershipId(id, teacher), now)
+      const members = await department.members(id, seedsOf(lab))
+      for (const objection of objections.filter(told => told.lab === lab.name)) {
+        const member = members.find(known => known.key === objection.student)
+        if (member) tellObjection(timeline, { stores: workshop.stores, reference: workshop.judging.reference, department, until: workshop.now }, objection, member, { courseId: id, labId: run.labId, releasedAt })
+      }
     })
   }
 }
