@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto'
 import { z } from 'zod'
 import type { Read } from '../../db/writer'
-import type { LedgerEntryTable } from '../../db/schema/tables'
+import type { LedgerEntryTable, MarkTable } from '../../db/schema/tables'
 import { entryDigest } from './appendEntry'
 import { answersDigest, evaluationDigest, evaluationsDigest, marksDigest, rulingDigest, submissionDigest, type ColumnDigests } from './coveredDigests'
 
@@ -124,7 +124,7 @@ async function checkCovered(read: Read, entry: LedgerEntryTable, facts: Facts, c
   const marks = await read.selectFrom('mark').selectAll().where('ledger_chain', '=', entry.chain_id).where('ledger_seq', '=', entry.seq).execute()
   compare('mark', covers.marks, marksDigest(marks))
   if (covers.evaluations) {
-    const ids = marks.flatMap(mark => mark.evaluation_id ?? [])
+    const ids = await evaluationsThatCame(read, marks)
     const rows = ids.length === 0 ? [] : await read.selectFrom('evaluation').selectAll().where('id', 'in', ids).execute()
     compare('evaluation', covers.evaluations, evaluationsDigest(rows))
   }
@@ -133,6 +133,19 @@ async function checkCovered(read: Read, entry: LedgerEntryTable, facts: Facts, c
     compare('ruling', covers.ruling, row ? rulingDigest(row) : null)
   }
   return findings
+}
+
+/** A mark that a person changed by hand goes on from the evaluation of the mark before: that one came with another entry. */
+async function evaluationsThatCame(read: Read, marks: readonly MarkTable[]): Promise<string[]> {
+  const ids: string[] = []
+  for (const mark of marks) {
+    if (mark.evaluation_id === null) continue
+    const before = mark.version === 1
+      ? undefined
+      : await read.selectFrom('mark').select('id').where('submission_id', '=', mark.submission_id).where('step_key', '=', mark.step_key).where('version', '<', mark.version).where('evaluation_id', '=', mark.evaluation_id).executeTakeFirst()
+    if (!before) ids.push(mark.evaluation_id)
+  }
+  return ids
 }
 
 /** Every mark in force is the ledger's last word on it, and every word has its mark. */

@@ -103,6 +103,7 @@ describe('ruling', () => {
     expect(await codeOf(rule(right, ruler('ann'), { kind: 'change', reason: 'x', pointsMilli: 1000 }))).toBe('points_out_of_range')
     await rule(disputeId, ruler('ann'), { kind: 'change', reason: 'The working is sound.', pointsMilli: 2000 })
     expect(await Promise.all([0, 1, 2, 3, 4].map(no => points(no)))).toEqual([3000, 0, 0, 2000, 0])
+    expect((await auditLedger(stores.read)).findings).toEqual([])
   })
 
   it('accepting a reading raises all who did the same, asked or not, and settles what they asked', async () => {
