@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { refuse } from '#shared/errors'
+import { placesReply } from '#shared/schemas/runningHead'
 import { describePlaces } from '../../../domain/people/describePlaces'
 import { defineApiHandler } from '../../../utils/defineApiHandler'
 import { useStores } from '../../../utils/useStores'
@@ -8,6 +9,6 @@ export default defineApiHandler({
   action: 'course:read',
   summary: 'What waits at the places of a course, and its teaching week',
   params: z.object({ courseId: z.string() }),
-  reply: z.object({ week: z.number().int().nullable(), counts: z.object({ due: z.number().int(), open: z.number().int(), fresh: z.number().int() }) }),
+  reply: placesReply,
   handle: ({ acting, params, now }) => describePlaces(useStores().read, { acting: acting ?? refuse('not_found'), courseId: params.courseId }, now),
 })
