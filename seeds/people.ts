@@ -24,7 +24,7 @@ export const mainStudents: readonly SeedPerson[] = [
   person('siobhan.kilcarragh', 'Siobhán Kilcarragh'), person('farid.nazarov', 'Farid Nazarov'), person('hoku.kealamakia', 'Hōkū Kealamakia'), person('greta.osterlund', 'Greta Österlund'),
   person('tariq.al-mansouri', 'Tariq al-Mansouri'), person('ines.carvalhal', 'Inês Carvalhal'), person('wojciech.zdanowski', 'Wojciech Zdanowski'), person('leilani.fonoti', 'Leilani Fonoti'),
   person('ravi.sundaresan', 'Ravi Sundaresan'), person('chloe.beaurivage', 'Chloé Beaurivage-Whitcombe'), person('mateo.quispe', 'Mateo Quispe'), person('nadia.hrytsenko', 'Nadia Hrytsenko'),
-  person('kofi.ansah', 'Kofi Ansah'), person('elspeth.mcquarrie', 'Elspeth McQuarrie'), person('bao.trinh', 'Bảo Trịnh'), person('yildiz.karaca', 'Yıldız Karaca'),
+  person('kofi.amponsem', 'Kofi Amponsem'), person('elspeth.mcquarrie', 'Elspeth McQuarrie'), person('bao.trinh', 'Bảo Trịnh'), person('yildiz.karaca', 'Yıldız Karaca'),
   person('samuel.redfern', 'Samuel Redfern'), person('ayelet.ronen', 'Ayelet Ronen'), person('dmitri.volkonin', 'Dmitri Volkonin'), person('zanele.mokoatle', 'Zanele Mokoatle'),
   person('oskar.wikander', 'Oskar Wikander'), person('paloma.ibarrondo', 'Paloma Ibarrondo'), person('june.halvarson', 'June Halvarson'), person('arjun.mehrotra', 'Arjun Mehrotra'),
   person('freya.damgaard', 'Freya Damgaard'), person('luca.pellegrinelli', 'Luca Pellegrinelli'),

@@ -10,14 +10,14 @@ export type StoriedLab = 'past-inversion' | 'past-weighing' | 'past-heat' | 'pas
 export const told: Partial<Record<StoriedLab, Readonly<Record<string, Readonly<Record<string, Doing>>>>>> = {
   'past-inversion': {
     'cyrus.bahrami': { 'rate-ends': slip('sign'), 'rate-fit': { does: 'right' } },
-    'kirsi.lahdelma': { 'theta-top': slip('station-pressure') },
+    'kirsi.lahdelma': { 'theta-base': slip('station-pressure'), 'theta-top': slip('station-pressure') },
   },
   'past-heat': { 'liam.ockendon': { 'lifted-work': slip('sign') } },
   'inversion': {
     'farid.nazarov': { 'rate-ends': slip('sign'), 'rate-fit': { does: 'right' } },
     'ines.carvalhal': { 'rate-ends': slip('sign') },
     'bao.trinh': { 'rate-ends': slip('sign') },
-    'elspeth.mcquarrie': { 'theta-top': slip('station-pressure') },
+    'elspeth.mcquarrie': { 'theta-base': slip('station-pressure'), 'theta-top': slip('station-pressure') },
     'mateo.quispe': { parcel: slip('standard-atmosphere') },
     'amara.oyelaran': Object.fromEntries(['rate-ends', 'rate-fit', 'fit-error', 'stability', 'theta-base', 'theta-top', 'dry-rate', 'parcel'].map(step => [step, { does: 'right' } as const])),
   },
@@ -33,7 +33,7 @@ export const told: Partial<Record<StoriedLab, Readonly<Record<string, Readonly<R
     'amara.oyelaran': { heat: { does: 'right' }, work: slip('cp-for-r') },
     'ravi.sundaresan': { 'heat': slip('cv-for-cp'), 'internal': slip('cp-for-cv'), 'lifted-work': slip('sign') },
   },
-  'small-weighing': { 'linnea.castellan': { 'theta-top': slip('station-pressure') }, 'roya.farahani': { thickness: { does: 'miscalculated' } } },
+  'small-weighing': { 'linnea.castellan': { 'theta-base': { does: 'right' }, 'theta-top': slip('station-pressure') }, 'roya.farahani': { thickness: { does: 'miscalculated' } } },
 }
 
 export interface Objection {
@@ -51,7 +51,7 @@ export interface Objection {
 export const objections: readonly Objection[] = [
   {
     lab: 'past-inversion', student: 'cyrus.bahrami', step: 'rate-ends', after: 26,
-    words: 'The temperature goes up with height in my layer, and that is what my positive number says. My fitted rate two lines below has the other sign and got full marks, so I clearly know which way it goes.',
+    words: 'The temperature goes up with height in my layer, and that is what my positive number says. My fitted rate in the next step has the other sign and got full marks, so I clearly know which way it goes.',
     ruled: { after: 50, by: staff.formerTa, role: 'ta', kind: 'uphold', reason: 'The line above the field says that the rate is positive where it gets colder with height. Your layer gets warmer, so the rate is negative. The step after this one shows that you know it; the mark for this one still goes by what was asked.' },
   },
   {
@@ -71,8 +71,8 @@ export const objections: readonly Objection[] = [
   },
   {
     lab: 'inversion', student: 'elspeth.mcquarrie', step: 'theta-top', after: 30,
-    words: 'My value is only about 2.7 K away from the worked one, and the difference between base and top is right to the digit. I think it deserves the marks.',
-    ruled: { after: 51, by: staff.otherTa, role: 'ta', kind: 'uphold', reason: 'Your value refers to the pressure of the station. The difference survives that, the value does not: it was asked at 1000 hPa, and no rounding or choice of constants comes near 2.7 K.' },
+    words: 'My value is only a few kelvins away from the worked one, and the difference between base and top is right to the digit. I think it deserves the marks.',
+    ruled: { after: 51, by: staff.otherTa, role: 'ta', kind: 'uphold', reason: 'Your value refers to the pressure of the station. The difference survives that, the value does not: it was asked at 1000 hPa, and no rounding or choice of constants comes near the difference.' },
   },
   {
     lab: 'inversion', student: 'mateo.quispe', step: 'parcel', after: 47,
