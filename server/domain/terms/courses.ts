@@ -1,8 +1,10 @@
 import { refuse } from '#shared/errors'
 import type { LateRule } from '#shared/schemas/lab'
+import { closed1004 } from '#shared/thermo/conventions/closed1004'
 import type { Stores, Trx } from '../../db/writer'
 import { doOnce, type Asked } from '../asked'
 import { newId } from '../ids'
+import { ensureConvention } from '../labs/conventions'
 import { appendEntry, courseChain } from '../ledger/appendEntry'
 import { assertOpenTerm } from './assertOpenTerm'
 import { insertMembership } from './enrol'
@@ -14,7 +16,7 @@ export interface CourseDraft {
   /** Codes under which other departments list the same course. */
   alsoListedAs: readonly string[]
   lateRule: LateRule
-  /** The set of constants and formulae it teaches with; the department's newest one where none is named. */
+  /** The set of constants and formulae it teaches with; the house's own where none is named. */
   conventionRevisionId: string | null
   sections: readonly string[]
   leadPersonId: string | null
@@ -28,7 +30,7 @@ export function createCourse({ write }: Stores, input: Asked & { course: CourseD
     const alsoListedAs = await freeCodes(trx, { termId: course.termId, courseId: null, code: course.code, alsoListedAs: course.alsoListedAs })
     const id = newId(now)
     await trx.insertInto('course').values({
-      id, term_id: course.termId, code: course.code, title: course.title, ancestor_id: null, convention_revision_id: await conventionRevision(trx, course.conventionRevisionId),
+      id, term_id: course.termId, code: course.code, title: course.title, ancestor_id: null, convention_revision_id: await conventionRevision(trx, course.conventionRevisionId, now),
       state: 'open', late_rule_json: JSON.stringify(course.lateRule), version: 1,
     }).execute()
     await insertListings(trx, id, alsoListedAs)
@@ -113,9 +115,9 @@ async function freeCodes(trx: Trx, { termId, courseId, code, alsoListedAs }: { t
 /** "ATM 301" and "atm301" are one code. */
 const codeKey = (code: string): string => code.replace(/[\s-]+/g, '').toLowerCase()
 
-async function conventionRevision(trx: Trx, id: string | null): Promise<string> {
-  let query = trx.selectFrom('convention_revision').select('id')
-  if (id !== null) query = query.where('id', '=', id)
-  const found = await query.orderBy('no', 'desc').executeTakeFirst()
+/** The revision that was named, or that of the house's own convention. */
+async function conventionRevision(trx: Trx, id: string | null, now: number): Promise<string> {
+  if (id === null) return (await ensureConvention(trx, closed1004, now)).id
+  const found = await trx.selectFrom('convention_revision').select('id').where('id', '=', id).executeTakeFirst()
   return found?.id ?? refuse('not_found')
 }
