@@ -1,4 +1,5 @@
 import { defineStore } from 'pinia'
+import type { SavedDraft } from '#shared/schemas/work'
 import { readProblem } from '~/composables/readProblem'
 import { keepUnsent, unsentOf, type Unsent } from '~/composables/unsentText'
 
@@ -98,7 +99,7 @@ export const useDraftStore = defineStore('draft', () => {
     field.state = 'saving'
     sending.add(key)
     try {
-      const saved = await $fetch(`/api/shares/${who.shareId}/drafts/${key}`, { method: 'PUT', body: { typed, baseVersion: field.saved.version } })
+      const saved = await $fetch<SavedDraft>(`/api/shares/${who.shareId}/drafts/${key}`, { method: 'PUT', body: { typed, baseVersion: field.saved.version } })
       field.saved = { typed: saved.typed, version: saved.version, savedAt: saved.savedAt }
       field.state = field.typed === typed ? 'saved' : 'typing'
       silentSince.value = null
