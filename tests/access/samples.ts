@@ -18,13 +18,15 @@ const placed: Record<string, { reaches: Named['reaches'], isOfLab: boolean }> = 
 }
 /** Objects of the department: who may is decided by the role alone. */
 const unplaced = ['membershipId', 'personId', 'termId', 'roleId']
-/** Names inside an object, which must be one that it has. */
-const inside: Record<string, string> = { stepKey: 'rate', step: 'rate', digest: 'ab'.repeat(32) }
+/** Names inside an object, which must be one that it has: another object's name for it is a missing one. */
+const inside: Record<string, string | null> = { stepKey: 'rate', digest: null }
 
 export interface Cell { where: string, path: string, named: Named, /** The object exists and every parameter is its own. */ isWhole: boolean }
 
+const nonsense = ['%00', '../../etc/passwd', '\' or 1=1 --', '__proto__', 'x'.repeat(3000), '0']
+
 /** Every way to fill a route's parameters: with each object of the world, with one that is not there, with nonsense, and with parts of two objects. */
-export function cellsOf(pattern: string, world: World): Cell[] {
+export function cellsOf(pattern: string, world: World, nonsenses = nonsense): Cell[] {
   const names = [...pattern.matchAll(/\{(\w+)\}/g)].map(match => match[1]!)
   const unknown = names.filter(name => !(name in placed) && !unplaced.includes(name) && !(name in inside))
   if (unknown.length > 0) throw new Error(`${pattern}: say in tests/access/samples.ts what the parameter "${unknown[0]}" names.`)
@@ -42,10 +44,10 @@ export function cellsOf(pattern: string, world: World): Cell[] {
     if (!cells.some(cell => cell.path === path)) cells.push({ where, path, named: { object, isNothing, ...kind }, isWhole: true })
   }
   const missing = { object: null, isNothing, ...kind }
-  cells.push({ where: 'missing', path: fill(name => inside[name] ?? '0190a1b2-0000-7000-8000-000000000000'), named: missing, isWhole: false })
-  for (const nonsense of ['%00', '../../etc/passwd', '\' or 1=1 --', '__proto__', 'x'.repeat(3000), '0']) cells.push({ where: `nonsense ${nonsense.slice(0, 12)}`, path: fill(() => nonsense), named: missing, isWhole: false })
+  cells.push({ where: 'missing', path: fill(name => inside[name] ?? (name === 'digest' ? 'ab'.repeat(32) : '0190a1b2-0000-7000-8000-000000000000')), named: missing, isWhole: false })
+  for (const text of nonsenses) cells.push({ where: `nonsense ${text.slice(0, 12)}`, path: fill(() => text), named: missing, isWhole: false })
   const [outer] = names.filter(name => name in placed)
-  if (outer !== undefined && names.filter(name => name in placed).length > 1) {
+  if (outer !== undefined && names.filter(name => name in placed || inside[name] === null).length > 1) {
     const own = world.objects.own!
     const foreign = world.objects.otherCourses!
     cells.push({ where: 'own course, other course’s object', path: fill(name => (name === outer ? valueOf(own, name) : valueOf(foreign, name)) ?? '0'), named: missing, isWhole: false })

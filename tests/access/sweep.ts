@@ -50,7 +50,8 @@ export async function sweep({ url, operations, world, browsers, actors }: SweepO
       // Ending one's own sessions would end the sweep for that person; its refusals are still asked for.
       if (policy.scope === 'session' && isBare(operation) && operation.method !== 'GET' && person && !person.isClosed) continue
       const refusals: { where: string, said: string }[] = []
-      const list = cellsOf(operation.path, world)
+      // Nonsense is read before anybody's role is: a few people are enough to send it.
+      const list = cellsOf(operation.path, world, ['nobody', 'student', 'lead', 'admin'].includes(actor) ? undefined : ['0'])
       cells += list.length
       tasks.push(async () => {
         for (const cell of list) {
