@@ -11,7 +11,7 @@ const quiet = 450 // ms without a key before the server is asked for a preview
 export function useLabEditor(lab: Ref<EditedLab>) {
   const draft = ref<LabDraft>(draftOf(lab.value.revision.body))
   const version = ref(lab.value.version)
-  const preview = ref<Preview>({ html: '', asks: lab.value.asks, stepHtml: {}, problems: lab.value.problems })
+  const preview = ref<Preview>({ html: lab.value.html, asks: lab.value.asks, stepHtml: lab.value.stepHtml, problems: lab.value.problems })
   const isKept = ref(true)
   const isKeeping = ref(false)
   const failure = ref<unknown>(null)
@@ -38,7 +38,6 @@ export function useLabEditor(lab: Ref<EditedLab>) {
     clearTimeout(timer)
     timer = setTimeout(askPreview, quiet)
   }, { deep: true })
-  onMounted(askPreview)
   onBeforeUnmount(() => clearTimeout(timer))
 
   async function keep(): Promise<boolean> {

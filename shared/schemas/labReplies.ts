@@ -25,7 +25,7 @@ export const labEditReply = z.object({
   id: z.string(), courseId: z.string(), title: z.string(), state: labState, version: z.number(), zone: z.string(),
   revision: z.object({ id: z.string(), no: z.number(), isFrozen: z.boolean(), body: labBody }),
   convention: z.object({ title: z.string(), source: z.string(), constants: z.record(z.string(), z.number()) }),
-  asks: z.record(z.string(), z.string()),
+  html: z.string(), stepHtml: z.record(z.string(), z.string()), asks: z.record(z.string(), z.string()),
   problems: z.array(fieldProblem),
   courseLateRule: lateRule,
   sections: z.array(z.object({ id: z.string(), name: z.string(), students: z.number() })),

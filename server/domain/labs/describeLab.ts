@@ -4,6 +4,7 @@ import type { Read } from '../../db/writer'
 import type { Observations } from '../../observations/chunks'
 import { bindingProblems } from './bindingProblems'
 import { prepareLab } from './prepareLab'
+import { renderLabText } from './renderLabText'
 import { generalAsks } from './writeRevision'
 
 /** A lab as its authors see it: what they wrote, the asks printed from it, what is not bound yet, and where it is posted. */
@@ -21,6 +22,8 @@ export async function describeLab(read: Read, observations: Observations, labId:
     id: lab.id, courseId: lab.courseId, title: lab.title, state: lab.state, version: lab.version, zone,
     revision: { id: revision.id, no: revision.no, isFrozen: revision.frozenAt !== null, body: revision.body },
     convention: { title: convention.title, source: convention.source, constants: convention.constants },
+    html: renderLabText(revision.body.text),
+    stepHtml: Object.fromEntries(revision.body.steps.map(step => [step.key, step.text === '' ? '' : renderLabText(step.text)])),
     asks: generalAsks(revision.body, convention),
     problems: bindingProblems(prepared),
     courseLateRule: lateRule.parse(JSON.parse(course.late_rule_json)),
