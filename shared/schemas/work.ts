@@ -60,7 +60,8 @@ export type WorkListEntry = z.infer<typeof workListEntry>
 export const submissionListEntry = z.object({ submissionId: z.string(), attempt: z.number().int(), receiptNo: z.string(), at: z.iso.datetime(), lateDays: z.number().int() })
 export type SubmissionListEntry = z.infer<typeof submissionListEntry>
 
-export const servedColumn = z.object({ name: z.string(), quantity: z.string(), unit: z.string(), texts: z.array(z.string()), values: z.array(z.number().nullable()) })
+/** A column with the digits of its file; an empty text is a missing value. */
+export const servedColumn = z.object({ name: z.string(), quantity: z.string(), unit: z.string(), texts: z.array(z.string()) })
 
 export const workStep = z.object({
   key: stepKey, no: z.number().int(), title: z.string(), ask: z.string(), textHtml: z.string(), pointsMilli: z.number().int(), unit: z.string(), digits: z.number().int(),

@@ -35,7 +35,7 @@ export async function readWork(read: Read, loadShare: (shareId: string) => Promi
       key: step.key, no: at + 1, title: step.title, ask: loaded.asks[step.key] ?? step.title, textHtml: step.text === '' ? '' : renderLabText(step.text), pointsMilli: step.pointsMilli, unit: step.unit, digits: step.digits,
       from: [...new Set(Object.values(step.inputs).flatMap(source => source.from === 'step' ? numberOf.get(source.key) ?? [] : []))].sort((a, b) => a - b),
     })),
-    rows: { times: [...loaded.rows.times], use: [...loaded.rows.use], columns: loaded.rows.columns.map(column => ({ name: column.name, quantity: column.quantity, unit: column.unit, texts: [...column.texts], values: [...column.values] })) },
+    rows: { times: [...loaded.rows.times], use: [...loaded.rows.use], columns: loaded.rows.columns.map(column => ({ name: column.name, quantity: column.quantity, unit: column.unit, texts: [...column.texts] })) },
     drafts,
     made,
     stopped: stoppedBy(ground, now), now: new Date(now).toISOString(),
