@@ -19,9 +19,22 @@ const headBytes = 16
 
 if (new Uint8Array(new Uint16Array([1]).buffer)[0] !== 1) throw new Error('Chunks are little-endian; this machine is not.')
 
-export function encodeValues(day: DayValues): Buffer {
+/** Memory that is used again for each chunk: valid until the next one is written into it. */
+export class ChunkScratch {
+  private memory = new ArrayBuffer(0)
+
+  take(size: number): Buffer {
+    if (this.memory.byteLength < size) this.memory = new ArrayBuffer(size * 2)
+    return Buffer.from(this.memory, 0, size)
+  }
+}
+
+/** @param scratch where to write; the bytes are valid until it is used again */
+export function encodeValues(day: DayValues, scratch?: ChunkScratch): Buffer {
   const rows = day.time.length
-  const bytes = Buffer.alloc(headBytes + 8 * rows * (2 + day.columns.length))
+  const size = headBytes + 8 * rows * (2 + day.columns.length)
+  const bytes = scratch ? scratch.take(size) : Buffer.alloc(size)
+  bytes.writeUInt32LE(0, 12)
   bytes.writeUInt32LE(valuesMark, 0)
   bytes.writeUInt32LE(rows, 4)
   bytes.writeUInt32LE(day.columns.length, 8)

@@ -1,5 +1,5 @@
 import type { ObservationsWriter } from './chunks'
-import { cellsPerDay, decodeValues, encodeFlags, encodeMonth, encodeValues, type DayValues, type MonthDay } from './form'
+import { cellsPerDay, ChunkScratch, decodeValues, encodeFlags, encodeMonth, encodeValues, type DayValues, type MonthDay } from './form'
 import { putRoot, type Root, type StoredColumn } from './root'
 
 const dayMs = 86_400_000
@@ -10,7 +10,10 @@ export class OpenDays {
   private readonly days = new Set<OpenDay>()
   private cells = 0
 
-  constructor(private readonly mostCells = 1_500_000) {}
+  constructor(private readonly mostCells = 400_000) {}
+
+  /** Chunks are written here one after the other. */
+  readonly scratch = new ChunkScratch()
 
   touch(day: OpenDay): void {
     this.days.delete(day)
@@ -50,6 +53,7 @@ export interface RecordForm { kind: 'station' | 'flight', isInterval: boolean, h
 export class RecordWriter {
   private readonly open = new Map<number, DayBuffer>()
   private readonly stored = new Map<number, { sha256: Buffer, isNew: boolean, rows: number }>()
+  private readonly spare: Float64Array[][] = []
   private current: DayBuffer | null = null
   rowCount = 0
 
@@ -108,30 +112,39 @@ export class RecordWriter {
   }
 
   private openDay(key: number): DayBuffer {
-    const day = new DayBuffer(key, this.form.columnCount, () => this.flush(day))
+    const day = new DayBuffer(key, this.spare.pop() ?? emptyParts(this.form.columnCount), () => this.flush(day))
     this.open.set(key, day)
+    this.days.grew(day.cells, day)
     return day
   }
 
   private flush(day: DayBuffer): void {
     const earlier = this.stored.get(day.key)
     const values = day.sorted(earlier ? decodeValues(this.observations.getChunk(earlier.sha256).bytes) : null)
-    const { sha256, isNew } = this.observations.putChunk('values', encodeValues(values))
+    const { sha256, isNew } = this.observations.putChunk('values', encodeValues(values, this.days.scratch))
     if (earlier?.isNew && !earlier.sha256.equals(sha256)) this.observations.dropChunk(earlier.sha256)
     this.stored.set(day.key, { sha256, isNew, rows: values.time.length })
     this.open.delete(day.key)
     this.days.closed(day, day.cells)
     if (this.current === day) this.current = null
+    if (this.spare.length < mostSpare) this.spare.push(day.takeParts())
   }
 }
 
-class DayBuffer implements OpenDay {
-  private capacity = 0
-  private count = 0
-  private parts: Float64Array[]
+/** Arrays of closed days that the next ones use again. */
+const mostSpare = 4
+const emptyParts = (columnCount: number): Float64Array[] => Array.from({ length: columnCount + 2 }, () => new Float64Array(0))
 
-  constructor(readonly key: number, columnCount: number, readonly flush: () => void) {
-    this.parts = Array.from({ length: columnCount + 2 }, () => new Float64Array(0))
+class DayBuffer implements OpenDay {
+  private capacity: number
+  private count = 0
+
+  constructor(readonly key: number, private parts: Float64Array[], readonly flush: () => void) {
+    this.capacity = parts[0]!.length
+  }
+
+  takeParts(): Float64Array[] {
+    return this.parts
   }
 
   get cells(): number {
