@@ -65,7 +65,7 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
     await page.getByRole('heading', { name: 'Imported' }).waitFor()
     await page.getByRole('link', { name: 'Flight of the chain' }).click()
     await page.getByRole('heading', { level: 1, name: 'Flight of the chain' }).waitFor()
-    await page.locator('svg[role=img]').first().waitFor()
+    await page.locator('main figure svg path.d1').first().waitFor()
   })
 
   it('an instructor writes a lab on it, looks at every share, and posts it', async () => {
@@ -124,7 +124,9 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
     await Promise.race([ask.click({ timeout: 3_000 }).catch(() => {}), page.getByText('Received.').waitFor()])
     await page.getByText('Received.').waitFor()
     await page.getByRole('link', { name: 'Open the receipt' }).click()
-    await page.getByText(/[0-9a-f]{64}/).first().waitFor()
+    await page.waitForURL(/\/receipt\//)
+    await page.getByRole('heading', { level: 1 }).waitFor()
+    expect((await page.locator('main').innerText()).replace(/\s/g, '')).toMatch(/[0-9a-f]{64}/)
   })
 
   it('nothing is told before release; the instructor sees the class and releases', async () => {
@@ -136,6 +138,8 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
     await page.getByRole('link', { name: title }).click()
     await page.waitForURL(/\/labs\/[^/]+$/)
     await go(page, `${new URL(page.url()).pathname}/class`)
+    await page.getByLabel('section', { exact: true }).selectOption({ label: section.name })
+    await page.getByText(new RegExp(`section ${section.name}$`)).waitFor()
     await page.getByRole('button', { name: 'Release marks' }).click()
     await page.getByRole('dialog').getByRole('button', { name: 'Release marks' }).click()
     await page.getByText(/^Released /).waitFor()
