@@ -1,5 +1,8 @@
+import { Kysely } from 'kysely'
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import { refuse } from '../../../shared/errors'
+import { HouseDialect } from '../../../server/db/dialect'
+import type { Database } from '../../../server/db/schema/tables'
 import { groupWriter } from '../../../server/db/writer'
 import { temporaryStores, type TemporaryStores } from '../../fixtures/temporaryStores'
 
@@ -25,12 +28,12 @@ describe('the writer', () => {
 
   it('joins what waits at the same time into one transaction', async () => {
     let commits = 0
-    const prepare = stores.raw.prepare.bind(stores.raw)
-    stores.raw.prepare = ((source: string) => {
-      if (/^commit/i.test(source)) commits++
-      return prepare(source)
-    }) as typeof stores.raw.prepare
-    await Promise.all(Array.from({ length: 64 }, (_, at) => put(`k${at}`)))
+    const counting = new Kysely<Database>({ dialect: new HouseDialect({ database: { close: () => {}, prepare: (text) => {
+      if (/^commit/i.test(text)) commits++
+      return stores.raw.prepare(text)
+    } } }) })
+    const write = groupWriter(counting)
+    await Promise.all(Array.from({ length: 64 }, (_, at) => write(trx => trx.insertInto('installation').values({ key: `k${at}`, value_json: '1' }).execute())))
     expect(await keys()).toHaveLength(64)
     expect(commits).toBe(1)
   })
