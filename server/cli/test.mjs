@@ -29,12 +29,13 @@ if (wants('rooms')) check('rooms', [bin('depcruise'), 'shared', 'server', 'pages
 if (wants('types')) check('types', [bin('nuxt'), 'typecheck'])
 if (wants('unit')) suite('unit')
 if (wants('integration')) suite('integration')
-if (wants('server') || wants('browser')) {
+if (wants('server') || wants('browser') || only === 'pages') {
   const tools = findTools()
   buildWhenNeeded()
   tools.DEMO_WORLD = demoWorld()
   if (wants('server')) suite('server', tools)
   if (wants('browser')) suite('browser', tools)
+  if (only === 'pages') suite('pages', tools)
   rmSync(tools.DEMO_WORLD, { recursive: true, force: true })
 }
 
