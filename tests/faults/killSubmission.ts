@@ -23,10 +23,11 @@ const killed = ['pwrite64', 'fsync', 'fdatasync'] as const
  * R1: a submission is sent while the server is killed at its Nth write or sync, for every N until the submission gets through
  * without being met. After each: the store is sound, what was acknowledged is there once, and a retry under the same key gets one receipt.
  */
-export async function killSubmission({ entry, most = 200 }: { entry?: string, most?: number } = {}): Promise<KillReport> {
+export async function killSubmission({ entry, from = 1, most = 200, step = 1, isControl = false }: { entry?: string, from?: number, most?: number, step?: number, isControl?: boolean } = {}): Promise<KillReport> {
   const world = demoWorld()
   const report: KillReport = { points: 0, acknowledged: 0, storedUnanswered: 0, lost: 0, half: 0, slowestRestartMs: 0, wrong: [] }
-  for (let n = 1; n <= most; n++) {
+  for (let n = from; n <= most; n += step) {
+    if (isControl && report.lost > 0) return report
     const dataDir = copyOf(world)
     const options = { dataDir, env: { DEMO: '1' }, ...(entry ? { wrap: (command: string[]) => [command[0]!, entry] } : {}) }
     const server = await startBuiltServer(options)

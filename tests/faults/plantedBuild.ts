@@ -8,10 +8,10 @@ const output = fileURLToPath(new URL('../../.output', import.meta.url))
 /** A bug that a detector must see: a piece of the built server's text, and what stands there instead. */
 export interface Plant { find: string, put: string }
 
-/** The writer that answers before its transaction is on the disk: what a submission must never meet. */
+/** The writer that answers a submission before its transaction is on the disk: what must never be. Other work is answered as ever, so that signing in goes on. */
 export const answerBeforeCommit: Plant = {
   find: 'settle.push(() => job.resolve(value));',
-  put: 'job.resolve(value); await new Promise((later) => setTimeout(later, 40));',
+  put: 'if (value && value.receipt) { job.resolve(value); await new Promise((later) => setTimeout(later, 400)); } else settle.push(() => job.resolve(value));',
 }
 
 /** A copy of the built server with a bug in it; its entry and how to remove it. The product itself has no seam for this. */

@@ -17,9 +17,9 @@ if (spawnSync('strace', ['-V'], { stdio: 'ignore' }).status !== 0) {
 }
 
 if (only === null || only.includes('R1')) {
-  const sound = await killSubmission({ most: isShort ? 60 : 400 })
+  const sound = await killSubmission(isShort ? { most: 60, step: 4 } : { most: 400 })
   const planted = plantedBuild(answerBeforeCommit)
-  const control = await killSubmission({ entry: planted.entry, most: 12 })
+  const control = await killSubmission({ entry: planted.entry, from: 3, most: 60, step: 3, isControl: true })
   planted.remove()
   const bad = badOf(sound)
   figures.push({
