@@ -11,7 +11,8 @@ export interface RunningWorker { ended: Promise<ImportMessage>, kill: () => Prom
  * read through tsx. The address is looked up at each start: in a built server the module's own one is known only after start-up.
  */
 export function startImportWorker(task: ImportTask, onProgress: (message: Extract<ImportMessage, { is: 'progress' }>) => void, file = workerFile()): RunningWorker {
-  const options = { workerData: task, resourceLimits: { maxOldGenerationSizeMb: 256 } }
+  // A small young generation: an import makes many short-lived values, and a large one would only let them pile up.
+  const options = { workerData: task, resourceLimits: { maxOldGenerationSizeMb: 256, maxYoungGenerationSizeMb: 6 } }
   const worker = file.pathname.endsWith('.ts') ? new Worker(throughTsx(file), { ...options, eval: true }) : new Worker(file, options)
   const ended = new Promise<ImportMessage>((resolve, reject) => {
     worker.on('message', (message: ImportMessage) => message.is === 'progress' ? onProgress(message) : resolve(message))
