@@ -1,6 +1,8 @@
+import { createHash } from 'node:crypto'
 import { existsSync, readFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { build } from 'esbuild'
+import { referenceVersion } from '../../shared/marking/version'
 
 export interface BundledReference { bundle: string, goldenSha256: string }
 
@@ -27,9 +29,8 @@ export async function bundleReference(root: string): Promise<BundledReference> {
   return { bundle, goldenSha256: goldenOf(root) }
 }
 
-/** The digest over the seeded judgements that this build gives, as the repository keeps it; 64 zeros where none is kept yet. */
+/** The SHA-256 of the file of seeded judgements that the repository keeps for this version; 64 zeros where none is kept yet. */
 function goldenOf(root: string): string {
-  const file = join(root, 'server/reference/golden.sha256')
-  const kept = existsSync(file) ? /^[0-9a-f]{64}/.exec(readFileSync(file, 'utf8'))?.[0] : undefined
-  return kept ?? '0'.repeat(64)
+  const file = join(root, `server/reference/golden/${referenceVersion}.sha256`)
+  return existsSync(file) ? createHash('sha256').update(readFileSync(file)).digest('hex') : '0'.repeat(64)
 }

@@ -6,7 +6,7 @@
 import type { Inputs, QuantityDefinition } from '../thermo/definition'
 import { evaluateQuantity } from '../thermo/evaluate'
 import type { Unit } from '../units/ucum'
-import { acceptedWays } from './alternatives'
+import { acceptedWays, valuesOfWays } from './alternatives'
 import { outwardDecimals } from './decimalEdges'
 import { halfUnitAsked } from './rounding'
 import type { Band, BandPart, Granted, StepQuestion } from './types'
@@ -23,24 +23,14 @@ export class QuestionFault extends Error {
 export function referenceOf(definition: QuantityDefinition, question: StepQuestion, inputs: Inputs) {
   const [own] = acceptedWays(definition, question.convention, question.variant)
   if (!own) throw new Error('a question has its own way')
-  return { outcome: evaluateQuantity(definition, inputs, own.constants, own.variant), way: own }
-}
-
-/** Values of every accepted way, the convention's own first; ways that give no value here are left out. */
-export function valuesOfWays(definition: QuantityDefinition, question: StepQuestion, inputs: Inputs): number[] {
-  const values: number[] = []
-  for (const way of acceptedWays(definition, question.convention, question.variant)) {
-    const outcome = evaluateQuantity(definition, inputs, way.constants, way.variant)
-    if (outcome.is === 'value') values.push(outcome.value)
-  }
-  return values
+  return { outcome: evaluateQuantity(definition, inputs, own.constants, own.variant, own.formulae), way: own }
 }
 
 /** Half-unit ranges of carried inputs, by name. */
 export type CarriedHalfUnits = Readonly<Record<string, number>>
 
 export function makeBand(definition: QuantityDefinition, question: StepQuestion, inputs: Inputs, center: number, unit: Unit, carried: CarriedHalfUnits = {}): Band {
-  const values = valuesOfWays(definition, question, inputs)
+  const values = valuesOfWays(definition, question.convention, question.variant, inputs).map(one => one.value)
   const part = (key: BandPart['key'], label: string, below: number, above: number): BandPart => ({ key, label, below, above })
   const parts: BandPart[] = []
   const lowest = Math.min(center, ...values), highest = Math.max(center, ...values)

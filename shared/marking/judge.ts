@@ -5,7 +5,7 @@ import { evaluateQuantity } from '../thermo/evaluate'
 import { findQuantity } from '../thermo/registry'
 import { formatQuantity } from '../units/formatQuantity'
 import { findUnit, getUnit, isCommensurable, type Unit } from '../units/ucum'
-import { acceptedWays } from './alternatives'
+import { acceptedWays, formulaeOf } from './alternatives'
 import { makeBand, QuestionFault, referenceOf, type CarriedHalfUnits } from './band'
 import { liesWithin, outwardDecimals } from './decimalEdges'
 import { withCarried, type CarriedInputs } from './graph'
@@ -47,7 +47,7 @@ function judged(question: StepQuestion, answer: ReadAnswer): Judgement {
   const { outcome, way } = referenceOf(definition, question, question.inputs)
   const carried = withCarried(definition, question)
   const carriedNote = carried.notes.length > 0 ? carried.notes.join(' ') : null
-  const trace = definition.trace(question.inputs, way.constants, way.variant)
+  const trace = definition.trace(question.inputs, way.constants, way.variant, way.formulae)
   const notes = 'notes' in outcome ? outcome.notes ?? [] : []
 
   if (outcome.is === 'class') return judgedClass(definition, question, answer, carried, { ...blank, outcome: 'class', carriedNote, trace, notes })
@@ -124,7 +124,7 @@ function isRuledIn(definition: QuantityDefinition, question: StepQuestion, typed
       return liesWithin(typed, lowDecimal, highDecimal)
     }
     if (!definition.variants.some(variant => variant.key === accepted.variant)) return false
-    const outcome = evaluateQuantity(definition, question.inputs, question.convention.constants, accepted.variant)
+    const outcome = evaluateQuantity(definition, question.inputs, question.convention.constants, accepted.variant, formulaeOf(question.convention))
     if (outcome.is !== 'value') return false
     return isIn(makeBand(definition, { ...question, variant: accepted.variant }, question.inputs, outcome.value, unit), typed)
   })
@@ -150,7 +150,7 @@ function judgedClass(definition: QuantityDefinition, question: StepQuestion, ans
 function classesOf(definition: QuantityDefinition, question: StepQuestion, inputs: Inputs): string[] {
   const found: string[] = []
   for (const way of acceptedWays(definition, question.convention, question.variant)) {
-    const outcome = evaluateQuantity(definition, inputs, way.constants, way.variant)
+    const outcome = evaluateQuantity(definition, inputs, way.constants, way.variant, way.formulae)
     if (outcome.is === 'class' && !found.includes(outcome.key)) found.push(outcome.key)
   }
   return found

@@ -7,6 +7,7 @@ import { toDouble } from '../numerics/rational'
 import { findUnit, type Unit } from '../units/ucum'
 import { judgeStep } from './judge'
 import { halfUnitAsked } from './rounding'
+import { formulaeOf } from './alternatives'
 import { slipRanges } from './slips'
 import type { Band, ReadAnswer, StepQuestion } from './types'
 
@@ -48,7 +49,7 @@ function bandFaults(definition: QuantityDefinition, question: StepQuestion, band
   for (const slip of definition.slips) {
     if (slip.weight === 'gross' && makesNoDifference(definition, question, slip.key, center)) reasons.push(`The slip “${slip.label}” gives the right value here: the question asks nothing. Choose another share.`)
   }
-  for (const limit of definition.classLimits?.(question.inputs, question.convention.constants) ?? []) {
+  for (const limit of definition.classLimits?.(question.inputs, question.convention.constants, formulaeOf(question.convention)) ?? []) {
     const distance = Math.abs(limit.value - center)
     const width = limit.value > center ? band.high - center : center - band.low
     if (width > distance / 2) reasons.push(`The band reaches ${show(limit.value > center ? band.high : band.low)}, more than half the way from ${show(center)} to the class limit ${show(limit.value)} (${limit.label}).`)
@@ -60,7 +61,7 @@ function bandFaults(definition: QuantityDefinition, question: StepQuestion, band
 function makesNoDifference(definition: QuantityDefinition, question: StepQuestion, key: string, center: number): boolean {
   const slip = definition.slips.find(one => one.key === key)
   try {
-    const value = slip?.apply(question.inputs, question.convention.constants, center) ?? null
+    const value = slip?.apply(question.inputs, question.convention.constants, center, formulaeOf(question.convention)) ?? null
     return value !== null && Math.abs(value - center) <= 1e-12 * Math.abs(center)
   }
   catch {

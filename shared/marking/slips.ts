@@ -1,9 +1,8 @@
 /** Which known way to go wrong a value can come from. */
 import { absolute, compare, fromDecimal, minus, plus, rational, times, toDouble, type Rational } from '../numerics/rational'
 import type { Inputs, QuantityDefinition, Slip } from '../thermo/definition'
-import { evaluateQuantity } from '../thermo/evaluate'
 import type { Unit } from '../units/ucum'
-import { acceptedWays } from './alternatives'
+import { valuesOfWays } from './alternatives'
 import { exactInUnit } from './decimalEdges'
 import { halfUnitAsked } from './rounding'
 import type { ReadAnswer, StepQuestion } from './types'
@@ -16,15 +15,12 @@ const widest = 0.025
 
 /** Every slip that can be made with these inputs and makes a difference. A slip that fails in some way is left out, never the mark. */
 export function slipRanges(definition: QuantityDefinition, question: StepQuestion, inputs: Inputs, right: number): readonly SlipRange[] {
-  const ways = acceptedWays(definition, question.convention, question.variant)
+  const ways = valuesOfWays(definition, question.convention, question.variant, inputs)
   const ranges: SlipRange[] = []
   for (const slip of definition.slips) {
     const values: number[] = []
-    for (const way of ways) {
-      const value = tried(() => {
-        const outcome = evaluateQuantity(definition, inputs, way.constants, way.variant)
-        return outcome.is === 'value' ? slip.apply(inputs, way.constants, outcome.value) : null
-      })
+    for (const { way, value: rightByWay } of ways) {
+      const value = tried(() => slip.apply(inputs, way.constants, rightByWay, way.formulae))
       if (value !== null && Number.isFinite(value)) values.push(value)
     }
     const [own] = values

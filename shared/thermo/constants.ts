@@ -11,6 +11,12 @@ export const constantDefinitions: readonly ConstantDefinition[] = [
   { name: 'p0', symbol: 'p_0', label: 'reference pressure of potential temperature', unit: 'Pa', range: [100_000, 100_000] },
   { name: 'zeroCelsius', symbol: 'T_0', label: '0 °C in kelvin', unit: 'K', range: [273, 273.16] },
   { name: 'neutralTolerance', symbol: '\\delta', label: 'tolerance of a neutral layer about Γd', unit: 'K/m', range: [0, 0.001] },
+  { name: 'Rv', symbol: 'R_v', label: 'gas constant of water vapor', unit: 'J/(kg.K)', range: [460, 463] },
+  { name: 'cpv', symbol: 'c_{pv}', label: 'specific heat of water vapor at constant pressure', unit: 'J/(kg.K)', range: [1800, 2000] },
+  { name: 'cw', symbol: 'c_w', label: 'specific heat of liquid water', unit: 'J/(kg.K)', range: [4100, 4300] },
+  { name: 'latentHeat', symbol: 'L_v', label: 'latent heat of vaporization at 0 °C, or the constant that is taught', unit: 'J/kg', range: [2.4e6, 2.6e6] },
+  { name: 'latentHeatIce', symbol: 'L_s', label: 'latent heat of sublimation at 0 °C', unit: 'J/kg', range: [2.8e6, 2.9e6] },
+  { name: 'vonKarman', symbol: 'k', label: 'von Kármán constant', unit: '1', range: [0.35, 0.43] },
   { name: 'kappa', symbol: '\\kappa', label: 'exponent of Poisson’s relation, where it is not R/cp', unit: '1', range: [0.28, 0.29], isOptional: true },
 ]
 
@@ -26,3 +32,6 @@ export const kappaOf = (constants: Constants): number => constants.kappa ?? cons
 
 /** The dry adiabatic lapse rate g/cp, K/m. */
 export const dryRateOf = (constants: Constants): number => constant(constants, 'g') / constant(constants, 'cp')
+
+/** ε = R/Rv, the ratio of the gas constants of dry air and of water vapor. */
+export const epsilonOf = (constants: Constants): number => constant(constants, 'R') / constant(constants, 'Rv')

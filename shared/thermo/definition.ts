@@ -34,6 +34,15 @@ export type Inputs = Readonly<Record<string, InputValue>>
 /** Constants by the convention's names, SI: cp, cv, R, g, p0, zeroCelsius, neutralTolerance; kappa where it is not R/cp. */
 export type Constants = Readonly<Record<string, number>>
 
+/** What a convention says beyond a variant's stated range: compute and show the known error, take the next variant that holds there, or refuse. */
+export type BeyondRange = 'compute' | 'next' | 'refuse'
+
+/**
+ * How the other quantities that enter are computed: the vapor pressure inside a relative humidity, the latent heat inside a saturated
+ * lapse rate. Variant keys by quantity key; the first variant of a definition where none is named.
+ */
+export interface Formulae { variants: Readonly<Record<string, string>>, beyond: BeyondRange }
+
 /** "None", "not reached" and "not defined" are answers in their own right. */
 export type Outcome =
   | { is: 'value', value: number, notes?: readonly string[], more?: Readonly<Record<string, number>> }
@@ -53,8 +62,10 @@ export interface Variant {
   /** Where it holds, and its known error, in words. */
   validity: string
   knownError: string
+  /** The stated range, by input, inclusive, in SI: what lies outside is treated as the convention says. An input's own range is the physical one. */
+  holds?: Readonly<Record<string, readonly [number, number]>>
   /** @throws {OutOfRangeError | MissingInputError | SeriesError} */
-  evaluate: (inputs: Inputs, constants: Constants) => Outcome
+  evaluate: (inputs: Inputs, constants: Constants, formulae: Formulae) => Outcome
 }
 
 /** One line of the working: what is done, the formula, and the same with numbers put in. TeX. `value` is in `unit`; the last line's is the value in SI. */
@@ -74,7 +85,7 @@ export interface Slip {
   /** For the student, in a sentence; may use {value} and {unit}. */
   sentence: string
   /** What one gets by this slip, SI; null where it makes no difference or cannot be made. */
-  apply: (inputs: Inputs, constants: Constants, right: number) => number | null
+  apply: (inputs: Inputs, constants: Constants, right: number, formulae: Formulae) => number | null
 }
 
 export interface QuantityDefinition {
@@ -94,14 +105,21 @@ export interface QuantityDefinition {
   variants: readonly Variant[]
   /** Constants of the convention that enter. */
   constants: readonly string[]
+  /** Keys of the quantities whose variant enters the value, those inside them included. */
+  uses?: readonly string[]
+  /** What is to be said beside the value: a formula inside it beyond its stated range, supersaturation. */
+  notes?: (inputs: Inputs, constants: Constants, formulae: Formulae) => readonly string[]
   /** Values at which the answer's class changes, SI, from the convention: Γd, Γm. */
-  classLimits?: (inputs: Inputs, constants: Constants) => readonly { label: string, value: number }[]
+  classLimits?: (inputs: Inputs, constants: Constants, formulae: Formulae) => readonly { label: string, value: number }[]
   /** The classes of an answer that is a class and not a number (static stability). */
   classes?: readonly { key: string, label: string, alsoTyped?: readonly string[] }[]
   /** What is asked, with sign and method, in a sentence without the inputs: "The lapse rate Γ = −∂T/∂z, positive where temperature falls with height, …" */
   ask: string
-  trace: (inputs: Inputs, constants: Constants, variant: string) => readonly TraceStep[]
+  trace: (inputs: Inputs, constants: Constants, variant: string, formulae: Formulae) => readonly TraceStep[]
   slips: readonly Slip[]
   /** One worked example in SI with the default convention, repeated by a test: the handbook's calculator starts from it. */
   example: { inputs: Inputs, gives: number | string, within: number }
 }
+
+/** Quantities that a course meets together: a chapter of the handbook. */
+export interface QuantityGroup { key: string, title: string, quantities: readonly QuantityDefinition[] }

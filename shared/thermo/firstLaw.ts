@@ -11,7 +11,7 @@
 import { pow } from '../numerics/elementary'
 import { kelvin, pascal } from '../units/brands'
 import { constant, kappaOf } from './constants'
-import type { Constants, InputDefinition, Inputs, QuantityDefinition, Slip, TraceStep } from './definition'
+import type { Constants, InputDefinition, Formulae, Inputs, QuantityDefinition, Slip, TraceStep } from './definition'
 import { numberOf } from './inputs'
 import { poissonTemperature } from './poisson'
 import { joulesSlip, kilojoulesSlip, signSlip, slip, zeroCelsius } from './slips'
@@ -100,14 +100,14 @@ export function forGivenMass(base: QuantityDefinition, name: string, example: Qu
     variants: base.variants.map(variant => ({
       ...variant,
       label: `mass times ${variant.label}`,
-      evaluate: (inputs, constants) => {
-        const outcome = variant.evaluate(withoutMass(inputs), constants)
+      evaluate: (inputs, constants, formulae) => {
+        const outcome = variant.evaluate(withoutMass(inputs), constants, formulae)
         return outcome.is === 'value' ? { ...outcome, value: mass(inputs) * outcome.value } : outcome
       },
     })),
     ask: base.ask.replace(' per kilogram of dry air', ' for the whole mass of dry air, not per kilogram'),
-    trace(inputs, constants, variant) {
-      const steps = base.trace(withoutMass(inputs), constants, variant)
+    trace(inputs, constants, variant, formulae) {
+      const steps = base.trace(withoutMass(inputs), constants, variant, formulae)
       const last = steps[steps.length - 1]
       const perKg = last?.value ?? 0
       const total = mass(inputs) * perKg
@@ -116,8 +116,8 @@ export function forGivenMass(base: QuantityDefinition, name: string, example: Qu
     slips: [
       ...base.slips.map(one => ({
         ...one,
-        apply: (inputs: Inputs, constants: Constants, right: number) => {
-          const perKg = one.apply(withoutMass(inputs), constants, right / mass(inputs))
+        apply: (inputs: Inputs, constants: Constants, right: number, formulae: Formulae) => {
+          const perKg = one.apply(withoutMass(inputs), constants, right / mass(inputs), formulae)
           return perKg === null ? null : perKg * mass(inputs)
         },
       })),

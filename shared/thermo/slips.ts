@@ -1,7 +1,7 @@
 /** Slips that many quantities share, so that they are worded alike everywhere. */
-import type { Constants, Inputs, Slip } from './definition'
+import type { Constants, Formulae, Inputs, Slip } from './definition'
 
-type Apply = (inputs: Inputs, constants: Constants, right: number) => number | null
+type Apply = (inputs: Inputs, constants: Constants, right: number, formulae: Formulae) => number | null
 
 export const slip = (key: string, label: string, sentence: string, apply: Apply): Slip => ({ key, weight: 'gross', label, sentence, apply })
 export const fineSlip = (key: string, label: string, sentence: string, apply: Apply): Slip => ({ key, weight: 'fine', label, sentence, apply })

@@ -1,5 +1,5 @@
 import { judgeStep } from '#shared/marking/judge'
-import { taughtVariant } from '#shared/marking/alternatives'
+import { formulaeOf, taughtVariant } from '#shared/marking/alternatives'
 import type { Judgement, StepQuestion } from '#shared/marking/types'
 import { conventions, defaultConvention, findConvention } from '#shared/thermo/conventions/index'
 import type { Convention } from '#shared/thermo/convention'
@@ -137,8 +137,8 @@ const decimalOf = (raw: number) => fromDecimal(String(raw)) ?? fromDouble(raw)
 
 function value(definition: QuantityDefinition, convention: Convention, variant: string | undefined, unit: Unit, inputs: Inputs, withTrace: boolean): AnswerLine {
   const taught = taughtVariant(definition, convention, variant)
-  const outcome = evaluateQuantity(definition, inputs, convention.constants, taught)
-  const trace = withTrace ? { trace: definition.trace(inputs, convention.constants, taught).map(step => ({ ...step })) } : {}
+  const outcome = evaluateQuantity(definition, inputs, convention.constants, taught, formulaeOf(convention))
+  const trace = withTrace ? { trace: definition.trace(inputs, convention.constants, taught, formulaeOf(convention)).map(step => ({ ...step })) } : {}
   const notes = 'notes' in outcome && outcome.notes && outcome.notes.length > 0 ? { notes: outcome.notes } : {}
   if (outcome.is === 'class') return { value: outcome.key, unit: '1', ...notes, ...trace }
   if (outcome.is !== 'value') return { value: outcome.is.replace('_', ' '), unit: unit.code, ...notes, ...trace }
@@ -152,7 +152,7 @@ function inUnit(si: number, unit: Unit, definition: QuantityDefinition): number 
 function judge(question: Fields, definition: QuantityDefinition, convention: Convention, variant: string | undefined, unit: Unit, inputs: Inputs): AnswerLine {
   if (typeof question.answer !== 'string') throw new Refusal('bad_question', 'with --judge a question has an answer, a text')
   // says which input is to blame, where one is
-  evaluateQuantity(definition, inputs, convention.constants, taughtVariant(definition, convention, variant))
+  evaluateQuantity(definition, inputs, convention.constants, taughtVariant(definition, convention, variant), formulaeOf(convention))
   const step: StepQuestion = { quantity: definition.key, ...(variant === undefined ? {} : { variant }), inputs, convention, granted: {}, digits: 3, unit: unit.code, maxMilli: 1000 }
   const answer = definition.classes ? readClass(question.answer, definition.classes) : readQuantity(question.answer, { unit: unit.code, kind: definition.kind, quantityName: definition.name })
   const judgement: Judgement = judgeStep(step, answer)

@@ -15,7 +15,8 @@ export const conventionBody = z.object({
   source: z.string().min(1).max(400),
   constants,
   variants,
-  accepted: z.array(z.object({ label: z.string().min(1).max(120), constants: constants.optional(), variants: variants.optional() })),
+  beyond: z.enum(['compute', 'next', 'refuse']).optional(),
+  accepted: z.array(z.object({ label: z.string().min(1).max(120), group: z.string().min(1).max(40).optional(), constants: constants.optional(), variants: variants.optional() })),
 })
 
 /**

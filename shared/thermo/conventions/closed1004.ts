@@ -18,16 +18,32 @@ const exponents: readonly Alternative[] = [
   { label: 'κ 0.286', constants: { kappa: 0.286 } },
 ]
 
+const vaporConstants: readonly Alternative[] = [
+  { label: 'Rv 461 J kg⁻¹ K⁻¹', constants: { Rv: 461 } },
+  { label: 'Rv 461.52 J kg⁻¹ K⁻¹', constants: { Rv: 461.52 } },
+]
+const latentHeats: readonly Alternative[] = [
+  { label: 'Lv 2.5 MJ kg⁻¹', constants: { latentHeat: 2.5e6 } },
+  { label: 'Lv by temperature', variants: { 'latent-heat-of-vaporization': 'linear' } },
+]
+
 /** The default convention. It closes: 1004 − 717 = 287. */
 export const closed1004: Convention = {
   key: 'closed-1004',
   title: 'cp 1004, cv 717, R 287, g 9.81',
   source: 'common practice; alternatives from AMS Glossary of Meteorology, Bolton (1980), WMO and MetPy documentation',
-  constants: { cp: 1004, cv: 717, R: 287, g: 9.81, p0: 100_000, zeroCelsius: 273.15, neutralTolerance: 0.0001 },
+  constants: {
+    cp: 1004, cv: 717, R: 287, g: 9.81, p0: 100_000, zeroCelsius: 273.15, neutralTolerance: 0.0001,
+    Rv: 461.5, cpv: 1870, cw: 4190, latentHeat: 2.501e6, latentHeatIce: 2.834e6, vonKarman: 0.4,
+  },
   variants: {},
+  beyond: 'compute',
   accepted: [
-    ...heats.flatMap(heat => gravities.map(gravity => ({ label: `${heat.label}, ${gravity.label}`, constants: { ...heat.constants, ...gravity.constants } }))),
-    ...exponents,
-    { label: 'Γd as usually printed, 9.8 K km⁻¹', variants: { 'dry-adiabatic-lapse-rate': 'as-printed', 'parcel-temperature-by-height': 'printed-rate' } },
+    ...heats.flatMap(heat => gravities.map(gravity => ({ group: 'dry air', label: `${heat.label}, ${gravity.label}`, constants: { ...heat.constants, ...gravity.constants } }))),
+    ...exponents.map(exponent => ({ group: 'dry air', ...exponent })),
+    { group: 'dry air', label: 'Γd as usually printed, 9.8 K km⁻¹', variants: { 'dry-adiabatic-lapse-rate': 'as-printed', 'parcel-temperature-by-height': 'printed-rate' } },
+    ...vaporConstants.map(one => ({ group: 'water vapor', ...one })),
+    ...latentHeats.map(one => ({ group: 'latent heat', ...one })),
+    { group: 'von Kármán constant', label: 'von Kármán constant 0.41', constants: { vonKarman: 0.41 } },
   ],
 }

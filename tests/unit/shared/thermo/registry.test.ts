@@ -2,7 +2,7 @@ import { readdirSync } from 'node:fs'
 import { describe, expect, it } from 'vitest'
 import { conventionFaults } from '#shared/thermo/conventions/closes'
 import { conventions, defaultConvention } from '#shared/thermo/conventions/index'
-import { evaluateQuantity } from '#shared/thermo/evaluate'
+import { evaluateQuantity, plainFormulae } from '#shared/thermo/evaluate'
 import { findQuantity, quantities } from '#shared/thermo/registry'
 import { findUnit, getUnit, isCommensurable } from '#shared/units/ucum'
 import { randomSource, seedFromNumber } from '#shared/numerics/random'
@@ -10,6 +10,7 @@ import { slipRanges } from '#shared/marking/slips'
 import { plausibleInputs, seededQuestion } from '../../../fixtures/marking/questions'
 
 const constants = defaultConvention.constants
+const formulae = { ...plainFormulae, variants: defaultConvention.variants }
 
 describe('the registry', () => {
   it('lists every file of quantities/, under the key that its name spells', () => {
@@ -26,7 +27,7 @@ describe('the registry', () => {
 
 describe.each(quantities.map(one => [one.key, one] as const))('%s', (_key, definition) => {
   it('repeats its example', () => {
-    const outcome = evaluateQuantity(definition, definition.example.inputs, constants)
+    const outcome = evaluateQuantity(definition, definition.example.inputs, constants, defaultConvention.variants[definition.key], formulae)
     if (outcome.is === 'value') expect(Math.abs(outcome.value - Number(definition.example.gives))).toBeLessThanOrEqual(definition.example.within)
     else expect(outcome.is === 'class' ? outcome.key : outcome.is).toBe(definition.example.gives)
   })
@@ -38,8 +39,8 @@ describe.each(quantities.map(one => [one.key, one] as const))('%s', (_key, defin
   })
   it('has a trace for every variant whose last number is the value', () => {
     for (const variant of definition.variants) {
-      const outcome = evaluateQuantity(definition, definition.example.inputs, constants, variant.key)
-      const trace = definition.trace(definition.example.inputs, constants, variant.key)
+      const outcome = evaluateQuantity(definition, definition.example.inputs, constants, variant.key, formulae)
+      const trace = definition.trace(definition.example.inputs, constants, variant.key, formulae)
       expect(trace.length).toBeGreaterThan(0)
       if (outcome.is === 'value') expect(trace[trace.length - 1]).toMatchObject({ value: outcome.value, unit: definition.unit })
       for (const step of trace) {
