@@ -18,7 +18,11 @@ export const constantDefinitions: readonly ConstantDefinition[] = [
   { name: 'latentHeatIce', symbol: 'L_s', label: 'latent heat of sublimation at 0 °C', unit: 'J/kg', range: [2.8e6, 2.9e6] },
   { name: 'vonKarman', symbol: 'k', label: 'von Kármán constant', unit: '1', range: [0.35, 0.43] },
   { name: 'kappa', symbol: '\\kappa', label: 'exponent of Poisson’s relation, where it is not R/cp', unit: '1', range: [0.28, 0.29], isOptional: true },
+  { name: 'enhancementFactor', symbol: 'f', label: 'saturation vapor pressure in moist air over that of pure water, where it is used', unit: '1', range: [1, 1.006], isOptional: true },
 ]
+
+/** The factor by which vapor in saturated moist air exceeds pure vapor: 1 where the convention does not name it. */
+export const enhancementOf = (constants: Constants): number => constants.enhancementFactor ?? 1
 
 /** A constant that the convention has to name: a definition that asks for another is a fault in the program. */
 export function constant(constants: Constants, name: string): number {

@@ -23,9 +23,21 @@ const vaporConstants: readonly Alternative[] = [
   { label: 'Rv 461.52 J kg⁻¹ K⁻¹', constants: { Rv: 461.52 } },
 ]
 const latentHeats: readonly Alternative[] = [
-  { label: 'Lv 2.5 MJ kg⁻¹', constants: { latentHeat: 2.5e6 } },
-  { label: 'Lv by temperature', variants: { 'latent-heat-of-vaporization': 'linear' } },
+  { label: 'Lv 2.501 MJ kg⁻¹', constants: { latentHeat: 2.501e6 }, variants: { 'latent-heat-of-vaporization': 'constant' } },
+  { label: 'Lv 2.5 MJ kg⁻¹', constants: { latentHeat: 2.5e6 }, variants: { 'latent-heat-of-vaporization': 'constant' } },
+  { label: 'Lv by Kirchhoff’s relation', variants: { 'latent-heat-of-vaporization': 'kirchhoff' } },
+  { label: 'Ls by temperature, Murphy & Koop (2005)', variants: { 'latent-heat-of-sublimation': 'murphy-koop' } },
 ]
+/** Over water and over ice by one source, where it has both. */
+const vaporPressures: readonly Alternative[] = [
+  { label: 'Magnus form of WMO-No. 8', variants: { 'saturation-vapor-pressure': 'wmo', 'saturation-vapor-pressure-over-ice': 'wmo' } },
+  { label: 'Murphy & Koop (2005)', variants: { 'saturation-vapor-pressure': 'murphy-koop', 'saturation-vapor-pressure-over-ice': 'murphy-koop' } },
+  { label: 'IAPWS industrial formulation and sublimation curve', variants: { 'saturation-vapor-pressure': 'industrial', 'saturation-vapor-pressure-over-ice': 'sublimation' } },
+  { label: 'Goff & Gratch (1946)', variants: { 'saturation-vapor-pressure': 'goff-gratch', 'saturation-vapor-pressure-over-ice': 'goff-gratch' } },
+  { label: 'Buck (1981)', variants: { 'saturation-vapor-pressure': 'buck' } },
+]
+/** In moist air near the ground; Buck (1981) and WMO-No. 8 give 1.004 to 1.0045. */
+const enhancement: Alternative = { label: 'enhancement factor 1.004 of moist air', constants: { enhancementFactor: 1.004 } }
 
 /** The default convention. It closes: 1004 − 717 = 287. */
 export const closed1004: Convention = {
@@ -44,6 +56,8 @@ export const closed1004: Convention = {
     { group: 'dry air', label: 'Γd as usually printed, 9.8 K km⁻¹', variants: { 'dry-adiabatic-lapse-rate': 'as-printed', 'parcel-temperature-by-height': 'printed-rate' } },
     ...vaporConstants.map(one => ({ group: 'water vapor', ...one })),
     ...latentHeats.map(one => ({ group: 'latent heat', ...one })),
+    ...vaporPressures.map(one => ({ group: 'vapor pressure', ...one })),
+    { group: 'enhancement factor', ...enhancement },
     { group: 'von Kármán constant', label: 'von Kármán constant 0.41', constants: { vonKarman: 0.41 } },
   ],
 }

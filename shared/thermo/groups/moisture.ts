@@ -1,7 +1,16 @@
 import type { QuantityGroup } from '../definition'
+import { latentHeatOfSublimationDefinition } from '../quantities/latentHeatOfSublimation'
+import { latentHeatOfVaporizationDefinition } from '../quantities/latentHeatOfVaporization'
+import { saturationVaporPressureDefinition } from '../quantities/saturationVaporPressure'
+import { saturationVaporPressureOverIceDefinition } from '../quantities/saturationVaporPressureOverIce'
 
 export const moisture: QuantityGroup = {
   key: 'moisture',
   title: 'Moisture',
-  quantities: [],
+  quantities: [
+    saturationVaporPressureDefinition,
+    saturationVaporPressureOverIceDefinition,
+    latentHeatOfVaporizationDefinition,
+    latentHeatOfSublimationDefinition,
+  ],
 }

@@ -22,7 +22,7 @@ const rows: Row[] = hasShared ? sharedTable('checks/values.csv').filter(row => r
 
 function off(row: Row, with_: Constants): { got: number, by: number, allowed: number } {
   const given: Given = JSON.parse(row.inputs_json ?? '{}')
-  const got = asked[row.quantity ?? '']?.(given, with_, row.id ?? '') ?? NaN
+  const got = asked[row.quantity ?? '']?.(given, with_, row.id ?? '', row.unit ?? '') ?? NaN
   return { got, by: Math.abs(got - Number(row.expected)), allowed: Number(row.tolerance) }
 }
 
