@@ -19,6 +19,7 @@ export const texFactor = (value: number, digits = 5): string => (value < 0 ? `($
 const units: Readonly<Record<string, string>> = {
   'K': 'K', 'Pa': 'Pa', 'hPa': 'hPa', 'm': 'm', 'km': 'km', 'kg': 'kg', '1': '', 'Cel': '{}^{\\circ}C',
   'J': 'J', 'kJ': 'kJ', 'J/kg': 'J\\,kg^{-1}', 'kJ/kg': 'kJ\\,kg^{-1}', 'K/m': 'K\\,m^{-1}', 'K/km': 'K\\,km^{-1}',
+  's': 's', 'm/s': 'm\\,s^{-1}', 's-1': 's^{-1}', 's-2': 's^{-2}', 'K/s': 'K\\,s^{-1}', 'deg': '{}^{\\circ}', 'rad': 'rad', 'mm': 'mm', 'g/kg': 'g\\,kg^{-1}', 'kg/kg': 'kg\\,kg^{-1}',
   'kg/m3': 'kg\\,m^{-3}', 'J/(kg.K)': 'J\\,kg^{-1}\\,K^{-1}', 'm/s2': 'm\\,s^{-2}',
 }
 

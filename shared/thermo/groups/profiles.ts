@@ -1,16 +1,56 @@
 import type { QuantityGroup } from '../definition'
+import { bruntVaisalaFrequencyDefinition } from '../quantities/bruntVaisalaFrequency'
+import { bruntVaisalaFrequencySquaredDefinition } from '../quantities/bruntVaisalaFrequencySquared'
+import { bruntVaisalaFrequencySquaredFromLapseRateDefinition } from '../quantities/bruntVaisalaFrequencySquaredFromLapseRate'
+import { bulkRichardsonNumberDefinition } from '../quantities/bulkRichardsonNumber'
+import { bulkRichardsonNumberFromWindsDefinition } from '../quantities/bulkRichardsonNumberFromWinds'
+import { freezingLevelDefinition } from '../quantities/freezingLevel'
+import { gradientRichardsonNumberDefinition } from '../quantities/gradientRichardsonNumber'
+import { inversionBaseDefinition } from '../quantities/inversionBase'
+import { inversionStrengthDefinition } from '../quantities/inversionStrength'
+import { inversionTopDefinition } from '../quantities/inversionTop'
 import { lapseRateEndPointsDefinition } from '../quantities/lapseRateEndPoints'
+import { lapseRateEndPointsStandardErrorDefinition } from '../quantities/lapseRateEndPointsStandardError'
+import { lapseRateInflatedStandardErrorDefinition } from '../quantities/lapseRateInflatedStandardError'
+import { lapseRateLagOneCorrelationDefinition } from '../quantities/lapseRateLagOneCorrelation'
 import { lapseRateLeastSquaresDefinition } from '../quantities/lapseRateLeastSquares'
 import { lapseRateStandardErrorDefinition } from '../quantities/lapseRateStandardError'
+import { lapseRateTheilSenDefinition } from '../quantities/lapseRateTheilSen'
+import { lapseRateTheilSenStandardErrorDefinition } from '../quantities/lapseRateTheilSenStandardError'
+import { mixedLayerDepthBulkRichardsonDefinition } from '../quantities/mixedLayerDepthBulkRichardson'
+import { mixedLayerDepthGradientDefinition } from '../quantities/mixedLayerDepthGradient'
+import { mixedLayerDepthParcelDefinition } from '../quantities/mixedLayerDepthParcel'
+import { potentialTemperatureGradientDefinition } from '../quantities/potentialTemperatureGradient'
 import { staticStabilityDefinition } from '../quantities/staticStability'
+import { vectorWindDifferenceDefinition } from '../quantities/vectorWindDifference'
 
 export const profiles: QuantityGroup = {
   key: 'profiles',
   title: 'Profiles',
   quantities: [
     lapseRateEndPointsDefinition,
+    lapseRateEndPointsStandardErrorDefinition,
     lapseRateLeastSquaresDefinition,
     lapseRateStandardErrorDefinition,
+    lapseRateTheilSenDefinition,
+    lapseRateTheilSenStandardErrorDefinition,
+    lapseRateLagOneCorrelationDefinition,
+    lapseRateInflatedStandardErrorDefinition,
     staticStabilityDefinition,
+    potentialTemperatureGradientDefinition,
+    bruntVaisalaFrequencySquaredDefinition,
+    bruntVaisalaFrequencySquaredFromLapseRateDefinition,
+    bruntVaisalaFrequencyDefinition,
+    gradientRichardsonNumberDefinition,
+    bulkRichardsonNumberDefinition,
+    bulkRichardsonNumberFromWindsDefinition,
+    vectorWindDifferenceDefinition,
+    inversionBaseDefinition,
+    inversionTopDefinition,
+    inversionStrengthDefinition,
+    mixedLayerDepthParcelDefinition,
+    mixedLayerDepthBulkRichardsonDefinition,
+    mixedLayerDepthGradientDefinition,
+    freezingLevelDefinition,
   ],
 }
