@@ -39,8 +39,11 @@ export function statementsOf(text: string): string[] {
   return statements
 }
 
-/** The pragmas of a writing connection. FULL is said aloud: the build's default in WAL is NORMAL, which can lose acknowledged work. */
-export const writingPragmas = ['journal_mode = WAL', 'synchronous = FULL', 'foreign_keys = ON', 'busy_timeout = 50'] as const
+/**
+ * The pragmas of a writing connection. FULL is said aloud: the build's default in WAL is NORMAL, which can lose acknowledged work.
+ * What a savepoint may have to undo stays in memory: else it goes to a file in the system's temporary folder, at each submission.
+ */
+export const writingPragmas = ['journal_mode = WAL', 'synchronous = FULL', 'foreign_keys = ON', 'busy_timeout = 50', 'temp_store = MEMORY'] as const
 export const readingPragmas = ['foreign_keys = ON', 'busy_timeout = 1000', 'query_only = ON'] as const
 
 /** Below 3.51.3 two connections that write and checkpoint at once could corrupt the log. */

@@ -14,6 +14,15 @@ export const answerBeforeCommit: Plant = {
   put: 'if (value && value.receipt) { job.resolve(value); await new Promise((later) => setTimeout(later, 400)); } else settle.push(() => job.resolve(value));',
 }
 
+/** The writer that commits each unit of work alone: right, and slow when many wait. */
+export const commitAlone: Plant = { find: 'waiting.splice(0, most)', put: 'waiting.splice(0, 1)' }
+
+/** The writer that brings the log over into the database at each commit. */
+export const bringOverAtEachCommit: Plant = { find: 'for (const done of settle) done();', put: 'await sql`pragma wal_checkpoint(full)`.execute(db); for (const done of settle) done();' }
+
+/** The connection that prepares every statement anew. */
+export const prepareEachTime: Plant = { find: 'if (known && !known.busy) return known;', put: '' }
+
 /** A copy of the built server with a bug in it; its entry and how to remove it. The product itself has no seam for this. */
 export function plantedBuild(plant: Plant): { entry: string, remove: () => void } {
   const dir = mkdtempSync(join(tmpdir(), 'tetherhouse-planted-'))

@@ -1,0 +1,7 @@
+import type { Ratio } from './ratio'
+import { submissionCpu } from './submissionCpu'
+import { syncsAt1 } from './syncsAt1'
+import { syncsAt32 } from './syncsAt32'
+
+/** Every ratio that is measured: one file each, listed here. */
+export const ratios: readonly Ratio[] = [syncsAt32, syncsAt1, submissionCpu]
