@@ -46,6 +46,7 @@ export const policies = {
   'passphrase:reset': { scope: 'public', roles: [] },
   'invitation:accept': { scope: 'public', roles: [] },
   'reference:read': { scope: 'session', roles: [] },
+  'reference:compare': { scope: 'course', roles: staff },
   // courses
   'course:read': { scope: 'course', roles: [...everyone, 'admin'] },
   'course:people': { scope: 'course', roles: [...staff, 'admin'] },

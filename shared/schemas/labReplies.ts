@@ -70,7 +70,7 @@ export const labPostedReply = z.object({
 
 export const quantityListReply = z.object({
   quantities: z.array(z.object({
-    key: z.string(), name: z.string(), symbol: z.string(), unit: z.string(), shownUnit: z.string(), shownUnitLabel: z.string(), units: z.array(z.object({ ucum: z.string(), label: z.string() })), kind: z.string(), ask: z.string(), constants: z.array(z.string()),
+    group: z.string(), key: z.string(), name: z.string(), symbol: z.string(), unit: z.string(), shownUnit: z.string(), shownUnitLabel: z.string(), units: z.array(z.object({ ucum: z.string(), label: z.string() })), kind: z.string(), ask: z.string(), constants: z.array(z.string()),
     inputs: z.array(z.object({ name: z.string(), label: z.string(), symbol: z.string(), unit: z.string(), shownUnit: z.string(), shape: z.enum(['number', 'series']), isOptional: z.boolean(), usual: inputSource.nullable() })),
     variants: z.array(z.object({ key: z.string(), label: z.string(), source: z.string(), status: z.string(), validity: z.string() })),
     classes: z.array(z.object({ key: z.string(), label: z.string() })),

@@ -1,6 +1,6 @@
 import type { InputSource } from '#shared/schemas/lab'
 import type { InputDefinition, QuantityDefinition } from '#shared/thermo/definition'
-import { quantities } from '#shared/thermo/registry'
+import { quantityGroups } from '#shared/thermo/registry'
 import { formatUnit } from '#shared/units/formatQuantity'
 import { isSameDimension } from '../shares/units'
 
@@ -12,13 +12,13 @@ const usualColumns: Readonly<Record<string, string>> = { temperature: 'air-tempe
 
 /** The definitions of the reference as an editor needs them. */
 export function listQuantities() {
-  return quantities.map(definition => ({
-    key: definition.key, name: definition.name, symbol: definition.symbol, unit: definition.unit, shownUnit: definition.shownUnit, shownUnitLabel: formatUnit(definition.shownUnit),
+  return quantityGroups.flatMap(group => group.quantities.map(definition => ({
+    group: group.title, key: definition.key, name: definition.name, symbol: definition.symbol, unit: definition.unit, shownUnit: definition.shownUnit, shownUnitLabel: formatUnit(definition.shownUnit),
     units: unitsFor(definition), kind: definition.kind, ask: definition.ask, constants: [...definition.constants],
     inputs: definition.inputs.map(input => ({ name: input.name, label: input.label, symbol: input.symbol, unit: input.unit, shownUnit: input.shownUnit, shape: input.shape, isOptional: input.isOptional === true, usual: usualSource(input) })),
     variants: definition.variants.map(variant => ({ key: variant.key, label: variant.label, source: variant.source.text, status: variant.source.status, validity: variant.validity })),
     classes: (definition.classes ?? []).map(({ key, label }) => ({ key, label })),
-  }))
+  })))
 }
 
 function unitsFor(definition: QuantityDefinition): { ucum: string, label: string }[] {

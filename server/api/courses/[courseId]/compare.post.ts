@@ -1,0 +1,14 @@
+import { z } from 'zod'
+import { compareBody, compareReply } from '#shared/schemas/handbook'
+import { comparePasted } from '../../../domain/handbook/comparePasted'
+import { defineApiHandler } from '../../../utils/defineApiHandler'
+import { useStores } from '../../../utils/useStores'
+
+export default defineApiHandler({
+  action: 'reference:compare',
+  summary: 'A key column pasted from a sheet, beside the reference: where it departs, and by which cause; stores nothing',
+  params: z.object({ courseId: z.string() }),
+  body: compareBody,
+  reply: compareReply,
+  handle: ({ params, body }) => comparePasted(useStores().read, params.courseId, body),
+})
