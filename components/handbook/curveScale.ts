@@ -5,13 +5,14 @@ export interface CurvePoint { x: number, y: number | null }
 
 /** Scales and paths of a curve; a point without a value is a break. */
 export function curveScale(points: readonly CurvePoint[], size: { width: number, height: number }) {
-  const left = 64, right = size.width - 14, top = 26, bottom = size.height - 44
+  const left = 64, right = size.width - 24, top = 26, bottom = size.height - 44
   const [low = 0, high = 1] = extent(points, point => point.x)
   const [least = 0, most = 1] = extent(points.flatMap(point => point.y === null ? [] : [point.y]))
   const room = most > least ? (most - least) * 0.06 : Math.max(Math.abs(most) * 0.05, 1e-6)
   const x = scaleLinear().domain([low, high]).range([left, right])
   const y = scaleLinear().domain([least - room, most + room]).range([bottom, top]).nice()
-  const ticks = (scale: typeof x, count: number) => scale.ticks(count).map(value => ({ at: scale(value), text: scale.tickFormat(count)(value).replace('-', '−') }))
+  // no comma between thousands: it could be read as a decimal one
+  const ticks = (scale: typeof x, count: number) => scale.ticks(count).map(value => ({ at: scale(value), text: scale.tickFormat(count)(value).replaceAll(',', '').replace('-', '−') }))
   return { left, right, top, bottom, x, y, xTicks: ticks(x, Math.max(3, Math.floor(size.width / 90))), yTicks: ticks(y, 5), path: pathThrough(points, x, y) }
 }
 

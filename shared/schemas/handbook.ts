@@ -53,7 +53,7 @@ export const computeReply = z.object({
   notes: z.array(z.string()),
   lines: worked,
   slips: z.array(z.object({ label: z.string(), words: z.string() })),
-  curve: z.object({ along: z.string(), xLabel: z.string(), yLabel: z.string(), at: z.number(), points: z.array(z.object({ x: z.number(), y: z.number().nullable() })) }).nullable(),
+  curve: z.object({ along: z.string(), xLabel: z.string(), yLabel: z.string(), at: z.number(), here: z.object({ x: z.number(), y: z.number().nullable() }), points: z.array(z.object({ x: z.number(), y: z.number().nullable() })) }).nullable(),
 })
 export type ComputeReply = z.output<typeof computeReply>
 

@@ -15,12 +15,10 @@ export function curveOf(definition: QuantityDefinition, convention: Convention, 
   if (!input || typeof here !== 'number' || definition.kind === 'class') return null
   const [low, high] = spanAbout(here, input)
   const variant = taughtVariant(definition, convention, pinned)
-  const points = Array.from({ length: steps + 1 }, (_, step) => {
-    const at = low + (high - low) * step / steps
-    return { x: inUnit(at, input.shownUnit, input.kind !== 'temperature'), y: valueAt({ ...inputs, [along]: at }) }
-  })
+  const pointAt = (at: number) => ({ x: inUnit(at, input.shownUnit, input.kind !== 'temperature'), y: valueAt({ ...inputs, [along]: at }) })
+  const points = Array.from({ length: steps + 1 }, (_, step) => pointAt(low + (high - low) * step / steps))
   return {
-    along, points, at: inUnit(here, input.shownUnit, input.kind !== 'temperature'),
+    along, points, here: pointAt(here), at: inUnit(here, input.shownUnit, input.kind !== 'temperature'),
     xLabel: axisLabel(input.label, input.shownUnit), yLabel: axisLabel(definition.name, unit),
   }
 
