@@ -1,8 +1,10 @@
 /** The only entry of marking: one step, one answer, one judgement. Total: what cannot be judged is said, not thrown. */
+import { fromDecimal, plus, rational, toDecimal } from '../numerics/rational'
 import type { Inputs, QuantityDefinition } from '../thermo/definition'
 import { MissingInputError, OutOfRangeError, SeriesError, UnknownInputError } from '../thermo/errors'
 import { evaluateQuantity } from '../thermo/evaluate'
 import { findQuantity } from '../thermo/registry'
+import { fullTurn } from '../thermo/wind'
 import { formatQuantity } from '../units/formatQuantity'
 import { findUnit, getUnit, isCommensurable, type Unit } from '../units/ucum'
 import { acceptedWays, formulaeOf } from './alternatives'
@@ -70,8 +72,9 @@ function judgedValue(definition: QuantityDefinition, question: StepQuestion, ans
   const band = makeBand(definition, question, question.inputs, center, unit)
   const carriedBand = carried.inputs && bandOfCarried(definition, question, carried.inputs, unit, carried.halfUnits)
   const ranges = slipRanges(definition, question, question.inputs, center)
-  const typed = answer.reading === 'ok' ? answer.decimal : null
-  const isExplained = typed === null || isNear(band, answer) || (carriedBand && isNear(carriedBand, answer))
+  const near = definition.isDirection ? onNearestTurn(answer, center, unit) : answer
+  const typed = near.reading === 'ok' ? near.decimal : null
+  const isExplained = typed === null || isNear(band, near) || (carriedBand && isNear(carriedBand, near))
   const slip = isExplained ? null : explainingSlip(definition, question, answer, ranges, unit)
   const acceptedBy = typed === null ? null : isIn(band, typed) ? 'band' : carriedBand && isIn(carriedBand, typed) ? 'carried' : isRuledIn(definition, question, typed, unit, ranges, answer) ? 'ruling' : null
   const isAccepted = acceptedBy !== null
@@ -84,6 +87,14 @@ function judgedValue(definition: QuantityDefinition, question: StepQuestion, ans
     slipValues: ranges.map(({ slip: { key, label }, value }) => ({ key, label, value })),
     pointsMilli: withinStep(isAccepted ? question.maxMilli : slip ? question.slipMilli ?? 0 : 0, question.maxMilli),
   }
+}
+
+/** A direction as typed, or a full turn on where that is nearer to the reference: 0° beside 359.5°, 360° beside 2°. */
+function onNearestTurn(answer: ReadAnswer, center: number, unit: Unit): ReadAnswer {
+  const typed = answer.decimal === null || unit.code !== 'deg' ? null : fromDecimal(answer.decimal)
+  if (!typed || answer.valueSi === null) return answer
+  const turn = center - answer.valueSi > fullTurn / 2 ? 1 : center - answer.valueSi < -fullTurn / 2 ? -1 : 0
+  return turn === 0 ? answer : { ...answer, decimal: toDecimal(plus(typed, rational(BigInt(360 * turn))), 60), valueSi: answer.valueSi + turn * fullTurn }
 }
 
 /** Whether the band explains a typed value within the rounding of its own digits: "307" for 307.1 is short of digits, and no slip. */

@@ -100,6 +100,8 @@ export interface QuantityDefinition {
   kind: NumberKind
   /** Below this size (SI) digits are counted as if the value had it, and a relative width is refused. For quantities that pass through zero. */
   nearZero?: number
+  /** A wind's direction, 0 to a full turn: 0° and 360° are one answer. */
+  isDirection?: true
   inputs: readonly InputDefinition[]
   /** The first is the default. */
   variants: readonly Variant[]
