@@ -16,6 +16,7 @@ export const constantDefinitions: readonly ConstantDefinition[] = [
   { name: 'cw', symbol: 'c_w', label: 'specific heat of liquid water', unit: 'J/(kg.K)', range: [4100, 4300] },
   { name: 'latentHeat', symbol: 'L_v', label: 'latent heat of vaporization at 0 °C, or the constant that is taught', unit: 'J/kg', range: [2.4e6, 2.6e6] },
   { name: 'latentHeatIce', symbol: 'L_s', label: 'latent heat of sublimation at 0 °C', unit: 'J/kg', range: [2.8e6, 2.9e6] },
+  { name: 'earthRadius', symbol: 'a', label: 'radius of the earth, between geometric and geopotential height', unit: 'm', range: [6_350_000, 6_380_000] },
   { name: 'vonKarman', symbol: 'k', label: 'von Kármán constant', unit: '1', range: [0.35, 0.43] },
   { name: 'kappa', symbol: '\\kappa', label: 'exponent of Poisson’s relation, where it is not R/cp', unit: '1', range: [0.28, 0.29], isOptional: true },
   { name: 'enhancementFactor', symbol: 'f', label: 'saturation vapor pressure in moist air over that of pure water, where it is used', unit: '1', range: [1, 1.006], isOptional: true },

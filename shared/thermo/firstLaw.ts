@@ -3,7 +3,10 @@
  *
  *   q = Δu + w     w is the work done by the air, q the heat that it takes up
  *   isobaric:   q = Δh = cp ΔT,  w = R ΔT,  Δu = cv ΔT
+ *   isochoric:  q = Δu = cv ΔT,  w = 0,  Δh = cp ΔT
  *   adiabatic:  q = 0,  Δu = cv ΔT,  Δh = cp ΔT,  w = −cv ΔT,  T₂ = T₁ (p₂/p₁)^κ
+ *   polytropic: Δu = cv ΔT,  Δh = cp ΔT,  T₂ = T₁ (p₂/p₁)^((n−1)/n)     its work and heat: `polytropic.ts`
+ *   isothermal: Δu = Δh = 0                                              its work and heat: `isothermal.ts`
  *
  * Source: AMS Glossary of Meteorology, "first law of thermodynamics"; coefficients by common practice.
  * Valid where the specific heats are constant (200–350 K, to 0.3 %). Limits: no water vapor, no phase change.
@@ -18,6 +21,7 @@ import { joulesSlip, kilojoulesSlip, signSlip, slip, zeroCelsius } from './slips
 import { texFactor, texNumber, texQuantity } from './tex'
 
 type Coefficient = 'cp' | 'cv' | 'R'
+export type Process = 'isobaric' | 'isochoric' | 'isothermal' | 'adiabatic' | 'polytropic'
 const texOf: Readonly<Record<Coefficient, string>> = { cp: 'c_p', cv: 'c_v', R: 'R' }
 const printed: Readonly<Record<Coefficient, string>> = { cp: 'cp', cv: 'cv', R: 'R' }
 
@@ -27,7 +31,7 @@ export interface ProcessQuantity {
   symbol: string
   /** TeX of the symbol. */
   tex: string
-  process: 'isobaric' | 'adiabatic'
+  process: Exclude<Process, 'isothermal'>
   coefficient: Coefficient
   /** −1 for the work of an adiabatic process: w = −cv ΔT. */
   sign: 1 | -1
@@ -42,17 +46,26 @@ const temperature = (name: string, label: string, symbol: string): InputDefiniti
 const pressure = (name: string, label: string, symbol: string): InputDefinition =>
   ({ name, label, symbol, unit: 'Pa', shownUnit: 'hPa', kind: 'ratio', shape: 'number', range: [1000, 1_000_000] })
 
-export const processInputs: Readonly<Record<ProcessQuantity['process'], readonly InputDefinition[]>> = {
-  isobaric: [temperature('temperatureStart', 'temperature at the start', 'T₁'), temperature('temperatureEnd', 'temperature at the end', 'T₂')],
-  adiabatic: [temperature('temperatureStart', 'temperature at the start', 'T₁'), pressure('pressureStart', 'pressure at the start', 'p₁'), pressure('pressureEnd', 'pressure at the end', 'p₂')],
+const byTemperatures = [temperature('temperatureStart', 'temperature at the start', 'T₁'), temperature('temperatureEnd', 'temperature at the end', 'T₂')]
+const pressures = [pressure('pressureStart', 'pressure at the start', 'p₁'), pressure('pressureEnd', 'pressure at the end', 'p₂')]
+export const processInputs: Readonly<Record<Process, readonly InputDefinition[]>> = {
+  isobaric: byTemperatures,
+  isochoric: byTemperatures,
+  isothermal: [temperature('temperature', 'temperature, which stays', 'T'), ...pressures],
+  adiabatic: [temperature('temperatureStart', 'temperature at the start', 'T₁'), ...pressures],
+  polytropic: [temperature('temperatureStart', 'temperature at the start', 'T₁'), ...pressures, { name: 'polytropicExponent', label: 'exponent n of p αⁿ = constant', symbol: 'n', unit: '1', shownUnit: '1', kind: 'ratio', shape: 'number', range: [0.2, 20] }],
 }
 
 const start = (inputs: Inputs) => numberOf(inputs, 'temperatureStart')
 
 function endOf(process: ProcessQuantity['process'], inputs: Inputs, constants: Constants): number {
-  if (process === 'isobaric') return numberOf(inputs, 'temperatureEnd')
+  if (process === 'isobaric' || process === 'isochoric') return numberOf(inputs, 'temperatureEnd')
+  if (process === 'polytropic') return start(inputs) * pow(numberOf(inputs, 'pressureEnd') / numberOf(inputs, 'pressureStart'), polytropicPower(inputs))
   return poissonTemperature(kelvin(start(inputs)), pascal(numberOf(inputs, 'pressureStart')), pascal(numberOf(inputs, 'pressureEnd')), constants)
 }
+
+/** (n − 1)/n, the exponent of T₂ = T₁ (p₂/p₁)^((n−1)/n). */
+export const polytropicPower = (inputs: Inputs): number => (numberOf(inputs, 'polytropicExponent') - 1) / numberOf(inputs, 'polytropicExponent')
 
 /** ΔT of the process, K. */
 export const changeOf = (process: ProcessQuantity['process'], inputs: Inputs, constants: Constants): number => endOf(process, inputs, constants) - start(inputs)
@@ -129,17 +142,8 @@ export function forGivenMass(base: QuantityDefinition, name: string, example: Qu
 }
 
 function processTrace(of: ProcessQuantity, inputs: Inputs, constants: Constants, value: number): TraceStep[] {
-  const steps: TraceStep[] = []
-  const end = endOf(of.process, inputs, constants)
-  if (of.process === 'adiabatic') {
-    const kappa = kappaOf(constants)
-    steps.push({
-      text: 'Temperature at the end, by Poisson’s relation', formula: 'T_2 = T_1 \\left(\\frac{p_2}{p_1}\\right)^{\\kappa}',
-      filled: `T_2 = ${texNumber(start(inputs))} \\left(\\frac{${texNumber(numberOf(inputs, 'pressureEnd') / 100)}}{${texNumber(numberOf(inputs, 'pressureStart') / 100)}}\\right)^{${texNumber(kappa)}} = ${texQuantity(end, 'K', 6)}`, value: end, unit: 'K',
-    })
-  }
-  const change = end - start(inputs)
-  steps.push({ text: 'Change of temperature', formula: '\\Delta T = T_2 - T_1', filled: `\\Delta T = ${texNumber(end, 6)} - ${texNumber(start(inputs), 6)} = ${texQuantity(change, 'K')}`, value: change, unit: 'K' })
+  const steps = changeSteps(of.process, inputs, constants)
+  const change = changeOf(of.process, inputs, constants)
   const minus = of.sign < 0 ? '-' : ''
   steps.push({
     text: 'First law', formula: `${of.tex} = ${minus}${texOf[of.coefficient]}\\,\\Delta T`,
@@ -148,12 +152,28 @@ function processTrace(of: ProcessQuantity, inputs: Inputs, constants: Constants,
   return steps
 }
 
+/** ΔT worked out: by what the process does to the temperature, then the difference. */
+export function changeSteps(process: ProcessQuantity['process'], inputs: Inputs, constants: Constants): TraceStep[] {
+  const steps: TraceStep[] = []
+  const end = endOf(process, inputs, constants)
+  if (process === 'adiabatic' || process === 'polytropic') {
+    const [text, tex, exponent] = process === 'adiabatic' ? ['by Poisson’s relation', '\\kappa', kappaOf(constants)] as const : ['along p αⁿ = constant', '(n-1)/n', polytropicPower(inputs)] as const
+    steps.push({
+      text: `Temperature at the end, ${text}`, formula: `T_2 = T_1 \\left(\\frac{p_2}{p_1}\\right)^{${tex}}`,
+      filled: `T_2 = ${texNumber(start(inputs))} \\left(\\frac{${texNumber(numberOf(inputs, 'pressureEnd') / 100)}}{${texNumber(numberOf(inputs, 'pressureStart') / 100)}}\\right)^{${texNumber(exponent)}} = ${texQuantity(end, 'K', 6)}`, value: end, unit: 'K',
+    })
+  }
+  const change = end - start(inputs)
+  steps.push({ text: 'Change of temperature', formula: '\\Delta T = T_2 - T_1', filled: `\\Delta T = ${texNumber(end, 6)} - ${texNumber(start(inputs), 6)} = ${texQuantity(change, 'K')}`, value: change, unit: 'K' })
+  return steps
+}
+
 function processSlips(of: ProcessQuantity): Slip[] {
   const other = (coefficient: Coefficient) => slip(`${coefficient.toLowerCase()}-for-${of.coefficient.toLowerCase()}`, `${printed[coefficient]} for ${printed[of.coefficient]}`,
     `This comes from ${printed[coefficient]} ΔT in place of ${printed[of.coefficient]} ΔT.`,
     (inputs, constants) => of.sign * constant(constants, coefficient) * changeOf(of.process, inputs, constants))
   const slips = [signSlip(of.signSentence), ...(['cp', 'cv', 'R'] as const).filter(one => one !== of.coefficient).map(other), joulesSlip, kilojoulesSlip]
-  if (of.process === 'isobaric') {
+  if (of.process === 'isobaric' || of.process === 'isochoric') {
     slips.push(slip('difference-as-temperature', '273.15 added to a difference', 'A difference of temperatures is the same in °C and in K: 273.15 is not added to it.', (inputs, constants, right) =>
       right + of.sign * constant(constants, of.coefficient) * zeroCelsius))
     return slips
@@ -163,6 +183,16 @@ function processSlips(of: ProcessQuantity): Slip[] {
     return value === null || !Number.isFinite(value) ? null : of.sign * constant(constants, of.coefficient) * (value - start(inputs))
   }
   const ratio = (inputs: Inputs) => numberOf(inputs, 'pressureEnd') / numberOf(inputs, 'pressureStart')
+  if (of.process === 'polytropic') {
+    const ratioTo = (inputs: Inputs, exponent: number) => start(inputs) * pow(ratio(inputs), exponent)
+    slips.push(
+      slip('celsius-for-kelvin', 'Celsius put in for kelvin', 'This is what comes out with the temperature in °C: the formula takes kelvin.', along(inputs => zeroCelsius + (start(inputs) - zeroCelsius) * pow(ratio(inputs), polytropicPower(inputs)))),
+      slip('inverted-ratio', 'ratio of pressures turned round', 'This comes from p₁/p₂ in place of p₂/p₁.', along(inputs => ratioTo(inputs, -polytropicPower(inputs)))),
+      slip('exponent-of-volume', 'n − 1 for (n − 1)/n', 'This takes the exponent n − 1, which belongs to the ratio of volumes; that of pressures has (n − 1)/n.', along(inputs => ratioTo(inputs, numberOf(inputs, 'polytropicExponent') - 1))),
+      slip('adiabatic-exponent', 'adiabatic for polytropic', 'This takes the exponent R/cp of a dry adiabat: the process has its own n.', along((inputs, constants) => ratioTo(inputs, kappaOf(constants)))),
+    )
+    return slips
+  }
   slips.push(
     slip('celsius-for-kelvin', 'Celsius put in for kelvin', 'This is what comes out with the temperature in °C in Poisson’s relation, which takes kelvin.', along((inputs, constants) => zeroCelsius + (start(inputs) - zeroCelsius) * pow(ratio(inputs), kappaOf(constants)))),
     slip('inverted-ratio', 'ratio of pressures turned round', 'This comes from p₁/p₂ in place of p₂/p₁.', along((inputs, constants) => start(inputs) * pow(ratio(inputs), -kappaOf(constants)))),

@@ -1,4 +1,6 @@
 /** Numbers and units as TeX, for a trace. */
+import type { TraceStep } from './definition'
+
 export function texNumber(value: number, digits = 5): string {
   if (value === 0) return '0'
   const text = value.toPrecision(digits)
@@ -19,8 +21,8 @@ export const texFactor = (value: number, digits = 5): string => (value < 0 ? `($
 const units: Readonly<Record<string, string>> = {
   'K': 'K', 'Pa': 'Pa', 'hPa': 'hPa', 'm': 'm', 'km': 'km', 'kg': 'kg', '1': '', 'Cel': '{}^{\\circ}C',
   'J': 'J', 'kJ': 'kJ', 'J/kg': 'J\\,kg^{-1}', 'kJ/kg': 'kJ\\,kg^{-1}', 'K/m': 'K\\,m^{-1}', 'K/km': 'K\\,km^{-1}',
-  's': 's', 'm/s': 'm\\,s^{-1}', 's-1': 's^{-1}', 's-2': 's^{-2}', 'K/s': 'K\\,s^{-1}', 'deg': '{}^{\\circ}', 'rad': 'rad', 'mm': 'mm', 'g/kg': 'g\\,kg^{-1}', 'kg/kg': 'kg\\,kg^{-1}',
-  'kg/m3': 'kg\\,m^{-3}', 'J/(kg.K)': 'J\\,kg^{-1}\\,K^{-1}', 'm/s2': 'm\\,s^{-2}',
+  's': 's', 'h': 'h', 'm/s': 'm\\,s^{-1}', 's-1': 's^{-1}', 's-2': 's^{-2}', 'K/s': 'K\\,s^{-1}', 'K/h': 'K\\,h^{-1}', 'deg': '{}^{\\circ}', 'rad': 'rad', 'mm': 'mm', 'g/kg': 'g\\,kg^{-1}', 'kg/kg': 'kg\\,kg^{-1}',
+  'kg/m3': 'kg\\,m^{-3}', 'm3/kg': 'm^{3}\\,kg^{-1}', 'J/(kg.K)': 'J\\,kg^{-1}\\,K^{-1}', 'm/s2': 'm\\,s^{-2}', 'W/kg': 'W\\,kg^{-1}', 'Pa/s': 'Pa\\,s^{-1}', 'hPa/h': 'hPa\\,h^{-1}',
 }
 
 export function texUnit(code: string): string {
@@ -30,3 +32,8 @@ export function texUnit(code: string): string {
 }
 
 export const texQuantity = (value: number, unit: string, digits = 5): string => `${texNumber(value, digits)}${texUnit(unit)}`
+
+/** A line of the working that ends in its number; `shown` where people read it in another unit than SI. */
+export function worked(text: string, formula: string, filled: string, value: number, unit: string, shown?: { value: number, unit: string }, digits = 6): TraceStep {
+  return { text, formula, filled: `${filled} = ${texQuantity(shown?.value ?? value, shown?.unit ?? unit, digits)}`, value, unit }
+}

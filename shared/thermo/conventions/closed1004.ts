@@ -46,7 +46,7 @@ export const closed1004: Convention = {
   source: 'common practice; alternatives from AMS Glossary of Meteorology, Bolton (1980), WMO and MetPy documentation',
   constants: {
     cp: 1004, cv: 717, R: 287, g: 9.81, p0: 100_000, zeroCelsius: 273.15, neutralTolerance: 0.0001,
-    Rv: 461.5, cpv: 1870, cw: 4190, latentHeat: 2.501e6, latentHeatIce: 2.834e6, vonKarman: 0.4,
+    Rv: 461.5, cpv: 1870, cw: 4190, latentHeat: 2.501e6, latentHeatIce: 2.834e6, earthRadius: 6_356_766, vonKarman: 0.4,
   },
   variants: {},
   beyond: 'compute',
@@ -58,6 +58,7 @@ export const closed1004: Convention = {
     ...latentHeats.map(one => ({ group: 'latent heat', ...one })),
     ...vaporPressures.map(one => ({ group: 'vapor pressure', ...one })),
     { group: 'enhancement factor', ...enhancement },
+    { group: 'radius of the earth', label: 'mean radius of the earth, 6371 km', constants: { earthRadius: 6_371_000 } },
     { group: 'von Kármán constant', label: 'von Kármán constant 0.41', constants: { vonKarman: 0.41 } },
   ],
 }

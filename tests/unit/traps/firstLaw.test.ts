@@ -6,6 +6,7 @@ import { evaluateQuantity } from '#shared/thermo/evaluate'
 import type { Constants, Inputs } from '#shared/thermo/definition'
 import { findQuantity } from '#shared/thermo/registry'
 import { judgeTyped, reading, stepOf } from '../../fixtures/marking/ask'
+import { resolveWallTime, wallTimeAt } from '../../../server/domain/terms/wallClock'
 
 function value(quantity: string, inputs: Inputs, constants: Constants = defaultConvention.constants): number {
   const definition = findQuantity(quantity)
@@ -86,17 +87,52 @@ describe('traps T: first law, θ, parcels without cloud', () => {
     expect((slips('density', inputs)['universal-gas-constant'] ?? 0) / value('density', inputs)).toBeCloseTo(287 / 8.314462618, 9)
     expect(8.31446 / 0.0289647).toBeCloseTo(287.06, 1)
   })
-  it('T12: by height, 15 °C lifted 878 m cools by Γd alone; by pressure is another quantity (6.46 °C at 900 hPa)', () => {
-    // the height from which Poisson's 6.46 °C would come is not that of 100 hPa in this column
+  it('T12: by height and by pressure are two quantities: 15 °C from 1000 to 900 hPa is 6.46 °C; lifted by 878 m it cools by Γd alone', () => {
+    const lifted = { temperatureStart: 288.15, pressureStart: 100_000, pressureEnd: 90_000 }
+    expect(Math.abs(value('parcel-temperature-by-pressure', lifted) - 273.15 - 6.46)).toBeLessThan(0.06)
+    expect(judgeTyped(stepOf('parcel-temperature-by-pressure', lifted), '6.46 °C').isAccepted).toBe(true)
+    // the height from which 6.46 °C would come is not that of 100 hPa in this column
     expect(value('parcel-temperature-by-height', { temperature: 288.15, heightDifference: 878 }) - 273.15).toBeCloseTo(15 - 878 * 9.81 / 1004, 9)
-    expect(288.15 * Math.pow(0.9, 2 / 7) - 273.15).toBeCloseTo(6.46, 1)
+    expect(judgeTyped(stepOf('parcel-temperature-by-pressure', lifted), `${(15 - 9.771).toFixed(2)} °C`).isAccepted).toBe(false)
   })
   it('T13: the parcel cools at Γd whatever its surroundings: no factor Tp/Te unless asked', () => {
     const inputs = { temperature: 290, heightDifference: 1000 }
     expect(judgeTyped(stepOf('parcel-temperature-by-height', inputs), `${(290 - 9.77 - 273.15).toFixed(2)} °C`).isAccepted).toBe(true)
+    // asked for with the factor, it is a quantity of its own: 290 K in 280 K
+    const asked = { parcelTemperature: 290, environmentTemperature: 280 }
+    expect(value('parcel-lapse-rate-in-environment', asked) * 1000).toBeCloseTo(10.12, 2)
+    expect(judgeTyped(stepOf('parcel-lapse-rate-in-environment', asked), '9.77 K/km')).toMatchObject({ isAccepted: false, slip: { key: 'factor-left-out' } })
+  })
+  it('T14: moist, unsaturated air has another rate: w 15 g/kg: 9.65 K/km, and neither is accepted for the other', () => {
+    expect(value('moist-unsaturated-lapse-rate', { mixingRatio: 0.015 }) * 1000).toBeCloseTo(9.65, 2)
+    expect(judgeTyped(stepOf('moist-unsaturated-lapse-rate', { mixingRatio: 0.015 }), '9.77 K/km').isAccepted).toBe(false)
+    expect(judgeTyped(stepOf('dry-adiabatic-lapse-rate', {}), '9.65 K/km').isAccepted).toBe(false)
   })
   it.each(['9.8', '9.77', '9.76', '9.75'])('T15: Γd %s K/km is correct', typed => expect(judgeTyped(stepOf('dry-adiabatic-lapse-rate', {}), `${typed} K/km`).isAccepted).toBe(true))
   it.each(['9.7', '9.9', '10', '9.74'])('T15: Γd %s K/km is not', typed => expect(judgeTyped(stepOf('dry-adiabatic-lapse-rate', {}), `${typed} K/km`).isAccepted).toBe(false))
+  it('T16: enthalpy with geopotential, adiabatic: cp ΔT + g Δz = 0: 1 km cools by 9.771 K', () => {
+    expect(value('temperature-change-from-heat-and-height-change', { heat: 0, heightDifference: 1000 })).toBeCloseTo(-9.771, 3)
+    expect(value('heat-from-enthalpy-and-geopotential', { temperatureChange: -9.81 * 1000 / 1004, heightDifference: 1000 })).toBeCloseTo(0, 9)
+    expect(judgeTyped(stepOf('temperature-change-from-heat-and-height-change', { heat: 0, heightDifference: 1000 }), '9.77 K').slip?.key).toBe('sign')
+  })
+  it('T17: heating from an observed change of temperature states its assumption in the ask', () => {
+    for (const key of ['heating-rate', 'specific-heating-rate']) expect(findQuantity(key)?.ask).toMatch(/neither advection nor vertical motion/)
+  })
+  it('T18: a rate over a clock change takes the elapsed time in UTC: 01:30 (first) to 03:30 on the autumn night are 3 h', () => {
+    const start = Date.parse('2026-11-01T01:30:00-05:00'), end = resolveWallTime('2026-11-01T03:30', 'America/Chicago').at
+    expect(wallTimeAt(start, 'America/Chicago')).toBe('2026-11-01T01:30')
+    const elapsedTime = (end - start) / 1000
+    expect(elapsedTime).toBe(3 * 3600)
+    const inputs = { temperatureStart: 285.15, temperatureEnd: 282.15, elapsedTime }
+    expect(value('heating-rate', inputs) * 3600).toBeCloseTo(-1, 12)
+    expect(judgeTyped(stepOf('heating-rate', inputs), '-1.50 K/h')).toMatchObject({ isAccepted: false, slip: { key: 'clock-hour' } })
+  })
+  it('T19: a lowered parcel warms along the dry adiabat, whatever it was at the start', () => {
+    const lowered = { temperatureStart: 273.15, pressureStart: 70_000, pressureEnd: 100_000 }
+    expect(value('parcel-temperature-by-pressure', lowered)).toBeGreaterThan(273.15)
+    expect(value('parcel-temperature-by-pressure', lowered)).toBeCloseTo(value('potential-temperature', { temperature: 273.15, pressure: 70_000 }), 9)
+    expect(value('parcel-temperature-by-height', { temperature: 273.15, heightDifference: -1000 })).toBeCloseTo(273.15 + 9.771, 3)
+  })
 })
 
 describe('traps H: heights and pressure', () => {

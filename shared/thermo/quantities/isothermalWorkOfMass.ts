@@ -1,0 +1,5 @@
+import { forGivenMass } from '../firstLaw'
+import { isothermalWorkDefinition } from './isothermalWork'
+
+/** Work done by a given mass, isothermal, J. */
+export const isothermalWorkOfMassDefinition = forGivenMass(isothermalWorkDefinition, 'work done by a given mass, isothermal', { inputs: { mass: 2, temperature: 293.15, pressureStart: 100_000, pressureEnd: 70_000 }, gives: 60017.0, within: 0.2 })
