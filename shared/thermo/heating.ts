@@ -13,7 +13,7 @@ import { numberOf } from './inputs'
 export const heatingInputs: readonly InputDefinition[] = [
   temperatureInput('temperatureStart', 'temperature at the start', 'T₁'),
   temperatureInput('temperatureEnd', 'temperature at the end', 'T₂'),
-  timeInput('elapsedTime', 'elapsed time, as between two instants in UTC', 'Δt', [1, 31_536_000]),
+  timeInput('timeBetween', 'elapsed time, as between two instants in UTC', 'Δt', [1, 31_536_000]),
 ]
 
 /** "No advection, no vertical motion": part of what is asked. */
@@ -21,10 +21,10 @@ export const heatingAssumption = 'assuming that neither advection nor vertical m
 
 /**
  * ΔT/Δt, K s⁻¹.
- * @example temperatureTendency({ temperatureStart: 285.15, temperatureEnd: 288.15, elapsedTime: 7200 }) // 0.00041667 K s⁻¹, 1.5 K h⁻¹
+ * @example temperatureTendency({ temperatureStart: 285.15, temperatureEnd: 288.15, timeBetween: 7200 }) // 0.00041667 K s⁻¹, 1.5 K h⁻¹
  */
 export function temperatureTendency(inputs: Inputs): number {
-  return (numberOf(inputs, 'temperatureEnd') - numberOf(inputs, 'temperatureStart')) / numberOf(inputs, 'elapsedTime')
+  return (numberOf(inputs, 'temperatureEnd') - numberOf(inputs, 'temperatureStart')) / numberOf(inputs, 'timeBetween')
 }
 
 export const heatingFormula: Omit<Variant, 'evaluate' | 'label'> = {

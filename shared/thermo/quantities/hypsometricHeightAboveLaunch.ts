@@ -15,7 +15,7 @@ const p = (inputs: Inputs) => numberOf(inputs, 'pressure')
 const Tv = (inputs: Inputs) => numberOf(inputs, 'meanVirtualTemperature')
 const datum = (inputs: Inputs) => optional(inputs, 'barometerHeight')
 /** Station pressure at the time of the sample: at the launch, and the tendency since. */
-const anchor = (inputs: Inputs) => numberOf(inputs, 'stationPressure') + optional(inputs, 'pressureTendency') * optional(inputs, 'elapsedTime')
+const anchor = (inputs: Inputs) => numberOf(inputs, 'stationPressure') + optional(inputs, 'pressureTendency') * optional(inputs, 'timeSinceLaunch')
 const corrected = (inputs: Inputs) => p(inputs) - optional(inputs, 'pressureOffset')
 
 /**
@@ -56,7 +56,7 @@ export const hypsometricHeightAboveLaunchDefinition = oneFormula({
     temperatureInput('meanVirtualTemperature', 'mean virtual temperature between barometer and sonde', 'T̄v', [150, 350]),
     { ...lengthInput('barometerHeight', 'height of the barometer above the launch point', 'z_b', [-500, 500]), isOptional: true },
     { name: 'pressureTendency', label: 'tendency of the station pressure', symbol: 'ṗ', unit: 'Pa/s', shownUnit: 'hPa/h', kind: 'difference', shape: 'number', range: [-1, 1], isOptional: true },
-    { ...timeInput('elapsedTime', 'time since the launch', 'Δt', [0, 172_800]), isOptional: true },
+    { ...timeInput('timeSinceLaunch', 'time since the launch', 'Δt', [0, 172_800]), isOptional: true },
     { name: 'pressureOffset', label: 'offset of the sonde’s pressure on the ground, sonde less barometer', symbol: 'δ', unit: 'Pa', shownUnit: 'hPa', kind: 'difference', shape: 'number', range: [-2000, 2000], isOptional: true },
   ],
   constants: ['R', 'g'],
@@ -69,7 +69,7 @@ export const hypsometricHeightAboveLaunchDefinition = oneFormula({
   working(inputs, constants, result) {
     const rise = result - datum(inputs)
     return [
-      ...(optional(inputs, 'pressureTendency') * optional(inputs, 'elapsedTime') === 0 ? [] : [worked('Station pressure at the time of the sample', 'p_s(t) = p_s + \\dot p\\,\\Delta t', `p_s(t) = ${texNumber(numberOf(inputs, 'stationPressure') / 100, 6)} + ${texFactor(optional(inputs, 'pressureTendency') * 36)} \\cdot ${texNumber(optional(inputs, 'elapsedTime') / 3600)}`, anchor(inputs), 'Pa', { value: anchor(inputs) / 100, unit: 'hPa' })]),
+      ...(optional(inputs, 'pressureTendency') * optional(inputs, 'timeSinceLaunch') === 0 ? [] : [worked('Station pressure at the time of the sample', 'p_s(t) = p_s + \\dot p\\,\\Delta t', `p_s(t) = ${texNumber(numberOf(inputs, 'stationPressure') / 100, 6)} + ${texFactor(optional(inputs, 'pressureTendency') * 36)} \\cdot ${texNumber(optional(inputs, 'timeSinceLaunch') / 3600)}`, anchor(inputs), 'Pa', { value: anchor(inputs) / 100, unit: 'hPa' })]),
       ...(optional(inputs, 'pressureOffset') === 0 ? [] : [worked('Pressure of the sonde without its offset', 'p - \\delta', `${texNumber(p(inputs) / 100, 6)} - ${texFactor(optional(inputs, 'pressureOffset') / 100)}`, corrected(inputs), 'Pa', { value: corrected(inputs) / 100, unit: 'hPa' })]),
       worked('Height above the barometer', '\\frac{R\\,\\overline{T_v}}{g} \\ln\\frac{p_s(t)}{p - \\delta}', `\\frac{R \\cdot ${texNumber(Tv(inputs), 6)}}{g} \\ln\\frac{${texNumber(anchor(inputs) / 100, 6)}}{${texNumber(corrected(inputs) / 100, 6)}}`, rise, 'm'),
       worked('Above the launch point', 'z = z_b + \\ldots', `z = ${texNumber(datum(inputs))} + ${texFactor(rise, 6)}`, result, 'm'),

@@ -121,9 +121,9 @@ describe('traps T: first law, θ, parcels without cloud', () => {
   it('T18: a rate over a clock change takes the elapsed time in UTC: 01:30 (first) to 03:30 on the autumn night are 3 h', () => {
     const start = Date.parse('2026-11-01T01:30:00-05:00'), end = resolveWallTime('2026-11-01T03:30', 'America/Chicago').at
     expect(wallTimeAt(start, 'America/Chicago')).toBe('2026-11-01T01:30')
-    const elapsedTime = (end - start) / 1000
-    expect(elapsedTime).toBe(3 * 3600)
-    const inputs = { temperatureStart: 285.15, temperatureEnd: 282.15, elapsedTime }
+    const timeBetween = (end - start) / 1000
+    expect(timeBetween).toBe(3 * 3600)
+    const inputs = { temperatureStart: 285.15, temperatureEnd: 282.15, timeBetween }
     expect(value('heating-rate', inputs) * 3600).toBeCloseTo(-1, 12)
     expect(judgeTyped(stepOf('heating-rate', inputs), '-1.50 K/h')).toMatchObject({ isAccepted: false, slip: { key: 'clock-hour' } })
   })

@@ -35,7 +35,7 @@ describe('traps H: heights and pressure', () => {
     expect(judgeTyped(step, '303 m')).toMatchObject({ isAccepted: false, slip: { key: 'barometer-height-left-out' } })
   })
   it('H4: with a pressure that falls by 1.2 hPa/h a fixed anchor is 20.4 m too high after 2 h', () => {
-    const falling = { pressureTendency: -120 / 3600, elapsedTime: 7200 }
+    const falling = { pressureTendency: -120 / 3600, timeSinceLaunch: 7200 }
     expect(Math.abs(above() - above(falling) - 20.4)).toBeLessThan(0.05)
     expect(judgeTyped(stepOf('hypsometric-height-above-launch', { ...launch, ...falling }), '303 m')).toMatchObject({ isAccepted: false, slip: { key: 'fixed-anchor' } })
   })

@@ -36,7 +36,7 @@ describe('examples of the docstrings', () => {
     expect(adiabaticExponent('pressure', 'temperature', { kappa: 2 / 7 })).toBeCloseTo(3.5, 12)
     expect(adiabaticState('specificVolume', 0.84, 'pressure', 100_000, 70_000, { kappa: 2 / 7 })).toBeCloseTo(1.08374, 5)
     expect(firstLawTerm('geopotential', 'temperatureChange', { heat: 0, heightDifference: 1000 }, { cp: 1004, g: 9.81 })).toBeCloseTo(-9.771, 3)
-    expect(temperatureTendency({ temperatureStart: 285.15, temperatureEnd: 288.15, elapsedTime: 7200 })).toBeCloseTo(0.00041667, 8)
+    expect(temperatureTendency({ temperatureStart: 285.15, temperatureEnd: 288.15, timeBetween: 7200 })).toBeCloseTo(0.00041667, 8)
     expect(isothermalWork(kelvin(293.15), pascal(100_000), pascal(70_000), { R: 287 })).toBeCloseTo(30_008.5, 0)
     expect(polytropicWork({ temperatureStart: 293.15, pressureStart: 100_000, pressureEnd: 70_000, polytropicExponent: 1.2 }, { R: 287 })).toBeCloseTo(24_280, -1)
     expect(dryStaticEnergy(kelvin(288.15), meter(1000), { cp: 1004, g: 9.81 })).toBeCloseTo(299_112.6, 1)
