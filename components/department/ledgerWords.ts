@@ -13,6 +13,7 @@ const words: Readonly<Record<string, string>> = {
   'term.rolled_over': 'A term was started from an earlier one',
   'course.created': 'The course was added',
   'course.edited': 'The course was changed',
+  'course.convention': 'The convention of the course was chosen',
   'course.rolled_over': 'The course came along into a new term',
   'section.created': 'A section was added',
   'membership.started': 'Somebody came into the course',

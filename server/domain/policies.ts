@@ -49,6 +49,8 @@ export const policies = {
   'reference:compare': { scope: 'course', roles: staff },
   // courses
   'course:read': { scope: 'course', roles: [...everyone, 'admin'] },
+  'course:convention': { scope: 'course', roles: staff },
+  'course:chooseConvention': { scope: 'course', roles: ['lead'], openTerm: true },
   'course:people': { scope: 'course', roles: [...staff, 'admin'] },
   'course:roof': { scope: 'course', roles: [...everyone, 'admin', 'technician'] },
   // data

@@ -1,23 +1,13 @@
-import { z } from 'zod'
 import { refuse } from '#shared/errors'
 import type { Convention } from '#shared/marking/types'
+import { conventionBody } from '#shared/schemas/convention'
 import { conventionFaults } from '#shared/thermo/conventions/closes'
 import type { Read, Trx } from '../../db/writer'
 import { newId } from '../ids'
 import { digestOf } from '../ledger/appendEntry'
+import { currentDraw } from '../shares/draws'
 
-const constants = z.record(z.string().min(1), z.number())
-const variants = z.record(z.string().min(1), z.string().min(1))
-
-export const conventionBody = z.object({
-  key: z.string().regex(/^[a-z][a-z0-9-]{0,39}$/),
-  title: z.string().min(1).max(120),
-  source: z.string().min(1).max(400),
-  constants,
-  variants,
-  beyond: z.enum(['compute', 'next', 'refuse']).optional(),
-  accepted: z.array(z.object({ label: z.string().min(1).max(120), group: z.string().min(1).max(40).optional(), constants: constants.optional(), variants: variants.optional() })),
-})
+export { conventionBody }
 
 /**
  * The row of a convention: found by its digest, or written as the next revision of its key.
@@ -39,6 +29,14 @@ export async function ensureConvention(trx: Trx, given: Convention, now: number)
 export async function getConvention(db: Read | Trx, revisionId: string): Promise<Convention> {
   const row = await db.selectFrom('convention_revision').select('body_json').where('id', '=', revisionId).executeTakeFirstOrThrow()
   return conventionBody.parse(JSON.parse(row.body_json))
+}
+
+/** The convention of a lab: the one that its shares were drawn and checked with; before that, the course's. */
+export async function conventionOfLab(db: Read | Trx, lab: { id: string, courseId: string }): Promise<{ id: string, convention: Convention }> {
+  const draw = await currentDraw(db, lab.id)
+  if (!draw) return conventionOfCourse(db, lab.courseId)
+  const id = draw.supply.conventionRevisionId
+  return { id, convention: await getConvention(db, id) }
 }
 
 /** The convention that a course teaches with now. */

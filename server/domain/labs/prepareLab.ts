@@ -6,7 +6,7 @@ import type { Observations } from '../../observations/chunks'
 import { listFlightVersions, readFlight, type FlightRow } from '../shares/flight'
 import { serveFlight, type Flight, type ServedFlight } from '../shares/servedData'
 import { serveShare, type ServedShare } from '../shares/serveShare'
-import { conventionOfCourse } from './conventions'
+import { conventionOfLab } from './conventions'
 import { latestRevision, type StoredRevision } from './latestRevision'
 
 /** A lab with its supply laid out in its canonical order and its flights at hand. */
@@ -37,7 +37,7 @@ export async function prepareLab(read: Read, observations: Observations, labId: 
   if (!lab) return refuse('not_found')
   const stored = await latestRevision(read, labId)
   const revision = body ? { ...stored, body } : stored
-  const { id: conventionRevisionId, convention } = await conventionOfCourse(read, lab.courseId)
+  const { id: conventionRevisionId, convention } = await conventionOfLab(read, lab)
   const flights = new Map((await listFlightVersions(read, lab.courseId)).map(row => [row.versionId, row]))
   const opened = new Map<string, { flight: Flight, served: ServedFlight }>()
   const flightOf = (versionId: string) => {

@@ -1,6 +1,7 @@
 import { refuse } from '#shared/errors'
 import { lateRule, type LateRule } from '#shared/schemas/lab'
 import type { Read } from '../../db/writer'
+import { getDraw } from '../shares/draws'
 
 /**
  * What a submission stands on and what may change under it: read before judging and again inside the storing
@@ -54,7 +55,7 @@ export async function readGround(db: Read, shareId: string, membershipId: string
     .select(eb => [
       'share.id as shareId', 'share.redraw', 'share.data_set_version_id as dataSetVersionId', 'share.holder_id as holderId', 'draw.lab_revision_id as labRevisionId',
       'membership.id as membershipId', 'membership.state as membershipState', 'membership.section_id as sectionId',
-      'course.id as courseId', 'course.code as courseCode', 'course.convention_revision_id as conventionRevisionId', 'term.state as termState',
+      'course.id as courseId', 'course.code as courseCode', 'draw.id as drawId', 'term.state as termState',
       'lab.id as labId', 'lab.title as labTitle', 'lab.state as labState',
       'posting.id as postingId', 'posting.state as postingState', 'posting.version as postingVersion', 'posting.opens_at as opensAt', 'posting.due_at as dueAt', 'posting.zone as zone',
       'posting.late_rule_json as lateRuleJson', 'posting.attempts', 'posting.keep', 'posting.feedback', 'posting.released_at as releasedAt',
@@ -67,7 +68,9 @@ export async function readGround(db: Read, shareId: string, membershipId: string
     .where('share.id', '=', shareId).executeTakeFirst()
   if (!row) return null
   const accepted = await db.selectFrom('accepted').select('id').where('lab_id', '=', row.labId).where('revoked_at', 'is', null).orderBy('added_at').orderBy('id').execute()
-  return { ...row, newestRedraw: row.newestRedraw ?? row.redraw, attemptsMade: row.attemptsMade ?? 0, acceptedIds: accepted.map(each => each.id) }
+  // A posted lab keeps the convention that its shares were checked by, whatever its course teaches since.
+  const { conventionRevisionId } = (await getDraw(db, row.drawId)).supply
+  return { ...row, conventionRevisionId, newestRedraw: row.newestRedraw ?? row.redraw, attemptsMade: row.attemptsMade ?? 0, acceptedIds: accepted.map(each => each.id) }
 }
 
 /** True when a judgement made on one ground holds on the other. How many attempts were made is no part of it: it is counted anew. */
