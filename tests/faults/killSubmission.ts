@@ -182,7 +182,7 @@ class Subject {
 
   static async of({ work, of, entry }: KillOptions): Promise<Subject> {
     const dataDir = copyOf(work.dir)
-    const server = await startBuiltServer({ dataDir, env: { DEMO: of === 'mail' ? '1' : '0' }, ...(entry ? { wrap: ([program = process.execPath]) => [program, entry] } : {}) })
+    const server = await startBuiltServer({ dataDir, readyWithinMs: 120_000, env: { DEMO: of === 'mail' ? '1' : '0' }, ...(entry ? { wrap: ([program = process.execPath]) => [program, entry] } : {}) })
     const subject = new Subject(server, dataDir, work.visitor.at(server.url), `/api/shares/${work.shareId}/work`)
     await subject.visitor.get(subject.warmUp)
     return subject
