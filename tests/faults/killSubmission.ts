@@ -185,6 +185,8 @@ class Subject {
     const server = await startBuiltServer({ dataDir, readyWithinMs: 120_000, env: { DEMO: of === 'mail' ? '1' : '0' }, ...(entry ? { wrap: ([program = process.execPath]) => [program, entry] } : {}) })
     const subject = new Subject(server, dataDir, work.visitor.at(server.url), `/api/shares/${work.shareId}/work`)
     await subject.visitor.get(subject.warmUp)
+    // The first submission of a copy writes more pages than those that follow.
+    if (!await handIn(subject.visitor, work, 'a-submission-before-all')) throw new Error(`The first submission was refused:\n${server.log()}`)
     return subject
   }
 
