@@ -1,4 +1,5 @@
 import { fileURLToPath } from 'node:url'
+import { listenEarly } from './plugins/keepTyped/listenEarly'
 
 const at = (path: string) => fileURLToPath(new URL(path, import.meta.url))
 
@@ -20,13 +21,17 @@ export default defineNuxtConfig({
   telemetry: { enabled: false },
   typescript: { strict: true, tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true }, exclude: ['../.output', '../.data'] } },
   css: ['~/assets/css/paper.css'],
+  plugins: [{ src: '~/plugins/keepTyped/handOver.ts', mode: 'client' }],
   components: [{ path: '~/components', pathPrefix: false, extensions: ['vue'] }],
   app: {
     head: {
       htmlAttrs: { lang: 'en' },
       meta: [{ name: 'viewport', content: 'width=device-width, initial-scale=1' }, { name: 'color-scheme', content: 'light dark' }],
       // Schemas are told not to try making code from text: the content policy refuses it, and would report each try.
-      script: [{ innerHTML: 'globalThis.__zod_globalConfig={jitless:true}', tagPriority: 'critical' }],
+      script: [
+        { innerHTML: 'globalThis.__zod_globalConfig={jitless:true}', tagPriority: 'critical' },
+        { innerHTML: `(${listenEarly.toString()})()`, tagPriority: 'critical' }, // what is typed before the scripts have come is kept
+      ],
       link: [{ rel: 'icon', type: 'image/svg+xml', href: '/favicon.svg' }],
     },
   },

@@ -180,6 +180,7 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
     const page = await as(people.withRole('admin'))
     await go(page, '/department/terms')
     await page.getByRole('link', { name: 'Plan the next term' }).click()
+    await page.getByRole('heading', { level: 1, name: 'Plan the next term' }).waitFor() // the page before has fields of the same names
     await page.getByLabel('Name', { exact: true }).fill('The term after')
     await page.getByLabel('First day').fill(local(60).slice(0, 10))
     await page.getByLabel('Last day').fill(local(180).slice(0, 10))
