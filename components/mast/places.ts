@@ -1,5 +1,5 @@
 /** Where a person may go, by role: the booms of the mast. */
-export type PlaceKey = 'work' | 'marks' | 'disputes' | 'labs' | 'data' | 'people' | 'terms' | 'courses' | 'ledger' | 'mail' | 'jobs'
+export type PlaceKey = 'work' | 'marks' | 'disputes' | 'labs' | 'data' | 'people' | 'terms' | 'courses' | 'ledger' | 'mail' | 'jobs' | 'visit'
 
 /** `key` tells what a count belongs to; a place without one has none. */
 export interface MastPlace { key: PlaceKey | null, word: string, to: string }
@@ -7,7 +7,7 @@ export interface PlaceCounts { due: number, open: number, fresh: number }
 
 const words: Record<PlaceKey, string> = {
   work: 'Work', marks: 'Marks', disputes: 'Disputes', labs: 'Labs', data: 'Data', people: 'People',
-  terms: 'Terms', courses: 'Courses', ledger: 'Ledger', mail: 'Mail', jobs: 'Jobs',
+  terms: 'Terms', courses: 'Courses', ledger: 'Ledger', mail: 'Mail', jobs: 'Jobs', visit: 'What you may read',
 }
 
 const byCourseRole: Record<'lead' | 'instructor' | 'ta' | 'student', readonly PlaceKey[]> = {
@@ -19,8 +19,8 @@ const byCourseRole: Record<'lead' | 'instructor' | 'ta' | 'student', readonly Pl
 
 const byDepartmentRole: Record<'admin' | 'technician' | 'visitor', readonly PlaceKey[]> = {
   admin: ['terms', 'courses', 'people', 'ledger', 'mail', 'jobs'],
-  technician: ['jobs'],
-  visitor: [],
+  technician: ['data', 'jobs'],
+  visitor: ['visit'],
 }
 
 export function coursePlaces(courseId: string, role: keyof typeof byCourseRole): MastPlace[] {

@@ -7,7 +7,7 @@ import { useStores } from '../utils/useStores'
 export const selfReply = z.object({
   id: z.string(), name: z.string(), email: z.string(),
   courses: z.array(z.object({
-    id: z.string(), code: z.string(), title: z.string(), term: z.string(), termState: z.enum(['planned', 'running', 'closed']), zone: z.string(),
+    id: z.string(), code: z.string(), title: z.string(), state: z.enum(['draft', 'open', 'settled', 'closed']), term: z.string(), termState: z.enum(['planned', 'running', 'closed']), zone: z.string(),
     role: z.enum(['lead', 'instructor', 'ta', 'student']), sections: z.array(z.object({ id: z.string(), name: z.string() })),
   })),
   department: z.array(z.enum(['admin', 'technician', 'visitor'])),

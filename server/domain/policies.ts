@@ -51,6 +51,7 @@ export const policies = {
   'course:read': { scope: 'course', roles: [...everyone, 'admin'] },
   'course:convention': { scope: 'course', roles: staff },
   'course:chooseConvention': { scope: 'course', roles: ['lead'], openTerm: true },
+  'course:open': { scope: 'course', roles: ['lead', 'admin'], openTerm: true },
   'course:people': { scope: 'course', roles: [...staff, 'admin'] },
   'course:roof': { scope: 'course', roles: [...everyone, 'admin', 'technician'] },
   // data
@@ -107,6 +108,10 @@ export const policies = {
   'department:ledger': { scope: 'department', roles: ['admin'] },
   'department:jobs': { scope: 'department', roles: ['admin', 'technician'] },
   'department:mail': { scope: 'department', roles: ['admin'] },
+  'department:resendMail': { scope: 'department', roles: ['admin'] },
+  'department:data': { scope: 'department', roles: ['technician'] },
+  // a visit: a stated scope until a stated day, logged
+  'visit:read': { scope: 'department', roles: ['visitor'], hides: { visitor: ['names', 'typed', 'unreleased'] } },
 } as const satisfies Record<string, Policy>
 
 export type Action = keyof typeof policies

@@ -46,7 +46,7 @@ export const termDescription = z.object({
 export type TermDescription = z.output<typeof termDescription>
 
 export const courseDescription = z.object({
-  id: z.string(), code: z.string(), title: z.string(), alsoListedAs: z.array(z.string()), lateRule, convention: z.string(), version: count,
+  id: z.string(), code: z.string(), title: z.string(), state: z.enum(['draft', 'open', 'settled', 'closed']), alsoListedAs: z.array(z.string()), lateRule, convention: z.string(), version: count,
   term: z.object({ id: z.string(), name: z.string(), state: termState }),
   ancestor: z.object({ id: z.string(), term: z.string() }).nullable(),
   sections: z.array(z.object({ id: z.string(), name: z.string(), students: count })),
@@ -89,3 +89,7 @@ export type CoursePeople = z.output<typeof coursePeople>
 
 export const allowanceTold = z.object({ dueAt: instant, told: z.string().nullable() })
 export type AllowanceTold = z.output<typeof allowanceTold>
+
+/** A course as whoever keeps the instruments sees it: where a file goes. */
+export const dataCourse = z.object({ id: z.string(), code: z.string(), title: z.string(), term: z.string(), termState, dataSets: count })
+export type DataCourse = z.output<typeof dataCourse>

@@ -17,7 +17,7 @@ const placed: Record<string, { reaches: Named['reaches'], isOfLab: boolean }> = 
   jobId: { reaches: 'course', isOfLab: false },
 }
 /** Objects of the department and of the reference: who may is decided by the role alone. */
-const unplaced = ['membershipId', 'personId', 'termId', 'roleId', 'quantityKey', 'conventionKey']
+const unplaced = ['membershipId', 'personId', 'termId', 'roleId', 'quantityKey', 'conventionKey', 'mailId']
 /** Names inside an object, which must be one that it has: another object's name for it is a missing one. */
 const inside: Record<string, string | null> = { stepKey: 'rate', digest: null }
 

@@ -8,6 +8,7 @@ import { startBuiltServer, type BuiltServer } from '../fixtures/builtServer'
 import { DemoPeople, type DemoPerson } from '../fixtures/demoPeople'
 import { copyOf, demoWorld } from '../fixtures/demoWorld'
 import { chromiumPath, openBrowser, signInAs } from '../fixtures/openBrowser'
+import { slopeOf, textOf } from '../fixtures/shareCsv'
 
 const root = fileURLToPath(new URL('../..', import.meta.url))
 const flight = join(root, 'tests/fixtures/generated/flight-morning.csv')
@@ -212,23 +213,4 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
 /** A wall time some days from now, as a datetime field takes it. */
 function local(days: number): string {
   return new Date(Date.now() + days * 86_400_000).toISOString().slice(0, 16)
-}
-
-async function textOf(download: { createReadStream: () => Promise<NodeJS.ReadableStream> }): Promise<string> {
-  const chunks: Buffer[] = []
-  for await (const chunk of await download.createReadStream()) chunks.push(Buffer.from(chunk))
-  return Buffer.concat(chunks).toString('utf8')
-}
-
-/** Least squares of temperature on height over the rows marked for use, worked out here and not by the reference; K/km, positive where it cools upward. */
-function slopeOf(csv: string): number {
-  const lines = csv.split(/\r?\n/).filter(line => line !== '' && !line.startsWith('#'))
-  const head = lines[0]!.split(',').map(name => name.toLowerCase())
-  const at = (pattern: RegExp) => head.findIndex(name => pattern.test(name))
-  const [use, z, T] = [at(/^use/), at(/height/), at(/temp/)]
-  const rows = lines.slice(1).map(line => line.split(',')).filter(row => row[use] === '1').map(row => [Number(row[z]), Number(row[T])] as const)
-  const [meanZ, meanT] = [0, 1].map(column => rows.reduce((sum, row) => sum + row[column as 0 | 1], 0) / rows.length) as [number, number]
-  const xy = rows.reduce((sum, [height, value]) => sum + (height - meanZ) * (value - meanT), 0)
-  const xx = rows.reduce((sum, [height]) => sum + (height - meanZ) ** 2, 0)
-  return -xy / xx * 1000
 }

@@ -575,7 +575,7 @@ export interface OutboxTable {
 }
 
 export interface AccessLogTable {
-  seq: number
+  seq: Generated<number>
   at: number
   actor_person_id: string
   subject_membership_id: string

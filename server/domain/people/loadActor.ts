@@ -31,7 +31,9 @@ async function findHeld(read: Read, tokenSha256: Buffer) {
 
 export async function loadRoles(read: Read, session: LiveSession, tokenSha256: Buffer, now: number): Promise<Actor> {
   const [memberships, taSections, departmentRoles] = await Promise.all([
-    read.selectFrom('membership').select(['id', 'course_id', 'role', 'section_id']).where('person_id', '=', session.personId).where('state', '=', 'active').execute(),
+    // A draft of a course is its staff's alone: for its students it is not there.
+    read.selectFrom('membership').innerJoin('course', 'course.id', 'membership.course_id').select(['membership.id', 'course_id', 'role', 'section_id']).where('person_id', '=', session.personId).where('membership.state', '=', 'active')
+      .where(eb => eb.or([eb('role', '<>', 'student'), eb('course.state', '<>', 'draft')])).execute(),
     read.selectFrom('ta_section').innerJoin('membership', 'membership.id', 'ta_section.membership_id').select(['ta_section.membership_id as id', 'ta_section.section_id as sectionId']).where('membership.person_id', '=', session.personId).execute(),
     read.selectFrom('department_role').select(['id', 'role', 'scope_json', 'until_at']).where('person_id', '=', session.personId).where('state', '=', 'active').execute(),
   ])

@@ -5,7 +5,7 @@ import type { Read } from '../../db/writer'
 /** A course as the admin keeps it: codes, late rule, sections, and everybody who is or was in it. */
 export async function describeCourse(read: Read, courseId: string) {
   const course = await read.selectFrom('course').innerJoin('term', 'term.id', 'course.term_id').innerJoin('convention_revision', 'convention_revision.id', 'course.convention_revision_id')
-    .select(['course.id', 'course.code', 'course.title', 'course.late_rule_json', 'course.version', 'course.ancestor_id', 'term.id as termId', 'term.name as term', 'term.state', 'convention_revision.convention_key as conventionKey', 'convention_revision.no as conventionNo'])
+    .select(['course.id', 'course.code', 'course.title', 'course.late_rule_json', 'course.version', 'course.ancestor_id', 'term.id as termId', 'term.name as term', 'term.state', 'course.state as courseState', 'convention_revision.convention_key as conventionKey', 'convention_revision.no as conventionNo'])
     .where('course.id', '=', courseId).executeTakeFirst()
   if (!course) return refuse('not_found')
   const [listings, sections, members, taSections, ancestor] = await Promise.all([
@@ -18,7 +18,7 @@ export async function describeCourse(read: Read, courseId: string) {
     course.ancestor_id === null ? undefined : read.selectFrom('course').innerJoin('term', 'term.id', 'course.term_id').select(['course.id', 'term.name as term']).where('course.id', '=', course.ancestor_id).executeTakeFirst(),
   ])
   return {
-    id: course.id, code: course.code, title: course.title, alsoListedAs: listings.map(row => row.code), lateRule: lateRule.parse(JSON.parse(course.late_rule_json)),
+    id: course.id, code: course.code, title: course.title, state: course.courseState, alsoListedAs: listings.map(row => row.code), lateRule: lateRule.parse(JSON.parse(course.late_rule_json)),
     convention: `${course.conventionKey}, revision ${course.conventionNo}`, version: course.version,
     term: { id: course.termId, name: course.term, state: course.state }, ancestor: ancestor ?? null,
     sections: sections.map(section => ({ ...section, students: members.filter(member => member.sectionId === section.id && member.state === 'active').length })),

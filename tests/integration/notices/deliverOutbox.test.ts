@@ -2,6 +2,7 @@ import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import { appendEntry } from '../../../server/domain/ledger/appendEntry'
 import { deliverOutbox, UnsendableMail, type OutboxMail } from '../../../server/domain/notices/deliverOutbox'
 import { queueNotice } from '../../../server/domain/notices/queueNotice'
+import { sendMailAgain } from '../../../server/domain/notices/sendMailAgain'
 import { composeMail, isTemplate } from '../../../server/mail/composeMail'
 import { openMailer } from '../../../server/mail/send'
 import { startMailServer, type MailServer } from '../../fixtures/mailServer'
@@ -50,6 +51,20 @@ describe('the outbox', () => {
     expect(mail!.text).toContain('course:1 no. 1')
     expect(mail!.text).toContain('https://labs.example/c/1/work')
     expect(await stores.read.selectFrom('ledger_anchor').selectAll().execute()).toEqual([{ chain_id: 'course:1', seq: 1, sent_to: personId, digest: entry.digest, sent_at: start }])
+  })
+
+  it('sends a mail that was given up once more when an admin asks, under the same Message-ID; one that went out stays', async () => {
+    await queue({ email: 'ada@department.example' })
+    const failing = () => Promise.reject(new UnsendableMail('refused'))
+    expect(await deliverOutbox(stores, failing, () => start)).toEqual({ sent: 0, failed: 0, dead: 1 })
+    const mail = await stores.read.selectFrom('outbox').select(['id', 'message_id']).executeTakeFirstOrThrow()
+    const asked = { actorId: 'admin', once: null, mailId: mail.id }
+    expect(await sendMailAgain(stores, asked, start)).toEqual({ state: 'waiting' })
+    expect(await deliverOutbox(stores, sender(), () => start)).toEqual({ sent: 1, failed: 0, dead: 0 })
+    expect(mails.mails.map(one => one.messageId)).toEqual([expect.stringContaining(mail.message_id)])
+    await expect(sendMailAgain(stores, asked, start)).rejects.toMatchObject({ code: 'invalid' })
+    await expect(sendMailAgain(stores, { ...asked, mailId: 'none' }, start)).rejects.toMatchObject({ code: 'not_found' })
+    expect(await stores.read.selectFrom('ledger_entry').select('actor').where('action', '=', 'mail.sent_again').execute()).toEqual([{ actor: 'admin' }])
   })
 
   it('is queued once per event, however often the event is told', async () => {

@@ -1,8 +1,8 @@
 import { z } from 'zod'
 import { mailPage } from '#shared/schemas/machinery'
-import { listMail } from '../../domain/notices/listMail'
-import { defineApiHandler } from '../../utils/defineApiHandler'
-import { useStores } from '../../utils/useStores'
+import { listMail } from '../../../domain/notices/listMail'
+import { defineApiHandler } from '../../../utils/defineApiHandler'
+import { useStores } from '../../../utils/useStores'
 
 export default defineApiHandler({
   action: 'department:mail',

@@ -1,0 +1,55 @@
+import { mkdtempSync, rmSync } from 'node:fs'
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
+import { afterAll, beforeAll, describe, expect, it } from 'vitest'
+import { openDatabase, type OpenDatabase } from '../../../server/db/open'
+import { readVisit } from '../../../server/domain/records/readVisit'
+import { buildWorld, type World } from '../../fixtures/world'
+
+describe('what a visitor reads', () => {
+  let stores: OpenDatabase
+  let world: World
+  let dataDir: string
+  let role: { roleId: string, personId: string }
+  const now = Date.now()
+
+  beforeAll(async () => {
+    dataDir = mkdtempSync(join(tmpdir(), 'tetherhouse-visit-'))
+    stores = await openDatabase(dataDir)
+    world = await buildWorld(stores, dataDir, now)
+    const personId = world.people.visitor!.personId
+    role = { personId, roleId: (await stores.read.selectFrom('department_role').select('id').where('person_id', '=', personId).executeTakeFirstOrThrow()).id }
+  }, 120_000)
+  afterAll(async () => {
+    await stores.close()
+    rmSync(dataDir, { recursive: true, force: true })
+  })
+  const logged = () => stores.read.selectFrom('access_log').selectAll().execute()
+  const entries = () => stores.read.selectFrom('ledger_entry').select(['actor', 'facts_json']).where('action', '=', 'visit.read').execute()
+
+  it('is the stated course alone, what was released in it, and nobody by name; each look is logged', async () => {
+    const visit = await readVisit(stores, role, now)
+    expect(visit.courses.map(course => course.title)).toEqual([expect.stringContaining(world.courseCanaries.main)])
+    const postings = visit.courses[0]!.postings
+    expect(postings.length).toBeGreaterThan(0)
+    for (const posting of postings) expect(posting.title).toMatch(/^Released/)
+    const pieces = postings.flatMap(posting => posting.pieces)
+    expect(pieces.length).toBeGreaterThan(2)
+    const text = JSON.stringify(visit)
+    for (const person of Object.values(world.people)) expect([person.name, text.includes(person.canary), text.includes(person.email)]).toEqual([person.name, false, false])
+    const pseudonyms = await stores.read.selectFrom('membership').select(['id', 'pseudonym']).execute()
+    const shown = pieces.map(piece => pseudonyms.find(row => row.pseudonym === piece.pseudonym)!.id).toSorted()
+    expect((await logged()).map(line => line.subject_membership_id).toSorted()).toEqual([...new Set(shown)])
+    expect((await logged()).every(line => line.actor_person_id === role.personId)).toBe(true)
+    expect(await entries()).toEqual([{ actor: role.roleId, facts_json: expect.stringContaining(`"people":${new Set(shown).size}`) }])
+  })
+
+  it('logs each further look, and enters the ledger once an hour', async () => {
+    const lines = (await logged()).length
+    await readVisit(stores, role, now + 60_000)
+    expect((await logged()).length).toBe(2 * lines)
+    expect(await entries()).toHaveLength(1)
+    await readVisit(stores, role, now + 3_700_000)
+    expect(await entries()).toHaveLength(2)
+  })
+})
