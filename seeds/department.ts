@@ -10,6 +10,7 @@ import { createTerm } from '../server/domain/terms/createTerm'
 import { enrol } from '../server/domain/terms/enrol'
 import { endMembership, setTaSections } from '../server/domain/terms/memberships'
 import { planTerm } from '../server/domain/terms/rollOver/planTerm'
+import { openCourse } from '../server/domain/terms/openCourse'
 import { startTerm } from '../server/domain/terms/rollOver/startTerm'
 import { setTermState } from '../server/domain/terms/setTermState'
 import type { Acting } from '../server/domain/people/actor'
@@ -96,7 +97,11 @@ export class Department {
   async rollOver(fromTermId: string, now: number): Promise<{ termId: string }> {
     const asked = { fromTermId, term: this.calendar.running, choices: { leaveOut: [], dates: [] } }
     const plan = await planTerm(this.stores.read, asked)
-    return startTerm(this.stores, { ...this.admin, ...asked, digest: plan.digest }, now)
+    const started = await startTerm(this.stores, { ...this.admin, ...asked, digest: plan.digest }, now)
+    // What came along is a draft: it is opened to its students before the term begins.
+    const courses = await this.stores.read.selectFrom('course').select('id').where('term_id', '=', started.termId).execute()
+    for (const course of courses) await openCourse(this.stores, { ...this.admin, courseId: course.id }, now)
+    return started
   }
 
   async setTerm(termId: string, state: 'running' | 'closed', now: number): Promise<void> {

@@ -1,7 +1,9 @@
 import type { Migration } from 'kysely'
 import { ground } from './0001_ground'
+import { openCourses } from './0002_open_courses'
 
 /** Every migration, by name, in order. A test holds this list against the folder. */
 export const migrations: Record<string, Migration> = {
   '0001_ground': ground,
+  '0002_open_courses': openCourses,
 }

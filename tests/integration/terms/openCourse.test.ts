@@ -3,7 +3,9 @@ import { authorize } from '../../../server/domain/authorize'
 import { locate } from '../../../server/domain/locate'
 import { describeSelf } from '../../../server/domain/people/describeSelf'
 import { loadRoles } from '../../../server/domain/people/loadActor'
+import { openCourses } from '../../../server/db/migrations/0002_open_courses'
 import { openCourse } from '../../../server/domain/terms/openCourse'
+import { createCourse } from '../../../server/domain/terms/courses'
 import { inTerm, smallDepartment } from '../../fixtures/smallDepartment'
 import { temporaryStores, type TemporaryStores } from '../../fixtures/temporaryStores'
 
@@ -48,4 +50,13 @@ it('a TA, an instructor and a student cannot open it', async () => {
     const actor = await actorOf(department.people[person])
     expect(() => authorize('course:open', actor, place)).toThrow(expect.objectContaining({ code }))
   }
+})
+
+it('an earlier house’s drafts that have students are open after the migration; those without stay drafts', async () => {
+  const { courseId, asked, termId } = department
+  const empty = await createCourse(stores, { ...asked, course: { termId, code: 'ATM 302', title: 'Not begun', alsoListedAs: [], lateRule: { kind: 'none' }, conventionRevisionId: null, sections: ['A'], leadPersonId: null } }, inTerm)
+  await stores.write(trx => trx.updateTable('course').set({ state: 'draft' }).execute())
+  await stores.write(trx => openCourses.up(trx))
+  const states = await stores.read.selectFrom('course').select(['id', 'state']).execute()
+  expect(Object.fromEntries(states.map(course => [course.id, course.state]))).toEqual({ [courseId]: 'open', [empty.id]: 'draft' })
 })
