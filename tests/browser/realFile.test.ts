@@ -83,6 +83,7 @@ describeWithShared('a real file in the browser', () => {
       await page.getByText('Layers of one thickness', { exact: true }).click()
       await page.getByLabel(/Sounding of the plains/).check()
       await page.getByLabel('up', { exact: true }).check()
+      await page.getByLabel('down', { exact: true }).uncheck() // a balloon's sounding has no way down
       await page.getByLabel('From, m').fill('600')
       await page.getByLabel('To, m').fill('3000')
       await page.getByLabel('Thickness, m').fill('2400')
