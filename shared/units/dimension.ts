@@ -27,6 +27,8 @@ const named: readonly [Dimension, string][] = [
   [[2, 1, -2, 0, 0], 'an energy'],
   [[2, 1, -3, 0, 0], 'a power'],
   [[0, 1, -3, 0, 0], 'a power per area'],
+  [[2, 0, -3, 0, 0], 'a power per mass'],
+  [[-1, 1, -3, 0, 0], 'a pressure per time'],
   [[-1, 1, -2, 0, 0], 'a pressure'],
   [[1, 1, -2, 0, 0], 'a force'],
   [[-3, 1, 0, 0, 0], 'a density'],

@@ -7,7 +7,7 @@ export interface FormattedQuantity { number: string, unit: readonly UnitPart[], 
 const minusSign = '−'
 const raised = ['⁰', '¹', '²', '³', '⁴', '⁵', '⁶', '⁷', '⁸', '⁹']
 const shownSymbols: Readonly<Record<string, string>> = {
-  'Cel': '°C', '[degF]': '°F', '[ft_i]': 'ft', '[in_i]': 'in', '[mi_i]': 'mi', '[nmi_i]': 'nmi', '[kn_i]': 'kt', 'm[Hg]': 'mHg', 'mm[Hg]': 'mmHg', '[in_i\'Hg]': 'inHg', '[psi]': 'psi', '[lb_av]': 'lb', '[ppth]': '‰', '[ppm]': 'ppm', 'deg': '°', 'um': 'µm',
+  'Cel': '°C', '[degF]': '°F', '[degR]': '°F', '[ft_i]': 'ft', '[in_i]': 'in', '[mi_i]': 'mi', '[nmi_i]': 'nmi', '[kn_i]': 'kt', 'm[Hg]': 'mHg', 'mm[Hg]': 'mmHg', '[in_i\'Hg]': 'inHg', '[psi]': 'psi', '[lb_av]': 'lb', '[ppth]': '‰', '[ppm]': 'ppm', 'deg': '°', 'um': 'µm',
 }
 
 /** A UCUM code as factors with exponents: J/(kg.K) → J, kg⁻¹, K⁻¹. */

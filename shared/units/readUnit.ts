@@ -166,13 +166,13 @@ function join(a: Part, b: Part, sign: 1 | -1): Part {
   }
 }
 
-/** Within a compound, °C is a step of temperature and therefore K. */
+/** Within a compound, °C is a step of temperature and therefore K, and °F one of the Rankine scale, which has the same degree. */
 function symbolPart(symbol: string): Part | null {
   const code = codeOfSymbol(symbol)
   if (code === 'Cel') return { dimension: [0, 0, 0, 1, 0], factor: one, code: 'K' }
   if (code !== null) {
-    const atom = findAtom(code)
-    if (atom) return { dimension: atom.dimension, factor: atom.factor, code }
+    const atom = findAtom(code === '[degF]' ? '[degR]' : code)
+    if (atom) return { dimension: atom.dimension, factor: atom.factor, code: code === '[degF]' ? '[degR]' : code }
   }
   const unit = soleUnit(symbol)
   return unit ? { dimension: unit.dimension, factor: unit.factor, code: unit.code } : null

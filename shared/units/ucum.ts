@@ -31,6 +31,8 @@ const atoms: Readonly<Record<string, Atom>> = {
   'mol': { dimension: [0, 0, 0, 0, 1], factor: one, takesPrefix: true },
   'Cel': { dimension: temperature, factor: one, offset: decimal('273.15') },
   '[degF]': { dimension: temperature, factor: fahrenheitStep, offset: times(decimal('459.67'), fahrenheitStep) },
+  // a step of °F: a scale with an offset cannot stand in a compound
+  '[degR]': { dimension: temperature, factor: fahrenheitStep },
   'Pa': { dimension: pressure, factor: one, takesPrefix: true },
   'bar': { dimension: pressure, factor: decimal('100000'), takesPrefix: true },
   'atm': { dimension: pressure, factor: decimal('101325') },
