@@ -4,7 +4,8 @@
  *   npm run --silent evaluate -- [--list] [--trace] [--judge]
  *
  * {"id","quantity","inputs":{name:{"value","unit"}},"convention"?,"variant"?,"unit"?} → {"id","value","unit"}; a bad line gives
- * {"id","error":{"code","detail","input"?}} and the next is read. With --judge a question has "answer" (no grant, three digits), and the line
+ * {"id","error":{"code","detail","input"?}} and the next is read. With "u":{input:{"value","unit"}} (and "correlation":[[input,input,r]]) an answer
+ * has "uncertainty" as well: its words are in `evaluate/uncertaintyOf.ts`. With --judge a question has "answer" (no grant, three digits), and the line
  * says {"id","accepted","band","unit","slip"}. Questions alone go to stdout; the closing counts go to stderr.
  */
 import { createInterface } from 'node:readline'

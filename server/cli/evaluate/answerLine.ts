@@ -13,17 +13,14 @@ import { readClass } from '#shared/units/readClass'
 import { plainText } from '#shared/units/plainText'
 import { readQuantity } from '#shared/units/readQuantity'
 import { readUnit } from '#shared/units/readUnit'
+import { CorrelationError } from '#shared/thermo/uncertainty/propagate'
+import { NoDerivativeError } from '#shared/thermo/uncertainty/budget'
 import { findUnit, fromSi, getUnit, isCommensurable, toSi, type Unit } from '#shared/units/ucum'
+import { Refusal } from './refusal'
+import { uncertaintyOf } from './uncertaintyOf'
 
 export type Json = null | boolean | number | string | readonly Json[] | { readonly [key: string]: Json | undefined }
 export type AnswerLine = { readonly [key: string]: Json | undefined }
-
-/** A question that cannot be answered, with the input that is to blame. */
-class Refusal extends Error {
-  constructor(readonly code: string, detail: string, readonly input?: string) {
-    super(detail)
-  }
-}
 
 const longestLine = 4_000_000
 const longestSeries = 200_000
@@ -40,7 +37,7 @@ export function answerLine(line: string, wants: { trace: boolean, judge: boolean
     const variant = variantOf(question, definition)
     const unit = unitOf(question, definition)
     const inputs = inputsOf(question, definition)
-    return { id, ...(wants.judge ? judge(question, definition, convention, variant, unit, inputs) : value(definition, convention, variant, unit, inputs, wants.trace)) }
+    return { id, ...(wants.judge ? judge(question, definition, convention, variant, unit, inputs) : { ...value(definition, convention, variant, unit, inputs, wants.trace), ...withUncertainty(question, definition, convention, variant, unit, inputs) }) }
   }
   catch (error) {
     return { id, error: described(error) }
@@ -53,6 +50,8 @@ function described(error: unknown): Json {
   if (error instanceof UnknownInputError) return { code: 'unknown_input', detail: error.message, input: error.input }
   if (error instanceof OutOfRangeError) return { code: 'out_of_range', detail: error.message, input: error.input }
   if (error instanceof SeriesError) return { code: 'series_unusable', detail: error.message, input: error.input }
+  if (error instanceof CorrelationError) return { code: 'correlation_impossible', detail: error.message }
+  if (error instanceof NoDerivativeError) return { code: 'no_derivative', detail: error.message }
   return { code: 'not_evaluated', detail: error instanceof Error ? error.message : String(error) }
 }
 
@@ -119,10 +118,7 @@ function inputsOf(question: Fields, definition: QuantityDefinition): Inputs {
     if (!isRecord(one)) throw new Refusal('bad_input', 'an input is {"value","unit"}', name)
     const unit = commensurable(one.unit ?? (input.unit === '1' ? '1' : undefined), input.unit, name)
     const isDifference = input.kind !== 'temperature'
-    const convert = (raw: unknown): number => {
-      if (typeof raw !== 'number' || !Number.isFinite(raw)) throw new Refusal('bad_input', `${JSON.stringify(raw)?.slice(0, 40) ?? 'nothing'} is not a number`, name)
-      return unit.code === input.unit ? raw : toDouble(toSi(decimalOf(raw), unit, isDifference))
-    }
+    const convert = (raw: unknown): number => inSi(raw, unit, input.unit, isDifference, name)
     if (Array.isArray(one.value)) {
       if (one.value.length > longestSeries) throw new Refusal('too_long', `a series holds at most ${longestSeries} values`, name)
       inputs[name] = one.value.map(convert)
@@ -143,6 +139,22 @@ function value(definition: QuantityDefinition, convention: Convention, variant: 
   if (outcome.is === 'class') return { value: outcome.key, unit: '1', ...notes, ...trace }
   if (outcome.is !== 'value') return { value: outcome.is.replace('_', ' '), unit: unit.code, ...notes, ...trace }
   return { value: inUnit(outcome.value, unit, definition), unit: unit.code, ...notes, ...trace }
+}
+
+function inSi(raw: unknown, unit: Unit, si: string, isDifference: boolean, name: string): number {
+  if (typeof raw !== 'number' || !Number.isFinite(raw)) throw new Refusal('bad_input', `${JSON.stringify(raw)?.slice(0, 40) ?? 'nothing'} is not a number`, name)
+  return unit.code === si ? raw : toDouble(toSi(decimalOf(raw), unit, isDifference))
+}
+
+function withUncertainty(question: Fields, definition: QuantityDefinition, convention: Convention, variant: string | undefined, unit: Unit, inputs: Inputs): AnswerLine {
+  const uncertainty = uncertaintyOf(question, {
+    definition, convention, variant: taughtVariant(definition, convention, variant), unit, inputs,
+    asDifference: (raw, code, name) => {
+      const si = definition.inputs.find(one => one.name === name)?.unit ?? '1'
+      return inSi(raw, commensurable(code ?? (si === '1' ? '1' : undefined), si, name), si, true, name)
+    },
+  })
+  return uncertainty === null ? {} : { uncertainty }
 }
 
 function inUnit(si: number, unit: Unit, definition: QuantityDefinition): number {

@@ -75,6 +75,26 @@ describe('the evaluator', () => {
     const { out } = await evaluate(['--trace'], JSON.stringify({ id: 1, ...theta }))
     expect(answers(out)[0]).toMatchObject({ trace: [{ formula: expect.any(String) }, { filled: expect.stringContaining('307.09') }] })
   })
+  it('gives the uncertainty beside the value where those of the inputs are given', async () => {
+    const heating = { quantity: 'isobaric-heat', inputs: { temperatureStart: { value: 10, unit: 'Cel' }, temperatureEnd: { value: 35, unit: 'Cel' } }, u: { temperatureStart: { value: 0.2, unit: 'Cel' }, temperatureEnd: { value: 0.2, unit: 'K' } } }
+    const lines = [heating, { ...heating, correlation: [['temperatureStart', 'temperatureEnd', 1]] }, { ...heating, monteCarlo: { trials: 2000, seed: 4 } }, { ...heating, monteCarlo: { trials: 2000, seed: 4 } },
+      { ...heating, u: { pressure: { value: 1, unit: 'hPa' } } }, { ...heating, u: { temperatureEnd: { value: -1, unit: 'K' } } }, { ...heating, u: { temperatureEnd: { value: 1, unit: 'hPa' } } }, { ...heating, u: 0.2 },
+      { ...heating, correlation: [['temperatureStart', 'temperatureEnd', 3]] }, { ...heating, correlation: 'all' }, { ...heating, coverage: 2 }, { ...heating, u: undefined }]
+    const { out, code } = await evaluate([], lines.map(line => JSON.stringify(line)).join('\n'))
+    expect(code).toBe(0)
+    const [plain, shared, simulated, again, ...rest] = answers(out)
+    // cp · 0.2 K · √2, and the same in both
+    expect(plain).toMatchObject({ value: 25.1, unit: 'kJ/kg', uncertainty: { method: 'propagation', unit: 'kJ/kg', coverage: 0.95, parts: [{ share: expect.closeTo(0.5, 9) }, { share: expect.closeTo(0.5, 9) }], standard: expect.closeTo(1.004 * 0.2 * Math.SQRT2, 9) } })
+    expect(shared).toMatchObject({ uncertainty: { standard: 0 } })
+    expect(simulated).toMatchObject({ uncertainty: { method: 'monte-carlo', trials: 2000, without: 0, seed: 4, standard: expect.closeTo(1.004 * 0.2 * Math.SQRT2, 1) } })
+    expect(again).toEqual(simulated)
+    const bad = rest.slice(0, -1).map(line => line.error)
+    expect(bad).toEqual([
+      expect.objectContaining({ code: 'unknown_input', input: 'pressure' }), expect.objectContaining({ code: 'out_of_range', input: 'temperatureEnd' }), expect.objectContaining({ code: 'wrong_dimension', input: 'temperatureEnd' }), expect.objectContaining({ code: 'bad_question' }),
+      expect.objectContaining({ code: 'out_of_range' }), expect.objectContaining({ code: 'bad_question' }), expect.objectContaining({ code: 'out_of_range', input: 'coverage' }),
+    ])
+    expect(rest.at(-1)).not.toHaveProperty('uncertainty')
+  })
   it('refuses a flag that it does not know, and is quiet about no questions', async () => {
     expect(await evaluate(['--nope'], '')).toMatchObject({ out: '', code: 2 })
     expect(await evaluate(['--judge'], '\n\n')).toMatchObject({ out: '', code: 0 })
