@@ -1,6 +1,4 @@
-/** Local lapse rates of saturated and of moist unsaturated air: plain numbers, SI. */
-import { constant } from './constants'
-import type { Constants } from './definition'
+/** Local lapse rates of saturated air: plain numbers, SI. */
 import { mixingRatioFrom } from './humidity'
 import type { MoistAir } from './moistAir'
 
@@ -31,17 +29,4 @@ export function fullSaturatedRate(temperature: number, pressure: number, liquid:
   const w = mixingRatioFrom(air.es(temperature), pressure, air.epsilon), L = air.L(temperature)
   return air.g * (1 + w + liquid) * (1 + L * w / (air.R * temperature))
     / (air.cp + w * air.cpv + liquid * air.cw + L * L * w * (air.epsilon + w) / (air.R * temperature * temperature))
-}
-
-/**
- * Adiabatic lapse rate of moist air that is not saturated.
- *
- *   Γ = g (1 + w) / (cp + w cpv)
- *
- * Source: AMS Glossary of Meteorology, "dry-adiabatic lapse rate", with the heat capacity of the vapor.
- *
- * @example moistUnsaturatedRate(0.015, { g: 9.81, cp: 1004, cpv: 1870 }) // 0.0096479 K m⁻¹
- */
-export function moistUnsaturatedRate(mixingRatio: number, constants: Constants): number {
-  return constant(constants, 'g') * (1 + mixingRatio) / (constant(constants, 'cp') + mixingRatio * constant(constants, 'cpv'))
 }

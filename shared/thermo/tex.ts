@@ -23,6 +23,7 @@ const units: Readonly<Record<string, string>> = {
   'J': 'J', 'kJ': 'kJ', 'J/kg': 'J\\,kg^{-1}', 'kJ/kg': 'kJ\\,kg^{-1}', 'K/m': 'K\\,m^{-1}', 'K/km': 'K\\,km^{-1}',
   's': 's', 'h': 'h', 'm/s': 'm\\,s^{-1}', 's-1': 's^{-1}', 's-2': 's^{-2}', 'K/s': 'K\\,s^{-1}', 'K/h': 'K\\,h^{-1}', 'deg': '{}^{\\circ}', 'rad': 'rad', 'mm': 'mm', 'g/kg': 'g\\,kg^{-1}', 'kg/kg': 'kg\\,kg^{-1}',
   'kg/m3': 'kg\\,m^{-3}', 'm3/kg': 'm^{3}\\,kg^{-1}', 'J/(kg.K)': 'J\\,kg^{-1}\\,K^{-1}', 'm/s2': 'm\\,s^{-2}', 'W/kg': 'W\\,kg^{-1}', 'Pa/s': 'Pa\\,s^{-1}', 'hPa/h': 'hPa\\,h^{-1}',
+  'g/m3': 'g\\,m^{-3}', '%': '\\%', '1/K': 'K^{-1}',
 }
 
 export function texUnit(code: string): string {

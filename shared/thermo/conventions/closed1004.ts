@@ -39,6 +39,27 @@ const vaporPressures: readonly Alternative[] = [
 /** In moist air near the ground; Buck (1981) and WMO-No. 8 give 1.004 to 1.0045. */
 const enhancement: Alternative = { label: 'enhancement factor 1.004 of moist air', constants: { enhancementFactor: 1.004 } }
 
+/** Formulae of equal standing for one quantity, by the group in which only one holds at once. */
+const formulae: readonly Alternative[] = [
+  ...(['romps', 'bolton', 'solved'] as const).map(form => ({
+    group: 'lifting condensation level', label: `condensation level ${form === 'romps' ? 'by Romps (2017)' : form === 'bolton' ? 'by Bolton (1980)' : 'where w = ws'}`,
+    variants: { 'lifting-condensation-level-temperature': form, 'lifting-condensation-level-pressure': form, 'lifting-condensation-level-height': form },
+  })),
+  { group: 'theta-e', label: 'θe by Bolton’s equation 43', variants: { 'equivalent-potential-temperature': 'bolton-43', 'saturation-equivalent-potential-temperature': 'bolton-43' } },
+  { group: 'wet-bulb potential temperature', label: 'θw by Davies-Jones (2008)', variants: { 'wet-bulb-potential-temperature': 'davies-jones' } },
+  { group: 'saturated rate', label: 'Γm with the heat capacity of the vapor', variants: { 'saturated-adiabatic-lapse-rate': 'full' } },
+  { group: 'wet bulb', label: 'wet bulb with the heat capacity of dry air', variants: { 'wet-bulb-temperature': 'dry-heat', 'wet-bulb-temperature-from-relative-humidity': 'dry-heat', 'mixing-ratio-from-wet-bulb': 'dry-heat' } },
+  ...(['ferrel', 'assmann'] as const).map(coefficient => ({
+    group: 'psychrometer', label: coefficient === 'ferrel' ? 'psychrometer coefficient of Ferrel' : 'psychrometer coefficient 6.62·10⁻⁴, with ice 5.84·10⁻⁴',
+    variants: {
+      'vapor-pressure-from-psychrometer': coefficient, 'relative-humidity-from-psychrometer': coefficient,
+      ...coefficient === 'assmann' ? { 'vapor-pressure-from-ice-psychrometer': coefficient, 'relative-humidity-from-ice-psychrometer': coefficient } : {},
+    },
+  })),
+  { group: 'mixing', label: 'mixing by the mean of the vapor pressures', variants: { 'isobaric-mixing-vapor-pressure': 'mean-vapor-pressure', 'isobaric-mixing-relative-humidity': 'mean-vapor-pressure' } },
+  { group: 'liquid water', label: 'liquid water along the reversible path', variants: { 'adiabatic-liquid-water': 'reversible' } },
+]
+
 /** The default convention. It closes: 1004 − 717 = 287. */
 export const closed1004: Convention = {
   key: 'closed-1004',
@@ -59,6 +80,7 @@ export const closed1004: Convention = {
     ...vaporPressures.map(one => ({ group: 'vapor pressure', ...one })),
     { group: 'enhancement factor', ...enhancement },
     { group: 'radius of the earth', label: 'mean radius of the earth, 6371 km', constants: { earthRadius: 6_371_000 } },
+    ...formulae,
     { group: 'von Kármán constant', label: 'von Kármán constant 0.41', constants: { vonKarman: 0.41 } },
   ],
 }

@@ -7,7 +7,7 @@ import { bolton39, bolton43, daviesJonesWetBulbPotential, equivalentPotentialTem
 import { boltonLclTemperature, lclFunction, rompsLcl, rompsSaturationPressure, solvedLclTemperature } from '#shared/thermo/liftingCondensation'
 import { moistAir } from '#shared/thermo/moistAir'
 import { pseudoadiabaticSlope, pseudoadiabaticTemperature, pseudoadiabatThrough } from '#shared/thermo/pseudoadiabat'
-import { fullSaturatedRate, moistUnsaturatedRate, saturatedRate } from '#shared/thermo/saturatedRate'
+import { fullSaturatedRate, saturatedRate } from '#shared/thermo/saturatedRate'
 
 const constants = defaultConvention.constants
 const air = moistAir(constants, plainFormulae)
@@ -23,7 +23,6 @@ describe('examples of the docstrings', () => {
     expect(through[1]).toBeCloseTo(264.3, 1)
     expect(saturatedRate(293.15, 100_000, air)).toBeCloseTo(0.00431, 5)
     expect(fullSaturatedRate(293.15, 100_000, 0, air)).toBeCloseTo(0.00427, 5)
-    expect(moistUnsaturatedRate(0.015, constants)).toBeCloseTo(0.0096479, 7)
     expect(boltonLclTemperature(293.15, 285.15)).toBeCloseTo(283.35, 2)
     expect(solvedLclTemperature(293.15, 285.15, 100_000, air)).toBeCloseTo(283.36, 2)
     expect(lclFunction(constants, plainFormulae)(293.15, 285.15, 100_000).heightAboveStart).toBeCloseTo(1003, 0)
