@@ -8,15 +8,16 @@
  */
 import { exp, log } from './elementary'
 
-const lanczos = [0.99999999999980993, 676.5203681218851, -1259.1392167224028, 771.32342877765313, -176.61502916214059, 12.507343278686905, -0.13857109526572012, 9.9843695780195716e-6, 1.5056327351493116e-7]
+/** Lanczos’ coefficients of ln Γ. */
+export const lanczos: readonly number[] = [0.99999999999980993, 676.5203681218851, -1259.1392167224028, 771.32342877765313, -176.61502916214059, 12.507343278686905, -0.13857109526572012, 9.9843695780195716e-6, 1.5056327351493116e-7]
 const halfLogOfTwoPi = 0.9189385332046727
 
 /** ln Γ(x) for x > 0. */
-export function logGamma(x: number): number {
+export function logGamma(x: number, coefficients: readonly number[] = lanczos): number {
   // below ½ by Γ(x) = Γ(x + 1)/x
-  if (x < 0.5) return logGamma(x + 1) - log(x)
-  let sum = lanczos[0] ?? 0
-  for (let n = 1; n < lanczos.length; n++) sum += (lanczos[n] ?? 0) / (x - 1 + n)
+  if (x < 0.5) return logGamma(x + 1, coefficients) - log(x)
+  let sum = coefficients[0] ?? 0
+  for (let n = 1; n < coefficients.length; n++) sum += (coefficients[n] ?? 0) / (x - 1 + n)
   const t = x + 6.5
   return halfLogOfTwoPi + (x - 0.5) * log(t) - t + log(sum)
 }
