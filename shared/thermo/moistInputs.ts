@@ -1,7 +1,7 @@
 /** The inputs of moist air, so that they are named, ranged and labeled alike everywhere. */
 import type { InputDefinition } from './definition'
 
-export const pressureInput: InputDefinition = { name: 'pressure', label: 'pressure', symbol: 'p', unit: 'Pa', shownUnit: 'hPa', kind: 'ratio', shape: 'number', range: [5000, 120_000] }
+export const pressureInput: InputDefinition = { name: 'pressure', label: 'pressure', symbol: 'p', unit: 'Pa', shownUnit: 'hPa', kind: 'ratio', shape: 'number', range: [500, 120_000] }
 export const temperatureInput: InputDefinition = { name: 'temperature', label: 'air temperature', symbol: 'T', unit: 'K', shownUnit: 'Cel', kind: 'temperature', shape: 'number', range: [180, 340] }
 export const dewpointInput: InputDefinition = { name: 'dewpoint', label: 'dewpoint', symbol: 'T_d', unit: 'K', shownUnit: 'Cel', kind: 'temperature', shape: 'number', range: [160, 340] }
 /** Up to where a sensor in fog goes; none of zero, which has no dewpoint. */

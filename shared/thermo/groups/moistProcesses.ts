@@ -1,5 +1,7 @@
 import type { QuantityGroup } from '../definition'
 import { adiabaticLiquidWaterDefinition } from '../quantities/adiabaticLiquidWater'
+import { convectiveCondensationLevelPressureDefinition } from '../quantities/convectiveCondensationLevelPressure'
+import { convectiveTemperatureDefinition } from '../quantities/convectiveTemperature'
 import { equivalentPotentialTemperatureDefinition } from '../quantities/equivalentPotentialTemperature'
 import { equivalentPotentialTemperatureShortcutDefinition } from '../quantities/equivalentPotentialTemperatureShortcut'
 import { isobaricMixingRelativeHumidityDefinition } from '../quantities/isobaricMixingRelativeHumidity'
@@ -42,5 +44,7 @@ export const moistProcesses: QuantityGroup = {
     isobaricMixingTemperatureDefinition,
     isobaricMixingVaporPressureDefinition,
     isobaricMixingRelativeHumidityDefinition,
+    convectiveCondensationLevelPressureDefinition,
+    convectiveTemperatureDefinition,
   ],
 }
