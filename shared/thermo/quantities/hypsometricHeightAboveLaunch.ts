@@ -1,5 +1,6 @@
 import { kelvin, pascal } from '../../units/brands'
 import { celsiusSlip } from '../composedSlips'
+import { constant } from '../constants'
 import type { Constants, Inputs } from '../definition'
 import { OutOfRangeError } from '../errors'
 import { lengthInput, pressureInput, temperatureInput, timeInput } from '../inputKinds'
@@ -71,8 +72,8 @@ export const hypsometricHeightAboveLaunchDefinition = oneFormula({
     return [
       ...(optional(inputs, 'pressureTendency') * optional(inputs, 'timeSinceLaunch') === 0 ? [] : [worked('Station pressure at the time of the sample', 'p_s(t) = p_s + \\dot p\\,\\Delta t', `p_s(t) = ${texNumber(numberOf(inputs, 'stationPressure') / 100, 6)} + ${texFactor(optional(inputs, 'pressureTendency') * 36)} \\cdot ${texNumber(optional(inputs, 'timeSinceLaunch') / 3600)}`, anchor(inputs), 'Pa', { value: anchor(inputs) / 100, unit: 'hPa' })]),
       ...(optional(inputs, 'pressureOffset') === 0 ? [] : [worked('Pressure of the sonde without its offset', 'p - \\delta', `${texNumber(p(inputs) / 100, 6)} - ${texFactor(optional(inputs, 'pressureOffset') / 100)}`, corrected(inputs), 'Pa', { value: corrected(inputs) / 100, unit: 'hPa' })]),
-      worked('Height above the barometer', '\\frac{R\\,\\overline{T_v}}{g} \\ln\\frac{p_s(t)}{p - \\delta}', `\\frac{R \\cdot ${texNumber(Tv(inputs), 6)}}{g} \\ln\\frac{${texNumber(anchor(inputs) / 100, 6)}}{${texNumber(corrected(inputs) / 100, 6)}}`, rise, 'm'),
-      worked('Above the launch point', 'z = z_b + \\ldots', `z = ${texNumber(datum(inputs))} + ${texFactor(rise, 6)}`, result, 'm'),
+      worked('Height above the barometer', '\\frac{R\\,\\overline{T_v}}{g} \\ln\\frac{p_s(t)}{p - \\delta}', `\\frac{${texNumber(constant(constants, 'R'))} \\cdot ${texNumber(Tv(inputs), 6)}}{${texNumber(constant(constants, 'g'), 6)}} \\ln\\frac{${texNumber(anchor(inputs) / 100, 6)}}{${texNumber(corrected(inputs) / 100, 6)}}`, rise, 'm'),
+      worked('Above the launch point', 'z = z_b + \\frac{R\\,\\overline{T_v}}{g} \\ln\\frac{p_s(t)}{p - \\delta}', `z = ${texNumber(datum(inputs))} + ${texFactor(rise, 6)}`, result, 'm'),
     ]
   },
   slips: [

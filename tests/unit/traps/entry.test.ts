@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { judgeTyped, kelvins, reading, setS, stepOf } from '../../fixtures/marking/ask'
+import { checkBand } from '#shared/marking/proof'
 import { readQuantity } from '#shared/units/readQuantity'
 
 const rate = (typed: string) => readQuantity(typed, { unit: 'K/km', kind: 'difference', quantityName: 'lapse rate' })
@@ -108,6 +109,13 @@ describe('traps U: entry, units, digits', () => {
     const hull = band?.parts.find(part => part.key === 'formulae')
     expect((band?.center ?? 0) * 1000 - (hull?.below ?? 0) * 1000).toBeCloseTo(9.751, 3)
     expect((band?.center ?? 0) * 1000 + (hull?.above ?? 0) * 1000).toBeCloseTo(9.8, 9)
+  })
+  it('U19: a band wider than half the way to the nearest slip is refused before posting, with the slip', () => {
+    const dry = stepOf('dry-adiabatic-lapse-rate', {}, { granted: { absoluteSi: 0.002 } })
+    const { ok, reasons } = checkBand(dry)
+    expect(ok).toBe(false)
+    expect(reasons.join(' ')).toMatch(/more than half the way from .* which is the slip “6.5 K km⁻¹”/)
+    expect(checkBand(stepOf('dry-adiabatic-lapse-rate', {}, { granted: { absoluteSi: 0.0005 } }))).toEqual({ ok: true, reasons: [] })
   })
   it('the wrong dimension is named in a sentence, with what is asked', () => {
     expect(rate('9.8 K').message).toBe('K is a temperature; the lapse rate is a temperature per length, such as K km⁻¹.')
