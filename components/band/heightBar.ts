@@ -33,8 +33,6 @@ export const inHalfWidths = (band: Pick<ShownBand, 'low' | 'high' | 'digits'>, v
   (value - (band.low + band.high) / 2) / halfWidth(band)
 
 export interface BarPointer { y: number, isInside: boolean, off: 'up' | 'down' | null }
-/** `textY`: where the pointer's words stand, a line away from those of the worked value. */
-export interface LargePointer extends BarPointer { textY: number }
 export interface SmallBar { high: number, low: number, center: number, pointer: BarPointer | null }
 
 /** Half-widths that the small bar spans on either side of the band's middle. */
@@ -50,7 +48,8 @@ export function smallBar(band: Pick<ShownBand, 'center' | 'low' | 'high' | 'digi
 }
 
 export interface PartBlock { key: ShownPart['key'], y: number, height: number }
-export interface PlacedLine { at: number, y: number, text: string, name: string }
+/** Words beside the bar: `at` where their leader starts, `y` where they stand. */
+export interface PlacedLine { kind: 'part' | 'edge' | 'value' | 'ghost', at: number, y: number, text: string, name: string }
 export interface LargeBar {
   top: number
   bottom: number
@@ -59,42 +58,33 @@ export interface LargeBar {
   high: number
   low: number
   center: number
-  /** Names of the parts: `at` where the leader starts, `y` where the words stand. */
-  labels: PlacedLine[]
-  /** The edges, where there is room for their names. */
-  edges: PlacedLine[]
-  pointer: LargePointer | null
-  ghosts: PlacedLine[]
+  /** All words beside the bar but the worked value's, which stand at `center`. */
+  lines: PlacedLine[]
+  pointer: BarPointer | null
 }
 
 const lineHeight = 21
 
-/** The large bar: ticks in the unit, parts stacked outward, names pushed apart so that none covers another. */
-export function largeBar(band: ShownBand, { height, span }: { height: number, span?: number }): LargeBar {
+/** The large bar: ticks in the unit, parts stacked outward, words in the order of what they name, so that no leader crosses another or words. */
+export function largeBar(band: ShownBand, { height, span, hidesParts = false }: { height: number, span?: number, hidesParts?: boolean }): LargeBar {
   const top = 44
   const bottom = height - 38
   const middle = (band.low + band.high) / 2
   const reach = span ?? largeReach(band)
   const y = (value: number) => (top + bottom) / 2 - (value - middle) / reach * (bottom - top) / 2
   const off = band.value === null ? null : band.value > middle + reach ? 'up' : band.value < middle - reach ? 'down' : null
-  const pointer = band.value === null ? null : placePointer(off === 'up' ? top - 14 : off === 'down' ? bottom + 14 : y(band.value), y(band.center), standingOf(band, band.value) === 'within', off)
+  const pointer: BarPointer | null = band.value === null ? null : { y: off === 'up' ? top - 14 : off === 'down' ? bottom + 14 : y(band.value), isInside: standingOf(band, band.value) === 'within', off }
 
   const { blocks, named } = stackParts(band, y)
-  const kept = [y(band.center), ...(pointer && !pointer.off ? [pointer.textY] : [])]
-  const edges = [{ value: band.high, name: 'top of the range' }, { value: band.low, name: 'foot of the range' }]
-    .map(edge => ({ at: y(edge.value), y: y(edge.value), text: numberText(edge.value, band.digits), name: edge.name }))
-    .filter(edge => kept.every(at => Math.abs(at - edge.y) >= lineHeight))
-  kept.push(...edges.map(edge => edge.y))
-  const labels = spread(named, kept)
-  kept.push(...labels.map(label => label.y))
-  const ghosts = spread((band.ghosts ?? []).filter(ghost => Math.abs(ghost.value - middle) <= reach).map(ghost => ({ at: y(ghost.value), y: y(ghost.value), text: numberText(ghost.value, band.digits), name: ghost.label })), kept)
+  const line = (kind: PlacedLine['kind'], value: number, name: string): PlacedLine => ({ kind, at: y(value), y: y(value), text: numberText(value, band.digits), name })
+  const lines = placeWords([
+    line('edge', band.high, 'top of the range'), line('edge', band.low, 'foot of the range'),
+    ...(hidesParts ? [] : named),
+    ...(band.value !== null && off === null ? [line('value', band.value, '')] : []),
+    ...(band.ghosts ?? []).filter(ghost => Math.abs(ghost.value - middle) <= reach).map(ghost => line('ghost', ghost.value, ghost.label)),
+  ], y(band.center))
   const ticks = bandTicks(middle - reach, middle + reach).map(tick => ({ ...tick, y: y(tick.value) }))
-  return { top, bottom, ticks, blocks, high: y(band.high), low: y(band.low), center: y(band.center), labels, edges, pointer, ghosts }
-}
-
-function placePointer(y: number, center: number, isInside: boolean, off: BarPointer['off']): LargePointer {
-  const isClose = Math.abs(y - center) < lineHeight
-  return { y, isInside, off, textY: isClose ? center + (y > center ? lineHeight : -lineHeight) : y }
+  return { top, bottom, ticks, blocks, high: y(band.high), low: y(band.low), center: y(band.center), lines, pointer }
 }
 
 /** Parts from the worked value outward; each is named on the side away from the value, where it has one there. */
@@ -112,7 +102,7 @@ function stackParts(band: ShownBand, y: (value: number) => number): { blocks: Pa
     if (part.above > 0 || part.below > 0) {
       const block = part.below > 0 && (isValueHigh || part.above === 0) ? lower : upper
       const at = block.y + block.height / 2
-      named.push({ at, y: at, text: partText(part, band.digits), name: part.label })
+      named.push({ kind: 'part', at, y: at, text: partText(part, band.digits), name: part.label })
     }
     above += part.above
     below -= part.below
@@ -142,14 +132,16 @@ export function bandTicks(low: number, high: number, about = 6): { value: number
   return niceTicks(low, high, about).map(value => ({ value, text: numberText(value, decimals) }))
 }
 
-/** Moves each line to the nearest free height, so that none stands within a line of another or of what is kept. */
-export function spread<T extends { at: number, y: number }>(lines: readonly T[], kept: readonly number[], gap = lineHeight): T[] {
-  const taken = [...kept]
-  return lines.map((line) => {
-    const tries = [line.at]
-    for (let step = 1; step <= 80; step++) tries.push(line.at + step * gap / 4, line.at - step * gap / 4)
-    const y = tries.find(candidate => taken.every(at => Math.abs(at - candidate) >= gap - 1e-6)) ?? line.at
-    taken.push(y)
-    return { ...line, y }
-  })
+/** Words a line apart, pushed away from the worked value, in the order of what they name. */
+export function placeWords<T extends { at: number, y: number }>(lines: readonly T[], center: number, gap = lineHeight): T[] {
+  const place = (side: readonly T[], away: 1 | -1): T[] => {
+    let last = center
+    return side.map((line) => {
+      last = away === 1 ? Math.max(line.at, last + gap) : Math.min(line.at, last - gap)
+      return { ...line, y: last }
+    })
+  }
+  const above = lines.filter(line => line.at < center).toSorted((a, b) => b.at - a.at)
+  const below = lines.filter(line => line.at >= center).toSorted((a, b) => a.at - b.at)
+  return [...place(above, -1).toReversed(), ...place(below, 1)]
 }

@@ -22,6 +22,8 @@ export interface ProfileScale {
   top: number
   bottom: number
   sideLeft: number
+  /** Where the last axis ends. */
+  end: number
   y: (height: number) => number
   x: (value: number) => number
   sideX: (value: number) => number
@@ -33,6 +35,10 @@ export interface ProfileScale {
   hasDots: boolean
 }
 
+/** Room for half of the last label of an axis, and for the labels of two axes side by side. */
+const rightMargin = 18
+const betweenAxes = 44
+
 /** Above this many levels the line stands without its dots. */
 const mostDots = 90
 
@@ -42,8 +48,8 @@ export function profileScale({ width, height, heights: all, main, side, range = 
   const heights = range ? all.map(level => level !== null && level >= range[0] && level <= range[1] ? level : null) : all
   const [left, top, bottom] = [52, 14, height - 46]
   const order = heights.map((_, at) => at).filter(at => heights[at] !== null).toSorted((a, b) => heights[a]! - heights[b]!)
-  const sideWidth = side ? Math.round((width - left - 10) * (isNarrow ? 0.24 : 0.27)) : 0
-  const right = width - 10 - sideWidth - (side ? 28 : 0)
+  const sideWidth = side ? Math.round((width - left - rightMargin) * (isNarrow ? 0.24 : 0.27)) : 0
+  const right = width - rightMargin - sideWidth - (side ? betweenAxes : 0)
   const lowest = order.length > 0 ? heights[order[0]!]! : 0
   const highest = order.length > 0 ? heights[order[order.length - 1]!]! : 100
   const whole = scaleLinear().domain([Math.min(0, lowest), highest - Math.min(0, lowest) < 1 ? lowest + 10 : highest]).nice(8)
@@ -51,9 +57,9 @@ export function profileScale({ width, height, heights: all, main, side, range = 
   const shown = range ? main.map(series => ({ ...series, values: heights.map((level, at) => level === null ? null : valueAt(series.values, at)) })) : main
   const x = scaleLinear().domain(padded(extentOf(shown) ?? [0, 1])).nice(6).range([left, right])
   const sideDomain = side?.unit === '%' ? [Math.min(40, (extentOf([side]) ?? [40, 100])[0]), Math.max(100, (extentOf([side]) ?? [40, 100])[1])] : padded(side ? extentOf([side]) ?? [0, 1] : [0, 1])
-  const sideX = scaleLinear().domain(sideDomain).nice(3).range([right + 28, width - 10])
+  const sideX = scaleLinear().domain(sideDomain).nice(3).range([right + betweenAxes, width - rightMargin])
   return {
-    left, right, top, bottom, sideLeft: right + 28, order, hasDots: heights.length <= mostDots,
+    left, right, top, bottom, sideLeft: right + betweenAxes, end: width - rightMargin, order, hasDots: heights.length <= mostDots,
     y: value => y(value), x: value => x(value), sideX: value => sideX(value),
     heightTicks: ticksOf(y, Math.max(3, Math.floor((bottom - top) / 64))),
     mainTicks: ticksOf(x, Math.max(2, Math.floor((right - left) / 62))),

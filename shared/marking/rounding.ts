@@ -21,11 +21,11 @@ export function halfUnitAsked(definition: QuantityDefinition, reference: number,
   return toDouble(times(times(step, rational(1n, 2n)), absolute(unit.factor)))
 }
 
-/** For the ask: "to 0.1 degree" for a temperature, "3 significant digits" for the rest. */
-export function digitsInWords(definition: QuantityDefinition, digits: number): string {
+/** For the ask: "to 0.1 K" for a temperature, "to 0.1 degree" where no unit is named, "3 significant digits" for the rest. */
+export function digitsInWords(definition: QuantityDefinition, digits: number, unit?: string): string {
   if (definition.kind === 'class') return 'one of the classes'
-  if (definition.kind !== 'temperature') return `${digits} significant digits`
+  if (definition.kind !== 'temperature') return `${digits} significant digit${digits === 1 ? '' : 's'}`
   const place = 2 - digits
-  if (place > 0) return `to ${place === 1 ? 10 : 100} degrees`
-  return `to ${place === 0 ? '1' : `0.${'1'.padStart(-place, '0')}`} degree`
+  if (place > 0) return `to ${place === 1 ? 10 : 100} ${unit ?? 'degrees'}`
+  return `to ${place === 0 ? '1' : `0.${'1'.padStart(-place, '0')}`} ${unit ?? 'degree'}`
 }

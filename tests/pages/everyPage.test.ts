@@ -1,87 +1,42 @@
-import { rmSync } from 'node:fs'
-import type { Browser } from 'playwright-core'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { openForReading } from '../../server/db/open'
-import { startBuiltServer, type BuiltServer } from '../fixtures/builtServer'
-import { DemoPeople } from '../fixtures/demoPeople'
-import { copyOf, demoWorld } from '../fixtures/demoWorld'
-import { chromiumPath, openBrowser } from '../fixtures/openBrowser'
-import { addressesOf, NoSampleError, pageFiles, type PageVisitor } from '../fixtures/pageAddresses'
+import { chromiumPath } from '../fixtures/openBrowser'
+import { addressesOf, NoSampleError, pageFiles } from '../fixtures/pageAddresses'
 import { keepBreaches, PageFaults } from '../fixtures/pageFaults'
+import { PageRounds } from '../fixtures/pageRounds'
 
-const looks = [{ sky: 'night', width: 360, height: 740 }, { sky: 'day', width: 1280, height: 720 }]
 const roles = ['student', 'ta', 'instructor', 'lead', 'admin', 'technician', 'visitor']
 const files = pageFiles()
-const timeout = 60_000
 
 /** Every page that is there, as each role that can open it: on a phone by night and on a laptop by day. */
 describe.skipIf(!chromiumPath)('every page', () => {
-  let server: BuiltServer
-  let browser: Browser
-  let people: DemoPeople
-  let database: ReturnType<typeof openForReading>
-  let dataDir: string
-  let runningCourse: string
+  let rounds: PageRounds
   /** Pages that somebody could open and was not refused on. */
   const opened = new Set<string>()
+  /** Pages on which somebody was already seen to be refused: a refusal looks the same to all. */
+  const refused = new Set<string>()
 
   beforeAll(async () => {
-    dataDir = copyOf(demoWorld())
-    server = await startBuiltServer({ dataDir, env: { DEMO: '1' } })
-    people = await DemoPeople.of(server.url)
-    runningCourse = (await people.courseOf(people.withRole('lead'), 'lead')).id
-    database = openForReading(dataDir)
-    browser = await openBrowser()
+    rounds = await PageRounds.start()
   })
-  afterAll(async () => {
-    await browser?.close()
-    await database?.close()
-    await server?.close()
-    rmSync(dataDir, { recursive: true, force: true })
-  })
+  afterAll(() => rounds?.close())
 
-  async function visitorOf(role: string | null): Promise<{ visitor: PageVisitor, cookies: { name: string, value: string, url: string }[] }> {
-    if (role === null) return { visitor: { email: null, courseId: runningCourse }, cookies: [] }
-    const person = people.withRole(role)
-    const cookies = (await people.visitor(person)).cookieHeader.split('; ').map((pair) => {
-      const at = pair.indexOf('=')
-      return { name: pair.slice(0, at), value: pair.slice(at + 1), url: server.url }
-    })
-    const isOfCourse = ['student', 'ta', 'instructor', 'lead'].includes(role)
-    return { visitor: { email: person.email, courseId: isOfCourse ? (await people.courseOf(person, role)).id : runningCourse }, cookies }
-  }
-
-  /** What is wrong with the pages that this role can open, on a phone and on a laptop at once. */
+  /** What is wrong with the pages that this role can open. */
   async function visit(role: string | null): Promise<string[]> {
-    const { visitor, cookies } = await visitorOf(role)
-    const lines: string[] = []
-    const open: { pattern: string, path: string }[] = []
-    const door = await browser.newContext()
-    await door.addCookies(cookies)
+    const guest = await rounds.guest(role)
+    const broken: string[] = []
+    const open: { name: string, path: string }[] = []
     for (const file of files.filter(each => role !== null || each.isPublic)) {
-      for (const path of await addressesOf(database.read, file, visitor)) {
-        const answer = await door.request.get(server.url + path, { maxRedirects: 0, timeout })
-        if (answer.status() >= 500) lines.push(`${path} (${file.pattern}): answers ${answer.status()}`)
-        if (answer.status() !== 200) continue
-        open.push({ pattern: file.pattern, path })
-        if (!(await answer.text()).includes('class="notice alarm"')) opened.add(file.pattern)
+      for (const path of await addressesOf(rounds.database.read, file, guest.visitor)) {
+        const answer = await rounds.answer(path, guest)
+        if (answer.status >= 500) broken.push(`${path} (${file.pattern}): answers ${answer.status}`)
+        if (answer.status !== 200) continue
+        const isRefused = answer.text.includes('class="notice alarm"')
+        if (isRefused && refused.has(file.pattern)) continue
+        (isRefused ? refused : opened).add(file.pattern)
+        open.push({ name: file.pattern, path })
       }
     }
-    await door.close()
-    await Promise.all(looks.map(async ({ sky, ...viewport }) => {
-      const context = await browser.newContext({ viewport })
-      await keepBreaches(context)
-      await context.addCookies([...cookies, { name: 'sky', value: sky, url: server.url }])
-      const page = await context.newPage()
-      const faults = new PageFaults(page, server.url)
-      for (const { pattern, path } of open) {
-        faults.begin()
-        await page.goto(server.url + path, { waitUntil: 'networkidle', timeout })
-        lines.push(...(await faults.lines()).map(line => `${path} (${pattern}) at ${viewport.width} by ${sky}: ${line}`))
-      }
-      await context.close()
-    }))
-    return lines.toSorted()
+    return [...broken, ...await rounds.look(guest, open)]
   }
 
   it.each([{ who: 'who is not signed in', role: null }, ...roles.map(role => ({ who: `a ${role}`, role }))])('has nothing wrong for $who', async ({ role }) => {
@@ -93,11 +48,12 @@ describe.skipIf(!chromiumPath)('every page', () => {
   })
 
   it('would tell of each thing that can be wrong', async () => {
+    const { browser, server } = rounds
     const context = await browser.newContext()
     await keepBreaches(context)
     const page = await context.newPage()
     const faults = new PageFaults(page, server.url)
-    await page.goto(`${server.url}/sign-in`, { waitUntil: 'networkidle' })
+    await faults.visit(`${server.url}/sign-in`)
     expect(await faults.lines()).toEqual([])
     await page.evaluate(() => {
       const broad = Object.assign(document.createElement('p'), { textContent: 'too broad' })
@@ -114,17 +70,31 @@ describe.skipIf(!chromiumPath)('every page', () => {
   })
 
   it('would tell of a request to another server', async () => {
+    const { browser, server } = rounds
     const context = await browser.newContext({ bypassCSP: true })
     const page = await context.newPage()
     const faults = new PageFaults(page, server.url)
-    await page.goto(`${server.url}/sign-in`, { waitUntil: 'networkidle' })
+    await faults.visit(`${server.url}/sign-in`)
     await page.evaluate(() => fetch('http://127.0.0.1:1/elsewhere').catch(() => null))
     expect(await faults.lines()).toContain('asked elsewhere: http://127.0.0.1:1/elsewhere')
     await context.close()
   })
 
+  it('waits for what a page asks for after it has loaded', async () => {
+    const { browser, server } = rounds
+    const page = await browser.newPage()
+    const faults = new PageFaults(page, server.url)
+    await faults.visit(`${server.url}/sign-in`)
+    await page.evaluate(() => {
+      void fetch('/readyz').then(() => fetch('/readyz')).then(() => document.querySelector('main')!.append(document.createElement('input')))
+    })
+    await faults.settle()
+    expect((await faults.lines()).join()).toContain('axe label')
+    await page.close()
+  })
+
   it('says which parameter of a new page has no sample', async () => {
-    await expect(addressesOf(database.read, { pattern: '/c/[courseId]/balloons/[balloonId]', isPublic: false }, { email: null, courseId: runningCourse }))
+    await expect(addressesOf(rounds.database.read, { pattern: '/c/[courseId]/balloons/[balloonId]', isPublic: false }, { email: null, courseId: rounds.runningCourse }))
       .rejects.toThrow(new NoSampleError('The page /c/[courseId]/balloons/[balloonId] has the parameter [balloonId]: say in tests/fixtures/pageAddresses.ts what stands for it.'))
   })
 })

@@ -1,3 +1,4 @@
+import { digitsInWords } from '#shared/marking/rounding'
 import type { Convention } from '#shared/marking/types'
 import type { InputSource, NumberStep, SupplyItem } from '#shared/schemas/lab'
 import type { InputDefinition, QuantityDefinition } from '#shared/thermo/definition'
@@ -115,5 +116,8 @@ export function constantWords(name: string, value: number | undefined): string |
 
 function answerOf(step: NumberStep, definition: QuantityDefinition): string {
   if (definition.classes) return `Answer with one of: ${definition.classes.map(entry => entry.label).join(', ')}.`
-  return `Answer in ${formatUnit(step.unit)}, to at least ${step.digits} significant digit${step.digits === 1 ? '' : 's'}.`
+  // The zero of a temperature is arbitrary: its digits are a fixed place, and the ask says which.
+  const unit = formatUnit(step.unit)
+  if (definition.kind === 'temperature') return `Answer in ${unit}, ${digitsInWords(definition, step.digits, unit)} or finer.`
+  return `Answer in ${unit}, to at least ${digitsInWords(definition, step.digits)}.`
 }

@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { bandTicks, inHalfWidths, largeBar, partText, smallBar, spread, standingOf, type ShownBand } from '../../../components/band/heightBar'
+import { bandTicks, inHalfWidths, largeBar, partText, placeWords, smallBar, standingOf, type ShownBand } from '../../../components/band/heightBar'
 
 const band: ShownBand = {
   unit: 'K km^-1', center: 9.6, low: 9.4, high: 10.2, digits: 2, value: 9.7,
@@ -49,7 +49,7 @@ describe('the height bar', () => {
   it('keeps words a line apart, whatever the value and the slips are', () => {
     fc.assert(fc.property(fc.double({ min: -30, max: 30, noNaN: true }), fc.array(fc.double({ min: 8, max: 12, noNaN: true }), { maxLength: 3 }), (value, ghosts) => {
       const bar = largeBar({ ...band, value, ghosts: ghosts.map((ghost, no) => ({ label: `slip ${no}`, value: ghost })) }, { height: 420 })
-      const lines = [bar.center, ...bar.labels.map(line => line.y), ...bar.ghosts.map(line => line.y), ...bar.edges.map(line => line.y)]
+      const lines = [bar.center, ...bar.lines.map(line => line.y)]
       const sorted = lines.toSorted((a, b) => a - b)
       return sorted.every((y, at) => at === 0 || y - sorted[at - 1]! >= 20.9)
     }))
@@ -67,7 +67,15 @@ describe('the height bar', () => {
     expect(partText({ above: 0.0004, below: 0.0004 }, 2)).toBe('± 0.0004')
   })
 
-  it('moves a line to the nearest free height', () => {
-    expect(spread([{ at: 100, y: 100 }, { at: 101, y: 101 }], [50]).map(line => line.y)).toEqual([100, 122])
+  it('keeps words in the order of what they name, so that no leader crosses another', () => {
+    fc.assert(fc.property(fc.double({ min: 9, max: 11, noNaN: true }), fc.array(fc.double({ min: 8, max: 12, noNaN: true }), { maxLength: 3 }), (value, ghosts) => {
+      const { lines, center } = largeBar({ ...band, value, ghosts: ghosts.map((ghost, no) => ({ label: `slip ${no}`, value: ghost })) }, { height: 420 })
+      const all = [...lines, { at: center, y: center }].toSorted((a, b) => a.y - b.y)
+      return all.every((line, at) => at === 0 || line.at >= all[at - 1]!.at)
+    }))
+  })
+
+  it('moves words away from the worked value, and no farther than a line', () => {
+    expect(placeWords([{ at: 100, y: 100 }, { at: 101, y: 101 }, { at: 40, y: 40 }], 50).map(line => line.y)).toEqual([29, 100, 121])
   })
 })

@@ -27,7 +27,7 @@ describe('the ask', () => {
   })
   it('prints the constants that enter, with units, and no input that only a slip knows', () => {
     const text = ask('potential-temperature', { unit: 'K', digits: 4, inputs: { pressure: { from: 'text', value: 850, unit: 'hPa' }, temperature: { from: 'text', value: 20, unit: 'Cel' }, stationPressure: { from: 'text', value: 975, unit: 'hPa' } } })
-    for (const part of ['850 hPa', '20 °C', 'cp = 1004 J kg⁻¹ K⁻¹', 'R = 287 J kg⁻¹ K⁻¹', 'p₀ = 1000 hPa']) expect(text).toContain(part)
+    for (const part of ['850 hPa', '20 °C', 'cp = 1004 J kg⁻¹ K⁻¹', 'R = 287 J kg⁻¹ K⁻¹', 'p₀ = 1000 hPa', 'Answer in K, to 0.01 K or finer.']) expect(text).toContain(part)
     expect(text).not.toContain('975')
     expect(text).not.toMatch(/slip/i)
   })
