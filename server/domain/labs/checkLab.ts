@@ -94,7 +94,7 @@ function barWithSlips(band: Band, slips: Judgement['slipValues']): HeightBar {
   return { ...heightBarOf(band, { decimal: null }), ghosts: slips.map(slip => ({ label: slip.label, value: shown(slip.value) })) }
 }
 
-const texLine = (formula: string): string => formula === '' ? '' : renderInline(`$${formula}$`)
+const texLine = (formula: string): string => formula === '' ? '' : renderInline(`$\\displaystyle ${formula}$`)
 
 function wordsOf(step: NumberStep, judgement: Judgement): string {
   if (judgement.band) {
