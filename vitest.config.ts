@@ -13,7 +13,7 @@ export default defineConfig({
       { resolve: { alias }, test: { name: 'integration', include: ['tests/integration/**/*.test.ts', 'tests/bad-files/**/*.test.ts', 'tests/races/**/*.test.ts'], environment: 'node', env: { AUTH_SECRET: 'a secret of these tests' }, testTimeout: 30_000, hookTimeout: 60_000 } },
       // against the built server: started once by the files that need it
       { resolve: { alias }, test: { name: 'server', include: ['tests/access/**/*.test.ts', 'tests/server/**/*.test.ts', 'tests/faults/**/*.test.ts'], environment: 'node', testTimeout: 60_000, hookTimeout: 240_000, fileParallelism: false } },
-      // every page as each role: a run of its own, since it is long
+      // every page as each role, and the states that a page can be in
       { resolve: { alias }, test: { name: 'pages', include: ['tests/pages/**/*.test.ts'], environment: 'node', testTimeout: 600_000, hookTimeout: 240_000, fileParallelism: false } },
       { resolve: { alias }, test: { name: 'browser', include: ['tests/browser/**/*.test.ts'], environment: 'node', testTimeout: 240_000, hookTimeout: 240_000, fileParallelism: false } },
     ],

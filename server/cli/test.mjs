@@ -1,6 +1,6 @@
 // `npm test`: installs what the tests need, runs everything, and closes with one plain line.
 //   npm test                    all of it
-//   npm test -- --only unit     one part: lint rooms types unit integration server browser
+//   npm test -- --only unit     one part: lint rooms types unit integration server browser pages (the last belongs to browser)
 import { existsSync, mkdirSync, mkdtempSync, readFileSync, rmSync } from 'node:fs'
 import { spawnSync } from 'node:child_process'
 import { tmpdir } from 'node:os'
@@ -35,7 +35,7 @@ if (wants('server') || wants('browser') || only === 'pages') {
   tools.DEMO_WORLD = demoWorld()
   if (wants('server')) suite('server', tools)
   if (wants('browser')) suite('browser', tools)
-  if (only === 'pages') suite('pages', tools)
+  if (wants('browser') || only === 'pages') suite('pages', tools)
   rmSync(tools.DEMO_WORLD, { recursive: true, force: true })
 }
 
