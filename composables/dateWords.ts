@@ -1,10 +1,17 @@
 /** "Wed 14 Oct, 23:00" on the wall of a zone. The locale is fixed, so that server and browser write the same. */
 export function dateInZone(iso: string, zone: string, withSeconds = false): string {
-  const parts = new Intl.DateTimeFormat('en-GB', {
+  const parts = new Intl.DateTimeFormat('en-US', {
     timeZone: zone, weekday: 'short', day: 'numeric', month: 'short', hour: '2-digit', minute: '2-digit', hourCycle: 'h23', ...(withSeconds ? { second: '2-digit' } : {}),
   }).formatToParts(new Date(iso))
   const of = (type: Intl.DateTimeFormatPartTypes) => parts.find(part => part.type === type)?.value ?? ''
   return `${of('weekday')} ${of('day')} ${of('month')}, ${of('hour')}:${of('minute')}${withSeconds ? `:${of('second')}` : ''}`
+}
+
+/** "7 Oct 2026" on the calendar of a zone. */
+export function dayInZone(iso: string, zone: string): string {
+  const parts = new Intl.DateTimeFormat('en-US', { timeZone: zone, day: 'numeric', month: 'short', year: 'numeric' }).formatToParts(new Date(iso))
+  const of = (type: Intl.DateTimeFormatPartTypes) => parts.find(part => part.type === type)?.value ?? ''
+  return `${of('day')} ${of('month')} ${of('year')}`
 }
 
 /** "10:41" on the wall of a zone. */

@@ -1,3 +1,4 @@
+import { dayInZone } from '~/composables/dateWords'
 import { findMeasuredQuantity, type MeasuredQuantity, measuredQuantities } from '#shared/schemas/data'
 
 export const quantityLabel = (key: string): string => findMeasuredQuantity(key)?.label ?? key
@@ -22,12 +23,11 @@ export const countText = (value: number): string => value >= 10_000 ? String(val
 export function utcText(iso: string | null): string {
   if (iso === null) return ''
   const at = new Date(iso)
-  const day = at.toLocaleDateString('en-GB', { day: 'numeric', month: 'short', year: 'numeric', timeZone: 'UTC' })
   const seconds = at.getUTCSeconds() === 0 ? '' : `:${String(at.getUTCSeconds()).padStart(2, '0')}`
-  return `${day}, ${String(at.getUTCHours()).padStart(2, '0')}:${String(at.getUTCMinutes()).padStart(2, '0')}${seconds} UTC`
+  return `${dayText(iso)}, ${String(at.getUTCHours()).padStart(2, '0')}:${String(at.getUTCMinutes()).padStart(2, '0')}${seconds} UTC`
 }
 
-export const dayText = (iso: string): string => new Date(iso).toLocaleDateString('en-GB', { day: 'numeric', month: 'short', year: 'numeric', timeZone: 'UTC' })
+export const dayText = (iso: string): string => dayInZone(iso, 'UTC')
 
 /** "7 Oct 2026", or "22 Feb to 14 Aug 2021". */
 export function spanText(from: string | null, to: string | null): string {
