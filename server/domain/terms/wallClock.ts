@@ -52,9 +52,14 @@ export function tellShift(resolved: ResolvedWallTime, asked: string): string | n
   return null
 }
 
+/** Zones that were found good: there are few, and asking the system anew costs more than the rest of a submission's lateness. */
+const knownZones = new Set<string>()
+
 export function isZone(zone: string): boolean {
+  if (knownZones.has(zone)) return true
   try {
     new Intl.DateTimeFormat('en-US', { timeZone: zone })
+    knownZones.add(zone)
     return true
   }
   catch {
