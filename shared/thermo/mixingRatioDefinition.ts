@@ -2,7 +2,7 @@
 import type { InputDefinition, QuantityDefinition, TraceStep } from './definition'
 import { mixingRatioFrom } from './humidity'
 import { pressureInput } from './moistInputs'
-import { fineMoistSlip, moistQuantity, moistSlip, type Hand, type MoistSlip } from './moistQuantity'
+import { moistQuantity, moistSlip, smallMoistSlip, type Hand, type MoistSlip } from './moistQuantity'
 import { kilogramSlip } from './moistSlips'
 import { inGrams, mixingRatioStep } from './moistTex'
 import { glossary } from './sources'
@@ -47,9 +47,9 @@ export function mixingRatioDefinition({ vaporPressure, step, temperatureName, in
       return step ? [step(hand, e), last] : [last]
     },
     slips: [
-      fineMoistSlip('without-e', 'e neglected against p', 'This is ε e/p: in the denominator stands p − e.', hand => hand.variant === 'approximate' ? null : over(hand, (e, p) => hand.air.epsilon * e / p)),
-      fineMoistSlip('specific-humidity', 'specific humidity', 'This is the specific humidity, per kilogram of moist air; the mixing ratio is per kilogram of dry air.', hand => hand.right / (1 + hand.right)),
-      moistSlip('plus', 'p + e for p − e', 'This comes from p + e in the denominator: the pressure of the dry air is p − e.', hand => over(hand, (e, p) => hand.air.epsilon * e / (p + e))),
+      smallMoistSlip('without-e', 'e neglected against p', 'This is ε e/p: in the denominator stands p − e.', hand => hand.variant === 'approximate' ? null : over(hand, (e, p) => hand.air.epsilon * e / p)),
+      smallMoistSlip('specific-humidity', 'specific humidity', 'This is the specific humidity, per kilogram of moist air; the mixing ratio is per kilogram of dry air.', hand => hand.right / (1 + hand.right)),
+      smallMoistSlip('plus', 'p + e for p − e', 'This comes from p + e in the denominator: the pressure of the dry air is p − e.', hand => over(hand, (e, p) => hand.air.epsilon * e / (p + e))),
       moistSlip('inverted-epsilon', 'ε turned round', 'This comes from 1/ε, the ratio of the gas constants the other way round.', hand => over(hand, (e, p) => e / (hand.air.epsilon * (p - e)))),
       moistSlip('epsilon-left-out', 'ε left out', 'This is e/(p − e): the ratio of the molar masses, ε = 0.622, is missing.', hand => over(hand, (e, p) => e / (p - e))),
       kilogramSlip,

@@ -39,6 +39,9 @@ const keys: Readonly<Record<string, string>> = { es: overWaterKey, ei: overIceKe
 export const moistSlip = (key: string, label: string, sentence: string, apply: MoistSlip['apply']): MoistSlip => ({ key, weight: 'gross', label, sentence, apply })
 export const fineMoistSlip = (key: string, label: string, sentence: string, apply: MoistSlip['apply']): MoistSlip => ({ key, weight: 'fine', label, sentence, apply })
 
+/** As small as the spread of accepted constants by its nature: named where it alone explains a value, and no reason to refuse a share. */
+export const smallMoistSlip = (key: string, label: string, sentence: string, apply: MoistSlip['apply']): MoistSlip => ({ key, weight: 'constant', label, sentence, apply })
+
 export function moistQuantity({ inside = [], notedAt, remarks, working, slips, variants, ...rest }: MoistQuantity): QuantityDefinition {
   const handOf = (inputs: Inputs, constants: Constants, formulae: Formulae, variant: string): Hand => ({ given: name => numberOf(inputs, name), air: moistAir(constants, formulae), constants, formulae, variant })
   const outcomeOf = (variant: MoistVariant, hand: Hand): Exclude<Outcome, { is: 'class' }> => {

@@ -49,7 +49,7 @@ export function psychrometerDefinition({ bulb, gives, ...named }: Psychrometer):
   const withCoefficient = (coefficient: number, hand: Hand, atBulb?: number) => finish(hand, psychrometerVaporPressure(atBulb ?? bulbPressure(hand, bulb), hand.given('pressure'), depressionOf(hand), coefficient))
   return moistQuantity({
     ...named,
-    symbol: isHumidity ? '\\mathit{RH}' : 'e',
+    symbol: isHumidity ? 'RH' : 'e',
     unit: isHumidity ? '1' : 'Pa', shownUnit: isHumidity ? '%' : 'hPa', kind: isHumidity ? 'fraction' : 'ratio',
     inputs: [pressureInput, { ...temperatureInput, label: 'dry-bulb temperature', range: bulb === 'ice' ? [230, 280] : [230, 330] }, bulb === 'ice' ? { ...wetBulbInput, range: [220, 273.16] } : wetBulbInput, coefficientInput],
     variants: coefficientsOf[bulb].map(({ key, label, source }) => ({ key, label, source, validity: wordsOf[bulb], knownError: '0.1 hPa by the coefficients in use', value: hand => finish(hand, vaporOf(hand, bulb)) })),

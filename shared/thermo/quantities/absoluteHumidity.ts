@@ -8,7 +8,7 @@ import { texNumber, texQuantity } from '../tex'
 export const absoluteHumidityDefinition = moistQuantity({
   key: 'absolute-humidity',
   name: 'absolute humidity',
-  symbol: '\\rho_v',
+  symbol: 'ρv',
   unit: 'kg/m3', shownUnit: 'g/m3', kind: 'ratio',
   inputs: [temperatureInput, vaporPressureInput],
   variants: [{ key: 'ideal-gas', label: 'e/(Rv T)', source: glossary('absolute humidity'), validity: 'vapor at less than 100 hPa', knownError: '0.2 %', value: ({ given, air }) => given('vaporPressure') / (air.Rv * given('temperature')) }],

@@ -7,7 +7,7 @@ import { fineSlip, slip } from '../slips'
 export const convectiveCondensationLevelPressureDefinition = convectiveDefinition({
   key: 'convective-condensation-level-pressure',
   name: 'pressure at the convective condensation level',
-  symbol: 'p_{ccl}',
+  symbol: 'p_ccl',
   unit: 'Pa', shownUnit: 'hPa', kind: 'ratio',
   ask: 'The pressure at the convective condensation level: the lowest level at which the sounding is as cold as saturation with the mixing ratio of its lowest row; temperature linear in ln p between rows; "not reached" where the data end before it.',
   value: level => level.pressure,

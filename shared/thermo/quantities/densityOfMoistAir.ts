@@ -8,7 +8,7 @@ import { texNumber, texQuantity } from '../tex'
 export const densityOfMoistAirDefinition = moistQuantity({
   key: 'density-of-moist-air',
   name: 'density of moist air',
-  symbol: '\\rho',
+  symbol: 'ρ',
   unit: 'kg/m3', shownUnit: 'kg/m3', kind: 'ratio',
   inputs: [pressureInput, temperatureInput, vaporPressureInput],
   variants: [{ key: 'ideal-gases', label: 'dry air and vapor as ideal gases', source: glossary('equation of state', 'common practice'), validity: '180–340 K, below 1200 hPa', knownError: '0.1 %', value: ({ given, air }) => (given('pressure') - given('vaporPressure')) / (air.R * given('temperature')) + given('vaporPressure') / (air.Rv * given('temperature')) }],

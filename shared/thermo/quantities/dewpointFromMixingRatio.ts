@@ -1,7 +1,7 @@
 import { dewpointFunction, frostPoint } from '../dewpoints'
 import { vaporPressureFrom } from '../humidity'
 import { mixingRatioInput, pressureInput } from '../moistInputs'
-import { fineMoistSlip, moistQuantity, moistSlip } from '../moistQuantity'
+import { fineMoistSlip, moistQuantity, moistSlip, smallMoistSlip } from '../moistQuantity'
 import { kelvinAsCelsiusSlip } from '../moistSlips'
 import { inCelsius, inHectopascal } from '../moistTex'
 import { glossary } from '../sources'
@@ -26,7 +26,7 @@ export const dewpointFromMixingRatioDefinition = moistQuantity({
     ]
   },
   slips: [
-    fineMoistSlip('without-w', 'w neglected against ε', 'This comes from e = w p/ε: in the denominator stands ε + w.', ({ given, air, constants, formulae }) => dewpointFunction(constants, formulae)(given('mixingRatio') * given('pressure') / air.epsilon)),
+    smallMoistSlip('without-w', 'w neglected against ε', 'This comes from e = w p/ε: in the denominator stands ε + w.', ({ given, air, constants, formulae }) => dewpointFunction(constants, formulae)(given('mixingRatio') * given('pressure') / air.epsilon)),
     moistSlip('epsilon-left-out', 'ε left out', 'This comes from e = w p: the ratio of the molar masses, ε = 0.622, is missing.', ({ given, constants, formulae }) => dewpointFunction(constants, formulae)(given('mixingRatio') * given('pressure'))),
     fineMoistSlip('frost-point', 'frost point for dewpoint', 'This is the frost point, over ice; the dewpoint refers to liquid water, also below 0 °C.', ({ given, air, constants, formulae, right }) => {
       if (right > 273.15) return null

@@ -16,7 +16,7 @@ const bolton = (equation: string) => ({ text: `Bolton (1980), Mon. Wea. Rev. 108
 export const equivalentPotentialTemperatureDefinition = moistQuantity({
   key: 'equivalent-potential-temperature',
   name: 'equivalent potential temperature',
-  symbol: '\\theta_e',
+  symbol: 'θe',
   unit: 'K', shownUnit: 'K', kind: 'temperature',
   inputs: [pressureInput, temperatureInput, dewpointInput],
   variants: [

@@ -11,7 +11,7 @@ import { texNumber } from '../tex'
 export const equivalentPotentialTemperatureShortcutDefinition = moistQuantity({
   key: 'equivalent-potential-temperature-shortcut',
   name: 'equivalent potential temperature by the shortcut θ exp(Lw/cpT)',
-  symbol: '\\theta\\,e^{Lw/c_pT}',
+  symbol: 'θ exp(Lw/cpT)',
   unit: 'K', shownUnit: 'K', kind: 'temperature',
   inputs: [pressureInput, temperatureInput, dewpointInput],
   variants: [{ key: 'parcel', label: 'with the temperature of the parcel', source: { text: 'common practice: θ exp[L w/(cp T)] as textbooks print it', status: 'common practice' }, validity: 'as an approximation', knownError: '0.1 to 16 K below θe', value: ({ given, air }) => equivalentShortcut(given('temperature'), given('dewpoint'), given('pressure'), air) }],

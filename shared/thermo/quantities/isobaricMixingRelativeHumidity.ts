@@ -6,7 +6,7 @@ import { fractionAsPercentSlip } from '../moistSlips'
 export const isobaricMixingRelativeHumidityDefinition = isobaricMixingDefinition({
   key: 'isobaric-mixing-relative-humidity',
   name: 'relative humidity after isobaric mixing',
-  symbol: '\\mathit{RH}',
+  symbol: 'RH',
   unit: '1', shownUnit: '%', kind: 'fraction',
   part: 'relative-humidity',
   ask: 'The relative humidity e/es over liquid water of the mixture of the two bodies of air at one pressure, before anything condenses: it may be above 100 %.',

@@ -1,7 +1,7 @@
 import { constant } from '../constants'
 import { vaporizationForms } from '../latentHeat'
 import { latentHeatDefinition } from '../latentHeatDefinition'
-import { slip, zeroCelsius } from '../slips'
+import { constantSlip, slip, zeroCelsius } from '../slips'
 
 /** Latent heat of vaporization. Formulae, sources and ranges: `latentHeat.ts`. */
 export const latentHeatOfVaporizationDefinition = latentHeatDefinition({
@@ -12,7 +12,8 @@ export const latentHeatOfVaporizationDefinition = latentHeatDefinition({
   forms: vaporizationForms,
   ask: 'The latent heat of vaporization of water at the temperature, per kilogram.',
   slips: [
-    slip('sign', 'sign of the slope turned round', 'The latent heat of vaporization falls as the temperature rises: here it rises.', (inputs) => {
+    // beside the constants that are taught it is never half the way off
+    constantSlip('sign', 'sign of the slope turned round', 'The latent heat of vaporization falls as the temperature rises: here it rises.', (inputs) => {
       const t = Number(inputs.temperature) - zeroCelsius
       return t === 0 ? null : 2.501e6 + 2370 * t
     }),

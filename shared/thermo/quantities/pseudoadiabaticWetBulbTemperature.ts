@@ -13,7 +13,7 @@ const lclOf = ({ given, constants, formulae }: Hand) => lclFunction(constants, f
 export const pseudoadiabaticWetBulbTemperatureDefinition = moistQuantity({
   key: 'pseudoadiabatic-wet-bulb-temperature',
   name: 'pseudoadiabatic wet-bulb temperature',
-  symbol: 'T_{sw}',
+  symbol: 'T_sw',
   unit: 'K', shownUnit: 'Cel', kind: 'temperature',
   inputs: [pressureInput, temperatureInput, dewpointInput],
   variants: [{ key: 'normand', label: 'Normand’s rule', source: glossary('wet-bulb temperature', 'common practice'), validity: 'over liquid water', knownError: '0.1 K by the formulae inside', value: hand => pseudoadiabaticWetBulb(hand.given('pressure'), lclOf(hand), hand.air) }],

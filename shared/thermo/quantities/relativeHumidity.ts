@@ -10,7 +10,7 @@ import { texNumber, texQuantity } from '../tex'
 export const relativeHumidityDefinition = moistQuantity({
   key: 'relative-humidity',
   name: 'relative humidity',
-  symbol: '\\mathit{RH}',
+  symbol: 'RH',
   unit: '1', shownUnit: '%', kind: 'fraction',
   inputs: [temperatureInput, dewpointInput],
   variants: [{ key: 'vapor-pressures', label: 'e/eₛ, ratio of vapor pressures', source: wmoHumidity, validity: 'over liquid water, also below 0 °C', knownError: '0.1 of a percent by the formula of eₛ', value: ({ given, air }) => air.es(given('dewpoint')) / air.es(given('temperature')) }],

@@ -10,7 +10,7 @@ import { texNumber, texQuantity } from '../tex'
 export const relativeHumidityByMixingRatioDefinition = moistQuantity({
   key: 'relative-humidity-by-mixing-ratio',
   name: 'relative humidity as the ratio of mixing ratios',
-  symbol: 'w/w_s',
+  symbol: 'w/ws',
   unit: '1', shownUnit: '%', kind: 'fraction',
   inputs: [pressureInput, temperatureInput, dewpointInput],
   variants: [{

@@ -10,7 +10,7 @@ import { texNumber, texQuantity } from '../tex'
 export const relativeHumidityOverIceDefinition = moistQuantity({
   key: 'relative-humidity-over-ice',
   name: 'relative humidity over ice',
-  symbol: '\\mathit{RH}_i',
+  symbol: 'RHi',
   unit: '1', shownUnit: '%', kind: 'fraction',
   inputs: [{ ...temperatureInput, range: [180, 273.16] }, { ...dewpointInput, range: [160, 275] }],
   variants: [{ key: 'vapor-pressures', label: 'e/eᵢ, ratio of vapor pressures', source: wmoHumidity, validity: 'below 0 °C', knownError: '0.5 of a percent by the formulae', value: ({ given, air, constants, formulae }) => air.es(given('dewpoint')) / iceSaturationPressureFunction(constants, formulae)(given('temperature')) }],

@@ -10,7 +10,7 @@ import { texQuantity } from '../tex'
 export const reversibleSaturatedLapseRateDefinition = moistQuantity({
   key: 'reversible-saturated-lapse-rate',
   name: 'reversible saturated adiabatic lapse rate',
-  symbol: '\\Gamma_{rm}',
+  symbol: 'Γrm',
   unit: 'K/m', shownUnit: 'K/km', kind: 'difference',
   nearZero: 0.001,
   inputs: [pressureInput, temperatureInput, { ...mixingRatioInput, name: 'liquidWater', label: 'liquid water mixing ratio of the parcel', symbol: 'w_l', range: [0, 0.05] }],

@@ -11,7 +11,7 @@ import { texNumber, texQuantity } from '../tex'
 export const saturatedAdiabaticLapseRateDefinition = moistQuantity({
   key: 'saturated-adiabatic-lapse-rate',
   name: 'saturated adiabatic lapse rate',
-  symbol: '\\Gamma_m',
+  symbol: 'Γm',
   unit: 'K/m', shownUnit: 'K/km', kind: 'difference',
   nearZero: 0.001,
   inputs: [pressureInput, temperatureInput],

@@ -11,7 +11,7 @@ const by = ({ given, air }: Hand, variant: string) => equivalentPotentialTempera
 export const saturationEquivalentPotentialTemperatureDefinition = moistQuantity({
   key: 'saturation-equivalent-potential-temperature',
   name: 'saturation equivalent potential temperature',
-  symbol: '\\theta_{es}',
+  symbol: 'θes',
   unit: 'K', shownUnit: 'K', kind: 'temperature',
   inputs: [pressureInput, temperatureInput],
   variants: [

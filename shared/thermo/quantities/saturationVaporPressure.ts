@@ -1,7 +1,7 @@
 import { exp, pow } from '../../numerics/elementary'
 import { saturationDefinition, saturationInput } from '../saturationDefinition'
 import { overWaterForms, overIceForms } from '../saturation'
-import { fineSlip, slip, zeroCelsius } from '../slips'
+import { constantSlip, fineSlip, slip, zeroCelsius } from '../slips'
 
 const celsius = (kelvins: number) => kelvins - zeroCelsius
 
@@ -30,7 +30,7 @@ export const saturationVaporPressureDefinition = saturationDefinition({
       const t = celsius(Number(inputs.temperature))
       return t === 0 ? null : 611 * exp(7.5 * t / (t + 237.3))
     }),
-    slip('sign-in-denominator', 'difference for sum in the denominator', 'This comes from a denominator that takes t away from its constant: the two are added.', (inputs) => {
+    constantSlip('sign-in-denominator', 'difference for sum in the denominator', 'This comes from a denominator that takes t away from its constant: the two are added.', (inputs) => {
       const t = celsius(Number(inputs.temperature))
       return t === 0 || t > 120 ? null : 611.2 * exp(17.67 * t / (243.5 - t))
     }),

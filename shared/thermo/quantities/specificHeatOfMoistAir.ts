@@ -5,9 +5,10 @@ import { moistHeatDefinition } from '../moistHeatDefinition'
 export const specificHeatOfMoistAirDefinition = moistHeatDefinition({
   key: 'specific-heat-of-moist-air',
   name: 'specific heat of moist air at constant pressure',
-  symbol: 'c_{pm}',
+  symbol: 'c_pm',
   ask: 'The specific heat of the moist air at constant pressure, per kilogram of moist air.',
   constants: ['cp', 'cpv'],
+  tex: 'c_{pm}',
   dryTex: 'c_p', vaporTex: 'c_{pv}',
   dry: constants => constant(constants, 'cp'),
   vapor: constants => constant(constants, 'cpv'),

@@ -1,6 +1,6 @@
 import { mixingRatioFrom, specificHumidityFrom } from '../humidity'
 import { dewpointInput, pressureInput, temperatureForSlips } from '../moistInputs'
-import { fineMoistSlip, moistQuantity, moistSlip } from '../moistQuantity'
+import { fineMoistSlip, moistQuantity, moistSlip, smallMoistSlip } from '../moistQuantity'
 import { atTemperatureSlip, kilogramSlip, overIce } from '../moistSlips'
 import { inGrams, saturationStep } from '../moistTex'
 import { glossary } from '../sources'
@@ -30,7 +30,7 @@ export const specificHumidityFromDewpointDefinition = moistQuantity({
   },
   slips: [
     atTemperatureSlip('the specific humidity'),
-    fineMoistSlip('mixing-ratio', 'the mixing ratio', 'This is the mixing ratio, per kilogram of dry air: the specific humidity is per kilogram of moist air.', ({ right }) => right / (1 - right)),
+    smallMoistSlip('mixing-ratio', 'the mixing ratio', 'This is the mixing ratio, per kilogram of dry air: the specific humidity is per kilogram of moist air.', ({ right }) => right / (1 - right)),
     fineMoistSlip('ice-for-water', 'over ice for over water', 'This comes from the vapor pressure over ice; a dewpoint refers to liquid water, also below 0 °C.', (hand) => {
       const e = overIce(hand, hand.given('dewpoint'))
       return e === null ? null : specificHumidityFrom(mixingRatioFrom(e, hand.given('pressure'), hand.air.epsilon))

@@ -16,7 +16,7 @@ const virtual = (hand: Hand, temperature = hand.given('temperature')) => hand.va
 export const virtualPotentialTemperatureDefinition = moistQuantity({
   key: 'virtual-potential-temperature',
   name: 'virtual potential temperature',
-  symbol: '\\theta_v',
+  symbol: 'θv',
   unit: 'K', shownUnit: 'K', kind: 'temperature',
   inputs: [pressureInput, temperatureInput, dewpointInput],
   variants: [

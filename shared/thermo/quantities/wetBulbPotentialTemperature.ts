@@ -14,7 +14,7 @@ const thetaE = ({ given, air }: Hand) => equivalentPotentialTemperature(given('t
 export const wetBulbPotentialTemperatureDefinition = moistQuantity({
   key: 'wet-bulb-potential-temperature',
   name: 'wet-bulb potential temperature',
-  symbol: '\\theta_w',
+  symbol: 'θw',
   unit: 'K', shownUnit: 'Cel', kind: 'temperature',
   inputs: [pressureInput, temperatureInput, dewpointInput],
   variants: [
