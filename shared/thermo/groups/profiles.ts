@@ -23,6 +23,9 @@ import { mixedLayerDepthParcelDefinition } from '../quantities/mixedLayerDepthPa
 import { potentialTemperatureGradientDefinition } from '../quantities/potentialTemperatureGradient'
 import { staticStabilityDefinition } from '../quantities/staticStability'
 import { vectorWindDifferenceDefinition } from '../quantities/vectorWindDifference'
+import { layerStabilityDefinition } from '../quantities/layerStability'
+import { equivalentPotentialTemperatureGradientDefinition } from '../quantities/equivalentPotentialTemperatureGradient'
+import { potentialStabilityDefinition } from '../quantities/potentialStability'
 
 export const profiles: QuantityGroup = {
   key: 'profiles',
@@ -37,6 +40,9 @@ export const profiles: QuantityGroup = {
     lapseRateLagOneCorrelationDefinition,
     lapseRateInflatedStandardErrorDefinition,
     staticStabilityDefinition,
+    layerStabilityDefinition,
+    potentialStabilityDefinition,
+    equivalentPotentialTemperatureGradientDefinition,
     potentialTemperatureGradientDefinition,
     bruntVaisalaFrequencySquaredDefinition,
     bruntVaisalaFrequencySquaredFromLapseRateDefinition,

@@ -1,0 +1,5 @@
+import { parcelDefinition } from '../parcelDefinition'
+import { cinResult } from '../parcelResults'
+
+/** Convective inhibition of the most unstable parcel, with virtual correction on parcel and surroundings: see `parcelDefinition` and `lift`. */
+export const mostUnstableParcelCinVirtualDefinition = parcelDefinition('most-unstable', cinResult, true, { gives: -19.00571, within: 2e-05 })
