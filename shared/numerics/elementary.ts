@@ -68,12 +68,14 @@ const perStep = 1 / stepOf.hi
 
 /** exp(hi + lo) for |hi| < 746. */
 function expOf(hi: number, lo: number): number {
-  const k = Math.round(hi * perStep)
+  // whole numbers of 32 bits, on which engines are quick: |k| < 138,000
+  const k = Math.round(hi * perStep) | 0
   const r = ((hi - k * stepHi) - k * stepLo) + lo
   const series = r + r * r * (1 / 2 + r * (1 / 6 + r * (1 / 24 + r * (1 / 120 + r * (1 / 720)))))
-  const j = ((k % steps) + steps) % steps
+  const j = k & (steps - 1), n = k >> 7
   const root = rootHi[j] ?? 1
-  return scaled(root + ((rootLo[j] ?? 0) + root * series), (k - j) / steps)
+  const value = root + ((rootLo[j] ?? 0) + root * series)
+  return n >= -1022 && n <= 1023 ? value * (powers[n + 1074] ?? 0) : scaled(value, n)
 }
 
 /** e to the x. NaN gives NaN; beyond the doubles, Infinity or 0. */
@@ -100,10 +102,10 @@ const halves = new Uint32Array(words.buffer)
 words[0] = 1
 const high = halves[1] === 0x3FF00000 ? 1 : 0
 
-let resultHi = 0
-let resultLo = 0
+/** The logarithm's leading part and what is left: in an array, because a number that a module keeps in a variable is allocated anew at each change. */
+const result = new Float64Array(2)
 
-/** Puts log x in (resultHi, resultLo), with about 66 good bits; x positive and finite. */
+/** Puts log x in `result`, with about 66 good bits; x positive and finite. */
 function logInto(x: number): void {
   let e = 0
   let positive = x
@@ -112,15 +114,15 @@ function logInto(x: number): void {
     e = -54
   }
   words[0] = positive
-  const top = halves[high] ?? 0
-  e += (top >>> 20) - 1023
-  halves[high] = (top & 0xFFFFF) | 0x3FF00000
-  let m = words[0]
+  const power = ((halves[high] ?? 0) >>> 20) - 1023
+  e = (e + power) | 0
+  // exact: a power of two
+  let m = positive * (powers[1074 - power] ?? 0)
   if (m > 1.4142135623730951) {
-    m /= 2
-    e += 1
+    m *= 0.5
+    e = (e + 1) | 0
   }
-  const k = Math.round(m * steps)
+  const k = Math.round(m * steps) | 0
   const c = k / steps
   const d = m - c
   const r = d / c
@@ -138,8 +140,9 @@ function logInto(x: number): void {
   const sum = b + half
   const sumLo = sumError(b, half, sum)
   const rest = (((aLo + bLo) + sumLo) + (e * ln2Lo + (logLo[k] ?? 0))) + ((rLo - 0.5 * squareLo) + series)
-  resultHi = sum + rest
-  resultLo = rest - (resultHi - sum)
+  const leadingPart = sum + rest
+  result[0] = leadingPart
+  result[1] = rest - (leadingPart - sum)
 }
 
 function leading27(value: number): number {
@@ -152,7 +155,7 @@ export function log(x: number): number {
   if (!(x > 0)) return x === 0 ? -Infinity : NaN
   if (x === Infinity) return x
   logInto(x)
-  return resultHi
+  return result[0] ?? 0
 }
 
 /** The logarithm to base 10. */
@@ -160,8 +163,9 @@ export function log10(x: number): number {
   if (!(x > 0)) return x === 0 ? -Infinity : NaN
   if (x === Infinity) return x
   logInto(x)
-  const product = resultHi * perLn10.hi
-  return product + (productError(resultHi, perLn10.hi, product) + (resultHi * perLn10.lo + resultLo * perLn10.hi))
+  const hi = result[0] ?? 0, lo = result[1] ?? 0
+  const product = hi * perLn10.hi
+  return product + (productError(hi, perLn10.hi, product) + (hi * perLn10.lo + lo * perLn10.hi))
 }
 
 /** x to the y, with the special cases of the language's own. */
@@ -184,8 +188,9 @@ export function pow(x: number, y: number): number {
   if (size === 1) return sign
   if (y === 1) return x
   logInto(size)
-  const exponent = y * resultHi
+  const hi = result[0] ?? 0
+  const exponent = y * hi
   if (exponent > 709.79) return sign * Infinity
   if (exponent < -745.2) return sign * 0
-  return sign * expOf(exponent, productError(y, resultHi, exponent) + y * resultLo)
+  return sign * expOf(exponent, productError(y, hi, exponent) + y * (result[1] ?? 0))
 }
