@@ -66,23 +66,32 @@ const stepHi = leading(stepOf.hi, 32)
 const stepLo = (stepOf.hi - stepHi) + stepOf.lo
 const perStep = 1 / stepOf.hi
 
-/** exp(hi + lo) for |hi| < 746. */
-function expOf(hi: number, lo: number): number {
-  // whole numbers of 32 bits, on which engines are quick: |k| < 138,000
-  const k = Math.round(hi * perStep) | 0
-  const r = ((hi - k * stepHi) - k * stepLo) + lo
+/** 1.5 · 2⁵²: added and taken off again it leaves the nearest whole number, without a call. */
+const toWhole = 6755399441055744
+
+/** e^r · 2^(whole/128) for a small r. */
+function raised(r: number, whole: number): number {
   const series = r + r * r * (1 / 2 + r * (1 / 6 + r * (1 / 24 + r * (1 / 120 + r * (1 / 720)))))
+  // in 32 bits, on which engines are quick: |whole| < 138,000
+  const k = whole | 0
   const j = k & (steps - 1), n = k >> 7
   const root = rootHi[j] ?? 1
   const value = root + ((rootLo[j] ?? 0) + root * series)
   return n >= -1022 && n <= 1023 ? value * (powers[n + 1074] ?? 0) : scaled(value, n)
 }
 
+/** exp(hi + lo) for |hi| < 746. */
+function expOf(hi: number, lo: number): number {
+  const whole = (hi * perStep + toWhole) - toWhole
+  return raised(((hi - whole * stepHi) - whole * stepLo) + lo, whole)
+}
+
 /** e to the x. NaN gives NaN; beyond the doubles, Infinity or 0. */
 export function exp(x: number): number {
   if (!(x < 709.782712893385)) return x !== x ? x : Infinity
   if (x < -745.14) return 0
-  return expOf(x, 0)
+  const whole = (x * perStep + toWhole) - toWhole
+  return raised((x - whole * stepHi) - whole * stepLo, whole)
 }
 
 // ---- log

@@ -15,7 +15,7 @@ import { exp, log } from '../numerics/elementary'
 import type { LiftingCondensationLevel } from './liftingCondensation'
 import type { MoistAir } from './moistAir'
 import type { Parcel } from './parcel'
-import { longestStep, pseudoadiabaticSlope } from './pseudoadiabat'
+import { longestStep, slopeAt } from './pseudoadiabat'
 import type { Sounding } from './sounding'
 
 export interface Ascent {
@@ -102,14 +102,33 @@ function between(logPressure: Float64Array, column: Float64Array, at: number, wh
   return to === from ? below : below + (where - from) / (to - from) * ((column[at + 1] ?? below) - below)
 }
 
-/** One step of Runge and Kutta along the pseudoadiabat, fourth order in ln p; the middle of a step in ln p is the geometric mean of its ends. */
-function saturatedStep(T: number, from: number, to: number, h: number, air: MoistAir): number {
+/** What a saturated step leaves for the next one: temperature, eₛ, and the slope there. In an array, so that no step allocates. */
+const state = new Float64Array(3)
+
+function startSaturated(T: number, p: number, air: MoistAir): void {
+  const e = air.es(T)
+  state[0] = T
+  state[1] = e
+  state[2] = slopeAt(T, p, e, air)
+}
+
+/**
+ * One step of Runge and Kutta along the pseudoadiabat, fourth order in ln p; the middle of a step in ln p is the geometric mean of its ends.
+ * The fourth evaluation is the first of the next step; all stand in one loop, which an engine can keep in registers.
+ */
+function saturatedStep(from: number, to: number, h: number, air: MoistAir): void {
   const middle = Math.sqrt(from * to)
-  const k1 = pseudoadiabaticSlope(T, from, air)
-  const k2 = pseudoadiabaticSlope(T + 0.5 * h * k1, middle, air)
-  const k3 = pseudoadiabaticSlope(T + 0.5 * h * k2, middle, air)
-  const k4 = pseudoadiabaticSlope(T + h * k3, to, air)
-  return T + h / 6 * (k1 + 2 * k2 + 2 * k3 + k4)
+  const T = state[0] ?? 0
+  let slope = state[2] ?? 0, sum = slope, here = T, e = 0
+  for (let stage = 1; stage <= 4; stage++) {
+    here = T + (stage === 4 ? h / 6 * sum : (stage === 3 ? h : 0.5 * h) * slope)
+    e = air.es(here)
+    slope = slopeAt(here, stage < 3 ? middle : to, e, air)
+    sum += stage < 3 ? 2 * slope : slope
+  }
+  state[0] = here
+  state[1] = e
+  state[2] = slope
 }
 
 /** Puts the parcel's excess over its surroundings in the nodes, K. */
@@ -120,16 +139,13 @@ function liftThroughNodes(parcel: Parcel, lcl: LiftingCondensationLevel, lclNode
   const dryNodes = Math.min(lclNode, nodeCount)
   for (let n = 0; n < dryNodes; n++) nodeExcess[n] = parcel.temperature * exp(kappa * ((nodeLog[n] ?? 0) - start)) * dryFactor - (nodeExcess[n] ?? 0)
   if (lclNode >= nodeCount) return
-  let T = lcl.temperature
-  nodeExcess[lclNode] = T * dryFactor - (nodeExcess[lclNode] ?? 0)
+  nodeExcess[lclNode] = lcl.temperature * dryFactor - (nodeExcess[lclNode] ?? 0)
+  startSaturated(lcl.temperature, nodePressure[lclNode] ?? 0, air)
   for (let n = lclNode + 1; n < nodeCount; n++) {
     const p = nodePressure[n] ?? 0
-    T = saturatedStep(T, nodePressure[n - 1] ?? 0, p, (nodeLog[n] ?? 0) - (nodeLog[n - 1] ?? 0), air)
-    if (isVirtual) {
-      const e = air.es(T), w = epsilon * e / (p - e)
-      nodeExcess[n] = T * (1 + w / epsilon) / (1 + w) - (nodeExcess[n] ?? 0)
-    }
-    else nodeExcess[n] = T - (nodeExcess[n] ?? 0)
+    saturatedStep(nodePressure[n - 1] ?? 0, p, (nodeLog[n] ?? 0) - (nodeLog[n - 1] ?? 0), air)
+    const T = state[0] ?? 0, e = state[1] ?? 0, w = epsilon * e / (p - e)
+    nodeExcess[n] = (isVirtual ? T * (1 + w / epsilon) / (1 + w) : T) - (nodeExcess[n] ?? 0)
   }
 }
 
@@ -191,13 +207,15 @@ export function parcelTemperatureAt(parcel: Parcel, lcl: LiftingCondensationLeve
     return isVirtual ? T * (1 + parcel.mixingRatio / air.epsilon) / (1 + parcel.mixingRatio) : T
   }
   const start = log(lcl.pressure), whole = log(pressure) - start, parts = Math.ceil(-whole / longestStep)
-  let T = lcl.temperature, p = lcl.pressure
+  startSaturated(lcl.temperature, lcl.pressure, air)
+  let p = lcl.pressure
   for (let n = 1; n <= parts; n++) {
     const next = n === parts ? pressure : exp(start + n / parts * whole)
-    T = saturatedStep(T, p, next, whole / parts, air)
+    saturatedStep(p, next, whole / parts, air)
     p = next
   }
+  const T = state[0] ?? 0, e = state[1] ?? 0
   if (!isVirtual) return T
-  const e = air.es(T), w = air.epsilon * e / (pressure - e)
+  const w = air.epsilon * e / (pressure - e)
   return T * (1 + w / air.epsilon) / (1 + w)
 }

@@ -17,10 +17,12 @@ import type { MoistAir } from './moistAir'
 export const longestStep = 0.05
 
 /** dT/d ln p at a saturated state, K. @throws {OutOfRangeError} where the water would boil */
-export function pseudoadiabaticSlope(temperature: number, pressure: number, air: MoistAir): number {
-  const e = air.es(temperature)
-  if (!(e < pressure)) throw new OutOfRangeError('temperature', temperature, `temperatures whose saturation vapor pressure is below ${pressure} Pa`)
-  const w = air.epsilon * e / (pressure - e)
+export const pseudoadiabaticSlope = (temperature: number, pressure: number, air: MoistAir): number => slopeAt(temperature, pressure, air.es(temperature), air)
+
+/** The same where the saturation vapor pressure is known: what the innermost loop of an ascent calls. @throws {OutOfRangeError} where the water would boil */
+export function slopeAt(temperature: number, pressure: number, saturationPressure: number, air: MoistAir): number {
+  if (!(saturationPressure < pressure)) throw new OutOfRangeError('temperature', temperature, `temperatures whose saturation vapor pressure is below ${pressure} Pa`)
+  const w = air.epsilon * saturationPressure / (pressure - saturationPressure)
   const L = air.L(temperature)
   const RT = air.R * temperature
   return (RT + L * w) / (air.cp + L * L * w * air.epsilon / (RT * temperature))

@@ -10,25 +10,26 @@ export interface Ratio {
   part?: string
   /** What is divided by what, in words. */
   says: string
-  /** The highest value that passes. */
+  /** The highest value that passes; the least, where more is better. */
   bar: number
+  isMoreBetter?: true
   /** Makes the denominator again. */
   command: string
-  /** A bug in the built server that takes it over its bar: were it not seen, the figure would see nothing. */
-  plant: Plant
+  /** A bug in the built server that takes it over its bar: were it not seen, the figure would see nothing. "own": the measure plants one itself. */
+  plant: Plant | 'own'
   /** Numerator and denominator by turns, so that what else the machine does meets both; `entry` is another built server than the one in place. */
-  measure: (given: { isShort: boolean, entry?: string }) => Promise<Round[]>
+  measure: (given: { isShort: boolean, entry?: string, isPlanted?: boolean }) => Promise<Round[]>
 }
 
 export interface Figure { id: string, part?: string, ratio: number, bar: number, ok: boolean, rounds: number, spread: number, numerator: number, denominator: number, command: string }
 
 /** The median round decides; spread is how far the rounds lie apart, over the median. */
-export function figureOf({ id, part, bar, command }: Ratio, rounds: readonly Round[]): Figure {
+export function figureOf({ id, part, bar, isMoreBetter, command }: Ratio, rounds: readonly Round[]): Figure {
   const ratios = rounds.map(round => round.numerator / round.denominator)
   const ratio = median(ratios)
   if (!Number.isFinite(ratio) || ratio <= 0) throw new Error(`${id} ${part ?? ''}: ${JSON.stringify(rounds)} is no measurement.`)
   return {
-    id, ...(part === undefined ? {} : { part }), ratio: rounded(ratio), bar, ok: ratio <= bar, rounds: rounds.length, spread: rounded((Math.max(...ratios) - Math.min(...ratios)) / ratio),
+    id, ...(part === undefined ? {} : { part }), ratio: rounded(ratio), bar, ok: isMoreBetter ? ratio >= bar : ratio <= bar, rounds: rounds.length, spread: rounded((Math.max(...ratios) - Math.min(...ratios)) / ratio),
     numerator: rounded(median(rounds.map(round => round.numerator))), denominator: rounded(median(rounds.map(round => round.denominator))), command,
   }
 }

@@ -19,8 +19,8 @@ if (missing !== null) stop(missing)
 
 const figures: Figure[] = []
 for (const ratio of ratios.filter(each => only === null || only.some(name => isAsked(each, name)))) {
-  const planted = has('--plant') ? plantedBuild(ratio.plant) : null
-  const rounds = await ratio.measure({ isShort: has('--short'), ...(planted ? { entry: planted.entry } : {}) }).finally(planted?.remove)
+  const planted = has('--plant') && ratio.plant !== 'own' ? plantedBuild(ratio.plant) : null
+  const rounds = await ratio.measure({ isShort: has('--short'), isPlanted: has('--plant'), ...(planted ? { entry: planted.entry } : {}) }).finally(planted?.remove)
   const figure = figureOf(ratio, rounds)
   figures.push(figure)
   if (asJson) console.log(JSON.stringify(figure))
