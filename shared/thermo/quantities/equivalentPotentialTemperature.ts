@@ -48,11 +48,7 @@ export const equivalentPotentialTemperatureDefinition = moistQuantity({
       return hand.given('dewpoint') >= T ? null : T * pow(100_000 / hand.given('pressure'), 0.2854 * (1 - 0.28 * w)) * exp((3376 / T - 2.54) * w * (1 + 0.81 * w))
     }),
     fineMoistSlip('saturated', 'w at T for w at Td', 'This takes the saturation mixing ratio at the temperature: that gives the saturation equivalent potential temperature.', ({ given, again }) => given('dewpoint') === given('temperature') ? null : again({ dewpoint: given('temperature') })),
-    fineMoistSlip('theta', 'potential temperature', 'This is the potential temperature: the latent heat of the vapor is not in it.', ({ given, air }) => given('temperature') * pow(100_000 / given('pressure'), air.kappa)),
-    moistSlip('kilogram-in-gram-formula', 'kg kg⁻¹ in a formula for g kg⁻¹', 'This comes from w in kg per kg in a formula that takes g per kg: the exponential is all but 1.', (hand) => {
-      const w = wOf(hand) / 1000
-      return hand.given('temperature') * pow(100_000 / hand.given('pressure'), 0.2854 * (1 - 0.28 * w)) * exp((3376 / boltonLclTemperature(hand.given('temperature'), Math.min(hand.given('dewpoint'), hand.given('temperature'))) - 2.54) * w * (1 + 0.81 * w))
-    }),
+    fineMoistSlip('theta', 'potential temperature', 'This is the potential temperature: the latent heat of the vapor is not in it, or all but vanishes by w in kg per kg in a formula that takes g per kg.', ({ given, air }) => given('temperature') * pow(100_000 / given('pressure'), air.kappa)),
     moistSlip('standard-pressure', '1013.25 hPa for 1000 hPa', 'This refers to 1013.25 hPa: θe refers to 1000 hPa.', ({ air, right }) => right * pow(1.01325, air.kappa)),
     moistSlip('celsius-exponential', 'Celsius put in for kelvin in the exponential', 'This comes from the shortcut with the temperature in °C in the exponential.', (hand) => {
       const t = hand.given('temperature') - zeroCelsius, value = hand.given('temperature') * pow(100_000 / hand.given('pressure'), hand.air.kappa) * exp(Math.min(50, hand.air.L(hand.given('temperature')) * wOf(hand) / (hand.air.cp * t)))
