@@ -91,6 +91,22 @@ describe('conventions', () => {
   it.each(conventions.map(one => [one.key, one] as const))('%s closes with every alternative', (_key, convention) => {
     expect(conventionFaults(convention)).toEqual([])
   })
+  it.each(conventions.map(one => [one.key, one] as const))('%s names quantities and formulae that there are', (_key, convention) => {
+    for (const variants of [convention.variants, ...convention.accepted.map(one => one.variants ?? {})]) {
+      for (const [quantity, variant] of Object.entries(variants)) expect(findQuantity(quantity)?.variants.map(one => one.key) ?? [], quantity).toContain(variant)
+    }
+  })
+  it('lets the value depend on the convention: θ of 20 °C at 850 hPa, by κ', () => {
+    const theta = findQuantity('potential-temperature')
+    const by = (key: string) => {
+      const convention = conventions.find(one => one.key === key)
+      const outcome = theta && convention ? evaluateQuantity(theta, { pressure: 85_000, temperature: 293.15 }, convention.constants, undefined, { variants: convention.variants, beyond: 'compute' }) : null
+      return outcome?.is === 'value' ? outcome.value : NaN
+    }
+    // trap T3: 307.067 by 0.2854 … 307.093; 307.083 by 2/7
+    expect(by('bolton-1980')).toBeCloseTo(293.15 * (1000 / 850) ** 0.2854, 9)
+    expect(by('seven-halves')).toBeCloseTo(293.15 * (1000 / 850) ** (2 / 7), 9)
+  })
   it('T9: 1004 / 717 / 287.05 does not close and is refused when it is saved', () => {
     const faults = conventionFaults({ constants: { ...constants, R: 287.05 }, accepted: [] })
     expect(faults).toHaveLength(1)
