@@ -15,7 +15,8 @@ export const visitedPosting = z.object({
 })
 /** What a visitor reads: a stated scope, until a stated day. */
 export const visit = z.object({
-  until: z.string(),
+  /** The last day of it where the department keeps its clock. */
+  lastDay: z.string(),
   courses: z.array(z.object({ id: z.string(), code: z.string(), title: z.string(), term: z.string(), postings: z.array(visitedPosting) })),
 })
 export type VisitedWork = z.output<typeof visitedWork>

@@ -82,8 +82,8 @@ const isBare = (operation: Operation) => operation.method !== 'GET' && !operatio
 function agrees(want: ReturnType<typeof expected>, code: string | null, status: number, policy: Policy, isWhole: boolean): boolean {
   if (want !== 'through') return code === want
   if (code === 'not_signed_in' || code === 'not_allowed' || code === 'term_closed') return false
-  // In the department and on public routes the work itself finds out that an object is not there.
-  if (code === 'not_found') return policy.scope === 'public' || (policy.scope === 'department' && !isWhole)
+  // In the department, in the reference and on public routes the work itself finds out that an object is not there.
+  if (code === 'not_found') return policy.scope === 'public' || ((policy.scope === 'department' || policy.scope === 'session') && !isWhole)
   return status < 500
 }
 

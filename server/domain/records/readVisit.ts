@@ -8,6 +8,7 @@ import { classView } from '../marking/classView'
 import { judgedAs } from '../marking/heightBar'
 import { currentSteps, type StoredStep } from '../marking/readEvaluations'
 import { judgementOfRow, questionOfRow } from '../marking/storedEvaluation'
+import { wallTimeAt } from '../terms/wallClock'
 import { pieceNumbers } from './samplePieces'
 
 const scope = z.object({ courseIds: z.array(z.string()) })
@@ -26,6 +27,7 @@ export async function readVisit({ read, write }: Stores, { roleId, personId }: {
   const role = await read.selectFrom('department_role').select(['scope_json', 'until_at']).where('id', '=', roleId).executeTakeFirst()
   if (!role || role.until_at === null || role.scope_json === null) return refuse('not_found')
   const { courseIds } = scope.parse(JSON.parse(role.scope_json))
+  const term = await read.selectFrom('term').select('zone').orderBy('starts_on', 'desc').limit(1).executeTakeFirst()
   const courses = courseIds.length === 0
     ? []
     : await read.selectFrom('course').innerJoin('term', 'term.id', 'course.term_id').select(['course.id', 'course.code', 'course.title', 'term.name as term']).where('course.id', 'in', courseIds).orderBy('term.starts_on', 'desc').orderBy('course.code').execute()
@@ -43,7 +45,7 @@ export async function readVisit({ read, write }: Stores, { roleId, personId }: {
     const last = await trx.selectFrom('ledger_entry').select('at').where('chain_id', '=', departmentChain).where('actor', '=', roleId).where('action', '=', 'visit.read').orderBy('seq', 'desc').limit(1).executeTakeFirst()
     if (!last || last.at <= now - loggedEachMs) await appendEntry(trx, { chain: departmentChain, at: now, actor: roleId, action: 'visit.read', facts: { roleId, courseIds: courses.map(course => course.id), people: seen.size } })
   })
-  return { until: new Date(role.until_at).toISOString(), courses: shown }
+  return { lastDay: wallTimeAt(role.until_at - 60_000, term?.zone ?? 'UTC').slice(0, 10), courses: shown }
 }
 
 async function visitedPosting(read: Read, view: ClassView, seen: Set<string>): Promise<VisitedPosting> {

@@ -29,6 +29,8 @@ describe('what a visitor reads', () => {
 
   it('is the stated course alone, what was released in it, and nobody by name; each look is logged', async () => {
     const visit = await readVisit(stores, role, now)
+    // The role was given until a day that is thirty days off; it is good to that day's end on the department's wall.
+    expect(visit.lastDay).toBe(new Date(now + 30 * 86_400_000).toISOString().slice(0, 10))
     expect(visit.courses.map(course => course.title)).toEqual([expect.stringContaining(world.courseCanaries.main)])
     const postings = visit.courses[0]!.postings
     expect(postings.length).toBeGreaterThan(0)
