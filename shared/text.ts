@@ -67,6 +67,7 @@ export const refusalWords: Record<RefusalCode, Words> = {
   already_released: plain('Released already', 'Marks of this section are released.'),
   nothing_to_submit: plain('Nothing to submit', 'Every step is empty.'),
   attempts_used: { title: 'No attempt left', detail: f => `All ${f.attempts ?? ''} attempts are used.` },
+  marks_shown: plain('Your marks are shown', 'You have seen the worked values of your data: nothing more can be handed in for this lab.'),
   wrong_dimension: { title: 'Another kind of quantity', detail: f => String(f.reason ?? 'The unit does not fit what is asked.') },
   dispute_exists: plain('Already in dispute', 'This step has an open dispute.'),
   dispute_closed: plain('The dispute is closed', 'It has been ruled on.'),

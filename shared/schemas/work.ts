@@ -82,7 +82,7 @@ export const work = z.object({
   drafts: z.array(savedDraft),
   made: z.array(submissionListEntry),
   /** Why nothing can be handed in now; null when it can. */
-  stopped: z.enum(['lab_closed', 'attempts_used', 'term_closed']).nullable(),
+  stopped: z.enum(['lab_closed', 'attempts_used', 'marks_shown', 'term_closed']).nullable(),
   now: z.iso.datetime(),
 })
 export type Work = z.infer<typeof work>

@@ -35,7 +35,7 @@ export async function classView(read: Read, postingId: string, now: number): Pro
     const terms = { dueAt: posting.due_at, allowedUntil: student.allowedUntil, zone: posting.zone, lateRule: rule }
     const closesAt = closingOf(terms)
     const standing = standingOf({ isWithdrawn: posting.state === 'withdrawn', standing: student.standing, hasSubmission: made.length > 0, releasedAt: posting.released_at, dueAt: personalDue(terms), closesAt, now })
-    return { membershipId: student.id, name: student.display_name ?? student.pseudonym, standing, submissionId: counts?.submissionId ?? null, totalMilli: counts?.totalMilli ?? null, lateDays: counts?.lateDays ?? null, claimedSentAt: claimOf(made, counts), maySubmit: made.length < posting.attempts && (closesAt === null || now <= closesAt) }
+    return { membershipId: student.id, name: student.display_name ?? student.pseudonym, standing, submissionId: counts?.submissionId ?? null, totalMilli: counts?.totalMilli ?? null, lateDays: counts?.lateDays ?? null, claimedSentAt: claimOf(made, counts), maySubmit: made.length < posting.attempts && (made.length === 0 || posting.released_at === null) && (closesAt === null || now <= closesAt) }
   })
   const counted = people.filter(person => person.submissionId !== null && person.standing !== 'excused' && person.standing !== 'not_counted')
   const stored = await currentSteps(read, people.flatMap(person => person.submissionId ?? []))

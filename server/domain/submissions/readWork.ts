@@ -4,10 +4,11 @@ import type { Work } from '#shared/schemas/work'
 import type { Read } from '../../db/writer'
 import { renderLabText } from '../labs/renderLabText'
 import type { LoadedShare } from '../shares/loadedShare'
-import { postedGround, readGround, type PostedGround } from './ground'
+import { postedGround, readGround } from './ground'
 import { listSubmissions } from './listSubmissions'
-import { closingOf, decideLateness, personalDue } from './lateness'
+import { closingOf, personalDue } from './lateness'
 import { readDrafts } from './readDrafts'
+import { stoppedBy } from './stoppedBy'
 
 /**
  * Everything on a student's work page: the lab's text, the asks, the share's rows, what is saved and what was handed in.
@@ -40,10 +41,4 @@ export async function readWork(read: Read, loadShare: (shareId: string) => Promi
     made,
     stopped: stoppedBy(ground, now), now: new Date(now).toISOString(),
   }
-}
-
-function stoppedBy(ground: PostedGround, now: number): Work['stopped'] {
-  if (ground.termState === 'closed' && (ground.allowedUntil ?? 0) < now) return 'term_closed'
-  if (decideLateness(ground, now).isClosed) return 'lab_closed'
-  return ground.attemptsMade >= ground.attempts ? 'attempts_used' : null
 }

@@ -6,8 +6,9 @@ import { judgeSubmission } from '../marking/judgeSubmission'
 import type { Reference } from '../marking/reference'
 import type { LoadedShare } from '../shares/loadedShare'
 import { isSameGround, postedGround, readGround, type PostedGround } from './ground'
-import { decideLateness } from './lateness'
+import { closingOf, decideLateness } from './lateness'
 import { insertSubmission, type SubmitLab } from './insertSubmission'
+import { stoppedBy } from './stoppedBy'
 
 export type { SubmitLab }
 
@@ -28,7 +29,7 @@ const mostJudgings = 3
  * the lab has closed since.
  *
  * `receivedAt` is the instant at which the complete request had arrived: lateness is decided from it, once.
- * @throws {DomainError} `not_found`, `lab_withdrawn`, `lab_not_open`, `lab_closed`, `attempts_used`, `term_closed`, `nothing_to_submit`, `request_key_reused`, `changed_meanwhile`
+ * @throws {DomainError} `not_found`, `lab_withdrawn`, `lab_not_open`, `lab_closed`, `attempts_used`, `marks_shown`, `term_closed`, `nothing_to_submit`, `request_key_reused`, `changed_meanwhile`
  */
 export async function submitLab({ read, write }: Stores, judging: Judging, input: SubmitLab, receivedAt: number): Promise<SubmissionReply> {
   const request: Once = { ...input.request, personId: input.personId, now: receivedAt }
@@ -44,7 +45,7 @@ export async function submitLab({ read, write }: Stores, judging: Judging, input
       try {
         return await write(trx => once(trx, request, async () => {
           const again = await readGround(trx, input.shareId, input.membershipId)
-          if (!again || !ground || !isSameGround(ground, again) || again.attemptsMade >= posted.attempts) throw new StaleGround()
+          if (!again || !ground || !isSameGround(ground, again) || stoppedBy({ ...posted, attemptsMade: again.attemptsMade }, receivedAt) !== null) throw new StaleGround()
           return insertSubmission(trx, { ground: { ...posted, attemptsMade: again.attemptsMade }, loaded, judged, referenceDigest: judging.reference.digest, input, lateness: decideLateness(posted, receivedAt), receivedAt })
         }))
       }
@@ -63,11 +64,13 @@ export async function submitLab({ read, write }: Stores, judging: Judging, input
   }
 }
 
-/** Refuses what the lab's dates, its attempts or its term no longer let in. */
+/** Refuses what the lab's dates, its attempts, its release or its term no longer let in. */
 function assertMaySubmit(ground: PostedGround, receivedAt: number): PostedGround {
-  const lateness = decideLateness(ground, receivedAt)
-  if (ground.termState === 'closed' && (ground.allowedUntil ?? 0) < receivedAt) return refuse('term_closed')
-  if (lateness.isClosed) return refuse('lab_closed', { at: lateness.closesAt === null ? null : new Date(lateness.closesAt).toISOString() })
-  if (ground.attemptsMade >= ground.attempts) return refuse('attempts_used', { attempts: ground.attempts })
-  return ground
+  const stopped = stoppedBy(ground, receivedAt)
+  if (stopped === 'lab_closed') {
+    const closesAt = closingOf(ground)
+    return refuse('lab_closed', { at: closesAt === null ? null : new Date(closesAt).toISOString() })
+  }
+  if (stopped === 'attempts_used') return refuse('attempts_used', { attempts: ground.attempts })
+  return stopped === null ? ground : refuse(stopped)
 }
