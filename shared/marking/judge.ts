@@ -7,7 +7,7 @@ import { findQuantity } from '../thermo/registry'
 import { fullTurn } from '../thermo/wind'
 import { formatQuantity } from '../units/formatQuantity'
 import { findUnit, getUnit, isCommensurable, type Unit } from '../units/ucum'
-import { acceptedWays, formulaeOf } from './alternatives'
+import { acceptedWays } from './alternatives'
 import { makeBand, QuestionFault, referenceOf, type CarriedHalfUnits } from './band'
 import { liesWithin, outwardDecimals } from './decimalEdges'
 import { withCarried, type CarriedInputs } from './graph'
@@ -16,6 +16,8 @@ import { explainingSlip, sentenceOf, slipRanges, type SlipRange } from './slips'
 import type { Accepted, Band, Judgement, ReadAnswer, StepQuestion } from './types'
 
 export { judgeInterface, referenceVersion } from './version'
+
+const carriedWords = 'Right by the value that follows from your own earlier one.'
 
 export function judgeStep(question: StepQuestion, answer: ReadAnswer): Judgement {
   try {
@@ -53,10 +55,7 @@ function judged(question: StepQuestion, answer: ReadAnswer): Judgement {
   const notes = 'notes' in outcome ? outcome.notes ?? [] : []
 
   if (outcome.is === 'class') return judgedClass(definition, question, answer, carried, { ...blank, outcome: 'class', carriedNote, trace, notes })
-  if (outcome.is !== 'value') {
-    const isAccepted = answer.reading === outcome.is
-    return { ...blank, outcome: outcome.is, reason: outcome.why, carriedNote, trace, notes, isAccepted, acceptedBy: isAccepted ? 'word' : null, pointsMilli: isAccepted ? withinStep(question.maxMilli, question.maxMilli) : 0 }
-  }
+  if (outcome.is !== 'value') return judgedWord(definition, question, answer, unit, carried, { ...blank, outcome: outcome.is, reason: outcome.why, carriedNote, trace, notes })
   return judgedValue(definition, question, answer, unit, outcome.value, carried, { ...blank, outcome: 'value', carriedNote, trace, notes })
 }
 
@@ -70,7 +69,7 @@ function checkedUnit(definition: QuantityDefinition, question: StepQuestion): Un
 
 function judgedValue(definition: QuantityDefinition, question: StepQuestion, answer: ReadAnswer, unit: Unit, center: number, carried: CarriedInputs, base: Judgement): Judgement {
   const band = makeBand(definition, question, question.inputs, center, unit)
-  const carriedBand = carried.inputs && bandOfCarried(definition, question, carried.inputs, unit, carried.halfUnits)
+  const carriedBand = carried.inputs && bandOf(definition, question, carried.inputs, unit, carried.halfUnits)
   const ranges = slipRanges(definition, question, question.inputs, center)
   const near = definition.isDirection ? onNearestTurn(answer, center, unit) : answer
   const typed = near.reading === 'ok' ? near.decimal : null
@@ -79,13 +78,26 @@ function judgedValue(definition: QuantityDefinition, question: StepQuestion, ans
   const acceptedBy = typed === null ? null : isIn(band, typed) ? 'band' : carriedBand && isIn(carriedBand, typed) ? 'carried' : isRuledIn(definition, question, typed, unit, ranges, answer) ? 'ruling' : null
   const isAccepted = acceptedBy !== null
   const notes = [...base.notes]
-  if (acceptedBy === 'carried') notes.push('Right by the value that follows from your own earlier one.')
+  if (acceptedBy === 'carried') notes.push(carriedWords)
   return {
     ...base,
     band, carriedBand, acceptedBy, isAccepted, notes,
     slip: slip && acceptedBy === null ? named(slip, unit, question, definition) : null,
     slipValues: ranges.map(({ slip: { key, label }, value }) => ({ key, label, value })),
     pointsMilli: withinStep(isAccepted ? question.maxMilli : slip ? question.slipMilli ?? 0 : 0, question.maxMilli),
+  }
+}
+
+/** "None", "not reached" and "not defined" as the true answer; where the student's own earlier value leads to a number, that number counts as well. */
+function judgedWord(definition: QuantityDefinition, question: StepQuestion, answer: ReadAnswer, unit: Unit, carried: CarriedInputs, base: Judgement): Judgement {
+  const carriedBand = carried.inputs && bandOf(definition, question, carried.inputs, unit, carried.halfUnits)
+  const near = carriedBand && definition.isDirection ? onNearestTurn(answer, carriedBand.center, unit) : answer
+  const isRight = answer.reading === base.outcome
+  const isCarried = !isRight && carriedBand !== null && near.reading === 'ok' && near.decimal !== null && isIn(carriedBand, near.decimal)
+  return {
+    ...base, carriedBand, isAccepted: isRight || isCarried, acceptedBy: isRight ? 'word' : isCarried ? 'carried' : null,
+    notes: isCarried ? [...base.notes, carriedWords] : base.notes,
+    pointsMilli: isRight || isCarried ? withinStep(question.maxMilli, question.maxMilli) : 0,
   }
 }
 
@@ -111,14 +123,13 @@ function named(range: SlipRange, unit: Unit, question: StepQuestion, definition:
   return { key: range.slip.key, label: range.slip.label, sentence: sentenceOf(range, { value: shown.number, unit: shown.text.slice(shown.number.length).trim() }), value: range.value }
 }
 
-/** The band of what follows from the student's own earlier value; null where nothing does. */
-function bandOfCarried(definition: QuantityDefinition, question: StepQuestion, inputs: Inputs, unit: Unit, halfUnits: CarriedHalfUnits): Band | null {
+/** The band for some inputs (those that follow from the student's own earlier value, or a variant that a ruling accepted); null where they lead to no value or out of the range. */
+function bandOf(definition: QuantityDefinition, question: StepQuestion, inputs: Inputs, unit: Unit, halfUnits: CarriedHalfUnits): Band | null {
   try {
     const { outcome } = referenceOf(definition, question, inputs)
     return outcome.is === 'value' ? makeBand(definition, question, inputs, outcome.value, unit, halfUnits) : null
   }
   catch (error) {
-    // together with the other inputs the carried value leads out of the range: judged on the true value alone
     if (error instanceof OutOfRangeError || error instanceof SeriesError || error instanceof RangeError) return null
     throw error
   }
@@ -135,9 +146,9 @@ function isRuledIn(definition: QuantityDefinition, question: StepQuestion, typed
       return liesWithin(typed, lowDecimal, highDecimal)
     }
     if (!definition.variants.some(variant => variant.key === accepted.variant)) return false
-    const outcome = evaluateQuantity(definition, question.inputs, question.convention.constants, accepted.variant, formulaeOf(question.convention))
-    if (outcome.is !== 'value') return false
-    return isIn(makeBand(definition, { ...question, variant: accepted.variant }, question.inputs, outcome.value, unit), typed)
+    // where the accepted variant does not hold, this share has no value by it
+    const band = bandOf(definition, { ...question, variant: accepted.variant }, question.inputs, unit, {})
+    return band !== null && isIn(band, typed)
   })
 }
 
@@ -152,7 +163,7 @@ function judgedClass(definition: QuantityDefinition, question: StepQuestion, ans
     classes,
     isAccepted: isRight || isCarried,
     acceptedBy: isRight ? 'word' : isCarried ? 'carried' : null,
-    notes: isCarried ? [...base.notes, 'Right by the value that follows from your own earlier one.'] : base.notes,
+    notes: isCarried ? [...base.notes, carriedWords] : base.notes,
     pointsMilli: isRight || isCarried ? withinStep(question.maxMilli, question.maxMilli) : 0,
   }
 }

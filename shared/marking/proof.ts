@@ -1,5 +1,6 @@
 /** What has to hold before a step is posted with a share: it can be judged, and its band stays within half the way to a slip or a class limit. */
-import type { QuantityDefinition } from '../thermo/definition'
+import type { Outcome, QuantityDefinition } from '../thermo/definition'
+import { evaluateQuantity } from '../thermo/evaluate'
 import { findQuantity } from '../thermo/registry'
 import { formatQuantity } from '../units/formatQuantity'
 import { exactInUnit } from './decimalEdges'
@@ -7,7 +8,7 @@ import { toDouble } from '../numerics/rational'
 import { findUnit, type Unit } from '../units/ucum'
 import { judgeStep } from './judge'
 import { halfUnitAsked } from './rounding'
-import { formulaeOf } from './alternatives'
+import { acceptedWays, formulaeOf } from './alternatives'
 import { slipRanges } from './slips'
 import type { Band, ReadAnswer, StepQuestion } from './types'
 
@@ -24,8 +25,22 @@ export function checkBand(question: StepQuestion): BandCheck {
   if (judgement.classes.length > 1) {
     reasons.push(`Accepted constants put it in different classes (${judgement.classes.join(', ')}): the layer lies at the limit. Choose another.`)
   }
+  const answers = answersByWays(definition, question)
+  if (answers.size > 1) reasons.push(`Accepted formulae and constants lead to different kinds of answer (${[...answers].join(', ').replaceAll('_', ' ')}): choose another share.`)
   if (judgement.band) reasons.push(...bandFaults(definition, question, judgement.band, unit))
   return { ok: reasons.length === 0, reasons }
+}
+
+/** The kinds of answer that accepted ways give: whoever works by one of them must be able to be right. A way that cannot be computed here gives none. */
+function answersByWays(definition: QuantityDefinition, question: StepQuestion): ReadonlySet<Outcome['is']> {
+  return new Set(acceptedWays(definition, question.convention, question.variant).flatMap((way) => {
+    try {
+      return evaluateQuantity(definition, question.inputs, way.constants, way.variant, way.formulae).is
+    }
+    catch {
+      return []
+    }
+  }))
 }
 
 function bandFaults(definition: QuantityDefinition, question: StepQuestion, band: Band, unit: Unit): string[] {

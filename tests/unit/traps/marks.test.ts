@@ -100,6 +100,15 @@ describe('traps K: carried values', () => {
     expect(right).toMatchObject({ isAccepted: true, acceptedBy: 'band' })
     expect(judgeTyped(stepOf('parcel-temperature-by-height', { ...parcel, lapseRate: 0.0098 }), '29.7 °C').isAccepted).toBe(false)
   })
+  it('K16: where the truth is "not defined" and the own earlier value leads to a number, that number counts as well, with its note', () => {
+    const layer = { potentialTemperatureBottom: 303, potentialTemperatureTop: 300, depth: 1000 } // θ falls with height
+    const question = stepOf('brunt-vaisala-frequency', layer, { carried: { potentialTemperatureTop: { valueSi: 306, halfUnitSi: 0.5 } } })
+    const own = Math.sqrt(9.81 / 304.5 * 3 / 1000).toPrecision(3)
+    expect(judgeTyped(question, 'not defined')).toMatchObject({ isAccepted: true, acceptedBy: 'word', pointsMilli: 1000 })
+    expect(judgeTyped(question, `${own} s-1`)).toMatchObject({ outcome: 'not_defined', isAccepted: true, acceptedBy: 'carried', pointsMilli: 1000, notes: [expect.stringContaining('your own earlier one')] })
+    expect(judgeTyped(question, `${2 * Number(own)} s-1`)).toMatchObject({ isAccepted: false, pointsMilli: 0 })
+    expect(judgeTyped(stepOf('brunt-vaisala-frequency', layer), `${own} s-1`)).toMatchObject({ isAccepted: false, carriedBand: null })
+  })
   it('K18: a carried value that is unphysical or leaves nothing to compute is not carried, and the note says so', () => {
     const lapseRate = input('parcel-temperature-by-height', 'lapseRate')
     expect(carriedFrom(lapseRate, reading('dry-adiabatic-lapse-rate', '0 K/km'))).toMatchObject({ notCarried: expect.stringContaining('leave nothing to compute') })

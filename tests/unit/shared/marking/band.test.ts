@@ -4,6 +4,7 @@ import { judgeStep } from '#shared/marking/judge'
 import { checkBand } from '#shared/marking/proof'
 import { digitsInWords, lastPlaceAsked } from '#shared/marking/rounding'
 import { fromDecimal, compare, toDecimal, fromDouble } from '#shared/numerics/rational'
+import { defaultConvention } from '#shared/thermo/conventions/index'
 import { findQuantity, quantities } from '#shared/thermo/registry'
 import { fromSi, getUnit } from '#shared/units/ucum'
 import type { QuantityDefinition } from '#shared/thermo/definition'
@@ -120,6 +121,13 @@ describe('the proof of a band', () => {
   it('refuses a layer that accepted constants put in two classes', () => {
     expect(checkBand(stepOf('static-stability', { lapseRate: 0.00966 })).reasons.join()).toContain('different classes (stable, dry-neutral)')
     expect(checkBand(stepOf('static-stability', { lapseRate: 0.0065 }))).toEqual({ ok: true, reasons: [] })
+  })
+  it('refuses a share in which one accepted constant leads to a value and another to "not reached", either way round', () => {
+    const profile = { height: [100, 200, 300], temperature: [280, 276, 273.155] } // ends between two values that 0 °C has in kelvin
+    const by = (own: number, other: number) => ({ convention: { ...defaultConvention, constants: { ...defaultConvention.constants, zeroCelsius: own }, accepted: [{ label: 'the other', constants: { zeroCelsius: other } }] } })
+    expect(checkBand(stepOf('freezing-level', profile, by(273.15, 273.16))).reasons.join()).toContain('different kinds of answer (not reached, value)')
+    expect(checkBand(stepOf('freezing-level', profile, by(273.16, 273.15))).reasons.join()).toContain('different kinds of answer (value, not reached)')
+    expect(checkBand(stepOf('freezing-level', { ...profile, temperature: [280, 276, 274] }, by(273.15, 273.16)))).toEqual({ ok: true, reasons: [] })
   })
   it('refuses a share that asks nothing: ΔT of 0, θ at 1000 hPa', () => {
     expect(checkBand(stepOf('isobaric-heat', { temperatureStart: 283.15, temperatureEnd: 283.15 })).ok).toBe(false)
