@@ -11,8 +11,11 @@ const isDev = process.argv.includes('--dev')
 const host = process.env.HOST || '127.0.0.1'
 const port = Number(process.env.PORT || 3000)
 const dataDir = resolve(process.env.DATA_DIR || join(root, '.data'))
-const isLoopback = host === 'localhost' || host === '::1' || /^127\.\d+\.\d+\.\d+$/.test(host)
-const isDemo = process.env.DEMO === undefined ? isLoopback : process.env.DEMO === '1'
+const isHere = name => name === 'localhost' || name === '::1' || name === '[::1]' || /^127\.\d+\.\d+\.\d+$/.test(name)
+const isLoopback = isHere(host)
+// Behind a proxy the demo's sign-ins and its mail would be everybody's: there it must be asked for.
+const reachedAt = URL.canParse(process.env.PUBLIC_ORIGIN ?? '') ? new URL(process.env.PUBLIC_ORIGIN).hostname : host
+const isDemo = process.env.DEMO === undefined || process.env.DEMO === '' ? isLoopback && isHere(reachedAt) : process.env.DEMO === '1'
 
 assertNode()
 if (!Number.isInteger(port) || port < 1 || port > 65_535) stop(`PORT is ${process.env.PORT}: give a number from 1 to 65535.`)

@@ -23,7 +23,8 @@ export async function locate(read: Read, params: Readonly<Record<string, string>
   const narrowest = found[found.length - 1]!
   const courseId = found[0]!.courseId
   if (found.some(place => place.courseId !== courseId && !place.isDepartmentWide)) return null
-  return { ...narrowest, courseId }
+  // what is the department's is used from a course: whether its term is open decides
+  return { ...narrowest, courseId, termState: narrowest.termState ?? found[0]!.termState }
 }
 
 type Finder = (read: Read, id: string, now: number) => Promise<Place | null>

@@ -2,6 +2,7 @@ import { refuse } from '#shared/errors'
 import { once, type Once } from '../../db/queries/requestKeys'
 import type { Stores } from '../../db/writer'
 import type { FileStore } from '../../files/store'
+import { shownFileName } from '../data/fileName'
 import { newId } from '../ids'
 import { appendEntry, courseChain, keepPrivateText } from '../ledger/appendEntry'
 import { disputeGround } from './disputeGround'
@@ -21,6 +22,7 @@ export async function attachFile({ write }: Stores, files: FileStore, input: Att
     await received.discard()
     return refuse('file_empty')
   }
+  const name = shownFileName(input.name)
   const reply = { digest: received.sha256.toString('hex'), size: received.size }
   try {
     await received.keep()
@@ -28,8 +30,8 @@ export async function attachFile({ write }: Stores, files: FileStore, input: Att
       const ground = await disputeGround(trx, input.disputeId)
       if (ground.state === 'ruled' || ground.state === 'closed' || ground.state === 'withdrawn') refuse('dispute_closed')
       const about = ground.studentIds.includes(input.actorId) ? input.actorId : ground.studentIds[0] ?? refuse('not_found')
-      await trx.insertInto('work_file').values({ digest: received.sha256, about_membership_id: about, size: received.size, original_name: input.name }).onConflict(conflict => conflict.column('digest').doNothing()).execute()
-      const privateDigest = await keepPrivateText(trx, about, `Added a file: ${input.name}`)
+      await trx.insertInto('work_file').values({ digest: received.sha256, about_membership_id: about, size: received.size, original_name: name }).onConflict(conflict => conflict.column('digest').doNothing()).execute()
+      const privateDigest = await keepPrivateText(trx, about, `Added a file: ${name}`)
       await trx.insertInto('dispute_note').values({ id: newId(now), dispute_id: ground.id, by_actor_id: input.actorId, audience: 'all', private_digest: privateDigest, file_digest: received.sha256, at: now }).execute()
       await appendEntry(trx, { chain: courseChain(ground.courseId), at: now, actor: input.actorId, action: 'dispute.file_added', privateDigest, facts: { dispute: ground.id, file: reply.digest, size: reply.size } })
       return reply

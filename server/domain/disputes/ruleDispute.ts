@@ -3,7 +3,7 @@ import type { Accepted } from '#shared/marking/types'
 import type { RulingBody } from '#shared/schemas/disputes'
 import type { MarkTable } from '../../db/schema/tables'
 import { once, type Once } from '../../db/queries/requestKeys'
-import type { Stores, Trx } from '../../db/writer'
+import type { Read, Stores, Trx } from '../../db/writer'
 import { newId } from '../ids'
 import { appendEntry, courseChain, digestOf } from '../ledger/appendEntry'
 import { evaluationsDigest, marksDigest, rulingDigest, type MarkFact } from '../ledger/coveredDigests'
@@ -35,9 +35,10 @@ export async function ruleDispute({ read, write }: Stores, reference: Reference,
   for (let tries = 0; tries < 3; tries++) {
     const seen = await disputeGround(read, input.disputeId)
     const accept = input.body.kind === 'accept' ? acceptedOfRuling(input.body.accept, rulingId) : null
+    const newest = await newestSubmission(read, seen.labId)
     const cases = accept ? await likeCases(read, reference, seen.labId, seen.stepKey, accept) : []
     try {
-      return await write(trx => once(trx, input.request, () => store(trx, reference, input, { rulingId, accept, cases }, now)))
+      return await write(trx => once(trx, input.request, () => store(trx, reference, input, { rulingId, accept, cases, newest }, now)))
     }
     catch (error) {
       if (!(error instanceof StaleCases)) throw error
@@ -48,13 +49,21 @@ export async function ruleDispute({ read, write }: Stores, reference: Reference,
 
 class StaleCases extends Error {}
 
+/** The number of the submission that came last in a lab; 0 where there is none. */
+async function newestSubmission(db: Read, labId: string): Promise<number> {
+  const row = await db.selectFrom('submission').innerJoin('share', 'share.id', 'submission.share_id').select(eb => eb.fn.max('submission.seq').as('seq')).where('share.lab_id', '=', labId).executeTakeFirst()
+  return Number(row?.seq ?? 0)
+}
+
 function acceptedOfRuling(accept: { kind: 'slip' | 'variant', key: string }, ruling: string): Accepted {
   return accept.kind === 'slip' ? { kind: 'slip', slip: accept.key, ruling } : { kind: 'variant', variant: accept.key, ruling }
 }
 
-async function store(trx: Trx, reference: Reference, input: RuleDispute, { rulingId, accept, cases }: { rulingId: string, accept: Accepted | null, cases: readonly LikeCase[] }, now: number): Promise<RulingReply> {
+async function store(trx: Trx, reference: Reference, input: RuleDispute, { rulingId, accept, cases, newest }: { rulingId: string, accept: Accepted | null, cases: readonly LikeCase[], newest: number }, now: number): Promise<RulingReply> {
   const ground = await disputeGround(trx, input.disputeId)
   await assertMayRule(trx, ground, input, now)
+  // Work handed in since the cases were judged was judged without what is accepted here, and would be left out of it.
+  if (accept && await newestSubmission(trx, ground.labId) !== newest) throw new StaleCases()
   const level = ground.state === 'appealed' ? 'appeal' as const : 'first' as const
   const cause = level === 'appeal' ? 'appeal' as const : 'ruling' as const
   const evaluations = cases.map(each => evaluationRow({

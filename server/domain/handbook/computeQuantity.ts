@@ -21,7 +21,7 @@ const askedDigits = 3
 
 /**
  * The calculator of a handbook page: inputs as typed, the value with its working, what a step with three digits would accept, and a curve.
- * Bands and slips are for staff: a student's are named after release, on their own work.
+ * Bands and slips are for staff (`seesBands`): a student's are named after release, on their own work.
  * @throws {DomainError} `not_found` for a quantity, convention, variant or unit that there is not
  */
 export function computeQuantity(key: string, asked: z.output<typeof computeBody>, isStaff: boolean): ComputeReply {

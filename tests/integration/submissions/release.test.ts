@@ -96,6 +96,15 @@ describe('release', () => {
     expect((await Promise.all([codeOf(release()), codeOf(release())])).sort()).toEqual(['already_released', 'done'])
   })
 
+  it('is the end of attempts for whoever has handed in and sees the worked values, and not for whoever has handed in nothing', async () => {
+    const inTime = Date.parse('2026-10-18T15:00:00Z')
+    await releaseMarks(stores, { actorId: 'm-lead', postingId: 'posting-1', seenVersion: 1 }, inTime)
+    expect(await codeOf(handIn(stores, judging, course, { no: 1, key: 'key-00000011', at: inTime + 60_000 }))).toBe('marks_shown')
+    expect((await readWork(stores.read, judging.loadShare, { membershipId: 'm-1', shareId: 'share-1' }, inTime + 60_000)).stopped).toBe('marks_shown')
+    expect(await codeOf(handIn(stores, judging, course, { no: 4, key: 'key-00000014', at: inTime + 60_000 }))).toBe('done')
+    expect((await stores.read.selectFrom('submission').select('attempt').where('share_id', '=', 'share-1').execute()).length).toBe(1)
+  })
+
   it('shows a student marks, the band with its parts, the working with numbers put in, and the slip as a sentence', async () => {
     await release()
     const marks = await submissionMarks(stores.read, student(1), submissions[1]!)

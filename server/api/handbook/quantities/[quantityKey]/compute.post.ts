@@ -1,8 +1,10 @@
 import { z } from 'zod'
+import { refuse } from '#shared/errors'
 import { computeBody, computeReply } from '#shared/schemas/handbook'
 import { computeQuantity } from '../../../../domain/handbook/computeQuantity'
-import type { Actor } from '../../../../domain/people/actor'
+import { seesBands } from '../../../../domain/handbook/seesBands'
 import { defineApiHandler } from '../../../../utils/defineApiHandler'
+import { useStores } from '../../../../utils/useStores'
 
 export default defineApiHandler({
   action: 'reference:read',
@@ -10,9 +12,5 @@ export default defineApiHandler({
   params: z.object({ quantityKey: z.string().max(80) }),
   body: computeBody,
   reply: computeReply,
-  handle: ({ params, body, actor }) => computeQuantity(params.quantityKey, body, isStaff(actor)),
+  handle: async ({ params, body, actor }) => computeQuantity(params.quantityKey, body, await seesBands(useStores().read, actor ?? refuse('not_signed_in'))),
 })
-
-function isStaff(actor: Actor | null): boolean {
-  return actor !== null && (actor.memberships.some(member => member.role !== 'student') || actor.departmentRoles.length > 0)
-}
