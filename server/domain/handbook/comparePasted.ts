@@ -1,3 +1,4 @@
+import { setImmediate as otherRequests } from 'node:timers/promises'
 import { refuse } from '#shared/errors'
 import { acceptedWays, formulaeOf, type Way } from '#shared/marking/alternatives'
 import { judgeStep } from '#shared/marking/judge'
@@ -29,15 +30,16 @@ const words: Record<CompareCause, string> = {
 
 /** The same by the convention that the course teaches with now. @throws {DomainError} `not_found`, `invalid` */
 export async function comparePasted(read: Read, courseId: string, asked: z.output<typeof compareBody>): Promise<CompareReply> {
-  return compareBeside((await conventionOfCourse(read, courseId)).convention, asked)
+  return compareBeside((await conventionOfCourse(read, courseId)).convention, asked, otherRequests)
 }
 
 /**
  * A key column from a sheet beside the reference, by a convention: where it departs, and by which cause. Constants and formulae that the convention accepts are
  * looked at first, then every other formula of the quantity, then its slips; a cause is named where it gives the very digits of the sheet.
+ * `between` is awaited before each row: two thousand rows of a moist quantity take many seconds, in which others hand in.
  * @throws {DomainError} `not_found`, `invalid`
  */
-export function compareBeside(convention: Convention, asked: z.output<typeof compareBody>): CompareReply {
+export async function compareBeside(convention: Convention, asked: z.output<typeof compareBody>, between: () => Promise<unknown> = async () => {}): Promise<CompareReply> {
   const definition = findQuantity(asked.quantity)
   const unit = findUnit(asked.unit)
   if (!definition) refuse('not_found')
@@ -45,7 +47,11 @@ export function compareBeside(convention: Convention, asked: z.output<typeof com
   if (asked.variant !== '' && !definition.variants.some(one => one.key === asked.variant)) refuse('not_found')
   const pasted = pastedRows(definition, asked)
   if (pasted.length === 0) refuse('invalid', {}, [{ path: 'pasted', message: 'No row with a number in the key column was found.' }])
-  const rows = pasted.map(row => comparedRow(definition, convention, asked.variant === '' ? undefined : asked.variant, asked.unit, row))
+  const rows: Row[] = []
+  for (const row of pasted) {
+    await between()
+    rows.push(comparedRow(definition, convention, asked.variant === '' ? undefined : asked.variant, asked.unit, row))
+  }
   const causes = Object.keys(words) as CompareCause[]
   return {
     quantity: definition.name, unit: formatUnit(asked.unit), convention: convention.title, rows,

@@ -66,22 +66,27 @@ describe('a pasted key', () => {
   const columns = [{ holds: 'temperature', unit: 'Cel' }, { holds: 'pressure', unit: 'hPa' }, { holds: 'key', unit: 'K' }]
   const compare = (pasted: string) => compareBeside(defaultConvention, { quantity: 'potential-temperature', variant: '', unit: 'K', pasted, columns })
   // 20 °C, 850 hPa: 307.09 K by κ 287/1004; 307.0831 by 2/7 (trap T3); 308.24 from 1013.25 hPa (trap T1)
-  it('names the cause of each departure', () => {
-    const reply = compare('t\tp\ttheta\n20\t850\t307.09\n20\t850\t307.0831\n20\t850\t308.24\n20\t850\t311.5\nx\t850\t300\n')
+  it('names the cause of each departure', async () => {
+    const reply = await compare('t\tp\ttheta\n20\t850\t307.09\n20\t850\t307.0831\n20\t850\t308.24\n20\t850\t311.5\nx\t850\t300\n')
     expect(reply.rows.map(row => [row.line, row.cause])).toEqual([[2, 'same'], [3, 'constant'], [4, 'slip'], [5, 'none'], [6, 'not_read']])
     expect(reply.rows[1]?.words).toContain('2/7')
     expect(reply.rows[2]?.words).toContain('1013.25')
     expect(reply.causes.map(one => one.rows)).toEqual([1, 1, 1, 1, 1])
   })
-  it('takes a series down the rows, with one key', () => {
-    const reply = compareBeside(defaultConvention, {
+  it('takes a series down the rows, with one key', async () => {
+    const reply = await compareBeside(defaultConvention, {
       quantity: 'lapse-rate-least-squares', variant: '', unit: 'K/km', columns: [{ holds: 'height', unit: 'm' }, { holds: 'temperature', unit: 'Cel' }, { holds: 'key', unit: 'K/km' }],
       pasted: 'z;T;rate\n100;15,0;10,4\n150;14,6;\n200;14,1;\n250;13,7;\n300;12,9;\n',
     })
     expect(reply.rows).toMatchObject([{ cause: 'slip', words: 'z fitted on T and inverted' }])
   })
-  it('asks for what is missing and for units that fit', () => {
-    expect(() => compareBeside(defaultConvention, { quantity: 'density', variant: '', unit: 'kg/m3', pasted: '1\t2', columns: [{ holds: 'key', unit: '1' }, { holds: '', unit: '' }] })).toThrow('invalid')
-    expect(() => compareBeside(defaultConvention, { quantity: 'density', variant: '', unit: 'K', pasted: '1', columns })).toThrow('invalid')
+  it('lets others in between two rows', async () => {
+    let turns = 0
+    const reply = await compareBeside(defaultConvention, { quantity: 'potential-temperature', variant: '', unit: 'K', pasted: '20\t850\t307\n20\t850\t308\n', columns }, async () => { turns++ })
+    expect([reply.rows.length, turns]).toEqual([2, 2])
+  })
+  it('asks for what is missing and for units that fit', async () => {
+    await expect(compareBeside(defaultConvention, { quantity: 'density', variant: '', unit: 'kg/m3', pasted: '1\t2', columns: [{ holds: 'key', unit: '1' }, { holds: '', unit: '' }] })).rejects.toThrow('invalid')
+    await expect(compareBeside(defaultConvention, { quantity: 'density', variant: '', unit: 'K', pasted: '1', columns })).rejects.toThrow('invalid')
   })
 })
