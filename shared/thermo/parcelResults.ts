@@ -4,7 +4,7 @@ import type { Inputs, Outcome, Slip, Source, Variant } from './definition'
 import { parcelTemperatureAt } from './parcelAscent'
 import { parcelContext, type Origin, type ParcelContext } from './parcelContext'
 import { endOfData, energyStep, levelStep, type ParcelResult } from './parcelDefinition'
-import { fineSlip, signSlip, slip } from './slips'
+import { constantSlip, fineSlip, signSlip, slip } from './slips'
 import { atPressure } from './sounding'
 import { texFactor, texQuantity } from './tex'
 
@@ -18,7 +18,7 @@ const pseudoadiabatic = (entry: string): Ascending => ({
 })
 
 /** The same result of another ascent: with the other treatment of moisture in density, or of the surface parcel. */
-function otherAscents(of: (context: ParcelContext, origin: Origin, isVirtual: boolean) => Outcome) {
+function otherAscents(of: (context: ParcelContext, origin: Origin, isVirtual: boolean) => Outcome, weigh: typeof fineSlip = fineSlip) {
   const valueOf = (inputs: Inputs, constants: Parameters<Slip['apply']>[1], formulae: Parameters<Slip['apply']>[3], origin: Origin, isVirtual: boolean) => {
     const context = parcelContext(inputs, constants, formulae)
     const outcome = of(context, origin, isVirtual)
@@ -29,8 +29,8 @@ function otherAscents(of: (context: ParcelContext, origin: Origin, isVirtual: bo
   }
   return (origin: Origin, isVirtual: boolean): Slip[] => [
     isVirtual
-      ? fineSlip('virtual-left-out', 'virtual correction left out', 'This leaves the virtual correction out: the ask takes the virtual temperature of parcel and surroundings.', (inputs, constants, _right, formulae) => valueOf(inputs, constants, formulae, origin, false))
-      : fineSlip('virtual-put-in', 'virtual correction put in', 'This has the virtual correction in it: the ask takes the temperatures themselves.', (inputs, constants, _right, formulae) => valueOf(inputs, constants, formulae, origin, true)),
+      ? weigh('virtual-left-out', 'virtual correction left out', 'This leaves the virtual correction out: the ask takes the virtual temperature of parcel and surroundings.', (inputs, constants, _right, formulae) => valueOf(inputs, constants, formulae, origin, false))
+      : weigh('virtual-put-in', 'virtual correction put in', 'This has the virtual correction in it: the ask takes the temperatures themselves.', (inputs, constants, _right, formulae) => valueOf(inputs, constants, formulae, origin, true)),
     ...origin === 'surface' ? [] : [fineSlip('surface-parcel', 'surface parcel in place of the one asked', 'This is the result of the surface parcel: the ask takes another one.', (inputs, constants, _right, formulae) => valueOf(inputs, constants, formulae, 'surface', isVirtual))],
   ]
 }
@@ -107,7 +107,8 @@ export const elResult: ParcelResult = {
   trace: (_context, _origin, _isVirtual, value) => [levelStep('The highest level where the parcel becomes colder', 'p_{EL}', value)],
   slips: (origin, isVirtual) => [
     levelSlip('lfc-for-el', 'level of free convection for it', 'This is the level of free convection: the equilibrium level is where the parcel becomes colder again.', origin, isVirtual, 'lfc'),
-    ...otherAscents(elOf)(origin, isVirtual),
+    // as small as the spread of accepted formulae
+    ...otherAscents(elOf, constantSlip)(origin, isVirtual),
   ],
 }
 
@@ -128,7 +129,6 @@ export const capeResult: ParcelResult = {
     { ...pseudoadiabatic('convective available potential energy'), key: 'to-data-top', label: 'to the equilibrium level or the top of the data, whichever is lower' },
   ],
   outcome: capeOf,
-  classLimits: () => [{ label: 'no energy', value: 0 }],
   trace(context, origin, isVirtual, value) {
     const ascent = context.ascent(origin, isVirtual)
     const steps = ascent && ascent.lfc !== null ? [levelStep('Level of free convection', 'p_{LFC}', ascent.lfc)] : []
@@ -136,9 +136,11 @@ export const capeResult: ParcelResult = {
     return [...steps, energyStep('Sum of the positive areas between them', '\\mathrm{CAPE} = R \\int \\max(0,\\,T_p - T_e)\\,d\\ln p', '\\mathrm{CAPE}', value)]
   },
   slips: (origin, isVirtual) => [
-    signSlip('CAPE is positive: it is energy that the parcel gains.'),
-    slip('base-ten', 'log₁₀ p for ln p', 'This integrates over log₁₀ p: the natural logarithm is needed.', (_i, _c, right) => right / ln10),
+    slip('sign', 'sign turned round', 'CAPE is positive: it is energy that the parcel gains.', (_i, _c, right) => (right === 0 ? null : -right)),
+    slip('base-ten', 'log₁₀ p for ln p', 'This integrates over log₁₀ p: the natural logarithm is needed.', (_i, _c, right) => (right === 0 ? null : right / ln10)),
+    slip('no-energy', 'no energy found', 'Nothing was found here: the parcel does become warmer than its surroundings.', (_i, _c, right) => (right === 0 ? null : 0)),
     fineSlip('cin-added', 'CIN taken off', 'This is the whole area, with the negative one below taken off: CAPE is the positive area alone.', (inputs, constants, right, formulae) => {
+      if (right === 0) return null
       const ascent = parcelContext(inputs, constants, formulae).ascent(origin, isVirtual)
       return ascent && right + ascent.cin
     }),
@@ -166,8 +168,8 @@ export const cinResult: ParcelResult = {
     ]
   },
   slips: (origin, isVirtual) => [
-    signSlip('CIN is asked with its sign: it is energy that has to be spent, at most 0.'),
-    slip('base-ten', 'log₁₀ p for ln p', 'This integrates over log₁₀ p: the natural logarithm is needed.', (_i, _c, right) => right / ln10),
+    slip('sign', 'sign turned round', 'CIN is asked with its sign: it is energy that has to be spent, at most 0.', (_i, _c, right) => (right === 0 ? null : -right)),
+    slip('base-ten', 'log₁₀ p for ln p', 'This integrates over log₁₀ p: the natural logarithm is needed.', (_i, _c, right) => (right === 0 ? null : right / ln10)),
     ...otherAscents(cinOf)(origin, isVirtual),
   ],
 }
@@ -213,6 +215,7 @@ export const liftedIndexResult: ParcelResult = {
       const factor = isVirtual ? (1 + parcel.mixingRatio / context.air.epsilon) / (1 + parcel.mixingRatio) : 1
       return found.environment - parcel.temperature * exp(context.air.kappa * log(indexPressure / parcel.pressure)) * factor
     }),
-    ...otherAscents(liftedIndexOf)(origin, isVirtual),
+    // as small as the spread of accepted formulae
+    ...otherAscents(liftedIndexOf, constantSlip)(origin, isVirtual),
   ],
 }

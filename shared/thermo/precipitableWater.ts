@@ -4,7 +4,7 @@ import { constant, epsilonOf } from './constants'
 import { numberOf } from './inputs'
 import { parcelContext } from './parcelContext'
 import { exampleSounding } from './parcelDefinition'
-import { fineSlip, slip } from './slips'
+import { constantSlip, fineSlip, slip } from './slips'
 import { soundingInputs, surfacePressureInput } from './sounding'
 import { texNumber, texQuantity } from './tex'
 
@@ -72,7 +72,7 @@ export function soundingWaterDefinition(humidity: Humidity, example: { gives: nu
       ]
     },
     slips: [
-      fineSlip('other-humidity', `${other(humidity)} in place of ${humidity}`, `This takes the ${inWords[other(humidity)]}: the ask takes the ${inWords[humidity]}.`, (inputs, constants, _right, formulae) => precipitableWater(inputs, constants, formulae, other(humidity))),
+      constantSlip('other-humidity', `${other(humidity)} in place of ${humidity}`, `This takes the ${inWords[other(humidity)]}: the ask takes the ${inWords[humidity]}.`, (inputs, constants, _right, formulae) => precipitableWater(inputs, constants, formulae, other(humidity))),
       slip('gravity-left-out', 'g left out', 'The acceleration of gravity is left out.', (_i, constants, right) => right * constant(constants, 'g')),
       slip('hectopascal', 'hPa in place of Pa', 'The pressures went in in hectopascal: pascal are needed.', (_i, _c, right) => right / 100),
       slip('grams', 'g kg⁻¹ in place of kg kg⁻¹', 'The humidity went in in g/kg: kg/kg is needed.', (_i, _c, right) => right * 1000),
@@ -111,7 +111,7 @@ export function layerWaterDefinition(humidity: Humidity, example: { gives: numbe
       ]
     },
     slips: [
-      fineSlip('other-humidity', `${other(humidity)} in place of ${humidity}`, `This takes the ${inWords[other(humidity)]}: the ask takes the ${inWords[humidity]}.`, (inputs, constants) => of(inputs, constants, other(humidity))),
+      constantSlip('other-humidity', `${other(humidity)} in place of ${humidity}`, `This takes the ${inWords[other(humidity)]}: the ask takes the ${inWords[humidity]}.`, (inputs, constants) => of(inputs, constants, other(humidity))),
       slip('sign', 'layer upside down', 'The layer is taken upside down: the bottom has the higher pressure.', (_i, _c, right) => -right),
       slip('gravity-left-out', 'g left out', 'The acceleration of gravity is left out.', (_i, constants, right) => right * constant(constants, 'g')),
       slip('hectopascal', 'hPa in place of Pa', 'The pressures went in in hectopascal: pascal are needed.', (_i, _c, right) => right / 100),

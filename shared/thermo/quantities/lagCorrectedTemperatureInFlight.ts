@@ -1,7 +1,7 @@
 import type { Inputs, QuantityDefinition } from '../definition'
 import { numberOf } from '../inputs'
 import { lagCorrected, timeConstantInput, verticalSpeedInput } from '../sensorLag'
-import { slip, zeroCelsius } from '../slips'
+import { fineSlip, slip, zeroCelsius } from '../slips'
 import { texFactor, texNumber, texQuantity } from '../tex'
 
 /**
@@ -41,12 +41,12 @@ export const lagCorrectedTemperatureInFlightDefinition: QuantityDefinition = {
     ]
   },
   slips: [
-    slip('sign-of-correction', 'correction with its sign turned', 'The correction has its sign turned: on ascent through air that cools with height the sensor is too warm.', (inputs) => {
+    fineSlip('sign-of-correction', 'correction with its sign turned', 'The correction has its sign turned: on ascent through air that cools with height the sensor is too warm.', (inputs) => {
       const { indicated, rate, timeConstant } = given(inputs)
       return indicated - timeConstant * rate
     }),
-    slip('speed-left-out', 'vertical speed left out', 'The vertical speed is left out.', inputs => given(inputs).indicated - given(inputs).timeConstant * numberOf(inputs, 'indicatedLapseRate')),
-    slip('time-constant-left-out', 'time constant left out', 'The time constant is left out.', inputs => given(inputs).indicated + given(inputs).rate),
+    fineSlip('speed-left-out', 'vertical speed left out', 'The vertical speed is left out.', inputs => given(inputs).indicated - given(inputs).timeConstant * numberOf(inputs, 'indicatedLapseRate')),
+    fineSlip('time-constant-left-out', 'time constant left out', 'The time constant is left out.', inputs => given(inputs).indicated + given(inputs).rate),
     slip('per-kilometer', 'K km⁻¹ in place of K m⁻¹', 'The lapse rate went in in K per kilometer: per meter is needed.', inputs => given(inputs).indicated + 1000 * given(inputs).timeConstant * given(inputs).rate),
   ],
   example: { inputs: { indicatedTemperature: 285.55, indicatedLapseRate: 0.0098, verticalSpeed: 2, timeConstant: 12 }, gives: 285.3148, within: 1e-9 },

@@ -145,7 +145,7 @@ describe('traps C: parcels, CAPE, CIN, indices', () => {
     const cape = value('surface-parcel-cape', small)
     expect(cape).toBeGreaterThan(1)
     expect(cape).toBeLessThan(60)
-    expect(checkBand(stepOf('surface-parcel-cape', small, { granted: { absoluteSi: 25 } })).reasons.join()).toContain('no energy')
+    expect(checkBand(stepOf('surface-parcel-cape', small, { granted: { absoluteSi: 25 } })).reasons.join()).toContain('no energy found')
   })
   it('C13: the lifted index is surroundings less parcel: negative is unstable; the sign turned is a slip', () => {
     const index = value('surface-parcel-lifted-index', exampleSounding)

@@ -108,7 +108,7 @@ describe('the proof of a band', () => {
       }
       expect(passed, `${definition.key}: ${reasons[0]}`).toBeGreaterThanOrEqual(30)
     }
-  })
+  }, 240_000)
   it('U19: refuses a band wider than half the way to the nearest slip, and says which', () => {
     const check = checkBand(stepOf('potential-temperature', { temperature: 293.15, pressure: 85_000 }, { granted: { absoluteSi: 0.7 } }))
     expect(check.ok).toBe(false)
