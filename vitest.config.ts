@@ -8,7 +8,7 @@ export default defineConfig({
   test: {
     projects: [
       // pure: no mocks, no files
-      { resolve: { alias }, test: { name: 'unit', include: ['tests/unit/**/*.test.ts'], environment: 'node' } },
+      { resolve: { alias }, test: { name: 'unit', include: ['tests/unit/**/*.test.ts'], environment: 'node', testTimeout: 60_000 } },
       // use cases on a temporary database file, real migrations, workers
       { resolve: { alias }, test: { name: 'integration', include: ['tests/integration/**/*.test.ts', 'tests/bad-files/**/*.test.ts', 'tests/races/**/*.test.ts'], environment: 'node', env: { AUTH_SECRET: 'a secret of these tests' }, testTimeout: 30_000, hookTimeout: 60_000 } },
       // against the built server: started once by the files that need it
