@@ -75,9 +75,11 @@ function raised(r: number, whole: number): number {
   // in 32 bits, on which engines are quick: |whole| < 138,000
   const k = whole | 0
   const j = k & (steps - 1), n = k >> 7
-  const root = rootHi[j] ?? 1
-  const value = root + ((rootLo[j] ?? 0) + root * series)
-  return n >= -1022 && n <= 1023 ? value * (powers[n + 1074] ?? 0) : scaled(value, n)
+  const root = rootHi[j] ?? 1, rest = rootLo[j] ?? 0
+  if (n < -900 || n > 1000) return scaled(root + (rest + root * series), n)
+  // a power of two changes no bit but the exponent's, so it can go in before the series is known
+  const power = powers[n + 1074] ?? 0, scaledRoot = root * power
+  return scaledRoot + (rest * power + scaledRoot * series)
 }
 
 /** exp(hi + lo) for |hi| < 746. */

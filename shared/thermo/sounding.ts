@@ -27,22 +27,28 @@ export interface Sounding {
   virtualTemperature: Float64Array
 }
 
+/** Room for a sounding of so many rows, in one piece of memory. */
+export function roomForSounding(count: number): Sounding {
+  const memory = new ArrayBuffer(6 * 8 * count)
+  const column = (at: number) => new Float64Array(memory, 8 * count * at, count)
+  return { count, pressure: column(0), logPressure: column(1), temperature: column(2), dewpoint: column(3), mixingRatio: column(4), virtualTemperature: column(5) }
+}
+
 /**
- * A sounding from its columns. Rows have to fall in pressure without a gap.
+ * A sounding from its columns. Rows have to fall in pressure without a gap. `into` is filled and given back where it has room for just these rows,
+ * so that a loop over many soundings takes no memory.
  *
  * @throws {SeriesError} for a gap wider than a factor of 2 in pressure, or where the ground leaves fewer than two rows
  * @throws {OutOfRangeError} for a dewpoint at which the vapor pressure is that of the air
  * @example makeSounding([100000, 85000], [300, 291], [293, 285], air).mixingRatio[0] // 0.0148
  */
-export function makeSounding(pressures: readonly number[], temperatures: readonly number[], dewpoints: readonly number[], air: MoistAir, ground = Infinity): Sounding {
+export function makeSounding(pressures: readonly number[], temperatures: readonly number[], dewpoints: readonly number[], air: MoistAir, ground = Infinity, into?: Sounding): Sounding {
   let first = 0
   while (first < pressures.length && (pressures[first] ?? 0) > ground) first++
   const count = pressures.length - first
   if (count < 2) throw new SeriesError('pressure', 'fewer than two rows are above the ground')
-  // one piece of memory for all: taking six costs as much as a tenth of an ascent
-  const memory = new ArrayBuffer(6 * 8 * count)
-  const column = (at: number) => new Float64Array(memory, 8 * count * at, count)
-  const pressure = column(0), logPressure = column(1), temperature = column(2), dewpoint = column(3), mixingRatio = column(4), virtualTemperature = column(5)
+  const sounding = into?.count === count ? into : roomForSounding(count)
+  const { pressure, logPressure, temperature, dewpoint, mixingRatio, virtualTemperature } = sounding
   let before = 0
   for (let at = 0; at < count; at++) {
     const p = pressures[first + at] ?? 0, T = temperatures[first + at] ?? 0, Td = dewpoints[first + at] ?? 0
@@ -58,7 +64,7 @@ export function makeSounding(pressures: readonly number[], temperatures: readonl
     mixingRatio[at] = w
     virtualTemperature[at] = virtualTemperatureFrom(T, w, air.epsilon)
   }
-  return { count, pressure, logPressure, temperature, dewpoint, mixingRatio, virtualTemperature }
+  return sounding
 }
 
 /** The sounding of a definition's inputs. */

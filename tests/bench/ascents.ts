@@ -12,7 +12,7 @@ import { lclFunction } from '#shared/thermo/liftingCondensation'
 import { moistAir, type MoistAir } from '#shared/thermo/moistAir'
 import { mixedLayerParcel, mostUnstableParcel, surfaceParcel } from '#shared/thermo/parcel'
 import { lift, type Ascent } from '#shared/thermo/parcelAscent'
-import { makeSounding } from '#shared/thermo/sounding'
+import { makeSounding, roomForSounding, type Sounding } from '#shared/thermo/sounding'
 import { saturationPressureFunction } from '#shared/thermo/saturationFunction'
 
 const { constants } = defaultConvention, formulae = formulaeOf(defaultConvention)
@@ -38,9 +38,11 @@ const lookedUpEachTime = (air: MoistAir): MoistAir => ({ ...air, es: temperature
 export class Ascents {
   private readonly air: MoistAir
   private readonly lclOf = lclFunction(constants, formulae)
+  private readonly room: Sounding
   constructor(private readonly columns: Columns, isPlanted = false) {
     const air = moistAir(constants, formulae)
     this.air = isPlanted ? lookedUpEachTime(air) : air
+    this.room = roomForSounding(columns.pressure.length)
   }
 
   /** The sounding made ready, and its surface, mixed-layer and most unstable parcels lifted with virtual correction. */
@@ -48,7 +50,7 @@ export class Ascents {
     const { pressure, temperature, dewpoint } = this.columns
     const first = temperature[0] ?? 0
     temperature[0] = first + moved
-    const sounding = makeSounding(pressure, temperature, dewpoint, this.air)
+    const sounding = makeSounding(pressure, temperature, dewpoint, this.air, Infinity, this.room)
     const mixed = mixedLayerParcel(sounding, 10_000, this.air)
     if (!mixed) throw new Error('The sounding is too short for its mixed layer.')
     const found = [surfaceParcel(sounding), mixed, mostUnstableParcel(sounding, this.air)].map(one => lift(sounding, one, this.lclOf(one.temperature, one.dewpoint, one.pressure), true, this.air))
