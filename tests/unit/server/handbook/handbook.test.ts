@@ -8,8 +8,8 @@ import { describeQuantity } from '../../../../server/domain/handbook/describeQua
 import { handbookList } from '../../../../server/domain/handbook/handbookList'
 
 const startOf = (key: string) => Object.fromEntries(describeQuantity(key).inputs.map(input => [input.name, input.start]))
-const compute = (key: string, inputs: Record<string, string>, more: { variant?: string, along?: string, unit?: string, isStaff?: boolean } = {}) =>
-  computeQuantity(key, { convention: 'closed-1004', variant: more.variant ?? '', unit: more.unit ?? describeQuantity(key).unit.ucum, inputs, along: more.along ?? '' }, more.isStaff ?? true)
+const compute = (key: string, inputs: Record<string, string>, more: { variant?: string, along?: string, unit?: string, isStaff?: boolean, isHeld?: boolean } = {}) =>
+  computeQuantity(key, { convention: 'closed-1004', variant: more.variant ?? '', unit: more.unit ?? describeQuantity(key).unit.ucum, inputs, along: more.along ?? '' }, { isStaff: more.isStaff ?? true, isHeld: more.isHeld ?? false })
 
 describe('the handbook', () => {
   it('lists every quantity once', () => {
@@ -55,6 +55,12 @@ describe('the calculator', () => {
     const first = curve?.points[0], last = curve?.points.at(-1)
     expect(first?.x).toBeCloseTo(270 - 273.15, 6)
     expect((first?.y ?? 0) / (last?.y ?? 1)).toBeCloseTo(330 / 270, 6)
+  })
+  it('keeps to the worked example while a lab asks a student for the quantity', () => {
+    expect(compute('density', startOf('density'), { isHeld: true, isStaff: false }).outcome?.words).toMatch(/^1\.184/)
+    const own = compute('density', { ...startOf('density'), temperature: '24.9 °C' }, { isHeld: true, isStaff: false })
+    expect(own).toMatchObject({ outcome: null, lines: [], curve: null })
+    expect(own.refused).toContain('a lab of yours asks for this')
   })
   it('keeps bands and slips for staff', () => {
     expect(compute('density', startOf('density'), { isStaff: false })).toMatchObject({ band: null, slips: [] })

@@ -2,6 +2,7 @@ import { z } from 'zod'
 import { refuse } from '#shared/errors'
 import { computeBody, computeReply } from '#shared/schemas/handbook'
 import { computeQuantity } from '../../../../domain/handbook/computeQuantity'
+import { isAskedNow } from '../../../../domain/handbook/isAskedNow'
 import { seesBands } from '../../../../domain/handbook/seesBands'
 import { defineApiHandler } from '../../../../utils/defineApiHandler'
 import { useStores } from '../../../../utils/useStores'
@@ -12,5 +13,9 @@ export default defineApiHandler({
   params: z.object({ quantityKey: z.string().max(80) }),
   body: computeBody,
   reply: computeReply,
-  handle: async ({ params, body, actor }) => computeQuantity(params.quantityKey, body, await seesBands(useStores().read, actor ?? refuse('not_signed_in'))),
+  handle: async ({ params, body, actor, now }) => {
+    const { read } = useStores()
+    const who = actor ?? refuse('not_signed_in')
+    return computeQuantity(params.quantityKey, body, { isStaff: await seesBands(read, who), isHeld: await isAskedNow(read, who, params.quantityKey, now) })
+  },
 })
