@@ -9,12 +9,14 @@ import { disputeGround } from './disputeGround'
 
 /** A photograph or a scan of working fits; a data file belongs elsewhere. */
 export const largestDisputeFile = 10 * 1_048_576
+/** Of both sides together: enough for evidence, too few to fill a disk. */
+export const mostDisputeFiles = 8
 
 export interface AttachFile { disputeId: string, actorId: string, name: string, body: AsyncIterable<Uint8Array>, expectedBytes?: number, request: Omit<Once, 'bodySha256'> }
 
 /**
  * Adds a file to a dispute. It is kept as it came, by its digest, and is only ever handed out for download.
- * @throws {DomainError} `too_large`, `dispute_closed`, `file_empty`, `no_room`
+ * @throws {DomainError} `too_large`, `dispute_closed`, `file_empty`, `no_room`, `invalid` where the dispute holds as many files as it takes
  */
 export async function attachFile({ write }: Stores, files: FileStore, input: AttachFile, now: number): Promise<{ digest: string, size: number }> {
   const received = await files.receive(input.body, { mostBytes: largestDisputeFile, ...(input.expectedBytes === undefined ? {} : { expectedBytes: input.expectedBytes }) })
@@ -29,6 +31,8 @@ export async function attachFile({ write }: Stores, files: FileStore, input: Att
     return await write(trx => once(trx, { ...input.request, bodySha256: received.sha256 }, async () => {
       const ground = await disputeGround(trx, input.disputeId)
       if (ground.state === 'ruled' || ground.state === 'closed' || ground.state === 'withdrawn') refuse('dispute_closed')
+      const held = await trx.selectFrom('dispute_note').select(eb => eb.fn.countAll().as('files')).where('dispute_id', '=', ground.id).where('file_digest', 'is not', null).executeTakeFirstOrThrow()
+      if (Number(held.files) >= mostDisputeFiles) refuse('invalid', {}, [{ path: 'file', message: `A dispute takes at most ${mostDisputeFiles} files.` }])
       const about = ground.studentIds.includes(input.actorId) ? input.actorId : ground.studentIds[0] ?? refuse('not_found')
       await trx.insertInto('work_file').values({ digest: received.sha256, about_membership_id: about, size: received.size, original_name: name }).onConflict(conflict => conflict.column('digest').doNothing()).execute()
       const privateDigest = await keepPrivateText(trx, about, `Added a file: ${name}`)

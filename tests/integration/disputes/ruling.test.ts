@@ -1,8 +1,12 @@
 import { randomUUID } from 'node:crypto'
+import { mkdtempSync, rmSync } from 'node:fs'
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import { DomainError } from '#shared/errors'
 import type { RulingBody } from '#shared/schemas/disputes'
 import type { OpenDatabase } from '../../../server/db/open'
+import { attachFile, disputeFile, mostDisputeFiles } from '../../../server/domain/disputes/attachFile'
 import { describeDispute } from '../../../server/domain/disputes/describeDispute'
 import { listDisputes } from '../../../server/domain/disputes/listDisputes'
 import { openDispute } from '../../../server/domain/disputes/openDispute'
@@ -11,6 +15,7 @@ import { takeDispute, withdrawDispute } from '../../../server/domain/disputes/ta
 import { auditLedger } from '../../../server/domain/ledger/auditLedger'
 import { releaseMarks } from '../../../server/domain/marking/releaseMarks'
 import type { Judging } from '../../../server/domain/submissions/submitLab'
+import { openFileStore } from '../../../server/files/store'
 import { addTas } from '../../fixtures/courseWithTas'
 import { openTemporary } from '../../fixtures/openTemporary'
 import { referenceIn } from '../../fixtures/reference'
@@ -28,7 +33,7 @@ let submissions: string[]
 beforeEach(async () => {
   stores = await openTemporary()
   const reference = await referenceIn(stores.write)
-  course = await workingCourse(stores, { students: 5, times: { zone: 'America/Chicago', opens: '2026-10-12T08:00', due: '2026-10-16T17:00' }, lateRule: { kind: 'none' } })
+  course = await workingCourse(stores, { students: 6, times: { zone: 'America/Chicago', opens: '2026-10-12T08:00', due: '2026-10-16T17:00' }, lateRule: { kind: 'none' } })
   await addTas(stores, ['ann', 'bo'])
   judging = { reference, loadShare: async shareId => course.loaded(shareId) }
   submissions = []
@@ -61,6 +66,19 @@ describe('objecting', () => {
     expect(await codeOf(object(1))).toBe('dispute_exists')
     expect(await codeOf(openDispute(stores, { membershipId: 'm-0', submissionId: submissions[1]!, body: { stepKey: 'rate', reason: 'not mine' }, request: request('p-0', 1) }, later))).toBe('not_found')
     expect(await mails('dispute_opened')).toEqual(['m-ann', 'm-bo'])
+  })
+
+  it('takes a few files as evidence, and no more', async () => {
+    await release()
+    const { disputeId } = await object(1)
+    const folder = mkdtempSync(join(tmpdir(), 'tetherhouse-files-'))
+    const files = openFileStore(folder)
+    const attach = (no: number) => attachFile(stores, files, { disputeId, actorId: 'm-1', name: `page ${no}.png`, body: (async function* () { yield Buffer.from(`page ${no}`) })(), request: request('p-1', no) }, later)
+    for (let no = 0; no < mostDisputeFiles; no++) expect((await attach(no)).size).toBe(6)
+    expect(await codeOf(attach(99))).toBe('invalid')
+    expect(await disputeFile(stores, { disputeId, digest: (await stores.read.selectFrom('work_file').select('digest').limit(1).executeTakeFirstOrThrow()).digest.toString('hex') })).toMatchObject({ size: 6 })
+    expect(await codeOf(disputeFile(stores, { disputeId: 'another', digest: 'ab'.repeat(32) }))).toBe('not_found')
+    rmSync(folder, { recursive: true })
   })
 
   it('can be taken back by its student alone, and only while nobody ruled', async () => {
@@ -123,8 +141,8 @@ describe('ruling', () => {
     const { disputeId } = await object(1)
     const { options } = await describeDispute(stores.read, judging, ruler('ann'), disputeId)
     await rule(disputeId, ruler('ann'), { kind: 'accept', reason: 'Both were taught.', accept: { kind: options[0]!.kind, key: options[0]!.key } })
-    await stores.write(trx => trx.insertInto('allowance').values({ id: 'a-1', posting_id: 'posting-1', membership_id: 'm-3', due_at: later + 86_400_000, reason: 'ill', by_actor_id: 'm-lead', seq: 1 }).execute())
-    const again = await handIn(stores, judging, course, { no: 3, key: 'key-10000003', at: later + 1000, answers: { ...rightAnswers(course, 'share-3'), rate: `${(-rateOf(course, 'share-3')).toFixed(2)} K/km` } })
+    await stores.write(trx => trx.insertInto('allowance').values({ id: 'a-1', posting_id: 'posting-1', membership_id: 'm-5', due_at: later + 86_400_000, reason: 'ill', by_actor_id: 'm-lead', seq: 1 }).execute())
+    const again = await handIn(stores, judging, course, { no: 5, key: 'key-10000005', at: later + 1000, answers: { ...rightAnswers(course, 'share-5'), rate: `${(-rateOf(course, 'share-5')).toFixed(2)} K/km` } })
     const mark = await stores.read.selectFrom('mark_current').select('points_milli').where('submission_id', '=', again.submissionId).where('step_key', '=', 'rate').executeTakeFirstOrThrow()
     expect(mark.points_milli).toBe(3000)
   })
