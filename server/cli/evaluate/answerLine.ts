@@ -16,11 +16,9 @@ import { readUnit } from '#shared/units/readUnit'
 import { CorrelationError } from '#shared/thermo/uncertainty/propagate'
 import { NoDerivativeError } from '#shared/thermo/uncertainty/budget'
 import { findUnit, fromSi, getUnit, isCommensurable, toSi, type Unit } from '#shared/units/ucum'
+import type { AnswerLine, Json } from './json'
 import { Refusal } from './refusal'
 import { uncertaintyOf } from './uncertaintyOf'
-
-export type Json = null | boolean | number | string | readonly Json[] | { readonly [key: string]: Json | undefined }
-export type AnswerLine = { readonly [key: string]: Json | undefined }
 
 const longestLine = 4_000_000
 const longestSeries = 200_000

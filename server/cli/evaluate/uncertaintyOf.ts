@@ -14,7 +14,7 @@ import { uncertaintyBudget } from '#shared/thermo/uncertainty/budget'
 import { simulateQuantity, usualTrials } from '#shared/thermo/uncertainty/monteCarlo'
 import type { GivenCorrelation, GivenUncertainties, GivenUncertainty } from '#shared/thermo/uncertainty/uncertainInputs'
 import { fromSi, type Unit } from '#shared/units/ucum'
-import type { AnswerLine } from './answerLine'
+import type { AnswerLine } from './json'
 import { Refusal } from './refusal'
 
 type Fields = Readonly<Record<string, unknown>>
