@@ -39,7 +39,7 @@ export class Ascents {
   private readonly air: MoistAir
   private readonly lclOf = lclFunction(constants, formulae)
   private readonly room: Sounding
-  constructor(private readonly columns: Columns, isPlanted = false) {
+  constructor(private readonly columns: Columns, private readonly isPlanted = false) {
     const air = moistAir(constants, formulae)
     this.air = isPlanted ? lookedUpEachTime(air) : air
     this.room = roomForSounding(columns.pressure.length)
@@ -65,10 +65,12 @@ export class Ascents {
     return seconds(start)
   }
 
-  /** The equivalent potential temperature at a million points: CPU seconds, and the sum of all. */
+  /** The equivalent potential temperature at a million points: CPU seconds, and the sum of all. The bug planted is a convention read anew for each point. */
   million(): { seconds: number, sum: number } {
     const start = process.cpuUsage()
     let sum = 0
+    if (this.isPlanted) for (let n = 0; n < 1_000_000; n++) sum += moistAir(constants, formulae).kappa
+    sum = 0
     for (let n = 0; n < 1_000_000; n++) sum += equivalentPotentialTemperature(250 + 50 * (n / 1_000_000), 245 + 48 * (n / 1_000_000), 70_000 + 30_000 * ((n % 1000) / 1000), this.air)
     return { seconds: seconds(start), sum }
   }
