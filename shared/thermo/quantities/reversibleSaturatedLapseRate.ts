@@ -1,6 +1,6 @@
 import { mixingRatioFrom } from '../humidity'
 import { mixingRatioInput, pressureInput, temperatureInput } from '../moistInputs'
-import { fineMoistSlip, moistQuantity, moistSlip } from '../moistQuantity'
+import { moistQuantity, moistSlip, smallMoistSlip } from '../moistQuantity'
 import { mixingRatioStep, inGrams } from '../moistTex'
 import { fullSaturatedRate, saturatedRate } from '../saturatedRate'
 import { glossary } from '../sources'
@@ -30,7 +30,8 @@ export const reversibleSaturatedLapseRateDefinition = moistQuantity({
   slips: [
     moistSlip('sign', 'sign turned round', 'A lapse rate is positive where temperature falls with height.', ({ right }) => -right),
     moistSlip('per-meter', 'K m⁻¹ given as K km⁻¹', 'Your value is the rate per meter: multiply it by 1000 for the rate per kilometer.', ({ right }) => right / 1000),
-    fineMoistSlip('pseudoadiabatic', 'condensed water left out', 'This is the pseudoadiabatic rate, of which the condensed water is no part: asked is the reversible one.', ({ given, air }) => saturatedRate(given('temperature'), given('pressure'), air)),
+    // with little liquid as small as the spread of accepted formulae
+    smallMoistSlip('pseudoadiabatic', 'condensed water left out', 'This is the pseudoadiabatic rate, of which the condensed water is no part: asked is the reversible one.', ({ given, air }) => saturatedRate(given('temperature'), given('pressure'), air)),
     moistSlip('dry-rate', 'Γd for Γm', 'This is the dry adiabatic lapse rate g/cp: saturated air cools less as it rises.', ({ air }) => air.g / air.cp),
   ],
   example: { inputs: { pressure: 70_000, temperature: 273.15, liquidWater: 0.006 }, gives: 0.005705015, within: 1e-8 },
