@@ -201,10 +201,10 @@ export const liftedIndexResult: ParcelResult = {
   trace(context, origin, isVirtual, value) {
     const found = at500(context, origin, isVirtual)
     if ('is' in found) return []
-    const symbol = isVirtual ? 'T_v' : 'T'
+    const parcelSymbol = isVirtual ? 'T_{v,p}' : 'T_p'
     return [
-      { text: 'Parcel at 500 hPa', formula: `${symbol}_p`, filled: `${symbol}_p = ${texQuantity(found.parcel, 'K', 6)}`, value: found.parcel, unit: 'K' },
-      { text: 'Surroundings less parcel', formula: `LI = ${symbol}_e - ${symbol}_p`, filled: `LI = ${texQuantity(found.environment, 'K', 6)} - ${texQuantity(found.parcel, 'K', 6)} = ${texFactor(value)}\\,\\mathrm{K}`, value, unit: 'K' },
+      { text: 'Parcel at 500 hPa', formula: parcelSymbol, filled: `${parcelSymbol} = ${texQuantity(found.parcel, 'K', 6)}`, value: found.parcel, unit: 'K' },
+      { text: 'Surroundings less parcel', formula: `LI = ${isVirtual ? 'T_{v,e}' : 'T_e'} - ${parcelSymbol}`, filled: `LI = ${texQuantity(found.environment, 'K', 6)} - ${texQuantity(found.parcel, 'K', 6)} = ${texFactor(value)}\\,\\mathrm{K}`, value, unit: 'K' },
     ]
   },
   slips: (origin, isVirtual) => [
