@@ -150,7 +150,7 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
     const page = await as(student())
     await go(page, `/c/${courseId}/marks`)
     await page.getByRole('link', { name: title }).click()
-    await page.getByRole('heading', { name: /worked/ }).waitFor()
+    await page.getByRole('heading', { name: /^Step 1, worked/ }).waitFor()
     await page.locator('main').getByText(/sign/i).first().waitFor()
     expect(await page.getByText(new RegExp(`${rate.toFixed(1).replace('.', '\\.')}`)).count()).toBeGreaterThan(0)
     await page.getByRole('link', { name: /^Object to this mark/ }).click()

@@ -130,7 +130,7 @@ describeWithShared('a real file in the browser', () => {
 
       await own.goto(`${server.url}/c/${course.id}/marks`)
       await own.getByRole('link', { name: title }).click()
-      await own.getByRole('heading', { name: /worked/ }).waitFor()
+      await own.getByRole('heading', { name: /^Step 1, worked/ }).waitFor()
       await own.getByText('within', { exact: true }).first().waitFor()
     })
   })
