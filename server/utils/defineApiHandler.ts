@@ -58,7 +58,8 @@ export interface ApiRoute<P extends z.ZodType | undefined, Q extends z.ZodType |
   handle: (asked: Asked<Output<P, Record<string, never>>, Output<Q, Record<string, never>>, Output<B, undefined>>) => Promise<z.input<R>> | z.input<R>
 }
 
-export type DescribedRoute = ApiRoute<z.ZodType | undefined, z.ZodType | undefined, z.ZodType | undefined, z.ZodType>
+/** A route as the interface's description reads it: everything but what it does. */
+export type DescribedRoute = Omit<ApiRoute<z.ZodType | undefined, z.ZodType | undefined, z.ZodType | undefined, z.ZodType>, 'handle'>
 export type ApiHandler<T> = EventHandler<EventHandlerRequest, Promise<T>> & { described: DescribedRoute }
 
 const mutating = new Set(['POST', 'PUT', 'PATCH', 'DELETE'])
@@ -102,7 +103,7 @@ export function defineApiHandler<R extends z.ZodType, P extends z.ZodType | unde
       return answerProblem(event, problemOf(refused ?? new DomainError('failed', { request: event.context.requestId ?? null }))) as never
     }
   })
-  return Object.assign(handler, { described: route as unknown as DescribedRoute }) as ApiHandler<z.output<R>>
+  return Object.assign(handler, { described: route satisfies DescribedRoute })
 }
 
 const emptyDigest = createHash('sha256').update('').digest()

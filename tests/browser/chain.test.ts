@@ -1,13 +1,11 @@
 import { spawnSync } from 'node:child_process'
-import { rmSync } from 'node:fs'
 import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
-import type { Browser, Page } from 'playwright-core'
+import type { Page } from 'playwright-core'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { startBuiltServer, type BuiltServer } from '../fixtures/builtServer'
-import { DemoPeople, type DemoPerson } from '../fixtures/demoPeople'
-import { copyOf, demoWorld } from '../fixtures/demoWorld'
-import { chromiumPath, openBrowser, signInAs } from '../fixtures/openBrowser'
+import { DemoHouse, local } from '../fixtures/demoHouse'
+import type { DemoPerson } from '../fixtures/demoPeople'
+import { chromiumPath } from '../fixtures/openBrowser'
 import { slopeOf, textOf } from '../fixtures/shareCsv'
 
 const root = fileURLToPath(new URL('../..', import.meta.url))
@@ -16,48 +14,27 @@ const title = 'The lapse rate of one layer'
 
 /** From a logger's file to a settled dispute and into the next term, as five people in a browser. The steps stand on each other. */
 describe.skipIf(!chromiumPath)('the whole chain', () => {
-  let server: BuiltServer
-  let browser: Browser
-  let people: DemoPeople
-  let dataDir: string
+  let house: DemoHouse
   let courseId: string
   let section: { id: string, name: string }
   let rate: number
-  const pages = new Map<string, Page>()
 
   beforeAll(async () => {
-    dataDir = copyOf(demoWorld())
-    server = await startBuiltServer({ dataDir, env: { DEMO: '1' } })
-    browser = await openBrowser()
-    people = await DemoPeople.of(server.url)
-    const course = await people.courseOf(people.withRole('student'), 'student')
+    house = await DemoHouse.open()
+    const course = await house.people.courseOf(house.people.withRole('student'), 'student')
     courseId = course.id
     section = course.sections[0]!
   })
-  afterAll(async () => {
-    await browser?.close()
-    await server?.close()
-    rmSync(dataDir, { recursive: true, force: true })
-  })
+  afterAll(() => house?.close())
 
-  /** A page of a browser of their own, signed in. */
-  async function as(person: DemoPerson): Promise<Page> {
-    const open = pages.get(person.email)
-    if (open) return open
-    const page = await (await browser.newContext({ viewport: { width: 1280, height: 900 }, acceptDownloads: true })).newPage()
-    page.setDefaultTimeout(30_000)
-    await signInAs(page, server.url, person.email, person.password)
-    pages.set(person.email, page)
-    return page
-  }
   const go = async (page: Page, path: string) => {
-    await page.goto(`${server.url}${path}`)
+    await page.goto(`${house.server.url}${path}`)
     await page.waitForLoadState('networkidle')
   }
-  const student = () => people.withRole('student')
+  const student = () => house.people.withRole('student')
 
   it('a technician brings a flight in and sees it drawn', async () => {
-    const page = await as(people.withRole('technician'))
+    const page = await house.as(house.people.withRole('technician'))
     await go(page, `/c/${courseId}/data/upload`)
     await page.locator('input[type=file]').setInputFiles(flight)
     await page.getByRole('heading', { name: 'First rows, as they would be kept' }).waitFor()
@@ -70,7 +47,7 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
   })
 
   it('an instructor writes a lab on it, looks at every share, and posts it', async () => {
-    const page = await as(people.withRole('instructor'))
+    const page = await house.as(house.people.withRole('instructor'))
     await go(page, `/c/${courseId}/labs`)
     await page.getByRole('button', { name: 'Begin a lab' }).click()
     await page.getByLabel('Title of the new lab').fill(title)
@@ -106,7 +83,7 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
   })
 
   it('a student takes the data, types a value as people do, is told a wrong dimension, submits, and has a receipt', async () => {
-    const page = await as(student())
+    const page = await house.as(student())
     await go(page, `/c/${courseId}/work`)
     await page.getByRole('link', { name: title }).click()
     await page.getByRole('heading', { level: 1, name: title }).waitFor()
@@ -131,10 +108,10 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
   })
 
   it('nothing is told before release; the instructor sees the class and releases', async () => {
-    const own = await as(student())
+    const own = await house.as(student())
     await go(own, `/c/${courseId}/marks`)
     expect(await own.getByRole('row', { name: new RegExp(title) }).getByText('marks released').count()).toBe(0)
-    const page = await as(people.withRole('instructor'))
+    const page = await house.as(house.people.withRole('instructor'))
     await go(page, `/c/${courseId}/labs`)
     await page.getByRole('link', { name: title }).click()
     await page.waitForURL(/\/labs\/[^/]+$/)
@@ -147,7 +124,7 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
   })
 
   it('the student reads marks, band, worked value and slip, and objects', async () => {
-    const page = await as(student())
+    const page = await house.as(student())
     await go(page, `/c/${courseId}/marks`)
     await page.getByRole('link', { name: title }).click()
     await page.getByRole('heading', { name: /^Step 1, worked/ }).waitFor()
@@ -160,7 +137,7 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
   })
 
   it('a TA of the section rules on the evidence, once', async () => {
-    const page = await as(await taOfSection())
+    const page = await house.as(await taOfSection())
     await go(page, `/c/${courseId}/disputes`)
     await page.getByRole('link', { name: new RegExp(title) }).click()
     await page.getByRole('heading', { name: 'The reference’s reading' }).waitFor()
@@ -170,7 +147,7 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
     await page.getByLabel(/^Reason, read by every student/).fill('Both signs were taught that week; the magnitude is right.')
     await page.getByRole('button', { name: /^Record ruling for one student/ }).click()
     await page.getByText('reading or method accepted').first().waitFor()
-    const own = await as(student())
+    const own = await house.as(student())
     await go(own, `/c/${courseId}/marks`)
     await own.getByRole('link', { name: title }).click()
     await own.getByText(/accepted by a ruling/).first().waitFor()
@@ -178,7 +155,7 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
   })
 
   it('the admin opens the next term from the running one', async () => {
-    const page = await as(people.withRole('admin'))
+    const page = await house.as(house.people.withRole('admin'))
     await go(page, '/department/terms')
     await page.getByRole('link', { name: 'Plan the next term' }).click()
     await page.getByRole('heading', { level: 1, name: 'Plan the next term' }).waitFor() // the page before has fields of the same names
@@ -194,23 +171,19 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
   })
 
   it('what was told along the way stands: audit and recheck find nothing', async () => {
-    await server.stop()
+    await house.server.stop()
     for (const command of ['audit', 'recheck']) {
-      const done = spawnSync(process.execPath, ['--import', 'tsx', `server/cli/${command}.ts`], { cwd: root, env: { ...process.env, DATA_DIR: dataDir }, encoding: 'utf8' })
+      const done = spawnSync(process.execPath, ['--import', 'tsx', `server/cli/${command}.ts`], { cwd: root, env: { ...process.env, DATA_DIR: house.dataDir }, encoding: 'utf8' })
       expect([command, done.status, done.stdout.trim().split('\n').slice(-3).join('\n')]).toEqual([command, 0, expect.stringMatching(/\w+=\d+/)])
     }
   })
 
   async function taOfSection(): Promise<DemoPerson> {
-    for (const person of people.people.filter(each => each.roles.includes('ta'))) {
-      const course = await people.courseOf(person, 'ta').catch(() => null)
+    for (const person of house.people.people.filter(each => each.roles.includes('ta'))) {
+      const course = await house.people.courseOf(person, 'ta').catch(() => null)
       if (course?.id === courseId && course.sections.some(each => each.id === section.id)) return person
     }
     throw new Error('The section has no TA in the demo.')
   }
 })
 
-/** A wall time some days from now, as a datetime field takes it. */
-function local(days: number): string {
-  return new Date(Date.now() + days * 86_400_000).toISOString().slice(0, 16)
-}

@@ -1,10 +1,6 @@
-import { rmSync } from 'node:fs'
-import type { Browser, Page } from 'playwright-core'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { startBuiltServer, type BuiltServer } from '../fixtures/builtServer'
-import { DemoPeople, type DemoPerson } from '../fixtures/demoPeople'
-import { copyOf, demoWorld } from '../fixtures/demoWorld'
-import { chromiumPath, openBrowser, signInAs } from '../fixtures/openBrowser'
+import { DemoHouse, local } from '../fixtures/demoHouse'
+import { chromiumPath } from '../fixtures/openBrowser'
 import { slopeOf, textOf } from '../fixtures/shareCsv'
 import { describeWithShared, sharedFile } from '../fixtures/sharedFolder'
 
@@ -13,43 +9,22 @@ const title = 'A lapse rate over the plains'
 /** A sounding as somebody else's program wrote it: quoted heads without units, wind in knots, heights above the sea, no clock. */
 describeWithShared('a real file in the browser', () => {
   describe.skipIf(!chromiumPath)('the sounding of North Platte', () => {
-    let server: BuiltServer
-    let browser: Browser
-    let people: DemoPeople
-    let dataDir: string
+    let house: DemoHouse
     let course: { id: string, code: string }
     let section: { name: string }
     let rate: number
-    const pages = new Map<string, Page>()
 
     beforeAll(async () => {
-      dataDir = copyOf(demoWorld())
-      server = await startBuiltServer({ dataDir, env: { DEMO: '1' } })
-      browser = await openBrowser()
-      people = await DemoPeople.of(server.url)
-      const found = await people.courseOf(people.withRole('student'), 'student')
+      house = await DemoHouse.open()
+      const found = await house.people.courseOf(house.people.withRole('student'), 'student')
       course = found
       section = found.sections[0]!
     })
-    afterAll(async () => {
-      await browser?.close()
-      await server?.close()
-      rmSync(dataDir, { recursive: true, force: true })
-    })
-    async function as(person: DemoPerson): Promise<Page> {
-      const open = pages.get(person.email)
-      if (open) return open
-      const page = await (await browser.newContext({ viewport: { width: 1280, height: 900 }, acceptDownloads: true })).newPage()
-      page.setDefaultTimeout(30_000)
-      await signInAs(page, server.url, person.email, person.password)
-      pages.set(person.email, page)
-      return page
-    }
-    const local = (days: number) => new Date(Date.now() + days * 86_400_000).toISOString().slice(0, 16)
+    afterAll(() => house?.close())
 
     it('a technician finds the way from the first page, says what is what, and sees the file\'s own values kept', async () => {
-      const page = await as(people.withRole('technician'))
-      await page.goto(`${server.url}/`)
+      const page = await house.as(house.people.withRole('technician'))
+      await page.goto(`${house.server.url}/`)
       await page.getByRole('navigation', { name: 'Places' }).getByRole('link', { name: 'Data' }).waitFor()
       await page.getByRole('link', { name: `Bring a file into ${course.code}` }).first().click()
       await page.locator('input[type=file]').setInputFiles(sharedFile('data/profiles/northplatte.csv'))
@@ -74,8 +49,8 @@ describeWithShared('a real file in the browser', () => {
     })
 
     it('an instructor asks for the lapse rate of a layer of it', async () => {
-      const page = await as(people.withRole('instructor'))
-      await page.goto(`${server.url}/c/${course.id}/labs`)
+      const page = await house.as(house.people.withRole('instructor'))
+      await page.goto(`${house.server.url}/c/${course.id}/labs`)
       await page.getByRole('button', { name: 'Begin a lab' }).click()
       await page.getByLabel('Title of the new lab').fill(title)
       await page.getByRole('button', { name: 'Begin the draft' }).click()
@@ -104,8 +79,8 @@ describeWithShared('a real file in the browser', () => {
     })
 
     it('a student computes it from the rows served, and earns the marks once they are released', async () => {
-      const own = await as(people.withRole('student'))
-      await own.goto(`${server.url}/c/${course.id}/work`)
+      const own = await house.as(house.people.withRole('student'))
+      await own.goto(`${house.server.url}/c/${course.id}/work`)
       await own.getByRole('link', { name: title }).click()
       await own.getByRole('heading', { level: 1, name: title }).waitFor()
       const [download] = await Promise.all([own.waitForEvent('download'), own.getByRole('link', { name: 'Download your data' }).click()])
@@ -117,8 +92,8 @@ describeWithShared('a real file in the browser', () => {
       await Promise.race([own.getByRole('dialog').getByRole('button', { name: 'Submit lab' }).click({ timeout: 5_000 }).catch(() => {}), own.getByText('Received.').waitFor()])
       await own.getByText('Received.').waitFor()
 
-      const page = await as(people.withRole('instructor'))
-      await page.goto(`${server.url}/c/${course.id}/labs`)
+      const page = await house.as(house.people.withRole('instructor'))
+      await page.goto(`${house.server.url}/c/${course.id}/labs`)
       await page.getByRole('link', { name: title }).click()
       await page.waitForURL(/\/labs\/[^/]+$/)
       await page.getByRole('link', { name: 'The class' }).click()
@@ -128,7 +103,7 @@ describeWithShared('a real file in the browser', () => {
       await page.getByRole('dialog').getByRole('button', { name: 'Release marks' }).click()
       await page.getByText(/^Released /).waitFor()
 
-      await own.goto(`${server.url}/c/${course.id}/marks`)
+      await own.goto(`${house.server.url}/c/${course.id}/marks`)
       await own.getByRole('link', { name: title }).click()
       await own.getByRole('heading', { name: /^Step 1, worked/ }).waitFor()
       await own.getByText('within', { exact: true }).first().waitFor()

@@ -20,9 +20,11 @@ import { sessionCookie } from '../../utils/sessionCookie'
 import { useLimits } from '../../utils/useLimits'
 import { openStores, useStores } from '../../utils/useStores'
 
-// next-auth 4 is CommonJS: the bundled import may be the namespace object.
 type Credentials = typeof CredentialsImport
-const CredentialsProvider = ((CredentialsImport as unknown as { default?: Credentials }).default ?? CredentialsImport) as Credentials
+const isProvider = (value: unknown): value is Credentials => typeof value === 'function'
+// next-auth 4 is CommonJS: the bundled import may be the namespace object.
+const inner: unknown = 'default' in CredentialsImport ? CredentialsImport.default : null
+const CredentialsProvider = isProvider(inner) ? inner : CredentialsImport
 
 /** The request that a sign-in belongs to: next-auth hands its callbacks no event. */
 const asking = new AsyncLocalStorage<H3Event>()

@@ -1,6 +1,6 @@
 import type { Accepted } from '#shared/marking/types'
 import type { Read } from '../../db/writer'
-import type { EvaluationTable } from '../../db/schema/tables'
+import type { EvaluationTable } from '../../db/schema/work'
 import { getConvention } from '../labs/conventions'
 import type { Reference } from '../marking/reference'
 import { questionOfRow, type Judged } from '../marking/storedEvaluation'

@@ -1,7 +1,7 @@
 import { refuse } from '#shared/errors'
 import type { Accepted } from '#shared/marking/types'
 import type { RulingBody } from '#shared/schemas/disputes'
-import type { MarkTable } from '../../db/schema/tables'
+import type { MarkTable } from '../../db/schema/work'
 import { once, type Once } from '../../db/queries/requestKeys'
 import type { Read, Stores, Trx } from '../../db/writer'
 import { newId } from '../ids'

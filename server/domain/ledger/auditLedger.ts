@@ -1,7 +1,8 @@
 import { createHash } from 'node:crypto'
 import { z } from 'zod'
 import type { Read } from '../../db/writer'
-import type { LedgerEntryTable, MarkTable } from '../../db/schema/tables'
+import type { LedgerEntryTable } from '../../db/schema/ledger'
+import type { MarkTable } from '../../db/schema/work'
 import { entryDigest } from './appendEntry'
 import { answersDigest, evaluationDigest, evaluationsDigest, marksDigest, rulingDigest, submissionDigest, type ColumnDigests } from './coveredDigests'
 

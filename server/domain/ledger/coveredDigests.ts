@@ -1,5 +1,6 @@
 import { createHash } from 'node:crypto'
-import type { AnswerTable, EvaluationTable, MarkTable, RulingTable, SubmissionTable } from '../../db/schema/tables'
+import type { RulingTable } from '../../db/schema/moderation'
+import type { AnswerTable, EvaluationTable, MarkTable, SubmissionTable } from '../../db/schema/work'
 import { digestOf } from './appendEntry'
 
 /**

@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import type { Accepted } from '#shared/marking/types'
-import type { AcceptedTable } from '../../db/schema/tables'
+import type { AcceptedTable } from '../../db/schema/labs'
 
 /** What a ruling added to a step, as `accepted.body_json` holds it. */
 export const acceptedBody = z.discriminatedUnion('kind', [

@@ -1,6 +1,6 @@
 import { refuse } from '#shared/errors'
 import type { Accepted } from '#shared/marking/types'
-import type { AcceptedTable } from '../../db/schema/tables'
+import type { AcceptedTable } from '../../db/schema/labs'
 import { questionFor } from '../shares/questionFor'
 import type { EarlierReadings, LoadedShare } from '../shares/loadedShare'
 import { acceptedOf } from './acceptedOf'

@@ -1,4 +1,4 @@
-import type { EvaluationTable } from '../../db/schema/tables'
+import type { EvaluationTable } from '../../db/schema/work'
 import type { Read } from '../../db/writer'
 
 export interface StoredStep {

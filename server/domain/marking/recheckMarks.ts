@@ -1,5 +1,5 @@
 import type { Convention } from '#shared/marking/types'
-import type { EvaluationTable } from '../../db/schema/tables'
+import type { EvaluationTable } from '../../db/schema/work'
 import type { Read } from '../../db/writer'
 import { getConvention } from '../labs/conventions'
 import { evaluationDigest } from '../ledger/coveredDigests'

@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import type { Accepted, Band, Convention, Judgement, ReadAnswer, StepQuestion } from '#shared/marking/types'
-import type { EvaluationTable } from '../../db/schema/tables'
+import type { EvaluationTable } from '../../db/schema/work'
 import { evaluationDigest } from '../ledger/coveredDigests'
 
 /**

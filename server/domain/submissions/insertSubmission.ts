@@ -1,6 +1,6 @@
 import type { SubmissionReply } from '#shared/schemas/work'
 import type { Once } from '../../db/queries/requestKeys'
-import type { AnswerTable, MarkTable, SubmissionTable } from '../../db/schema/tables'
+import type { AnswerTable, MarkTable, SubmissionTable } from '../../db/schema/work'
 import type { Trx } from '../../db/writer'
 import { newId } from '../ids'
 import { appendEntry, courseChain } from '../ledger/appendEntry'

@@ -93,7 +93,7 @@ describe('the gate', () => {
     ['people of a course without signing in', (table) => { table['course:people'] = { scope: 'public', roles: [] } }],
     ['disputes for any TA', (table) => { table['dispute:take'] = { ...table['dispute:take']!, scope: 'course' } }],
   ])('is caught with a hole in it: %s', async (_name, plant) => {
-    const table: Table = structuredClone(policies) as unknown as Table
+    const table: Table = { ...policies }
     plant(table)
     expect((await disagreements(table)).list.length).toBeGreaterThan(0)
   })

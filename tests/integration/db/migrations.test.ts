@@ -24,7 +24,7 @@ describe('migrations', () => {
 
   it('gives the tables and columns that the row types name', async () => {
     stores = await temporaryStores()
-    const types = readFileSync(join(dbFolder, 'schema/tables.ts'), 'utf8')
+    const types = readdirSync(join(dbFolder, 'schema')).map(name => readFileSync(join(dbFolder, 'schema', name), 'utf8')).join('\n')
     const database = /export interface Database \{([^}]*)\}/.exec(types)?.[1] ?? ''
     const typed = Object.fromEntries([...database.matchAll(/^ {2}(\w+): (\w+)$/gm)].map(([, table, row]) => {
       const body = new RegExp(`export interface ${row} \\{([^}]*)\\}`).exec(types)?.[1] ?? ''
