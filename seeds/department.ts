@@ -142,7 +142,7 @@ export class Department {
     await endMembership(this.stores, { ...this.admin, membershipId: await this.membershipId(courseId, staff.formerTa) }, now)
     await this.addTa(courseId, staff.ta, [a], now)
     await this.addTa(courseId, staff.otherTa, [b], now)
-    await setTaSections(this.stores, { ...this.admin, membershipId: await this.membershipId(courseId, staff.taAndStudent), sectionIds: [a, b] }, now)
+    await setTaSections(this.stores, { ...this.admin, membershipId: await this.membershipId(courseId, staff.taAndStudent), seenVersion: 1, sectionIds: [a, b] }, now)
     const small = await this.course(termId, 'small')
     await this.addTa(small.id, staff.formerTa, small.sections.map(section => section.id), now)
   }

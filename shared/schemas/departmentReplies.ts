@@ -37,7 +37,7 @@ export const termList = z.object({
 export type TermList = z.output<typeof termList>
 
 export const termDescription = z.object({
-  id: z.string(), name: z.string(), zone: z.string(), startsOn: z.string(), endsOn: z.string(), state: termState, calendar: termCalendar,
+  id: z.string(), name: z.string(), zone: z.string(), startsOn: z.string(), endsOn: z.string(), state: termState, version: count, calendar: termCalendar,
   from: z.object({ id: z.string(), name: z.string() }).nullable(),
   courses: z.array(z.object({
     id: z.string(), code: z.string(), title: z.string(), state: z.enum(['draft', 'open', 'settled', 'closed']), alsoListedAs: z.array(z.string()), sections: z.array(z.string()), students: count, staff: count, labs: count,
@@ -51,7 +51,7 @@ export const courseDescription = z.object({
   ancestor: z.object({ id: z.string(), term: z.string() }).nullable(),
   sections: z.array(z.object({ id: z.string(), name: z.string(), students: count })),
   members: z.array(z.object({
-    id: z.string(), personId: z.string().nullable(), name: z.string(), email: z.string(), role: courseRole, state: membershipState, accountState, sectionIds: z.array(z.string()),
+    id: z.string(), personId: z.string().nullable(), name: z.string(), email: z.string(), role: courseRole, state: membershipState, accountState, sectionIds: z.array(z.string()), version: count,
   })),
 })
 export type CourseDescription = z.output<typeof courseDescription>

@@ -9,6 +9,7 @@ export interface TermTable {
   ends_on: string
   state: 'planned' | 'running' | 'closed'
   calendar_json: string
+  version: Generated<number>
 }
 
 export interface CourseTable {

@@ -12,7 +12,7 @@ export async function describeCourse(read: Read, courseId: string) {
     read.selectFrom('course_listing').select('code').where('course_id', '=', courseId).orderBy('code').execute(),
     read.selectFrom('section').select(['id', 'name']).where('course_id', '=', courseId).orderBy('name').execute(),
     read.selectFrom('membership').leftJoin('person', 'person.id', 'membership.person_id')
-      .select(['membership.id', 'membership.role', 'membership.state', 'membership.pseudonym', 'membership.section_id as sectionId', 'person.id as personId', 'person.display_name as name', 'person.email_norm as email', 'person.state as accountState'])
+      .select(['membership.id', 'membership.role', 'membership.state', 'membership.pseudonym', 'membership.version', 'membership.section_id as sectionId', 'person.id as personId', 'person.display_name as name', 'person.email_norm as email', 'person.state as accountState'])
       .where('membership.course_id', '=', courseId).orderBy('person.display_name').orderBy('membership.id').execute(),
     read.selectFrom('ta_section').select(['membership_id', 'section_id']).where('course_id', '=', courseId).execute(),
     course.ancestor_id === null ? undefined : read.selectFrom('course').innerJoin('term', 'term.id', 'course.term_id').select(['course.id', 'term.name as term']).where('course.id', '=', course.ancestor_id).executeTakeFirst(),
@@ -24,7 +24,7 @@ export async function describeCourse(read: Read, courseId: string) {
     sections: sections.map(section => ({ ...section, students: members.filter(member => member.sectionId === section.id && member.state === 'active').length })),
     members: members.map(member => ({
       id: member.id, personId: member.personId, name: member.name ?? member.pseudonym, email: member.email ?? '', role: member.role, state: member.state, accountState: member.accountState ?? 'erased' as const,
-      sectionIds: member.role === 'ta' ? taSections.filter(row => row.membership_id === member.id).map(row => row.section_id) : member.sectionId === null ? [] : [member.sectionId],
+      version: member.version, sectionIds: member.role === 'ta' ? taSections.filter(row => row.membership_id === member.id).map(row => row.section_id) : member.sectionId === null ? [] : [member.sectionId],
     })),
   }
 }

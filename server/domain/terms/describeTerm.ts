@@ -36,7 +36,7 @@ export async function describeTerm(read: Read, termId: string) {
   const { calendar, origin } = readCalendar(term.calendar_json)
   const fromTerm = origin ? await read.selectFrom('term').select('name').where('id', '=', origin.termId).executeTakeFirst() : undefined
   return {
-    id: term.id, name: term.name, zone: term.zone, startsOn: term.starts_on, endsOn: term.ends_on, state: term.state, calendar,
+    id: term.id, name: term.name, zone: term.zone, startsOn: term.starts_on, endsOn: term.ends_on, state: term.state, version: term.version, calendar,
     from: fromTerm ? { id: origin!.termId, name: fromTerm.name } : null, courses: await listCourses(read, termId),
   }
 }

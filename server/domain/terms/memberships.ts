@@ -80,10 +80,11 @@ export async function leaveCourse(trx: Trx, { membershipId, actorId }: { members
 }
 
 /** Says which sections a TA has. */
-export function setTaSections({ write }: Stores, input: Asked & { membershipId: string, sectionIds: readonly string[] }, now: number): Promise<{ sectionIds: string[] }> {
+export function setTaSections({ write }: Stores, input: Asked & { membershipId: string, seenVersion: number, sectionIds: readonly string[] }, now: number): Promise<{ sectionIds: string[], version: number }> {
   return write(trx => doOnce(trx, input, async () => {
     const member = await activeMembership(trx, input.membershipId)
     if (member.role !== 'ta') refuse('invalid', {}, [{ path: 'sectionIds', message: 'Only a TA has named sections.' }])
+    if (member.version !== input.seenVersion) refuse('changed_meanwhile', { version: member.version })
     for (const sectionId of input.sectionIds) await assertSection(trx, member.course_id, sectionId)
     const before = await trx.selectFrom('ta_section').select('section_id').where('membership_id', '=', member.id).execute()
     await replaceTaSections(trx, { membershipId: member.id, courseId: member.course_id, sectionIds: input.sectionIds })
@@ -92,7 +93,7 @@ export function setTaSections({ write }: Stores, input: Asked & { membershipId: 
       chain: courseChain(member.course_id), at: now, actor: input.actorId, action: 'membership.sections',
       facts: { membershipId: member.id, before: before.map(row => row.section_id), after: [...input.sectionIds] },
     })
-    return { sectionIds: [...input.sectionIds] }
+    return { sectionIds: [...input.sectionIds], version: member.version + 1 }
   }))
 }
 

@@ -50,7 +50,13 @@ describe('a membership', () => {
     const other = await createCourse(db, { ...house.asked, course: { ...course, termId: house.termId, sections: ['A'] } }, inTerm)
     const personId = await house.addPerson('New Comer')
     await expect(enrol(db, { ...house.asked, courseId: house.courseId, enrolment: { role: 'student', personId, sectionId: other.sections[0]!.id } }, inTerm)).rejects.toMatchObject({ code: 'invalid' })
-    await expect(setTaSections(db, { ...house.asked, membershipId: house.members.ta, sectionIds: [other.sections[0]!.id] }, inTerm)).rejects.toMatchObject({ code: 'invalid' })
+    await expect(setTaSections(db, { ...house.asked, membershipId: house.members.ta, seenVersion: 1, sectionIds: [other.sections[0]!.id] }, inTerm)).rejects.toMatchObject({ code: 'invalid' })
+  })
+  it('gives a TA sections by what the admin saw: the second of two is told', async () => {
+    const give = (sectionIds: string[], seenVersion: number) => setTaSections(db, { ...house.asked, membershipId: house.members.ta, seenVersion, sectionIds }, inTerm)
+    expect(await give([house.sectionB], 1)).toEqual({ sectionIds: [house.sectionB], version: 2 })
+    await expect(give([house.sectionA], 1)).rejects.toMatchObject({ code: 'changed_meanwhile' })
+    expect(await db.read.selectFrom('ta_section').select('section_id').where('membership_id', '=', house.members.ta).execute()).toEqual([{ section_id: house.sectionB }])
   })
   it('resumes when somebody comes back, with the pseudonym and the work of before', async () => {
     const before = (await membersOf(house.courseId)).find(row => row.id === house.members.first)!

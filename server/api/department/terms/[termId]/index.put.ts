@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { refuse } from '#shared/errors'
 import { termDates } from '#shared/schemas/department'
 import { editTerm } from '../../../../domain/terms/editTerm'
 import { askedBy } from '../../../../utils/askedBy'
@@ -10,6 +11,7 @@ export default defineApiHandler({
   summary: 'Change a term’s name, dates and teaching weeks',
   params: z.object({ termId: z.string() }),
   body: termDates,
-  reply: z.object({ id: z.string() }),
-  handle: asked => editTerm(useStores(), { ...askedBy(asked), termId: asked.params.termId, term: asked.body }, asked.now),
+  reply: z.object({ id: z.string(), version: z.number().int() }),
+  guards: true,
+  handle: asked => editTerm(useStores(), { ...askedBy(asked), termId: asked.params.termId, seenVersion: asked.seenVersion ?? refuse('version_missing'), term: asked.body }, asked.now),
 })
