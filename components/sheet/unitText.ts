@@ -1,21 +1,26 @@
-/** A piece of a line: raised where it is an exponent. No text face here carries U+207B, so exponents are set, never typed. */
-export interface TextPart { text: string, raised: boolean }
+/** A piece of a line: raised where it is an exponent, lowered where it is an index. No text face here carries U+207B, so both are set, never typed. */
+export interface TextPart { text: string, set: 'line' | 'raised' | 'lowered' }
 
 const raisedDigits: Record<string, string> = { '⁻': '−', '⁺': '+', '⁰': '0', '¹': '1', '²': '2', '³': '3', '⁴': '4', '⁵': '5', '⁶': '6', '⁷': '7', '⁸': '8', '⁹': '9' }
-const raised = /[⁻⁺⁰¹²³⁴-⁹]+|\^[-−+]?\d+/g
+/** Exponents however they were written; and the index of a symbol of one or two letters (T_d, Ri_B, u_*), but no underscore of a name (flight_a). */
+const setApart = /[⁻⁺⁰¹²³⁴-⁹]+|\^[-−+]?\d+|(?<=(?<![\p{L}\p{N}_])\p{L}{1,2})_(?:[\p{L}\p{N}]{1,4}|\*)(?![\p{L}\p{N}_])/gu
 
-/** Cuts a line into plain and raised pieces: "K km⁻¹" and "K km^-1" give "K km" and, raised, "−1". */
-export function supParts(line: string): TextPart[] {
+/** Cuts a line into its pieces: "K km⁻¹" and "K km^-1" give "K km" and, raised, "−1"; "T_d" gives "T" and, lowered, "d". */
+export function textParts(line: string): TextPart[] {
   const parts: TextPart[] = []
   let from = 0
-  for (const found of line.matchAll(raised)) {
-    if (found.index > from) parts.push({ text: line.slice(from, found.index), raised: false })
-    const text = found[0].startsWith('^') ? found[0].slice(1).replace('-', '−') : [...found[0]].map(sign => raisedDigits[sign] ?? sign).join('')
-    parts.push({ text, raised: true })
+  for (const found of line.matchAll(setApart)) {
+    if (found.index > from) parts.push({ text: line.slice(from, found.index), set: 'line' })
+    parts.push(pieceOf(found[0]))
     from = found.index + found[0].length
   }
-  if (from < line.length) parts.push({ text: line.slice(from), raised: false })
+  if (from < line.length) parts.push({ text: line.slice(from), set: 'line' })
   return parts
+}
+
+function pieceOf(found: string): TextPart {
+  if (found.startsWith('_')) return { text: found.slice(1), set: 'lowered' }
+  return { text: found.startsWith('^') ? found.slice(1).replace('-', '−') : [...found].map(sign => raisedDigits[sign] ?? sign).join(''), set: 'raised' }
 }
 
 const ucumNames: Record<string, string> = { 'Cel': '°C', '[degF]': '°F', 'deg': '°', '[kn_i]': 'kn', '[ft_i]': 'ft', '[in_i]': 'in', '[in_i\'Hg]': 'inHg', '1': '', 'm[H2O]': 'mH2O', 'um': 'µm', 'us': 'µs' }

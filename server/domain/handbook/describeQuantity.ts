@@ -41,5 +41,7 @@ function startOf(definition: QuantityDefinition, input: InputDefinition): string
 /** The formulas of a variant, in the order in which its working uses them. */
 function formulasOf(definition: QuantityDefinition, variant: string): string[] {
   const steps = definition.trace(definition.example.inputs, defaultConvention.constants, variant, formulaeOf(defaultConvention))
-  return workedLines(steps).map(line => line.formulaHtml).filter((html, at, all) => html !== '' && all.indexOf(html) === at)
+  // a step that names what it finds and no more says nothing by itself, unless all do
+  const relations = steps.filter(step => step.formula.includes('='))
+  return workedLines(relations.length > 0 ? relations : steps).map(line => line.formulaHtml).filter((html, at, all) => html !== '' && all.indexOf(html) === at)
 }

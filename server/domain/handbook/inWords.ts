@@ -31,10 +31,16 @@ export function needsWords(input: InputDefinition): string | null {
 /** The constants of a convention in the order of the table, those named alone where names are given. */
 export function constantWords(constants: Constants, names?: readonly string[]): { name: string, symbolHtml: string, label: string, value: string }[] {
   return constantDefinitions.filter(({ name }) => constants[name] !== undefined && (names === undefined || names.includes(name)))
-    .map(({ name, symbol, label, unit }) => ({ name, symbolHtml: renderInline(`$${symbol}$`), label, value: `${String(constants[name]).replace('-', '−')}${unit === '1' ? '' : ` ${formatUnit(unit)}`}` }))
+    .map(({ name, symbol, label, unit }) => ({ name, symbolHtml: renderInline(`$${symbol}$`), label, value: `${grouped(constants[name] ?? 0)}${unit === '1' ? '' : ` ${formatUnit(unit)}`}` }))
 }
 
 export function workedLines(steps: readonly TraceStep[]): { text: string, formulaHtml: string, filledHtml: string }[] {
   const html = (tex: string): string => tex === '' ? '' : renderInline(`$\\displaystyle ${tex}$`)
   return steps.map(step => ({ text: step.text, formulaHtml: html(step.formula), filledHtml: html(step.filled) }))
+}
+
+/** Groups of three from five digits on, with U+202F: 2 501 000. */
+function grouped(value: number): string {
+  const [whole = '', decimals] = String(value).replace('-', '−').split('.')
+  return `${whole.length >= 5 ? whole.replace(/\B(?=(\d{3})+$)/g, '\u202F') : whole}${decimals === undefined ? '' : `.${decimals}`}`
 }

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { marksText, numberText, supParts, unitText } from '../../../components/sheet/unitText'
+import { marksText, numberText, textParts, unitText } from '../../../components/sheet/unitText'
 
 describe('numbers and units as they are set', () => {
   it.each([
@@ -8,8 +8,16 @@ describe('numbers and units as they are set', () => {
   ])('writes %s as %s', (ucum, written) => expect(unitText(ucum)).toBe(written))
 
   it('raises exponents however they were written', () => {
-    expect(supParts('−9.6 K km⁻¹')).toEqual([{ text: '−9.6 K km', raised: false }, { text: '−1', raised: true }])
-    expect(supParts('m^2 s^-2')).toEqual([{ text: 'm', raised: false }, { text: '2', raised: true }, { text: ' s', raised: false }, { text: '−2', raised: true }])
+    expect(textParts('−9.6 K km⁻¹')).toEqual([{ text: '−9.6 K km', set: 'line' }, { text: '−1', set: 'raised' }])
+    expect(textParts('m^2 s^-2')).toEqual([{ text: 'm', set: 'line' }, { text: '2', set: 'raised' }, { text: ' s', set: 'line' }, { text: '−2', set: 'raised' }])
+  })
+
+  it('lowers the index of a symbol, and leaves the underscores of names', () => {
+    const lowered = (line: string) => textParts(line).filter(part => part.set === 'lowered').map(part => part.text)
+    expect(textParts('T_d')).toEqual([{ text: 'T', set: 'line' }, { text: 'd', set: 'lowered' }])
+    expect(lowered('CAPE = R ∫ (T_p − T_e) d ln p, Ri_B, γ_min, u_*, dT_i/dt, θ_s(z)')).toEqual(['p', 'e', 'B', 'min', '*', 'i', 's'])
+    expect(lowered('flight_a.csv a_longer x_1_2 air_temperature _x')).toEqual([])
+    expect(textParts('a flight_a b').map(part => part.text).join('')).toBe('a flight_a b')
   })
 
   it('uses the true minus, never before a zero, and groups from five digits on', () => {
