@@ -20,5 +20,5 @@ module.exports = {
     rule('product-knows-no-test', '^(shared|server|pages|components|composables|stores|layouts)/', { path: '^(tests|seeds)/', pathNot: '^seeds/' }),
     { name: 'no-cycles', severity: 'error', from: { path: '^(shared|server|pages|components|composables|stores|seeds)/' }, to: { circular: true } },
   ],
-  options: { tsPreCompilationDeps: true, tsConfig: { fileName: 'tsconfig.json' }, doNotFollow: { path: 'node_modules' }, exclude: { path: '^(\\.nuxt|\\.output|node_modules)/' } },
+  options: { tsPreCompilationDeps: true, tsConfig: { fileName: 'tsconfig.json' }, doNotFollow: { path: 'node_modules' }, exclude: { path: '^(\\.nuxt|\\.output|node_modules|server/reference)/' } },
 }
