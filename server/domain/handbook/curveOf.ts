@@ -6,7 +6,10 @@ import { evaluateQuantity } from '#shared/thermo/evaluate'
 import { formatUnit } from '#shared/units/formatQuantity'
 import { inUnit } from './inWords'
 
-const steps = 60
+const mostSteps = 60
+const fewestSteps = 12
+/** Values that a curve may be computed from in all: a long series takes a coarser curve, so that its page costs no more than others. */
+const mostWork = 3000
 
 /** The value while one input runs about where it stands, the others held; a break where there is no value. Null where nothing can run. */
 export function curveOf(definition: QuantityDefinition, convention: Convention, pinned: string | undefined, inputs: Inputs, along: string, unit: string): ComputeReply['curve'] {
@@ -14,6 +17,7 @@ export function curveOf(definition: QuantityDefinition, convention: Convention, 
   const here = inputs[along]
   if (!input || typeof here !== 'number' || definition.kind === 'class') return null
   const [low, high] = spanAbout(here, input)
+  const steps = stepsFor(inputs)
   const variant = taughtVariant(definition, convention, pinned)
   const pointAt = (at: number) => ({ x: inUnit(at, input.shownUnit, input.kind !== 'temperature'), y: valueAt({ ...inputs, [along]: at }) })
   const points = Array.from({ length: steps + 1 }, (_, step) => pointAt(low + (high - low) * step / steps))
@@ -32,6 +36,11 @@ export function curveOf(definition: QuantityDefinition, convention: Convention, 
       return null
     }
   }
+}
+
+function stepsFor(inputs: Inputs): number {
+  const values = Object.values(inputs).reduce<number>((sum, value) => sum + (typeof value === 'number' || value === undefined ? 1 : value.length), 0)
+  return Math.max(fewestSteps, Math.min(mostSteps, Math.floor(mostWork / values)))
 }
 
 function axisLabel(label: string, unit: string): string {

@@ -18,6 +18,9 @@ export function readTypedInputs(definition: QuantityDefinition, typed: Readonly<
   return { inputs, read, isWhole: Object.values(read).every(one => one.ok) }
 }
 
+/** A sounding as it is worked by hand has tens of levels; a robust slope costs the square of their number. A record belongs in a lab, not in the calculator. */
+export const mostValues = 300
+
 interface Outcome { value: InputValue | null, message: string }
 
 function readNumber(input: InputDefinition, text: string): Outcome {
@@ -28,6 +31,7 @@ function readNumber(input: InputDefinition, text: string): Outcome {
 function readSeries(input: InputDefinition, text: string): Outcome {
   const tokens = text.split(/[\s;]+/).filter(token => token !== '')
   if (tokens.length === 0) return { value: null, message: `Type or paste the series in ${formatUnit(input.shownUnit) || 'plain numbers'}, a space or a new line between two values.` }
+  if (tokens.length > mostValues) return { value: null, message: `These are ${tokens.length} values; the calculator takes at most ${mostValues}.` }
   const values: number[] = []
   for (const [at, token] of tokens.entries()) {
     const answer = readQuantity(input.shownUnit === '1' ? token : `${token} ${formatUnit(input.shownUnit)}`, { unit: input.shownUnit, kind: input.kind, quantityName: input.label })

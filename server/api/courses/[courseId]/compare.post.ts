@@ -1,7 +1,9 @@
 import { z } from 'zod'
+import { refuse } from '#shared/errors'
 import { compareBody, compareReply } from '#shared/schemas/handbook'
 import { comparePasted } from '../../../domain/handbook/comparePasted'
 import { defineApiHandler } from '../../../utils/defineApiHandler'
+import { useComputingLimits } from '../../../utils/useLimits'
 import { useStores } from '../../../utils/useStores'
 
 export default defineApiHandler({
@@ -10,5 +12,8 @@ export default defineApiHandler({
   params: z.object({ courseId: z.string() }),
   body: compareBody,
   reply: compareReply,
-  handle: ({ params, body }) => comparePasted(useStores().read, params.courseId, body),
+  handle: async ({ params, body, actor }) => {
+    await useComputingLimits().compare((actor ?? refuse('not_signed_in')).personId)
+    return comparePasted(useStores().read, params.courseId, body)
+  },
 })

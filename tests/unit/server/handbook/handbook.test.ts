@@ -5,11 +5,22 @@ import { compareBeside } from '../../../../server/domain/handbook/comparePasted'
 import { computeQuantity } from '../../../../server/domain/handbook/computeQuantity'
 import { describeConvention } from '../../../../server/domain/handbook/describeConvention'
 import { describeQuantity } from '../../../../server/domain/handbook/describeQuantity'
+import { mostValues } from '../../../../server/domain/handbook/readTypedInputs'
 import { handbookList } from '../../../../server/domain/handbook/handbookList'
 
 const startOf = (key: string) => Object.fromEntries(describeQuantity(key).inputs.map(input => [input.name, input.start]))
 const compute = (key: string, inputs: Record<string, string>, more: { variant?: string, along?: string, unit?: string, isStaff?: boolean, isHeld?: boolean } = {}) =>
   computeQuantity(key, { convention: 'closed-1004', variant: more.variant ?? '', unit: more.unit ?? describeQuantity(key).unit.ucum, inputs, along: more.along ?? '' }, { isStaff: more.isStaff ?? true, isHeld: more.isHeld ?? false })
+
+/** The worked example with each series drawn out to so many values between its first and its last. */
+function longest(key: string, values: number): Record<string, string> {
+  const start = startOf(key)
+  return Object.fromEntries(describeQuantity(key).inputs.map(({ name, shape }) => {
+    const given = (start[name] ?? '').trim().split(/[\s;]+/).map(Number)
+    const [first = 0, last = 0] = [given[0], given.at(-1)]
+    return [name, shape === 'series' ? Array.from({ length: values }, (_, at) => (first + (last - first) * at / (values - 1)).toFixed(4)).join(' ') : start[name] ?? '']
+  }))
+}
 
 describe('the handbook', () => {
   it('lists every quantity once', () => {
@@ -56,6 +67,26 @@ describe('the calculator', () => {
     expect(first?.x).toBeCloseTo(270 - 273.15, 6)
     expect((first?.y ?? 0) / (last?.y ?? 1)).toBeCloseTo(330 / 270, 6)
   })
+  it('takes no longer a series than it can answer for, and says so', () => {
+    const reply = compute('lapse-rate-theil-sen', longest('lapse-rate-theil-sen', mostValues + 1))
+    expect(reply.outcome).toBeNull()
+    expect(Object.values(reply.read).some(one => one.message.includes(`takes at most ${mostValues}`))).toBe(true)
+    expect(compute('lapse-rate-theil-sen', longest('lapse-rate-theil-sen', mostValues)).outcome).not.toBeNull()
+  })
+  it('answers no question at more than fifty times the cost of the usual one (S9)', () => {
+    const cost = (key: string, inputs: Record<string, string>) => {
+      const start = process.cpuUsage()
+      compute(key, inputs, { along: describeQuantity(key).inputs.find(input => input.shape === 'number')?.name ?? '' })
+      const { user, system } = process.cpuUsage(start)
+      return user + system
+    }
+    const usual = quantities.map(one => cost(one.key, startOf(one.key))).sort((a, b) => a - b)[Math.floor(quantities.length / 2)] ?? 0
+    // one slow turn is the machine's: three slow ones are the product's
+    const isDear = (key: string) => [1, 2, 3].every(() => cost(key, longest(key, mostValues)) > 50 * usual)
+    const dear = quantities.map(one => one.key).filter(key => describeQuantity(key).inputs.some(input => input.shape === 'series') && isDear(key))
+    expect(usual).toBeGreaterThan(0)
+    expect(dear).toEqual([])
+  }, 120_000)
   it('keeps to the worked example while a lab asks a student for the quantity', () => {
     expect(compute('density', startOf('density'), { isHeld: true, isStaff: false }).outcome?.words).toMatch(/^1\.184/)
     const own = compute('density', { ...startOf('density'), temperature: '24.9 °C' }, { isHeld: true, isStaff: false })

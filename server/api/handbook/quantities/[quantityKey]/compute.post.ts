@@ -5,6 +5,7 @@ import { computeQuantity } from '../../../../domain/handbook/computeQuantity'
 import { isAskedNow } from '../../../../domain/handbook/isAskedNow'
 import { seesBands } from '../../../../domain/handbook/seesBands'
 import { defineApiHandler } from '../../../../utils/defineApiHandler'
+import { useComputingLimits } from '../../../../utils/useLimits'
 import { useStores } from '../../../../utils/useStores'
 
 export default defineApiHandler({
@@ -16,6 +17,7 @@ export default defineApiHandler({
   handle: async ({ params, body, actor, now }) => {
     const { read } = useStores()
     const who = actor ?? refuse('not_signed_in')
+    await useComputingLimits().compute(who.personId)
     return computeQuantity(params.quantityKey, body, { isStaff: await seesBands(read, who), isHeld: await isAskedNow(read, who, params.quantityKey, now) })
   },
 })
