@@ -16,6 +16,8 @@ const wants = part => only === null || only === part
 let passed = 0
 let failed = 0
 let skipped = 0
+/** What failed, told again at the end: the beginning of a long run is far away by then. */
+const fallen = []
 
 const bin = name => join(root, 'node_modules/.bin', name)
 const say = line => process.stdout.write(`${line}\n`)
@@ -41,6 +43,7 @@ if (wants('server') || wants('browser') || only === 'pages') {
 }
 
 say('')
+for (const name of fallen) say(`failed: ${name}`)
 say(`${passed} passed, ${failed} failed${skipped > 0 ? `, ${skipped} skipped` : ''}`)
 process.exit(failed === 0 && passed > 0 ? 0 : 1)
 
@@ -52,6 +55,7 @@ function check(name, command) {
   if (done.status === 0) passed++
   else {
     failed++
+    fallen.push(name)
     say(`${done.stdout}\n${done.stderr}`)
   }
   say(`${name} ${done.status === 0 ? 'is clean' : 'fails'} (${seconds(started)})`)
@@ -76,6 +80,11 @@ function suite(name, extra = {}) {
     // A file that could not even be loaded has no failed test of its own.
     const broken = report.testResults.filter(result => result.status === 'failed' && result.assertionResults.every(test => test.status !== 'failed')).length
     failed += broken
+    for (const result of report.testResults) {
+      const tests = result.assertionResults.filter(test => test.status === 'failed')
+      for (const test of tests) fallen.push(`${result.name.replace(`${root}/`, '')}: ${test.fullName}\n    ${String(test.failureMessages?.[0] ?? '').split('\n').slice(0, 4).join('\n    ')}`)
+      if (tests.length === 0 && result.status === 'failed') fallen.push(`${result.name.replace(`${root}/`, '')}: ${String(result.message).slice(0, 400)}`)
+    }
     if (done.status !== 0 && report.numFailedTests + broken === 0) failed++
   }
   else failed++

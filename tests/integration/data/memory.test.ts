@@ -26,9 +26,10 @@ async function growthMiB(keepsAll: boolean): Promise<number> {
   return rounds.sort((a, b) => a - b)[1]!
 }
 
-it('memory stays flat: ten times the rows take at most 32 MiB more (P3)', async () => {
+// a gate fails only where a second run misses too
+it('memory stays flat: ten times the rows take at most 32 MiB more (P3)', { timeout: 240_000, retry: 1 }, async () => {
   expect(await growthMiB(false)).toBeLessThanOrEqual(32)
-}, 240_000)
+})
 
 it('and an import that kept its rows would be seen', async () => {
   expect(await growthMiB(true)).toBeGreaterThan(32)

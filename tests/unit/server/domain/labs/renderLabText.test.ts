@@ -75,7 +75,7 @@ describe('lab text', () => {
   it('stops a formula that expands without end, in time', () => {
     const before = performance.now()
     const html = renderLabText('$\\def\\a{\\a\\a}\\a$ and $\\def\\b{xxxxxxxxxx}\\def\\c{\\b\\b\\b\\b\\b\\b\\b\\b\\b\\b}\\def\\d{\\c\\c\\c\\c\\c\\c\\c\\c\\c\\c}\\def\\e{\\d\\d\\d\\d\\d\\d\\d\\d\\d\\d}\\e\\e\\e\\e\\e\\e\\e\\e\\e\\e$')
-    expect(performance.now() - before).toBeLessThan(1000)
+    expect(performance.now() - before).toBeLessThan(3000)
     expect(html.match(/katex-error/g)).toHaveLength(2)
   })
 
