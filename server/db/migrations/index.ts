@@ -2,10 +2,14 @@ import type { Migration } from 'kysely'
 import { ground } from './0001_ground'
 import { openCourses } from './0002_open_courses'
 import { termVersions } from './0003_term_versions'
+import { privateReasons } from './0004_private_reasons'
+import { filesOfPeople } from './0005_files_of_people'
 
 /** Every migration, by name, in order. A test holds this list against the folder. */
 export const migrations: Record<string, Migration> = {
   '0001_ground': ground,
   '0002_open_courses': openCourses,
   '0003_term_versions': termVersions,
+  '0004_private_reasons': privateReasons,
+  '0005_files_of_people': filesOfPeople,
 }

@@ -120,5 +120,6 @@ export interface ShareTable {
   inputs_json: string
   served_sha256: Buffer
   digest: Buffer
-  reason: string | null
+  /** Hex: the text is in `private_body`, where it can be erased. */
+  reason_digest: string | null
 }

@@ -19,6 +19,8 @@ export interface DisputeNoteTable {
   audience: 'all' | 'staff'
   private_digest: Buffer
   file_digest: Buffer | null
+  /** Of the two the file is known: two people may have handed in the same bytes. */
+  file_about_membership_id: string | null
   at: number
 }
 
@@ -27,7 +29,8 @@ export interface RulingTable {
   dispute_id: string
   level: 'first' | 'appeal'
   kind: 'uphold' | 'change' | 'accept' | 'fault'
-  reason: string
+  /** Hex: the text is in `private_body`, where it can be erased. */
+  reason_digest: string
   by_actor_id: string
   at: number
   ledger_chain: string

@@ -34,9 +34,9 @@ export async function attachFile({ write }: Stores, files: FileStore, input: Att
       const held = await trx.selectFrom('dispute_note').select(eb => eb.fn.countAll().as('files')).where('dispute_id', '=', ground.id).where('file_digest', 'is not', null).executeTakeFirstOrThrow()
       if (Number(held.files) >= mostDisputeFiles) refuse('invalid', {}, [{ path: 'file', message: `A dispute takes at most ${mostDisputeFiles} files.` }])
       const about = ground.studentIds.includes(input.actorId) ? input.actorId : ground.studentIds[0] ?? refuse('not_found')
-      await trx.insertInto('work_file').values({ digest: received.sha256, about_membership_id: about, size: received.size, original_name: name }).onConflict(conflict => conflict.column('digest').doNothing()).execute()
+      await trx.insertInto('work_file').values({ digest: received.sha256, about_membership_id: about, size: received.size, original_name: name }).onConflict(conflict => conflict.columns(['digest', 'about_membership_id']).doNothing()).execute()
       const privateDigest = await keepPrivateText(trx, about, `Added a file: ${name}`)
-      await trx.insertInto('dispute_note').values({ id: newId(now), dispute_id: ground.id, by_actor_id: input.actorId, audience: 'all', private_digest: privateDigest, file_digest: received.sha256, at: now }).execute()
+      await trx.insertInto('dispute_note').values({ id: newId(now), dispute_id: ground.id, by_actor_id: input.actorId, audience: 'all', private_digest: privateDigest, file_digest: received.sha256, file_about_membership_id: about, at: now }).execute()
       await appendEntry(trx, { chain: courseChain(ground.courseId), at: now, actor: input.actorId, action: 'dispute.file_added', privateDigest, facts: { dispute: ground.id, file: reply.digest, size: reply.size } })
       return reply
     }))
@@ -49,7 +49,7 @@ export async function attachFile({ write }: Stores, files: FileStore, input: Att
 
 /** A file of this dispute by its digest; another dispute's is not there. */
 export async function disputeFile({ read }: Stores, input: { disputeId: string, digest: string }): Promise<{ sha256: Buffer, name: string, size: number }> {
-  const row = await read.selectFrom('dispute_note').innerJoin('work_file', 'work_file.digest', 'dispute_note.file_digest').select(['work_file.digest', 'work_file.original_name', 'work_file.size'])
+  const row = await read.selectFrom('dispute_note').innerJoin('work_file', join => join.onRef('work_file.digest', '=', 'dispute_note.file_digest').onRef('work_file.about_membership_id', '=', 'dispute_note.file_about_membership_id')).select(['work_file.digest', 'work_file.original_name', 'work_file.size'])
     .where('dispute_note.dispute_id', '=', input.disputeId).where('work_file.digest', '=', Buffer.from(input.digest, 'hex')).executeTakeFirst()
   return row ? { sha256: row.digest, name: row.original_name, size: row.size } : refuse('not_found')
 }

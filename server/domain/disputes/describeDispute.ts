@@ -3,6 +3,7 @@ import type { Accepted } from '#shared/marking/types'
 import type { DisputeDetail } from '#shared/schemas/disputes'
 import { findQuantity } from '#shared/thermo/registry'
 import type { Read } from '../../db/writer'
+import { erasedText, readPrivateTexts } from '../ledger/readPrivateTexts'
 import { markedStep } from '../marking/markedStep'
 import { markHistory } from '../marking/markHistory'
 import { currentSteps } from '../marking/readEvaluations'
@@ -29,6 +30,7 @@ export async function describeDispute(read: Read, evidence: DisputeEvidence, ask
     read.selectFrom('submission').selectAll().where('id', '=', ground.submissionId).executeTakeFirstOrThrow(),
     read.selectFrom('ruling').selectAll().where('dispute_id', '=', disputeId).orderBy('at').execute(),
   ])
+  const reasons = await readPrivateTexts(read, rulings.map(ruling => ruling.reason_digest))
   const at = loaded.revision.body.steps.findIndex(step => step.key === ground.stepKey)
   const step = loaded.revision.body.steps[at]
   const own = stored.find(each => each.stepKey === ground.stepKey)
@@ -50,7 +52,7 @@ export async function describeDispute(read: Read, evidence: DisputeEvidence, ask
     plot: plotOf(loaded),
     notes: await notesOf(read, disputeId, isStudent),
     history: (await markHistory(read, ground.submissionId)).filter(entry => entry.stepKey === ground.stepKey),
-    rulings: await Promise.all(rulings.map(async ruling => ({ level: ruling.level, kind: ruling.kind, reason: ruling.reason, by: await actorName(read, ruling.by_actor_id), at: iso(ruling.at) }))),
+    rulings: await Promise.all(rulings.map(async ruling => ({ level: ruling.level, kind: ruling.kind, reason: reasons.get(ruling.reason_digest) ?? erasedText, by: await actorName(read, ruling.by_actor_id), at: iso(ruling.at) }))),
     takenBy: ground.state === 'taken' && ground.takenBy !== null ? await actorName(read, ground.takenBy) : null,
     isMine: ground.takenBy === asker.actorId,
     mayNotRule,
@@ -75,12 +77,12 @@ function plotOf(loaded: LoadedShare): DisputeDetail['plot'] {
 }
 
 async function notesOf(read: Read, disputeId: string, isStudent: boolean): Promise<DisputeDetail['notes']> {
-  let query = read.selectFrom('dispute_note').leftJoin('private_body', 'private_body.digest', 'dispute_note.private_digest').leftJoin('work_file', 'work_file.digest', 'dispute_note.file_digest')
+  let query = read.selectFrom('dispute_note').leftJoin('private_body', 'private_body.digest', 'dispute_note.private_digest').leftJoin('work_file', join => join.onRef('work_file.digest', '=', 'dispute_note.file_digest').onRef('work_file.about_membership_id', '=', 'dispute_note.file_about_membership_id'))
     .select(['dispute_note.by_actor_id', 'dispute_note.at', 'private_body.body', 'work_file.digest', 'work_file.original_name', 'work_file.size']).where('dispute_note.dispute_id', '=', disputeId)
   if (isStudent) query = query.where('dispute_note.audience', '=', 'all')
   const rows = await query.orderBy('dispute_note.at').execute()
   return Promise.all(rows.map(async row => ({
-    by: await actorName(read, row.by_actor_id), at: iso(row.at), text: row.body ?? 'This text was erased.',
+    by: await actorName(read, row.by_actor_id), at: iso(row.at), text: row.body ?? erasedText,
     file: row.digest && row.original_name !== null && row.size !== null ? { digest: row.digest.toString('hex'), name: row.original_name, size: row.size } : null,
   })))
 }
@@ -103,8 +105,9 @@ async function optionsOf(read: Read, reference: Reference, ground: DisputeGround
 
 async function earlierRulings(read: Read, ground: DisputeGround, loaded: LoadedShare): Promise<DisputeDetail['earlierRulings']> {
   const rows = await read.selectFrom('ruling').innerJoin('dispute', 'dispute.id', 'ruling.dispute_id').innerJoin('submission', 'submission.id', 'dispute.submission_id').innerJoin('share', 'share.id', 'submission.share_id')
-    .select(['dispute.id', 'dispute.step_key', 'ruling.kind', 'ruling.reason', 'ruling.by_actor_id', 'ruling.at']).where('share.lab_id', '=', ground.labId).where('dispute.id', '!=', ground.id).orderBy('ruling.at', 'desc').limit(5).execute()
+    .select(['dispute.id', 'dispute.step_key', 'ruling.kind', 'ruling.reason_digest', 'ruling.by_actor_id', 'ruling.at']).where('share.lab_id', '=', ground.labId).where('dispute.id', '!=', ground.id).orderBy('ruling.at', 'desc').limit(5).execute()
+  const reasons = await readPrivateTexts(read, rows.map(row => row.reason_digest))
   return Promise.all(rows.map(async row => ({
-    disputeId: row.id, stepNo: loaded.revision.body.steps.findIndex(step => step.key === row.step_key) + 1, kind: row.kind, reason: row.reason, by: await actorName(read, row.by_actor_id), at: iso(row.at),
+    disputeId: row.id, stepNo: loaded.revision.body.steps.findIndex(step => step.key === row.step_key) + 1, kind: row.kind, reason: reasons.get(row.reason_digest) ?? erasedText, by: await actorName(read, row.by_actor_id), at: iso(row.at),
   })))
 }

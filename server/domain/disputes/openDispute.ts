@@ -35,7 +35,7 @@ export async function openDispute({ write }: Stores, input: OpenDispute, now: nu
       opened_by_membership_id: input.membershipId, taken_by: null, taken_until: null, opened_at: now,
     }).execute()
     const privateDigest = await keepPrivateText(trx, input.membershipId, input.body.reason)
-    await trx.insertInto('dispute_note').values({ id: newId(now), dispute_id: disputeId, by_actor_id: input.membershipId, audience: 'all', private_digest: privateDigest, file_digest: null, at: now }).execute()
+    await trx.insertInto('dispute_note').values({ id: newId(now), dispute_id: disputeId, by_actor_id: input.membershipId, audience: 'all', private_digest: privateDigest, file_digest: null, file_about_membership_id: null, at: now }).execute()
     await appendEntry(trx, {
       chain: courseChain(at.courseId), at: now, actor: input.membershipId, action: 'dispute.opened', privateDigest,
       facts: { dispute: disputeId, submission: input.submissionId, step: input.body.stepKey, mark: mark.id, markVersion: mark.version, points: mark.points_milli },

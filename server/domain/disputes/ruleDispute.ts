@@ -5,7 +5,7 @@ import type { MarkTable } from '../../db/schema/work'
 import { once, type Once } from '../../db/queries/requestKeys'
 import type { Read, Stores, Trx } from '../../db/writer'
 import { newId } from '../ids'
-import { appendEntry, courseChain, digestOf } from '../ledger/appendEntry'
+import { appendEntry, courseChain, digestOf, keepPrivateText } from '../ledger/appendEntry'
 import { evaluationsDigest, marksDigest, rulingDigest, type MarkFact } from '../ledger/coveredDigests'
 import type { Reference } from '../marking/reference'
 import { evaluationRow } from '../marking/storedEvaluation'
@@ -77,9 +77,10 @@ async function store(trx: Trx, reference: Reference, input: RuleDispute, { rulin
         row: { id: newId(now), submission_id: each.submissionId, step_key: ground.stepKey, version: await nextVersion(trx, each, ground.stepKey), points_milli: each.afterMilli, max_milli: each.maxMilli, evaluation_id: evaluations[at]?.id ?? null, cause },
       })))
 
-  const ruling = { id: rulingId, dispute_id: ground.id, level, kind: input.body.kind, reason: input.body.reason, by_actor_id: input.ruler.actorId, at: now }
+  const privateDigest = await keepPrivateText(trx, ground.studentIds[0] ?? refuse('not_found'), input.body.reason)
+  const ruling = { id: rulingId, dispute_id: ground.id, level, kind: input.body.kind, reason_digest: privateDigest.toString('hex'), by_actor_id: input.ruler.actorId, at: now }
   const entry = await appendEntry(trx, {
-    chain: courseChain(ground.courseId), at: now, actor: input.ruler.actorId, action: level === 'appeal' ? 'dispute.appeal_ruled' : 'dispute.ruled',
+    chain: courseChain(ground.courseId), at: now, actor: input.ruler.actorId, action: level === 'appeal' ? 'dispute.appeal_ruled' : 'dispute.ruled', privateDigest,
     facts: {
       dispute: ground.id, ruling: rulingId, kind: input.body.kind, level, submission: ground.submissionId, step: ground.stepKey, lab: ground.labId, accepted: accept,
       covers: { ruling: rulingDigest(ruling), evaluations: evaluationsDigest(evaluations), marks: marksDigest(marks.map(mark => mark.row)) },

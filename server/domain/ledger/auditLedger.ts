@@ -2,9 +2,11 @@ import { createHash } from 'node:crypto'
 import { z } from 'zod'
 import type { Read } from '../../db/writer'
 import type { LedgerEntryTable } from '../../db/schema/ledger'
+import type { RulingTable } from '../../db/schema/moderation'
 import type { MarkTable } from '../../db/schema/work'
 import { entryDigest } from './appendEntry'
-import { answersDigest, evaluationDigest, evaluationsDigest, marksDigest, rulingDigest, submissionDigest, type ColumnDigests } from './coveredDigests'
+import { answersDigest, evaluationDigest, evaluationsDigest, marksDigest, rulingDigest, rulingReasonDigest, submissionDigest, type ColumnDigests } from './coveredDigests'
+import { readPrivateTexts } from './readPrivateTexts'
 
 /** Something that does not add up: where, and what. */
 export interface AuditFinding { where: string, what: string }
@@ -131,9 +133,16 @@ async function checkCovered(read: Read, entry: LedgerEntryTable, facts: Facts, c
   }
   if (covers.ruling && facts.ruling) {
     const row = await read.selectFrom('ruling').selectAll().where('id', '=', facts.ruling).executeTakeFirst()
-    compare('ruling', covers.ruling, row ? rulingDigest(row) : null)
+    compare('ruling', covers.ruling, row ? { ...rulingDigest(row), ...await coveredReason(read, row, covers.ruling) } : null)
   }
   return findings
+}
+
+/** The reason that an older entry covers as a text: read where it is kept; once it was erased there is nothing left to compare. */
+async function coveredReason(read: Read, row: RulingTable, covered: ColumnDigests): Promise<ColumnDigests> {
+  if (covered.reason === undefined) return {}
+  const reason = (await readPrivateTexts(read, [row.reason_digest])).get(row.reason_digest)
+  return reason === undefined ? { reason: covered.reason } : rulingReasonDigest({ id: row.id, reason })
 }
 
 /** A mark that a person changed by hand goes on from the evaluation of the mark before: that one came with another entry. */

@@ -32,13 +32,15 @@ const submissionColumns = ['id', 'seq', 'share_id', 'attempt', 'by_membership_id
 const answerColumns = ['step_key', 'typed', 'reading', 'value_si', 'unit_ucum', 'digits', 'resolution_si', 'private_digest'] as const
 const evaluationColumns = ['id', 'step_key', 'reference_digest', 'convention_revision_id', 'data_set_version_id', 'lab_revision_id', 'inputs_json', 'carried_json', 'accepted_json', 'center_bits', 'low_bits', 'high_bits', 'parts_json', 'slips_json', 'trace_json', 'digest', 'outcome', 'refusal_code'] as const
 const markColumns = ['id', 'submission_id', 'step_key', 'version', 'points_milli', 'max_milli', 'evaluation_id', 'cause'] as const
-const rulingColumns = ['id', 'dispute_id', 'level', 'kind', 'reason', 'by_actor_id', 'at'] as const
+const rulingColumns = ['id', 'dispute_id', 'level', 'kind', 'reason_digest', 'by_actor_id', 'at'] as const
 
 export const submissionDigest = (row: Unlinked<SubmissionTable>): ColumnDigests => columnDigests([row], submissionColumns, each => each.id)
 export const answersDigest = (rows: readonly AnswerTable[]): ColumnDigests => columnDigests(rows, answerColumns, row => `${row.submission_id} ${row.step_key}`)
 export const evaluationsDigest = (rows: readonly EvaluationTable[]): ColumnDigests => columnDigests(rows, evaluationColumns, row => row.id)
 export const marksDigest = (rows: readonly Unlinked<MarkTable>[]): ColumnDigests => columnDigests(rows, markColumns, row => `${row.submission_id} ${row.step_key} ${row.version}`)
 export const rulingDigest = (row: Unlinked<RulingTable>): ColumnDigests => columnDigests([row], rulingColumns, each => each.id)
+/** Entries from before reasons could be erased cover the text itself. */
+export const rulingReasonDigest = (ruling: { id: string, reason: string }): ColumnDigests => columnDigests([ruling], ['reason'], each => each.id)
 
 /** Of one evaluation: also the value of its own `digest` column. */
 export function evaluationDigest(row: Omit<EvaluationTable, 'id' | 'digest'>): Buffer {

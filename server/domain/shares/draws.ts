@@ -73,12 +73,12 @@ async function nextOrdinal(trx: Trx, drawId: string): Promise<number> {
   return last ? last.ordinal + 1 : 0
 }
 
-async function insertShare(trx: Trx, draw: StoredDraw, share: { holderId: string, ordinal: number, redraw: number, reason: string | null }, now: number): Promise<string> {
+async function insertShare(trx: Trx, draw: StoredDraw, share: { holderId: string, ordinal: number, redraw: number, reasonDigest: Buffer | null }, now: number): Promise<string> {
   const item = itemOf(draw, share.ordinal)
   const id = newId(now)
   await trx.insertInto('share').values({
     id, lab_id: draw.labId, holder_id: share.holderId, redraw: share.redraw, draw_id: draw.id, ordinal: share.ordinal, supply_no: item.no, data_set_version_id: item.versionId,
-    inputs_json: JSON.stringify({ leg: item.leg, lowM: item.lowM, highM: item.highM }), served_sha256: Buffer.from(item.servedSha256, 'hex'), digest: shareDigest(draw, share.ordinal, item), reason: share.reason,
+    inputs_json: JSON.stringify({ leg: item.leg, lowM: item.lowM, highM: item.highM }), served_sha256: Buffer.from(item.servedSha256, 'hex'), digest: shareDigest(draw, share.ordinal, item), reason_digest: share.reasonDigest?.toString('hex') ?? null,
   }).execute()
   return id
 }
@@ -94,7 +94,7 @@ export async function giveShares(trx: Trx, draw: StoredDraw, membershipIds: read
     const holderId = newId(now)
     await trx.insertInto('holder').values({ id: holderId, lab_id: draw.labId, kind: 'one' }).execute()
     await trx.insertInto('holder_member').values({ holder_id: holderId, membership_id: membershipId, lab_id: draw.labId }).execute()
-    await insertShare(trx, draw, { holderId, ordinal, redraw: 0, reason: null }, now)
+    await insertShare(trx, draw, { holderId, ordinal, redraw: 0, reasonDigest: null }, now)
     ordinal++
     given++
   }
@@ -102,11 +102,11 @@ export async function giveShares(trx: Trx, draw: StoredDraw, membershipIds: read
 }
 
 /** Gives a holder another share: the next ordinal that gets another item than the present one. */
-export async function giveAnother(trx: Trx, draw: StoredDraw, holderId: string, reason: string, now: number): Promise<{ shareId: string, ordinal: number, before: string }> {
+export async function giveAnother(trx: Trx, draw: StoredDraw, holderId: string, reasonDigest: Buffer, now: number): Promise<{ shareId: string, ordinal: number, before: string }> {
   const present = await trx.selectFrom('share').select(['id', 'redraw', 'draw_id', 'supply_no']).where('holder_id', '=', holderId).orderBy('redraw', 'desc').limit(1).executeTakeFirstOrThrow()
   let ordinal = await nextOrdinal(trx, draw.id)
   const isSame = () => present.draw_id === draw.id && itemOf(draw, ordinal).no === present.supply_no
   if (draw.supply.items.length > 1) while (isSame()) ordinal++
-  const shareId = await insertShare(trx, draw, { holderId, ordinal, redraw: present.redraw + 1, reason }, now)
+  const shareId = await insertShare(trx, draw, { holderId, ordinal, redraw: present.redraw + 1, reasonDigest }, now)
   return { shareId, ordinal, before: present.id }
 }

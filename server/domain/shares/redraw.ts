@@ -1,7 +1,7 @@
 import { refuse } from '#shared/errors'
 import type { Stores } from '../../db/writer'
 import { doOnce, type Asked } from '../asked'
-import { appendEntry, courseChain } from '../ledger/appendEntry'
+import { appendEntry, courseChain, keepPrivateText } from '../ledger/appendEntry'
 import { currentDraw, giveAnother } from './draws'
 
 /** Gives a share's holder other data, openly: the reason stands with the share and the ledger says who did it. Work handed in on the old share stays with it. */
@@ -14,8 +14,10 @@ export async function redraw({ write }: Stores, input: Asked & { shareId: string
     if (share.state !== 'posted') return refuse('lab_withdrawn')
     const draw = await currentDraw(trx, share.labId)
     if (!draw) return refuse('no_share')
-    const given = await giveAnother(trx, draw, share.holderId, reason, now)
-    await appendEntry(trx, { chain: courseChain(share.courseId), at: now, actor: input.actorId, action: 'share.redrawn', facts: { labId: share.labId, holderId: share.holderId, before: given.before, after: given.shareId, ordinal: given.ordinal } })
+    const holder = await trx.selectFrom('holder_member').select('membership_id').where('holder_id', '=', share.holderId).orderBy('membership_id').limit(1).executeTakeFirstOrThrow()
+    const privateDigest = await keepPrivateText(trx, holder.membership_id, reason)
+    const given = await giveAnother(trx, draw, share.holderId, privateDigest, now)
+    await appendEntry(trx, { chain: courseChain(share.courseId), at: now, actor: input.actorId, action: 'share.redrawn', privateDigest, facts: { labId: share.labId, holderId: share.holderId, before: given.before, after: given.shareId, ordinal: given.ordinal } })
     return { shareId: given.shareId }
   }))
 }

@@ -81,6 +81,22 @@ describe('objecting', () => {
     rmSync(folder, { recursive: true })
   })
 
+  it('keeps the same photograph from two students as each one\'s own, under the name that each gave', async () => {
+    await release()
+    const folder = mkdtempSync(join(tmpdir(), 'tetherhouse-files-'))
+    const files = openFileStore(folder)
+    const asked: string[] = []
+    let digest = ''
+    for (const no of [1, 2]) {
+      const { disputeId } = await object(no)
+      digest = (await attachFile(stores, files, { disputeId, actorId: `m-${no}`, name: `page of ${no}.png`, body: (async function* () { yield Buffer.from('the same page') })(), request: request(`p-${no}`, no) }, later)).digest
+      asked.push(disputeId)
+    }
+    expect(await Promise.all(asked.map(async disputeId => (await disputeFile(stores, { disputeId, digest })).name))).toEqual(['page of 1.png', 'page of 2.png'])
+    expect(await stores.read.selectFrom('work_file').select('about_membership_id').orderBy('about_membership_id').execute()).toEqual([{ about_membership_id: 'm-1' }, { about_membership_id: 'm-2' }])
+    rmSync(folder, { recursive: true })
+  })
+
   it('can be taken back by its student alone, and only while nobody ruled', async () => {
     await release()
     const { disputeId } = await object(1)
@@ -106,6 +122,20 @@ describe('objecting', () => {
 
 describe('ruling', () => {
   beforeEach(release)
+
+  it('keeps its reason where it can be erased: gone there, it is gone everywhere, and the ledger stays whole', async () => {
+    const { disputeId } = await object(1)
+    await rule(disputeId, ruler('ann'), { kind: 'change', pointsMilli: 1000, reason: 'Mira read the plot with care.' })
+    const seen = async () => {
+      const { rulings, history } = await describeDispute(stores.read, judging, ruler('1', 'student'), disputeId)
+      return [rulings[0]?.reason, history.at(-1)?.reason]
+    }
+    expect(await seen()).toEqual(['Mira read the plot with care.', 'Mira read the plot with care.'])
+    expect(JSON.stringify([await stores.read.selectFrom('ruling').selectAll().execute(), await stores.read.selectFrom('ledger_entry').selectAll().execute()])).not.toContain('Mira')
+    expect(await stores.write(trx => trx.deleteFrom('private_body').where('body', '=', 'Mira read the plot with care.').where('about_membership_id', '=', 'm-1').executeTakeFirstOrThrow())).toMatchObject({ numDeletedRows: 1n })
+    expect(await seen()).toEqual(['This text was erased.', 'This text was erased.'])
+    expect((await auditLedger(stores.read)).findings).toEqual([])
+  })
 
   it('upholding moves no mark and tells the student', async () => {
     const { disputeId } = await object(1)

@@ -55,7 +55,7 @@ describe('what waits at the places of a course', () => {
       await trx.insertInto('data_set_version').values(versionOf(`version-${labId}`, set.id, Buffer.alloc(32, 2), inTerm)).execute()
       await trx.insertInto('holder').values({ id: `holder-${labId}`, lab_id: labId, kind: 'one' }).execute()
       await trx.insertInto('holder_member').values({ holder_id: `holder-${labId}`, membership_id: member, lab_id: labId }).execute()
-      await trx.insertInto('share').values({ id: `share-${labId}`, lab_id: labId, holder_id: `holder-${labId}`, redraw: 0, draw_id: `draw-${labId}`, ordinal: 1, supply_no: 1, data_set_version_id: `version-${labId}`, inputs_json: '{}', served_sha256: Buffer.alloc(32), digest: Buffer.alloc(32), reason: null }).execute()
+      await trx.insertInto('share').values({ id: `share-${labId}`, lab_id: labId, holder_id: `holder-${labId}`, redraw: 0, draw_id: `draw-${labId}`, ordinal: 1, supply_no: 1, data_set_version_id: `version-${labId}`, inputs_json: '{}', served_sha256: Buffer.alloc(32), digest: Buffer.alloc(32), reason_digest: null }).execute()
       const chain = await trx.selectFrom('ledger_entry').select(['chain_id', 'seq']).executeTakeFirstOrThrow()
       const revision = await trx.selectFrom('lab_revision').select('id').where('lab_id', '=', labId).orderBy('no', 'desc').executeTakeFirstOrThrow()
       await trx.insertInto('submission').values({
