@@ -2,6 +2,7 @@ import type { Judgement } from '#shared/marking/types'
 import { labBody, type NumberStep } from '#shared/schemas/lab'
 import type { MarkedStep } from '#shared/schemas/marks'
 import { renderInline } from '../labs/renderLabText'
+import { carriedNoteOf } from './carriedNoteOf'
 import { classLabel } from './classLabel'
 import { heightBarOf, judgedAs } from './heightBar'
 import type { StoredStep } from './readEvaluations'
@@ -16,12 +17,12 @@ export function markedStep(step: NumberStep, no: number, ask: string, stored: St
   const evaluation = stored.evaluation
   if (!evaluation) throw new Error(`Step ${step.key} of submission ${stored.submissionId} has no evaluation.`)
   const judgement = judgementOfRow(evaluation)
-  const { answer } = questionOfRow(evaluation, noConvention)
+  const { question, answer } = questionOfRow(evaluation, noConvention)
   return {
     key: step.key, no, title: step.title, ask, typed: stored.typed, readAs: answer.message, judged: judgedAs(judgement, answer), pointsMilli: stored.pointsMilli, maxMilli: stored.maxMilli,
     bar: judgement.band ? heightBarOf(judgement.band, answer, judgement.slip) : null,
     carriedBar: judgement.carriedBand ? heightBarOf(judgement.carriedBand, answer) : null,
-    carriedNote: judgement.carriedNote,
+    carriedNote: carriedNoteOf(question, judgement),
     slip: judgement.slip ? { key: judgement.slip.key, label: judgement.slip.label, sentence: judgement.slip.sentence } : null,
     worked: { ...workedValue(step, judgement), reason: judgement.reason, lines: judgement.trace.map(line => ({ text: line.text, formulaHtml: texLine(line.formula), filledHtml: texLine(line.filled) })) },
     notes: [...judgement.notes],

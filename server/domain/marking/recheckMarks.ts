@@ -15,13 +15,22 @@ export interface Finding {
   detail: string
 }
 
-export interface RecheckReport { evaluations: number, builds: number, same: number, findings: readonly Finding[], newestDiffers: number }
+export interface RecheckReport {
+  evaluations: number
+  builds: number
+  same: number
+  /** Marks that a person set: no build can give them, and the ledger alone says why they are so. */
+  byHand: number
+  findings: readonly Finding[]
+  newestDiffers: number
+}
 
 const pageSize = 200
 
 /**
  * Judges every stored mark again: with the build that made it, where every bit must come out the same, and with the newest
- * build, where points that would differ are named. A changed row, a changed bundle or a changed mark is a finding.
+ * build, where points that would differ are named. A changed row, a changed bundle or a changed mark is a finding, whatever the mark's cause:
+ * the first mark that rests on an evaluation came with it, and a later one on the same was set by a person, which is counted.
  */
 export async function recheckMarks(read: Read, newestBundle: string | null, tell: (finding: Finding) => void = () => {}): Promise<RecheckReport> {
   const findings: Finding[] = []
@@ -32,7 +41,8 @@ export async function recheckMarks(read: Read, newestBundle: string | null, tell
   const builds = await read.selectFrom('reference_build').select(['digest', 'version', 'bundle']).orderBy('added_at').execute()
   const newest = newestBundle === null ? null : isolatedJudge(newestBundle)
   const conventions = new Map<string, Convention>()
-  const report = { evaluations: 0, same: 0, newestDiffers: 0 }
+  const typed = await read.selectFrom('mark').select(eb => eb.fn.countAll<number>().as('n')).where('evaluation_id', 'is', null).executeTakeFirstOrThrow()
+  const report = { evaluations: 0, same: 0, byHand: Number(typed.n), newestDiffers: 0 }
   try {
     for (const build of builds) {
       if (!bundleDigest(build.bundle).equals(build.digest)) {
@@ -78,13 +88,13 @@ interface Recheck {
   newest: IsolatedJudge | null
   conventions: ReadonlyMap<string, Convention>
   found: (finding: Finding) => void
-  report: { same: number, newestDiffers: number }
+  report: { same: number, byHand: number, newestDiffers: number }
 }
 
 async function recheckPage(read: Read, page: readonly EvaluationTable[], { own, newest, conventions, found, report }: Recheck): Promise<void> {
   const asked = page.map(row => questionOfRow(row, conventions.get(row.convention_revision_id)!))
   const [again, newer] = await Promise.all([own.judge(asked), newest?.judge(asked) ?? null])
-  const marks = await read.selectFrom('mark').select(['evaluation_id', 'points_milli', 'cause', 'version']).where('evaluation_id', 'in', page.map(row => row.id)).execute()
+  const marks = await read.selectFrom('mark').select(['evaluation_id', 'points_milli', 'max_milli', 'version']).where('evaluation_id', 'in', page.map(row => row.id)).orderBy('version').execute()
   page.forEach((row, at) => {
     const judgement = again[at]!
     const { question, answer } = asked[at]!
@@ -92,10 +102,12 @@ async function recheckPage(read: Read, page: readonly EvaluationTable[], { own, 
     const made = evaluationRow({
       id: row.id, submissionId: row.submission_id, referenceDigest: row.reference_digest, conventionRevisionId: row.convention_revision_id, dataSetVersionId: row.data_set_version_id, labRevisionId: row.lab_revision_id,
     }, { stepKey: row.step_key, question, answer, judgement })
-    const mark = marks.find(each => each.evaluation_id === row.id && (each.cause === 'submission' || each.cause === 'run'))
+    const [mark, ...byHand] = marks.filter(each => each.evaluation_id === row.id)
+    report.byHand += byHand.length
     if (!evaluationDigest(row).equals(row.digest)) found({ kind: 'row_changed', ...where, detail: 'a column of the evaluation is not what its digest covers' })
     else if (!made.digest.equals(row.digest)) found({ kind: 'bits_differ', ...where, detail: `judged again by its own build it comes out as ${made.digest.toString('hex')}, stored is ${row.digest.toString('hex')}` })
-    else if (mark?.cause === 'submission' && mark.points_milli !== judgement.pointsMilli) found({ kind: 'points_differ', ...where, detail: `the mark says ${mark.points_milli} thousandths, its evaluation gives ${judgement.pointsMilli}` })
+    else if (!mark) found({ kind: 'points_differ', ...where, detail: 'no mark rests on this evaluation' })
+    else if (mark.points_milli !== judgement.pointsMilli || mark.max_milli !== question.maxMilli) found({ kind: 'points_differ', ...where, detail: `mark ${mark.version} says ${mark.points_milli} of ${mark.max_milli} thousandths, its evaluation gives ${judgement.pointsMilli} of ${question.maxMilli}` })
     else report.same++
     const then = newer?.[at]
     if (then && then.pointsMilli !== judgementOfRow(row).pointsMilli) {

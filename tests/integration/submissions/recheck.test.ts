@@ -1,12 +1,18 @@
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
+import type { RulingBody } from '#shared/schemas/disputes'
 import type { OpenDatabase } from '../../../server/db/open'
+import { openDispute } from '../../../server/domain/disputes/openDispute'
+import { ruleDispute } from '../../../server/domain/disputes/ruleDispute'
 import { isSound, recheckMarks } from '../../../server/domain/marking/recheckMarks'
+import { releaseMarks } from '../../../server/domain/marking/releaseMarks'
 import type { Reference } from '../../../server/domain/marking/reference'
+import { addTas } from '../../fixtures/courseWithTas'
 import { openTemporary } from '../../fixtures/openTemporary'
 import { referenceIn } from '../../fixtures/reference'
-import { handIn, rateOf, rightAnswers } from '../../fixtures/submitting'
+import { bodyDigest, handIn, rateOf, rightAnswers } from '../../fixtures/submitting'
 import { workingCourse } from '../../fixtures/workingCourse'
 
+const later = Date.parse('2026-10-19T18:00:00Z')
 let stores: OpenDatabase & { remove: () => Promise<void> }
 let reference: Reference
 
@@ -55,6 +61,24 @@ describe('recheck', () => {
     tamper('mark', `update mark set points_milli = points_milli - 1 where step_key = 'theta' and submission_id = (select id from submission where seq = 1)`)
     const report = await recheckMarks(stores.read, null)
     expect(report.findings.map(finding => [finding.kind, finding.stepKey])).toEqual([['points_differ', 'theta']])
+  })
+
+  it('sees changed points of a mark that a ruling made, and counts the marks that a person set and no build can give', async () => {
+    await addTas(stores, ['ann'])
+    await releaseMarks(stores, { actorId: 'm-lead', postingId: 'posting-1', seenVersion: 1 }, later)
+    const wrong = await stores.read.selectFrom('submission').select('id').where('seq', '=', 2).executeTakeFirstOrThrow()
+    const rule = async (stepKey: string, body: RulingBody) => {
+      const request = { personId: 'p-1', key: `key-${stepKey}-objects`, route: 'POST /x', bodySha256: bodyDigest(stepKey), now: later }
+      const { disputeId } = await openDispute(stores, { membershipId: 'm-1', submissionId: wrong.id, body: { stepKey, reason: 'The handout gives dT/dz.' }, request }, later)
+      await ruleDispute(stores, reference, { disputeId, ruler: { actorId: 'm-ann', personId: 'p-ann', role: 'ta' }, seenVersion: 1, body, request: { ...request, personId: 'p-ann' } }, later)
+    }
+    await rule('rate', { kind: 'accept', reason: 'Both signs are in use.', accept: { kind: 'slip', key: 'sign' } })
+    await rule('theta', { kind: 'change', reason: 'Half of it is right.', pointsMilli: 500 })
+    const sound = await recheckMarks(stores.read, null)
+    expect(sound.findings).toEqual([])
+    expect(sound.byHand).toBe(1)
+    tamper('mark', `update mark set points_milli = points_milli - 1 where step_key = 'rate' and cause = 'ruling'`)
+    expect((await recheckMarks(stores.read, null)).findings.map(finding => [finding.kind, finding.submissionId, finding.stepKey])).toEqual([['points_differ', wrong.id, 'rate']])
   })
 
   it('sees a bundle that is not the text its digest names, and does not run it', async () => {
