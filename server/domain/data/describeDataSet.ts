@@ -6,6 +6,7 @@ import type { Read } from '../../db/writer'
 import type { Observations } from '../../observations/chunks'
 import { readRoot } from '../../observations/root'
 import type { VersionMeta } from './publishVersions'
+import { sourceNames, unnamed } from './sourceNames'
 
 const iso = (at: number | null): string | null => at === null ? null : new Date(at).toISOString()
 
@@ -25,7 +26,8 @@ export async function describeVersion(read: Read, observations: Observations, ve
   const columns = await read.selectFrom('data_column').selectAll().where('version_id', '=', versionId).where('role', 'in', ['value', 'quality']).orderBy('no').execute()
   const sources = await read.selectFrom('data_set_version_source as used').innerJoin('source_file', 'source_file.sha256', 'used.source_sha256')
     .select(['used.source_sha256', 'source_file.size']).where('used.version_id', '=', versionId).orderBy('used.ordinal').execute()
-  const names = await namesOf(read, sources.map(source => source.source_sha256), version.made_at)
+  const set = await read.selectFrom('data_set').select('owner_course_id').where('id', '=', version.data_set_id).executeTakeFirstOrThrow()
+  const names = await sourceNames(read, { courseId: set.owner_course_id, digests: sources.map(source => source.source_sha256), before: version.made_at })
   const meta = JSON.parse(version.meta_json) as Partial<VersionMeta>
   const root = readRoot(observations, version.root_sha256)
   return {
@@ -36,17 +38,8 @@ export async function describeVersion(read: Read, observations: Observations, ve
       no: column.no, name: column.name, quantity: column.quantity, unit: column.unit_ucum, unitLabel: unitLabel(column.quantity, column.unit_ucum), decimals: column.decimals ?? 0,
       heightM: column.height_m, role: column.role === 'quality' ? 'quality' : 'value',
     })),
-    sources: sources.map(source => ({ sha256: source.source_sha256.toString('hex'), size: source.size, name: names.get(source.source_sha256.toString('hex')) ?? 'source' })),
+    sources: sources.map(source => ({ sha256: source.source_sha256.toString('hex'), size: source.size, name: names.get(source.source_sha256.toString('hex')) ?? unnamed })),
   }
-}
-
-/** The name under which a file was last uploaded before the version was made. */
-async function namesOf(read: Read, digests: readonly Buffer[], before: number): Promise<Map<string, string>> {
-  const names = new Map<string, string>()
-  if (digests.length === 0) return names
-  const uploads = await read.selectFrom('upload').select(['source_sha256', 'original_name']).where('source_sha256', 'in', [...digests]).where('at', '<=', before).orderBy('at').execute()
-  for (const upload of uploads) names.set(upload.source_sha256.toString('hex'), upload.original_name)
-  return names
 }
 
 async function nameOf(read: Read, actorId: string): Promise<string> {

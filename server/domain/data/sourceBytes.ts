@@ -2,14 +2,17 @@ import type { ReadStream } from 'node:fs'
 import { refuse } from '#shared/errors'
 import type { Read } from '../../db/writer'
 import type { FileStore } from '../../files/store'
+import { sourceNames, unnamed } from './sourceNames'
 
-/** The source file of a version, byte for byte, under the name it came with. */
+/**
+ * The source file of a version, byte for byte, under the name that it was given where the data set belongs: the same bytes may have come
+ * to another course as well, and under which name is that course's own.
+ */
 export async function sourceBytes(read: Read, files: FileStore, input: { versionId: string, ordinal: number }): Promise<{ stream: ReadStream, name: string, size: number, sha256: string }> {
   const source = await read.selectFrom('data_set_version_source as used')
     .innerJoin('source_file', 'source_file.sha256', 'used.source_sha256')
-    .innerJoin('upload', 'upload.source_sha256', 'used.source_sha256')
-    .select(['source_file.sha256', 'source_file.size', 'upload.original_name']).where('used.version_id', '=', input.versionId).where('used.ordinal', '=', input.ordinal)
-    .orderBy('upload.at', 'desc').executeTakeFirst()
+    .innerJoin('data_set_version', 'data_set_version.id', 'used.version_id').innerJoin('data_set', 'data_set.id', 'data_set_version.data_set_id')
+    .select(['source_file.sha256', 'source_file.size', 'data_set.owner_course_id as courseId', 'data_set_version.made_at as madeAt']).where('used.version_id', '=', input.versionId).where('used.ordinal', '=', input.ordinal).executeTakeFirst()
   if (!source || !files.has(source.sha256)) return refuse('not_found')
-  return { stream: files.read(source.sha256), name: source.original_name, size: source.size, sha256: source.sha256.toString('hex') }
+  return { stream: files.read(source.sha256), name: (await sourceNames(read, { courseId: source.courseId, digests: [source.sha256], before: source.madeAt })).get(source.sha256.toString('hex')) ?? unnamed, size: source.size, sha256: source.sha256.toString('hex') }
 }

@@ -1,13 +1,16 @@
 import { mkdtempSync, readdirSync, rmSync, writeFileSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
+import { text } from 'node:stream/consumers'
 import { pathToFileURL } from 'node:url'
 import SQLite from 'better-sqlite3'
 import { afterAll, afterEach, beforeEach, describe, expect, it } from 'vitest'
 import { cancelImport } from '../../../server/domain/data/cancelImport'
+import { describeDataSet } from '../../../server/domain/data/describeDataSet'
 import { ImportRunner } from '../../../server/domain/data/importRunner'
 import { liveChunks } from '../../../server/domain/data/liveChunks'
 import { refusedRows, refusedRowsCsv } from '../../../server/domain/data/refusedRows'
+import { sourceBytes } from '../../../server/domain/data/sourceBytes'
 import { judgeDays } from '../../../server/importing/quality/judgeDays'
 import { importFile } from '../../../server/importing/importFile'
 import { openObservationsWriter } from '../../../server/observations/chunks'
@@ -39,6 +42,21 @@ describe('the life of an import', () => {
     other.close()
     expect(again.records[0]!.rootSha256).toEqual(version.root_sha256)
     expect(again.records[0]!.refusals).toEqual(JSON.parse(version.meta_json).refusals)
+  })
+
+  it('a source has the name that its course gave it, whatever the same bytes are called elsewhere', async () => {
+    const upload = await room.uploadText('record.csv', `${head}${rowsOf(50)}`)
+    const { dataSets: [made] } = await room.importUpload(upload.id, upload.guess.recipe)
+    const version = await room.read.selectFrom('data_set_version').select(['id', 'made_at', 'data_set_id']).where('id', '=', made!.versionId).executeTakeFirstOrThrow()
+    const own = await room.read.selectFrom('upload').selectAll().where('id', '=', upload.id).executeTakeFirstOrThrow()
+    expect(own.course_id).not.toBeNull()
+    // the department had the same file before and has it again since, under names that are nobody else's business
+    for (const [id, at] of [['before', own.at + 1], ['since', own.at + 1e9]] as const) {
+      await room.write(trx => trx.insertInto('upload').values({ ...own, id, course_id: null, original_name: `${id}.csv`, at: Math.min(at, version.made_at) }).execute())
+    }
+    const source = await sourceBytes(room.read, room.files, { versionId: version.id, ordinal: 1 })
+    expect([source.name, await text(source.stream)]).toEqual(['record.csv', `${head}${rowsOf(50)}`])
+    expect((await describeDataSet(room.read, room.observations, version.data_set_id)).versions[0]?.sources[0]?.name).toBe('record.csv')
   })
 
   it('the same rows give the same root and chunks whatever was in memory when, also when they come in no order', () => {
