@@ -1,4 +1,5 @@
 import type { LabBody, LateRule } from '#shared/schemas/lab'
+import { askedSteps, isNumber } from '#shared/schemas/askedSteps'
 import { findQuantity } from '#shared/thermo/registry'
 import type { Stores } from '../server/db/writer'
 import { createLab } from '../server/domain/labs/createLab'
@@ -70,9 +71,13 @@ export class LabRun {
     const random = randomFrom(`${this.name} ${member.key}`)
     const earlier: Record<string, EarlierReadings[string]> = {}
     const answers: Record<string, string> = {}
-    for (const step of loaded.revision.body.steps) {
+    for (const step of askedSteps(loaded.revision.body)) {
       const judgement = this.judging.reference.judgeStep(questionFor(loaded, step.key, earlier), readTyped(step, ''))
       const doing = story[member.key]?.[step.key] ?? doingOf(random, habits, judgement)
+      if (!isNumber(step)) {
+        answers[step.key] = doing.does === 'blank' ? '' : doing.does === 'right' ? judgement.classes.join(', ') : step.options.find(option => !option.isRight)?.key ?? ''
+        continue
+      }
       const classes = findQuantity(step.quantity)?.classes?.map(entry => entry.key) ?? []
       answers[step.key] = typedFor(random, habits, step, judgement, doing, { right: judgement.classes[0] ?? null, all: classes })
       earlier[step.key] = readTyped(step, answers[step.key] ?? '')

@@ -1,4 +1,4 @@
-import type { NumberStep } from '#shared/schemas/lab'
+import type { AskedNumber } from '#shared/schemas/askedSteps'
 import type { Judgement } from '#shared/marking/types'
 import { randomFrom, type Random } from './generator/arithmetic'
 
@@ -32,7 +32,7 @@ export function doingOf(random: Random, habits: Habits, judgement: Judgement): D
 }
 
 /** What is typed for a step, as people type it; empty for a blank. */
-export function typedFor(random: Random, habits: Habits, step: NumberStep, judgement: Judgement, doing: Doing, klass: { right: string | null, all: readonly string[] }): string {
+export function typedFor(random: Random, habits: Habits, step: AskedNumber, judgement: Judgement, doing: Doing, klass: { right: string | null, all: readonly string[] }): string {
   if (doing.does === 'blank') return ''
   if (klass.all.length > 0) return doing.does === 'right' || doing.does === 'coarse' ? klass.right ?? '' : klass.all.find(key => key !== klass.right) ?? ''
   const center = (judgement.carriedBand ?? judgement.band)?.center
@@ -49,7 +49,7 @@ export function typedFor(random: Random, habits: Habits, step: NumberStep, judge
   return written(random, habits, step, center, doing.does === 'coarse' ? Math.max(1, step.digits - 1) : step.digits + (random.uniform() < 0.2 ? 1 : 0))
 }
 
-const isTemperature = (step: NumberStep) => step.unit === 'Cel' || step.unit === 'K'
+const isTemperature = (step: AskedNumber) => step.unit === 'Cel' || step.unit === 'K'
 
 interface Style { unit: string, of: (si: number) => number }
 const stylesOf: Readonly<Record<string, readonly Style[]>> = {
@@ -62,7 +62,7 @@ const stylesOf: Readonly<Record<string, readonly Style[]>> = {
 }
 
 /** A number with its unit, to so many significant digits; what a person writes differs from hand to hand. */
-export function written(random: Random, habits: Habits, step: NumberStep, si: number, digits: number): string {
+export function written(random: Random, habits: Habits, step: AskedNumber, si: number, digits: number): string {
   const styles = stylesOf[step.unit] ?? [{ unit: step.unit, of: (value: number) => value }]
   const style = styles[Math.floor(styles.length * random.uniform())] ?? styles[0]
   if (!style) throw new Error('A step without a unit.')

@@ -1,5 +1,5 @@
 import { postingBody, type LateRule, type PostingBody } from '#shared/schemas/lab'
-import { typedNumber } from './labDraft'
+import { typedNumber } from './readDraft'
 
 /** What stands in the fields of a posting. */
 export interface PostDraft {

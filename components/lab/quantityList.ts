@@ -14,7 +14,8 @@ export const readingWords: Record<string, string> = {
   mean: 'mean over the layer',
   lowBound: 'the layer’s base',
   highBound: 'the layer’s top',
+  row: 'in this row of the table',
 }
 
 /** The readings that fit an input: a series takes the layer, a number one value. */
-export const readingsFor = (input: QuantityInput): string[] => input.shape === 'series' ? ['layer'] : ['lowest', 'highest', 'mean', ...(input.unit === 'm' ? ['lowBound', 'highBound'] : [])]
+export const readingsFor = (input: QuantityInput, isTable = false): string[] => input.shape === 'series' ? ['layer'] : [...(isTable ? ['row'] : []), 'lowest', 'highest', 'mean', ...(input.unit === 'm' ? ['lowBound', 'highBound'] : [])]

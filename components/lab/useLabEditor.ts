@@ -1,6 +1,7 @@
 import type { z } from 'zod'
 import type { labPreviewReply } from '#shared/schemas/labReplies'
-import { draftOf, readDraft, type LabDraft } from './labDraft'
+import { draftOf, type LabDraft } from './labDraft'
+import { readDraft } from './readDraft'
 import type { EditedLab } from './quantityList'
 
 type Preview = Pick<z.output<typeof labPreviewReply>, 'html' | 'asks' | 'stepHtml' | 'problems'>

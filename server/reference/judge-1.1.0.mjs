@@ -204,8 +204,8 @@ function chooseVariant(definition, inputs2, formulae, key) {
 }
 function firstBeyond(variant, inputs2) {
   for (const [name, range] of Object.entries(variant.holds ?? {})) {
-    const given7 = inputs2[name];
-    for (const value19 of typeof given7 === "number" ? [given7] : given7 ?? []) {
+    const given8 = inputs2[name];
+    for (const value19 of typeof given8 === "number" ? [given8] : given8 ?? []) {
       if (value19 < range[0] || value19 > range[1]) return [name, value19, range];
     }
   }
@@ -214,11 +214,11 @@ function firstBeyond(variant, inputs2) {
 function evaluateQuantity(definition, inputs2, constants, variant, formulae = plainFormulae) {
   checkInputs(definition.inputs, inputs2);
   const { variant: chosen, note } = chooseVariant(definition, inputs2, formulae, variant);
-  const outcome2 = chosen.evaluate(inputs2, constants, formulae);
-  if (outcome2.is === "value" && !Number.isFinite(outcome2.value)) throw new OutOfRangeError(definition.key, outcome2.value, "the numbers");
-  if (outcome2.is !== "value" && outcome2.is !== "class") return outcome2;
-  const notes = [...outcome2.notes ?? [], ...note === null ? [] : [note], ...definition.notes?.(inputs2, constants, formulae) ?? []];
-  const noted = notes.length === 0 ? outcome2 : { ...outcome2, notes };
+  const outcome3 = chosen.evaluate(inputs2, constants, formulae);
+  if (outcome3.is === "value" && !Number.isFinite(outcome3.value)) throw new OutOfRangeError(definition.key, outcome3.value, "the numbers");
+  if (outcome3.is !== "value" && outcome3.is !== "class") return outcome3;
+  const notes = [...outcome3.notes ?? [], ...note === null ? [] : [note], ...definition.notes?.(inputs2, constants, formulae) ?? []];
+  const noted = notes.length === 0 ? outcome3 : { ...outcome3, notes };
   return noted.is === "value" && noted.value === 0 ? { ...noted, value: 0 } : noted;
 }
 
@@ -601,8 +601,8 @@ function forGivenMass(base, name, example) {
       ...variant,
       label: `mass times ${variant.label}`,
       evaluate: (inputs2, constants, formulae) => {
-        const outcome2 = variant.evaluate(withoutMass(inputs2), constants, formulae);
-        return outcome2.is === "value" ? { ...outcome2, value: mass3(inputs2) * outcome2.value } : outcome2;
+        const outcome3 = variant.evaluate(withoutMass(inputs2), constants, formulae);
+        return outcome3.is === "value" ? { ...outcome3, value: mass3(inputs2) * outcome3.value } : outcome3;
       }
     })),
     ask: base.ask.replace(" per kilogram of dry air", " for the whole mass of dry air, not per kilogram"),
@@ -1679,14 +1679,14 @@ var parcelLapseRateInEnvironmentDefinition = oneFormula({
 });
 
 // shared/thermo/quantities/parcelTemperatureByHeight.ts
-function parcelTemperatureByHeight(temperature6, height2, rate3) {
-  return kelvin(temperature6 - rate3 * height2);
+function parcelTemperatureByHeight(temperature6, height2, rate4) {
+  return kelvin(temperature6 - rate4 * height2);
 }
 var start2 = (inputs2) => numberOf(inputs2, "temperature");
 var height = (inputs2) => numberOf(inputs2, "heightDifference");
 function rateOf(inputs2, constants, variant) {
-  const given7 = inputs2.lapseRate;
-  if (typeof given7 === "number") return given7;
+  const given8 = inputs2.lapseRate;
+  if (typeof given8 === "number") return given8;
   return variant === "printed-rate" ? printedDryRate : dryRateOf(constants);
 }
 function variantWith(key, label, status, knownError) {
@@ -1718,11 +1718,11 @@ var parcelTemperatureByHeightDefinition = {
   constants: ["g", "cp"],
   ask: "The temperature of the parcel after it is lifted dry-adiabatically by the height, at Γd.",
   trace(inputs2, constants, variant) {
-    const rate3 = rateOf(inputs2, constants, variant);
-    const value19 = parcelTemperatureByHeight(kelvin(start2(inputs2)), meter(height(inputs2)), kelvinPerMeter(rate3));
+    const rate4 = rateOf(inputs2, constants, variant);
+    const value19 = parcelTemperatureByHeight(kelvin(start2(inputs2)), meter(height(inputs2)), kelvinPerMeter(rate4));
     return [
-      typeof inputs2.lapseRate === "number" || variant === "printed-rate" ? { text: "Dry adiabatic lapse rate, as given", formula: "\\Gamma_d", filled: `\\Gamma_d = ${texQuantity(rate3 * 1e3, "K/km")}`, value: rate3, unit: "K/m" } : { text: "Dry adiabatic lapse rate", formula: "\\Gamma_d = \\frac{g}{c_p}", filled: `\\Gamma_d = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(constant(constants, "cp"), 6)}} = ${texQuantity(rate3 * 1e3, "K/km")}`, value: rate3, unit: "K/m" },
-      { text: "Along the height", formula: "T(z) = T_0 - \\Gamma_d\\,\\Delta z", filled: `T(z) = ${texNumber(start2(inputs2), 6)} - ${texNumber(rate3 * 1e3)} \\cdot ${texFactor(height(inputs2) / 1e3)} = ${texQuantity(value19, "K", 6)} = ${texQuantity(value19 - zeroCelsius, "Cel")}`, value: value19, unit: "K" }
+      typeof inputs2.lapseRate === "number" || variant === "printed-rate" ? { text: "Dry adiabatic lapse rate, as given", formula: "\\Gamma_d", filled: `\\Gamma_d = ${texQuantity(rate4 * 1e3, "K/km")}`, value: rate4, unit: "K/m" } : { text: "Dry adiabatic lapse rate", formula: "\\Gamma_d = \\frac{g}{c_p}", filled: `\\Gamma_d = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(constant(constants, "cp"), 6)}} = ${texQuantity(rate4 * 1e3, "K/km")}`, value: rate4, unit: "K/m" },
+      { text: "Along the height", formula: "T(z) = T_0 - \\Gamma_d\\,\\Delta z", filled: `T(z) = ${texNumber(start2(inputs2), 6)} - ${texNumber(rate4 * 1e3)} \\cdot ${texFactor(height(inputs2) / 1e3)} = ${texQuantity(value19, "K", 6)} = ${texQuantity(value19 - zeroCelsius, "Cel")}`, value: value19, unit: "K" }
     ];
   },
   slips: [
@@ -2038,10 +2038,10 @@ var specificHeatingRateDefinition = oneFormula({
   ask: `The heating q̇ of the air per kilogram, positive where it is heated, ${heatingAssumption}.`,
   value: value6,
   working(inputs2, constants, result2) {
-    const rate3 = temperatureTendency(inputs2);
+    const rate4 = temperatureTendency(inputs2);
     return [
-      worked("Rate of temperature, in seconds", "\\frac{\\Delta T}{\\Delta t} = \\frac{T_2 - T_1}{\\Delta t}", `\\frac{\\Delta T}{\\Delta t} = \\frac{${texNumber(numberOf(inputs2, "temperatureEnd"), 6)} - ${texNumber(numberOf(inputs2, "temperatureStart"), 6)}}{${texNumber(numberOf(inputs2, "timeBetween"), 6)}}`, rate3, "K/s", void 0, 5),
-      worked("Without advection and vertical motion heating alone changes the temperature", "\\dot q = c_p \\frac{\\Delta T}{\\Delta t}", `\\dot q = ${texNumber(constant(constants, "cp"), 6)} \\cdot ${texFactor(rate3)}`, result2, "W/kg", void 0, 5)
+      worked("Rate of temperature, in seconds", "\\frac{\\Delta T}{\\Delta t} = \\frac{T_2 - T_1}{\\Delta t}", `\\frac{\\Delta T}{\\Delta t} = \\frac{${texNumber(numberOf(inputs2, "temperatureEnd"), 6)} - ${texNumber(numberOf(inputs2, "temperatureStart"), 6)}}{${texNumber(numberOf(inputs2, "timeBetween"), 6)}}`, rate4, "K/s", void 0, 5),
+      worked("Without advection and vertical motion heating alone changes the temperature", "\\dot q = c_p \\frac{\\Delta T}{\\Delta t}", `\\dot q = ${texNumber(constant(constants, "cp"), 6)} \\cdot ${texFactor(rate4)}`, result2, "W/kg", void 0, 5)
     ];
   },
   slips: [
@@ -2916,10 +2916,10 @@ var scaleHeightDefinition = oneFormula({
 function seaLevelReduction(of) {
   const from2 = of.to === "sea level" ? "stationPressure" : "seaLevelPressure";
   const sign = of.to === "sea level" ? -1 : 1;
-  const rate3 = of.mean === "isothermal" ? 0 : reductionLapseRate;
+  const rate4 = of.mean === "isothermal" ? 0 : reductionLapseRate;
   const p10 = (inputs2) => numberOf(inputs2, from2), T10 = (inputs2) => numberOf(inputs2, "stationTemperature"), z3 = (inputs2) => numberOf(inputs2, "stationHeight");
   const through = (inputs2, constants, mean2, direction2 = sign) => pressureAtHeight(pascal(p10(inputs2)), meter(direction2 * z3(inputs2)), kelvin(mean2), constants);
-  const meanOf = (inputs2) => fictitiousMeanTemperature(kelvin(T10(inputs2)), meter(z3(inputs2)), rate3);
+  const meanOf = (inputs2) => fictitiousMeanTemperature(kelvin(T10(inputs2)), meter(z3(inputs2)), rate4);
   const value19 = (inputs2, constants) => through(inputs2, constants, meanOf(inputs2));
   return oneFormula({
     key: of.key,
@@ -2954,7 +2954,7 @@ function seaLevelReduction(of) {
       celsiusSlip(value19, "stationTemperature"),
       feetSlip(value19, "stationHeight"),
       fineSlip("linear", "first term of the exponential", "This takes 1 + x for the exponential of x.", (inputs2, constants) => p10(inputs2) * (1 - sign * constant(constants, "g") * z3(inputs2) / (constant(constants, "R") * meanOf(inputs2)))),
-      fineSlip("other-mean", of.mean === "isothermal" ? "6.5 K km⁻¹ for isothermal" : "isothermal for 6.5 K km⁻¹", of.mean === "isothermal" ? "This takes the mean temperature along 6.5 K km⁻¹: here the layer is isothermal." : "This takes the station’s temperature for the whole layer: here it rises downwards at 6.5 K km⁻¹.", (inputs2, constants) => through(inputs2, constants, fictitiousMeanTemperature(kelvin(T10(inputs2)), meter(z3(inputs2)), reductionLapseRate - rate3))),
+      fineSlip("other-mean", of.mean === "isothermal" ? "6.5 K km⁻¹ for isothermal" : "isothermal for 6.5 K km⁻¹", of.mean === "isothermal" ? "This takes the mean temperature along 6.5 K km⁻¹: here the layer is isothermal." : "This takes the station’s temperature for the whole layer: here it rises downwards at 6.5 K km⁻¹.", (inputs2, constants) => through(inputs2, constants, fictitiousMeanTemperature(kelvin(T10(inputs2)), meter(z3(inputs2)), reductionLapseRate - rate4))),
       ...of.mean === "isothermal" ? [] : [fineSlip("lapse-sign", "cooled downwards", "This cools the fictitious air downwards: it is warmer below.", (inputs2, constants) => through(inputs2, constants, fictitiousMeanTemperature(kelvin(T10(inputs2)), meter(z3(inputs2)), -reductionLapseRate)))],
       otherConstantSlip(value19, "R", "cp"),
       slip("pascal-for-hectopascal", "Pa given as hPa", "Your number is in pascal; the unit beside it says hectopascal.", (_i, _c, right) => right * 100)
@@ -3571,25 +3571,25 @@ var lagCorrectedTemperatureDefinition = {
   constants: [],
   ask: "The air temperature T = T_i + τ dT_i/dt from the indication of a first-order sensor.",
   trace(inputs2) {
-    const { indicated, rate: rate3, timeConstant } = given(inputs2), value19 = lagCorrected(given(inputs2));
+    const { indicated, rate: rate4, timeConstant } = given(inputs2), value19 = lagCorrected(given(inputs2));
     return [
-      { text: "Correction", formula: "\\tau \\frac{dT_i}{dt}", filled: `${texNumber(timeConstant)}\\,\\mathrm{s} \\times ${texFactor(rate3)}\\,\\mathrm{K\\,s^{-1}} = ${texQuantity(timeConstant * rate3, "K")}`, value: timeConstant * rate3, unit: "K" },
-      { text: "Air temperature", formula: "T = T_i + \\tau \\frac{dT_i}{dt}", filled: `T = ${texQuantity(indicated - zeroCelsius, "Cel")} + ${texFactor(timeConstant * rate3)}\\,\\mathrm{K} = ${texQuantity(value19 - zeroCelsius, "Cel")}`, value: value19, unit: "K" }
+      { text: "Correction", formula: "\\tau \\frac{dT_i}{dt}", filled: `${texNumber(timeConstant)}\\,\\mathrm{s} \\times ${texFactor(rate4)}\\,\\mathrm{K\\,s^{-1}} = ${texQuantity(timeConstant * rate4, "K")}`, value: timeConstant * rate4, unit: "K" },
+      { text: "Air temperature", formula: "T = T_i + \\tau \\frac{dT_i}{dt}", filled: `T = ${texQuantity(indicated - zeroCelsius, "Cel")} + ${texFactor(timeConstant * rate4)}\\,\\mathrm{K} = ${texQuantity(value19 - zeroCelsius, "Cel")}`, value: value19, unit: "K" }
     ];
   },
   slips: [
     slip("sign-of-correction", "correction with its sign turned", "The correction has its sign turned: a sensor that falls is still too warm.", (inputs2) => {
-      const { indicated, rate: rate3, timeConstant } = given(inputs2);
-      return indicated - timeConstant * rate3;
+      const { indicated, rate: rate4, timeConstant } = given(inputs2);
+      return indicated - timeConstant * rate4;
     }),
     slip("rate-alone", "rate without the time constant", "The rate has to be multiplied by the time constant.", (inputs2) => given(inputs2).indicated + given(inputs2).rate),
     slip("divided", "rate divided by the time constant", "The rate is divided by the time constant: multiply.", (inputs2) => {
-      const { indicated, rate: rate3, timeConstant } = given(inputs2);
-      return timeConstant > 0 ? indicated + rate3 / timeConstant : null;
+      const { indicated, rate: rate4, timeConstant } = given(inputs2);
+      return timeConstant > 0 ? indicated + rate4 / timeConstant : null;
     }),
     slip("per-minute", "rate per minute", "The rate went in per minute: per second is needed.", (inputs2) => {
-      const { indicated, rate: rate3, timeConstant } = given(inputs2);
-      return indicated + timeConstant * rate3 * 60;
+      const { indicated, rate: rate4, timeConstant } = given(inputs2);
+      return indicated + timeConstant * rate4 * 60;
     })
   ],
   example: { inputs: { indicatedTemperature: 285.55, indicatedRate: -0.03, timeConstant: 12 }, gives: 285.19, within: 1e-9 }
@@ -3621,16 +3621,16 @@ var lagCorrectedTemperatureInFlightDefinition = {
   constants: [],
   ask: "The air temperature T = T_i − τ w Γ_i from the indication of a first-order sensor in flight, with the vertical speed w positive on ascent and the indicated lapse rate Γ_i positive where the indication falls with height.",
   trace(inputs2) {
-    const { indicated, rate: rate3, timeConstant } = given2(inputs2), value19 = corrected2(inputs2);
+    const { indicated, rate: rate4, timeConstant } = given2(inputs2), value19 = corrected2(inputs2);
     return [
-      { text: "How fast the indication changes", formula: "\\frac{dT_i}{dt} = -w\\,\\Gamma_i", filled: `\\frac{dT_i}{dt} = ${texQuantity(rate3, "K/s")}`, value: rate3, unit: "K/s" },
-      { text: "Air temperature", formula: "T = T_i + \\tau \\frac{dT_i}{dt}", filled: `T = ${texQuantity(indicated - zeroCelsius, "Cel")} + ${texNumber(timeConstant)} \\times ${texFactor(rate3)}\\,\\mathrm{K} = ${texQuantity(value19 - zeroCelsius, "Cel")}`, value: value19, unit: "K" }
+      { text: "How fast the indication changes", formula: "\\frac{dT_i}{dt} = -w\\,\\Gamma_i", filled: `\\frac{dT_i}{dt} = ${texQuantity(rate4, "K/s")}`, value: rate4, unit: "K/s" },
+      { text: "Air temperature", formula: "T = T_i + \\tau \\frac{dT_i}{dt}", filled: `T = ${texQuantity(indicated - zeroCelsius, "Cel")} + ${texNumber(timeConstant)} \\times ${texFactor(rate4)}\\,\\mathrm{K} = ${texQuantity(value19 - zeroCelsius, "Cel")}`, value: value19, unit: "K" }
     ];
   },
   slips: [
     fineSlip("sign-of-correction", "correction with its sign turned", "The correction has its sign turned: on ascent through air that cools with height the sensor is too warm.", (inputs2) => {
-      const { indicated, rate: rate3, timeConstant } = given2(inputs2);
-      return indicated - timeConstant * rate3;
+      const { indicated, rate: rate4, timeConstant } = given2(inputs2);
+      return indicated - timeConstant * rate4;
     }),
     fineSlip("speed-left-out", "vertical speed left out", "The vertical speed is left out.", (inputs2) => given2(inputs2).indicated - given2(inputs2).timeConstant * numberOf(inputs2, "indicatedLapseRate")),
     fineSlip("time-constant-left-out", "time constant left out", "The time constant is left out.", (inputs2) => given2(inputs2).indicated + given2(inputs2).rate),
@@ -4714,8 +4714,8 @@ function solvedLclTemperature(temperature6, dewpoint, pressure4, air) {
 var lclTemperatureKey = "lifting-condensation-level-temperature";
 function lclFunction(constants, formulae, variant = formulae.variants[lclTemperatureKey]) {
   const air = moistAir(constants, formulae);
-  return (temperature6, given7, pressure4) => {
-    const dewpoint = Math.min(given7, temperature6);
+  return (temperature6, given8, pressure4) => {
+    const dewpoint = Math.min(given8, temperature6);
     if (variant === "romps") {
       const e = air.es(dewpoint), w2 = mixingRatioFrom(e, pressure4, air.epsilon);
       return rompsLcl(temperature6, e / air.es(temperature6), pressure4, w2 / (1 + w2));
@@ -4758,23 +4758,23 @@ function moistQuantity({ inside = [], notedAt, remarks, working, slips, variants
       evaluate: (inputs2, constants, formulae) => {
         const hand = handOf(inputs2, constants, formulae, about.key);
         checkNoneBoils(inputs2, hand.air);
-        const outcome2 = outcomeOf({ ...about, value: value19 }, hand);
-        if (outcome2.is !== "value" || !remarks) return outcome2;
-        const said = remarks(hand, outcome2.value).filter((one2) => one2 !== null);
-        return said.length === 0 ? outcome2 : { ...outcome2, notes: said };
+        const outcome3 = outcomeOf({ ...about, value: value19 }, hand);
+        if (outcome3.is !== "value" || !remarks) return outcome3;
+        const said = remarks(hand, outcome3.value).filter((one2) => one2 !== null);
+        return said.length === 0 ? outcome3 : { ...outcome3, notes: said };
       }
     })),
     uses: inside.map((one2) => keys[one2] ?? one2),
     notes: (inputs2, _constants, formulae) => {
-      const given7 = (name) => numberOf(inputs2, name);
-      return [...saturationNotes(notedAt?.es?.(given7) ?? [], formulae), ...iceSaturationNotes(notedAt?.ei?.(given7) ?? [], formulae), ...latentHeatNotes(notedAt?.L?.(given7) ?? [], formulae)];
+      const given8 = (name) => numberOf(inputs2, name);
+      return [...saturationNotes(notedAt?.es?.(given8) ?? [], formulae), ...iceSaturationNotes(notedAt?.ei?.(given8) ?? [], formulae), ...latentHeatNotes(notedAt?.L?.(given8) ?? [], formulae)];
     },
     trace(inputs2, constants, key, formulae) {
       const hand = handOf(inputs2, constants, formulae, find2(key).key);
-      const outcome2 = outcomeOf(find2(key), hand);
-      if (outcome2.is !== "value") return [{ text: outcome2.why, formula: rest.symbol, filled: `\\text{${outcome2.is === "none" ? "none" : outcome2.is === "not_reached" ? "not reached" : "not defined"}}` }];
-      const steps2 = working(hand, outcome2.value);
-      return steps2.map((step, at) => at === steps2.length - 1 ? { ...step, value: outcome2.value, unit: rest.unit } : step);
+      const outcome3 = outcomeOf(find2(key), hand);
+      if (outcome3.is !== "value") return [{ text: outcome3.why, formula: rest.symbol, filled: `\\text{${outcome3.is === "none" ? "none" : outcome3.is === "not_reached" ? "not reached" : "not defined"}}` }];
+      const steps2 = working(hand, outcome3.value);
+      return steps2.map((step, at) => at === steps2.length - 1 ? { ...step, value: outcome3.value, unit: rest.unit } : step);
     },
     slips: slips.map((one2) => ({
       ...one2,
@@ -4782,8 +4782,8 @@ function moistQuantity({ inside = [], notedAt, remarks, working, slips, variants
         const { key } = variantOf(definition, formulae.variants[rest.key]);
         const hand = handOf(inputs2, constants, formulae, key);
         const again = (changes) => {
-          const outcome2 = outcomeOf(find2(key), { ...hand, given: (name) => changes[name] ?? hand.given(name) });
-          return outcome2.is === "value" ? outcome2.value : NaN;
+          const outcome3 = outcomeOf(find2(key), { ...hand, given: (name) => changes[name] ?? hand.given(name) });
+          return outcome3.is === "value" ? outcome3.value : NaN;
         };
         const found = one2.apply({ ...hand, right, again });
         return found === null || !Number.isFinite(found) ? null : found;
@@ -4823,7 +4823,7 @@ var atTemperatureSlip = (what) => fineMoistSlip("temperature-for-dewpoint", "tem
   const temperature6 = optionally(hand, "temperature");
   return temperature6 === null || temperature6 === hand.given("dewpoint") ? null : hand.again({ dewpoint: temperature6 });
 });
-var swappedSlip2 = moistSlip("swapped", "temperature and dewpoint swapped", "This comes from the temperature and the dewpoint in each other’s place.", ({ given: given7, again }) => again({ temperature: given7("dewpoint"), dewpoint: given7("temperature") }));
+var swappedSlip2 = moistSlip("swapped", "temperature and dewpoint swapped", "This comes from the temperature and the dewpoint in each other’s place.", ({ given: given8, again }) => again({ temperature: given8("dewpoint"), dewpoint: given8("temperature") }));
 
 // shared/thermo/moistTex.ts
 var inHectopascal = (pressure4, digits = 5) => texQuantity(pressure4 / 100, "hPa", digits);
@@ -4877,19 +4877,19 @@ function reversibleTemperature(temperature6, from2, to2, totalWater, air) {
 }
 
 // shared/thermo/quantities/adiabaticLiquidWater.ts
-var lclOf = ({ given: given7, constants, formulae }) => lclFunction(constants, formulae)(given7("temperature"), given7("dewpoint"), given7("pressureStart"));
-var waterOf = ({ given: given7, air }) => mixingRatioFrom(air.es(Math.min(given7("dewpoint"), given7("temperature"))), given7("pressureStart"), air.epsilon);
+var lclOf = ({ given: given8, constants, formulae }) => lclFunction(constants, formulae)(given8("temperature"), given8("dewpoint"), given8("pressureStart"));
+var waterOf = ({ given: given8, air }) => mixingRatioFrom(air.es(Math.min(given8("dewpoint"), given8("temperature"))), given8("pressureStart"), air.epsilon);
 function endTemperature(hand) {
-  const { given: given7, air, variant } = hand;
-  const lcl = lclOf(hand), end = given7("pressureEnd");
-  if (end >= lcl.pressure) return given7("temperature") * pow(end / given7("pressureStart"), air.kappa);
+  const { given: given8, air, variant } = hand;
+  const lcl = lclOf(hand), end = given8("pressureEnd");
+  if (end >= lcl.pressure) return given8("temperature") * pow(end / given8("pressureStart"), air.kappa);
   return variant === "reversible" ? reversibleTemperature(lcl.temperature, lcl.pressure, end, waterOf(hand), air) : pseudoadiabaticTemperature(lcl.temperature, lcl.pressure, end, air);
 }
 function liquid(hand) {
-  const { given: given7, air } = hand;
-  if (given7("pressureEnd") > given7("pressureStart")) throw new OutOfRangeError("pressureEnd", given7("pressureEnd"), `pressures up to ${given7("pressureStart")} Pa, that of the start`);
-  if (given7("pressureEnd") >= lclOf(hand).pressure) return 0;
-  return waterOf(hand) - mixingRatioFrom(air.es(endTemperature(hand)), given7("pressureEnd"), air.epsilon);
+  const { given: given8, air } = hand;
+  if (given8("pressureEnd") > given8("pressureStart")) throw new OutOfRangeError("pressureEnd", given8("pressureEnd"), `pressures up to ${given8("pressureStart")} Pa, that of the start`);
+  if (given8("pressureEnd") >= lclOf(hand).pressure) return 0;
+  return waterOf(hand) - mixingRatioFrom(air.es(endTemperature(hand)), given8("pressureEnd"), air.epsilon);
 }
 var adiabaticLiquidWaterDefinition = moistQuantity({
   key: "adiabatic-liquid-water",
@@ -4911,11 +4911,11 @@ var adiabaticLiquidWaterDefinition = moistQuantity({
   ],
   constants: ["R", "Rv", "cp", "kappa", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L", lclTemperatureKey],
-  notedAt: { es: (given7) => [given7("dewpoint")] },
+  notedAt: { es: (given8) => [given8("dewpoint")] },
   remarks: (hand, value19) => [foggy(hand.given("temperature"), hand.given("dewpoint")), value19 === 0 ? "The end lies below the condensation level: nothing has condensed." : null],
   ask: "The liquid water that has condensed per kilogram of dry air in a parcel lifted adiabatically, without mixing and without fallout, over liquid water.",
   working: (hand, value19) => {
-    const { given: given7, air } = hand, lcl = lclOf(hand), T10 = endTemperature(hand), ws2 = mixingRatioFrom(air.es(T10), given7("pressureEnd"), air.epsilon);
+    const { given: given8, air } = hand, lcl = lclOf(hand), T10 = endTemperature(hand), ws2 = mixingRatioFrom(air.es(T10), given8("pressureEnd"), air.epsilon);
     if (value19 === 0) return [{ text: "The end lies below the condensation level: nothing has condensed", formula: "w_l = 0", filled: `p_L = ${inHectopascal(lcl.pressure)},\\ w_l = 0` }];
     return [
       { text: "Mixing ratio at the start", formula: "w = w_s(T_d)", filled: `w = ${inGrams(waterOf(hand))}`, value: waterOf(hand), unit: "1" },
@@ -4956,32 +4956,32 @@ function convectiveLevel(pressures2, temperatures, surfaceDewpoint, air) {
     const p10 = pressures2[at] ?? 0, T10 = temperatures[at] ?? 0;
     if (excess(T10, p10) > 0) continue;
     const low = log(pressures2[at - 1] ?? p10), high2 = log(p10), below = temperatures[at - 1] ?? T10;
-    const between2 = (x) => below + (T10 - below) * (x - low) / (high2 - low);
-    const root = findRoot((x) => excess(between2(x), exp(x)), low, high2);
-    return { pressure: exp(root), temperature: between2(root), mixingRatio: w2, surfacePressure: surface };
+    const between3 = (x) => below + (T10 - below) * (x - low) / (high2 - low);
+    const root = findRoot((x) => excess(between3(x), exp(x)), low, high2);
+    return { pressure: exp(root), temperature: between3(root), mixingRatio: w2, surfacePressure: surface };
   }
   return null;
 }
 var convectiveTemperatureOf = (level, kappa) => level.temperature * pow(level.surfacePressure / level.pressure, kappa);
-function find(given7, constants, formulae) {
+function find(given8, constants, formulae) {
   const air = moistAir(constants, formulae);
-  return { level: convectiveLevel(seriesOf(given7, "pressure"), seriesOf(given7, "temperature"), seriesOf(given7, "dewpoint")[0] ?? 0, air), air };
+  return { level: convectiveLevel(seriesOf(given8, "pressure"), seriesOf(given8, "temperature"), seriesOf(given8, "dewpoint")[0] ?? 0, air), air };
 }
 function convectiveDefinition({ value: value19, last, slips, ...named2 }) {
   const missing = "The data end before the sounding is as cold as saturation with the mixing ratio of the lowest row.";
-  const outcome2 = (given7, constants, formulae) => {
-    const { level, air } = find(given7, constants, formulae);
+  const outcome3 = (given8, constants, formulae) => {
+    const { level, air } = find(given8, constants, formulae);
     return level ? { is: "value", value: value19(level, air), more: { pressure: level.pressure, temperature: level.temperature } } : { is: "not_reached", why: missing };
   };
   return {
     ...named2,
     inputs,
-    variants: [{ key: "lowest-row", label: "moisture of the lowest row", source: { text: 'AMS Glossary of Meteorology, "convective condensation level"', status: "common practice" }, validity: "a sounding from the ground", knownError: "the spacing of the rows; 0.3 hPa by the formula of eₛ", evaluate: outcome2 }],
+    variants: [{ key: "lowest-row", label: "moisture of the lowest row", source: { text: 'AMS Glossary of Meteorology, "convective condensation level"', status: "common practice" }, validity: "a sounding from the ground", knownError: "the spacing of the rows; 0.3 hPa by the formula of eₛ", evaluate: outcome3 }],
     constants: ["R", "Rv", "cp", "kappa", "enhancementFactor"],
     uses: [overWaterKey],
-    notes: (given7, _constants, formulae) => saturationNotes(seriesOf(given7, "dewpoint").slice(0, 1), formulae),
-    trace(given7, constants, _variant, formulae) {
-      const { level, air } = find(given7, constants, formulae);
+    notes: (given8, _constants, formulae) => saturationNotes(seriesOf(given8, "dewpoint").slice(0, 1), formulae),
+    trace(given8, constants, _variant, formulae) {
+      const { level, air } = find(given8, constants, formulae);
       if (!level) return [{ text: missing, formula: "w_s(T(p), p) > w", filled: "\\text{not reached}" }];
       const result2 = value19(level, air);
       return [
@@ -5070,8 +5070,8 @@ function daviesJonesWetBulbPotential(equivalentPotential) {
 }
 
 // shared/thermo/quantities/equivalentPotentialTemperature.ts
-var by = ({ given: given7, air }, variant) => equivalentPotentialTemperature(given7("temperature"), given7("dewpoint"), given7("pressure"), air, variant);
-var wOf = ({ given: given7, air }, T10 = given7("dewpoint")) => mixingRatioFrom(air.es(T10), given7("pressure"), air.epsilon);
+var by = ({ given: given8, air }, variant) => equivalentPotentialTemperature(given8("temperature"), given8("dewpoint"), given8("pressure"), air, variant);
+var wOf = ({ given: given8, air }, T10 = given8("dewpoint")) => mixingRatioFrom(air.es(T10), given8("pressure"), air.epsilon);
 var bolton = (equation) => ({ text: `Bolton (1980), Mon. Wea. Rev. 108, 1046–1053, Eq. ${equation}`, status: "verified" });
 var equivalentPotentialTemperatureDefinition = moistQuantity({
   key: "equivalent-potential-temperature",
@@ -5088,27 +5088,27 @@ var equivalentPotentialTemperatureDefinition = moistQuantity({
   constants: ["R", "Rv", "cp", "kappa", "cpv", "latentHeat", "cw", "enhancementFactor"],
   // the latent heat enters slips alone: the shortcut is as wide as those that are taught
   inside: ["es", "L"],
-  notedAt: { es: (given7) => [given7("dewpoint")] },
-  remarks: ({ given: given7 }) => [foggy(given7("temperature"), given7("dewpoint"))],
+  notedAt: { es: (given8) => [given8("dewpoint")] },
+  remarks: ({ given: given8 }) => [foggy(given8("temperature"), given8("dewpoint"))],
   ask: "The equivalent potential temperature θe by Bolton’s formula, with the temperature at the condensation level, referred to 1000 hPa; not θ exp(Lw/cpT).",
   working: (hand, value19) => {
-    const { given: given7, air, variant } = hand;
-    const T10 = given7("temperature"), Td = Math.min(given7("dewpoint"), T10), e = air.es(given7("dewpoint")), TL = Td < T10 ? boltonLclTemperature(T10, Td) : T10;
+    const { given: given8, air, variant } = hand;
+    const T10 = given8("temperature"), Td = Math.min(given8("dewpoint"), T10), e = air.es(given8("dewpoint")), TL = Td < T10 ? boltonLclTemperature(T10, Td) : T10;
     const formula = variant === "bolton-43" ? "\\theta_e = T\\left(\\frac{p_0}{p}\\right)^{0.2854\\,(1 - 0.28\\,w)}\\exp\\left[\\left(\\frac{3376}{T_L} - 2.54\\right) w\\,(1 + 0.81\\,w)\\right]" : "\\theta_e = T\\left(\\frac{p_0}{p - e}\\right)^{\\kappa}\\left(\\frac{T}{T_L}\\right)^{0.28\\,w}\\exp\\left[\\left(\\frac{3036}{T_L} - 1.78\\right) w\\,(1 + 0.448\\,w)\\right]";
     return [
-      { ...mixingRatioStep("w", "e", e, given7("pressure"), air), text: "Mixing ratio, with e = es(Td)" },
+      { ...mixingRatioStep("w", "e", e, given8("pressure"), air), text: "Mixing ratio, with e = es(Td)" },
       { text: "Temperature at the condensation level", formula: "T_L = \\frac{1}{\\frac{1}{T_d - 56} + \\frac{\\ln(T/T_d)}{800}} + 56", filled: `T_L = ${inKelvin(TL)}`, value: TL, unit: "K" },
       { text: "Bolton’s formula, with w in kg per kg", formula, filled: `\\theta_e = ${inKelvin(value19)}` }
     ];
   },
   slips: [
-    fineMoistSlip("shortcut", "θ exp(Lw/cpT)", "This is the shortcut θ exp(Lw/cpT), with the temperature of the parcel: asked is Bolton’s formula with that of the condensation level.", ({ given: given7, air }) => equivalentShortcut(given7("temperature"), given7("dewpoint"), given7("pressure"), air)),
+    fineMoistSlip("shortcut", "θ exp(Lw/cpT)", "This is the shortcut θ exp(Lw/cpT), with the temperature of the parcel: asked is Bolton’s formula with that of the condensation level.", ({ given: given8, air }) => equivalentShortcut(given8("temperature"), given8("dewpoint"), given8("pressure"), air)),
     fineMoistSlip("at-parcel", "temperature of the parcel for that at the level", "This takes the temperature of the parcel in place of that at its condensation level.", (hand) => {
       const T10 = hand.given("temperature"), w2 = wOf(hand);
       return hand.given("dewpoint") >= T10 ? null : T10 * pow(1e5 / hand.given("pressure"), 0.2854 * (1 - 0.28 * w2)) * exp((3376 / T10 - 2.54) * w2 * (1 + 0.81 * w2));
     }),
-    fineMoistSlip("saturated", "w at T for w at Td", "This takes the saturation mixing ratio at the temperature: that gives the saturation equivalent potential temperature.", ({ given: given7, again }) => given7("dewpoint") === given7("temperature") ? null : again({ dewpoint: given7("temperature") })),
-    fineMoistSlip("theta", "potential temperature", "This is the potential temperature: the latent heat of the vapor is not in it, or all but vanishes by w in kg per kg in a formula that takes g per kg.", ({ given: given7, air }) => given7("temperature") * pow(1e5 / given7("pressure"), air.kappa)),
+    fineMoistSlip("saturated", "w at T for w at Td", "This takes the saturation mixing ratio at the temperature: that gives the saturation equivalent potential temperature.", ({ given: given8, again }) => given8("dewpoint") === given8("temperature") ? null : again({ dewpoint: given8("temperature") })),
+    fineMoistSlip("theta", "potential temperature", "This is the potential temperature: the latent heat of the vapor is not in it, or all but vanishes by w in kg per kg in a formula that takes g per kg.", ({ given: given8, air }) => given8("temperature") * pow(1e5 / given8("pressure"), air.kappa)),
     moistSlip("standard-pressure", "1013.25 hPa for 1000 hPa", "This refers to 1013.25 hPa: θe refers to 1000 hPa.", ({ air, right }) => right * pow(1.01325, air.kappa)),
     moistSlip("celsius-exponential", "Celsius put in for kelvin in the exponential", "This comes from the shortcut with the temperature in °C in the exponential.", (hand) => {
       const t = hand.given("temperature") - zeroCelsius, value19 = hand.given("temperature") * pow(1e5 / hand.given("pressure"), hand.air.kappa) * exp(Math.min(50, hand.air.L(hand.given("temperature")) * wOf(hand) / (hand.air.cp * t)));
@@ -5128,24 +5128,24 @@ var equivalentPotentialTemperatureShortcutDefinition = moistQuantity({
   shownUnit: "K",
   kind: "temperature",
   inputs: [pressureInput2, temperatureInput2, dewpointInput],
-  variants: [{ key: "parcel", label: "with the temperature of the parcel", source: { text: "common practice: θ exp[L w/(cp T)] as textbooks print it", status: "common practice" }, validity: "as an approximation", knownError: "0.1 to 16 K below θe", value: ({ given: given7, air }) => equivalentShortcut(given7("temperature"), given7("dewpoint"), given7("pressure"), air) }],
+  variants: [{ key: "parcel", label: "with the temperature of the parcel", source: { text: "common practice: θ exp[L w/(cp T)] as textbooks print it", status: "common practice" }, validity: "as an approximation", knownError: "0.1 to 16 K below θe", value: ({ given: given8, air }) => equivalentShortcut(given8("temperature"), given8("dewpoint"), given8("pressure"), air) }],
   constants: ["R", "Rv", "cp", "kappa", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L"],
-  notedAt: { es: (given7) => [given7("dewpoint")], L: (given7) => [given7("temperature")] },
-  remarks: ({ given: given7 }) => [foggy(given7("temperature"), given7("dewpoint"))],
+  notedAt: { es: (given8) => [given8("dewpoint")], L: (given8) => [given8("temperature")] },
+  remarks: ({ given: given8 }) => [foggy(given8("temperature"), given8("dewpoint"))],
   ask: "The shortcut θ exp(Lw/cpT) for the equivalent potential temperature, with the mixing ratio and the temperature of the parcel itself.",
-  working: ({ given: given7, air }, value19) => {
-    const T10 = given7("temperature"), theta4 = T10 * pow(1e5 / given7("pressure"), air.kappa), w2 = mixingRatioFrom(air.es(given7("dewpoint")), given7("pressure"), air.epsilon), L = air.L(T10);
+  working: ({ given: given8, air }, value19) => {
+    const T10 = given8("temperature"), theta4 = T10 * pow(1e5 / given8("pressure"), air.kappa), w2 = mixingRatioFrom(air.es(given8("dewpoint")), given8("pressure"), air.epsilon), L = air.L(T10);
     return [
-      { ...mixingRatioStep("w", "e", air.es(given7("dewpoint")), given7("pressure"), air), text: "Mixing ratio, with e = es(Td)" },
+      { ...mixingRatioStep("w", "e", air.es(given8("dewpoint")), given8("pressure"), air), text: "Mixing ratio, with e = es(Td)" },
       { text: "Potential temperature", formula: "\\theta = T\\,(p_0/p)^{\\kappa}", filled: `\\theta = ${inKelvin(theta4)}`, value: theta4, unit: "K" },
       { text: "With the latent heat of all its vapor", formula: "\\theta \\exp\\frac{L\\,w}{c_p\\,T}", filled: `${texNumber(theta4, 6)} \\exp\\frac{${texNumber(L, 6)} \\cdot ${texNumber(w2)}}{${texNumber(air.cp, 6)} \\cdot ${texNumber(T10, 6)}} = ${inKelvin(value19)}` }
     ];
   },
   slips: [
-    fineMoistSlip("bolton", "Bolton’s θe", "This is the equivalent potential temperature by Bolton’s formula: asked is the shortcut.", ({ given: given7, air }) => equivalentPotentialTemperature(given7("temperature"), given7("dewpoint"), given7("pressure"), air)),
-    fineMoistSlip("theta", "potential temperature", "This is the potential temperature: the latent heat of the vapor is not in it.", ({ given: given7, air }) => given7("temperature") * pow(1e5 / given7("pressure"), air.kappa)),
-    fineMoistSlip("saturated", "w at T for w at Td", "This takes the saturation mixing ratio at the temperature.", ({ given: given7, again }) => given7("dewpoint") === given7("temperature") ? null : again({ dewpoint: given7("temperature") })),
+    fineMoistSlip("bolton", "Bolton’s θe", "This is the equivalent potential temperature by Bolton’s formula: asked is the shortcut.", ({ given: given8, air }) => equivalentPotentialTemperature(given8("temperature"), given8("dewpoint"), given8("pressure"), air)),
+    fineMoistSlip("theta", "potential temperature", "This is the potential temperature: the latent heat of the vapor is not in it.", ({ given: given8, air }) => given8("temperature") * pow(1e5 / given8("pressure"), air.kappa)),
+    fineMoistSlip("saturated", "w at T for w at Td", "This takes the saturation mixing ratio at the temperature.", ({ given: given8, again }) => given8("dewpoint") === given8("temperature") ? null : again({ dewpoint: given8("temperature") })),
     celsiusAsKelvinSlip
   ],
   example: { inputs: { pressure: 85e3, temperature: 293.15, dewpoint: 291.15 }, gives: 349.3488, within: 1e-4 }
@@ -5158,9 +5158,9 @@ var wmoHumidity = { text: "WMO-No. 8, Guide to Instruments and Methods of Observ
 // shared/thermo/isobaricMixingDefinition.ts
 var first2 = "First";
 var second2 = "Second";
-var massOf = ({ given: given7 }, which) => given7(`mass${which}`);
+var massOf = ({ given: given8 }, which) => given8(`mass${which}`);
 var shareOf = (hand) => massOf(hand, first2) / (massOf(hand, first2) + massOf(hand, second2));
-var vaporOf = ({ given: given7, air }, which) => given7(`relativeHumidity${which}`) * air.es(given7(`temperature${which}`));
+var vaporOf = ({ given: given8, air }, which) => given8(`relativeHumidity${which}`) * air.es(given8(`temperature${which}`));
 var humidityOf = (hand, which) => specificHumidityFrom(mixingRatioFrom(vaporOf(hand, which), hand.given("pressure"), hand.air.epsilon));
 var blend = (hand, a, b) => shareOf(hand) * a + (1 - shareOf(hand)) * b;
 var mixedTemperature = (hand) => blend(hand, hand.given("temperatureFirst"), hand.given("temperatureSecond"));
@@ -5185,7 +5185,7 @@ function isobaricMixingDefinition({ part, slips, ...named2 }) {
     ] : [{ key: "by-mass", label: "mean of the temperatures by mass", source: glossary("mixing cloud", "common practice"), validity: "mixing at one pressure without condensation", knownError: "0.1 K by the heat capacity of the vapor", value: value19 }],
     constants: isMoist ? part === "vapor-pressure" ? ["R", "Rv", "enhancementFactor"] : ["R", "Rv"] : [],
     inside: isMoist ? ["es"] : [],
-    notedAt: isMoist ? { es: (given7) => [given7("temperatureFirst"), given7("temperatureSecond")] } : {},
+    notedAt: isMoist ? { es: (given8) => [given8("temperatureFirst"), given8("temperatureSecond")] } : {},
     remarks: (hand) => isMoist ? [supersaturated(relative(hand))] : [],
     working: (hand, result2) => {
       const T10 = mixedTemperature(hand), m1 = massOf(hand, first2), m2 = massOf(hand, second2);
@@ -5219,7 +5219,7 @@ var isobaricMixingRelativeHumidityDefinition = isobaricMixingDefinition({
   slips: [
     fineMoistSlip("mean-humidity", "mean of the relative humidities", "This is the mean of the relative humidities: vapor is kept, relative humidity is not.", (hand) => shareOf(hand) * hand.given("relativeHumidityFirst") + (1 - shareOf(hand)) * hand.given("relativeHumiditySecond")),
     fineMoistSlip("cut-off", "cut off at 100 %", "This stops at 100 %: before anything condenses the mixture is supersaturated, and that is asked.", ({ right }) => right > 1.0005 ? 1 : null),
-    fineMoistSlip("masses-swapped", "masses swapped", "This comes from the masses in each other’s place.", ({ given: given7, again }) => given7("massFirst") === given7("massSecond") ? null : again({ massFirst: given7("massSecond"), massSecond: given7("massFirst") })),
+    fineMoistSlip("masses-swapped", "masses swapped", "This comes from the masses in each other’s place.", ({ given: given8, again }) => given8("massFirst") === given8("massSecond") ? null : again({ massFirst: given8("massSecond"), massSecond: given8("massFirst") })),
     fractionAsPercentSlip
   ],
   example: { inputs: { massFirst: 1, temperatureFirst: 273.15, massSecond: 1, temperatureSecond: 303.15, relativeHumidityFirst: 1, relativeHumiditySecond: 0.8, pressure: 1e5 }, gives: 1.1802588, within: 1e-6 }
@@ -5236,8 +5236,8 @@ var isobaricMixingTemperatureDefinition = isobaricMixingDefinition({
   part: "temperature",
   ask: "The temperature of the mixture of the two bodies of air at one pressure, before anything condenses.",
   slips: [
-    fineMoistSlip("plain-mean", "mean without the masses", "This is the plain mean: the masses differ.", ({ given: given7 }) => given7("massFirst") === given7("massSecond") ? null : (given7("temperatureFirst") + given7("temperatureSecond")) / 2),
-    fineMoistSlip("masses-swapped", "masses swapped", "This comes from the masses in each other’s place.", ({ given: given7, again }) => given7("massFirst") === given7("massSecond") ? null : again({ massFirst: given7("massSecond"), massSecond: given7("massFirst") })),
+    fineMoistSlip("plain-mean", "mean without the masses", "This is the plain mean: the masses differ.", ({ given: given8 }) => given8("massFirst") === given8("massSecond") ? null : (given8("temperatureFirst") + given8("temperatureSecond")) / 2),
+    fineMoistSlip("masses-swapped", "masses swapped", "This comes from the masses in each other’s place.", ({ given: given8, again }) => given8("massFirst") === given8("massSecond") ? null : again({ massFirst: given8("massSecond"), massSecond: given8("massFirst") })),
     kelvinAsCelsiusSlip
   ],
   example: { inputs: { massFirst: 1, temperatureFirst: 273.15, massSecond: 1, temperatureSecond: 303.15 }, gives: 288.15, within: 1e-9 }
@@ -5260,7 +5260,7 @@ var isobaricMixingVaporPressureDefinition = isobaricMixingDefinition({
     }),
     fineMoistSlip("plain-mean", "mean without the masses", "This is the plain mean of the vapor pressures: the masses differ.", (hand) => hand.given("massFirst") === hand.given("massSecond") ? null : (vaporOf(hand, "First") + vaporOf(hand, "Second")) / 2),
     fineMoistSlip("saturation", "saturation at the mixture’s temperature", "This is saturation at the temperature of the mixture: what it holds is the mean of what the two held.", (hand) => hand.air.es(mixedTemperature(hand))),
-    fineMoistSlip("masses-swapped", "masses swapped", "This comes from the masses in each other’s place.", ({ given: given7, again }) => given7("massFirst") === given7("massSecond") ? null : again({ massFirst: given7("massSecond"), massSecond: given7("massFirst") })),
+    fineMoistSlip("masses-swapped", "masses swapped", "This comes from the masses in each other’s place.", ({ given: given8, again }) => given8("massFirst") === given8("massSecond") ? null : again({ massFirst: given8("massSecond"), massSecond: given8("massFirst") })),
     pascalSlip,
     kilopascalSlip
   ],
@@ -5268,7 +5268,7 @@ var isobaricMixingVaporPressureDefinition = isobaricMixingDefinition({
 });
 
 // shared/thermo/lclDefinition.ts
-var lclOf2 = ({ given: given7, constants, formulae, variant }) => lclFunction(constants, formulae, variant)(given7("temperature"), given7("dewpoint"), given7("pressure"));
+var lclOf2 = ({ given: given8, constants, formulae, variant }) => lclFunction(constants, formulae, variant)(given8("temperature"), given8("dewpoint"), given8("pressure"));
 var solution = {
   bolton: { text: "Temperature at the level, by Bolton’s equation 15", formula: "T_L = \\frac{1}{\\frac{1}{T_d - 56} + \\frac{\\ln(T/T_d)}{800}} + 56" },
   romps: { text: "Temperature at the level, by Romps’ closed form", formula: "T_L = c\\,\\left[W_{-1}\\left(\\mathit{RH}^{1/a}\\,c\\,e^{c}\\right)\\right]^{-1} T" },
@@ -5286,16 +5286,16 @@ function lclDefinition({ part, more = [], slips, ...named2 }) {
     variants: [...part === "heightAboveStart" ? [romps2, bolton2] : [bolton2, romps2], solved2, ...more],
     constants: part === "heightAboveStart" ? ["R", "Rv", "cp", "g", "kappa"] : ["R", "Rv", "cp", "kappa"],
     inside: ["es"],
-    remarks: ({ given: given7 }) => [foggy(given7("temperature"), given7("dewpoint"))],
+    remarks: ({ given: given8 }) => [foggy(given8("temperature"), given8("dewpoint"))],
     working: (hand, value20) => {
-      const { given: given7, air, variant } = hand;
-      if (variant === "espy") return [{ text: "The 125 m per kelvin rule", formula: "z_L = 125\\,(T - T_d)", filled: `z_L = 125 \\cdot ${texNumber(given7("temperature") - given7("dewpoint"))} = ${texQuantity(value20, "m")}` }];
+      const { given: given8, air, variant } = hand;
+      if (variant === "espy") return [{ text: "The 125 m per kelvin rule", formula: "z_L = 125\\,(T - T_d)", filled: `z_L = 125 \\cdot ${texNumber(given8("temperature") - given8("dewpoint"))} = ${texQuantity(value20, "m")}` }];
       const lcl = lclOf2(hand), how = solution[variant] ?? solution.bolton;
       const first3 = { text: how?.text ?? "", formula: how?.formula ?? "", filled: `T_L = ${texQuantity(lcl.temperature, "K", 6)} = ${inCelsius(lcl.temperature)}`, value: lcl.temperature, unit: "K" };
       const exponent2 = variant === "romps" ? "c_{pm}/R_m" : "1/\\kappa";
       if (part === "temperature") return [first3];
-      if (part === "pressure") return [first3, { text: "Along the dry adiabat, with the temperatures in kelvin", formula: `p_L = p\\left(\\frac{T_L}{T}\\right)^{${exponent2}}`, filled: `p_L = ${texNumber(given7("pressure") / 100, 6)}\\left(\\frac{${texNumber(lcl.temperature, 6)}}{${texNumber(given7("temperature"), 6)}}\\right)^{${exponent2}} = ${inHectopascal(value20)}` }];
-      return [first3, { text: "At the dry adiabatic lapse rate, above the parcel’s start", formula: variant === "romps" ? "z_L = \\frac{c_{pm}}{g}\\,(T - T_L)" : "z_L = \\frac{c_p}{g}\\,(T - T_L)", filled: `z_L = ${variant === "romps" ? "\\frac{c_{pm}}{g}" : `\\frac{${texNumber(air.cp, 6)}}{${texNumber(air.g, 6)}}`} \\cdot ${texNumber(given7("temperature") - lcl.temperature)} = ${texQuantity(value20, "m")}` }];
+      if (part === "pressure") return [first3, { text: "Along the dry adiabat, with the temperatures in kelvin", formula: `p_L = p\\left(\\frac{T_L}{T}\\right)^{${exponent2}}`, filled: `p_L = ${texNumber(given8("pressure") / 100, 6)}\\left(\\frac{${texNumber(lcl.temperature, 6)}}{${texNumber(given8("temperature"), 6)}}\\right)^{${exponent2}} = ${inHectopascal(value20)}` }];
+      return [first3, { text: "At the dry adiabatic lapse rate, above the parcel’s start", formula: variant === "romps" ? "z_L = \\frac{c_{pm}}{g}\\,(T - T_L)" : "z_L = \\frac{c_p}{g}\\,(T - T_L)", filled: `z_L = ${variant === "romps" ? "\\frac{c_{pm}}{g}" : `\\frac{${texNumber(air.cp, 6)}}{${texNumber(air.g, 6)}}`} \\cdot ${texNumber(given8("temperature") - lcl.temperature)} = ${texQuantity(value20, "m")}` }];
     },
     slips
   });
@@ -5311,10 +5311,10 @@ var liftingCondensationLevelHeightDefinition = lclDefinition({
   kind: "difference",
   nearZero: 50,
   part: "heightAboveStart",
-  more: [{ key: "espy", label: "the 125 m per kelvin rule", source: { text: "Lawrence (2005), Bull. Amer. Meteor. Soc. 86, 225–233", status: "from memory" }, validity: "RH above 50 %", knownError: "1 to 3 %", value: ({ given: given7 }) => 125 * Math.max(0, given7("temperature") - given7("dewpoint")) }],
+  more: [{ key: "espy", label: "the 125 m per kelvin rule", source: { text: "Lawrence (2005), Bull. Amer. Meteor. Soc. 86, 225–233", status: "from memory" }, validity: "RH above 50 %", knownError: "1 to 3 %", value: ({ given: given8 }) => 125 * Math.max(0, given8("temperature") - given8("dewpoint")) }],
   ask: "The height of the lifting condensation level above the parcel’s start, lifted without mixing; above ground or sea level it is the start’s height more.",
   slips: [
-    fineMoistSlip("whole-spread", "T − Td at Γd", "This takes the whole of T − Td at the dry adiabatic lapse rate: the dewpoint falls too as the parcel rises.", ({ given: given7, air }) => given7("dewpoint") >= given7("temperature") ? null : air.cp / air.g * (given7("temperature") - given7("dewpoint"))),
+    fineMoistSlip("whole-spread", "T − Td at Γd", "This takes the whole of T − Td at the dry adiabatic lapse rate: the dewpoint falls too as the parcel rises.", ({ given: given8, air }) => given8("dewpoint") >= given8("temperature") ? null : air.cp / air.g * (given8("temperature") - given8("dewpoint"))),
     moistSlip("feet-for-meters", "feet given as meters", "Your number is in feet; the unit beside it says meters.", ({ right }) => right / 0.3048),
     moistSlip("kilometers-for-meters", "km given as m", "Your number is in kilometers; the unit beside it says meters.", ({ right }) => right / 1e3),
     moistSlip("standard-atmosphere", "6.5 K km⁻¹ for Γd", "This comes from 6.5 K km⁻¹, the mean rate of the standard atmosphere: an unsaturated parcel cools at Γd.", ({ right, air }) => right * (air.g / air.cp) / 65e-4)
@@ -5333,14 +5333,14 @@ var liftingCondensationLevelPressureDefinition = lclDefinition({
   part: "pressure",
   ask: "The pressure at the lifting condensation level of a parcel lifted dry-adiabatically from the start.",
   slips: [
-    fineMoistSlip("from-1000", "1000 hPa for the start", "This starts from 1000 hPa: the parcel starts at the pressure given.", ({ given: given7, right }) => given7("pressure") === 1e5 ? null : right * 1e5 / given7("pressure")),
-    fineMoistSlip("dewpoint", "dewpoint for the temperature at the level", "This comes from the dewpoint at the start in place of the temperature at the level.", ({ given: given7, air }) => given7("dewpoint") >= given7("temperature") ? null : given7("pressure") * pow(given7("dewpoint") / given7("temperature"), 1 / air.kappa)),
+    fineMoistSlip("from-1000", "1000 hPa for the start", "This starts from 1000 hPa: the parcel starts at the pressure given.", ({ given: given8, right }) => given8("pressure") === 1e5 ? null : right * 1e5 / given8("pressure")),
+    fineMoistSlip("dewpoint", "dewpoint for the temperature at the level", "This comes from the dewpoint at the start in place of the temperature at the level.", ({ given: given8, air }) => given8("dewpoint") >= given8("temperature") ? null : given8("pressure") * pow(given8("dewpoint") / given8("temperature"), 1 / air.kappa)),
     moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This comes from temperatures in °C: Poisson’s relation takes kelvin.", (hand) => {
       const T10 = hand.given("temperature") - zeroCelsius, TL = lclOf2(hand).temperature - zeroCelsius;
       return T10 > 0 && TL > 0 && TL < T10 ? hand.given("pressure") * pow(TL / T10, 1 / hand.air.kappa) : null;
     }),
     moistSlip("inverted-exponent", "exponent turned round", "This comes from the exponent κ in place of 1/κ.", (hand) => hand.given("dewpoint") >= hand.given("temperature") ? null : hand.given("pressure") * pow(lclOf2(hand).temperature / hand.given("temperature"), hand.air.kappa)),
-    moistSlip("inverted-ratio", "ratio turned round", "This lies below the start: the ratio of the temperatures is turned round.", ({ given: given7, right }) => given7("dewpoint") >= given7("temperature") ? null : given7("pressure") * given7("pressure") / right),
+    moistSlip("inverted-ratio", "ratio turned round", "This lies below the start: the ratio of the temperatures is turned round.", ({ given: given8, right }) => given8("dewpoint") >= given8("temperature") ? null : given8("pressure") * given8("pressure") / right),
     pascalSlip,
     kilopascalSlip
   ],
@@ -5358,8 +5358,8 @@ var liftingCondensationLevelTemperatureDefinition = lclDefinition({
   part: "temperature",
   ask: "The temperature of the parcel at its lifting condensation level, lifted dry-adiabatically from the start.",
   slips: [
-    fineMoistSlip("dewpoint", "dewpoint at the start", "This is the dewpoint at the start: it falls as the parcel rises, by about 2 K per km.", ({ given: given7 }) => given7("dewpoint") >= given7("temperature") ? null : given7("dewpoint")),
-    fineMoistSlip("mean", "mean of temperature and dewpoint", "This is the mean of temperature and dewpoint.", ({ given: given7 }) => given7("dewpoint") >= given7("temperature") ? null : (given7("temperature") + given7("dewpoint")) / 2),
+    fineMoistSlip("dewpoint", "dewpoint at the start", "This is the dewpoint at the start: it falls as the parcel rises, by about 2 K per km.", ({ given: given8 }) => given8("dewpoint") >= given8("temperature") ? null : given8("dewpoint")),
+    fineMoistSlip("mean", "mean of temperature and dewpoint", "This is the mean of temperature and dewpoint.", ({ given: given8 }) => given8("dewpoint") >= given8("temperature") ? null : (given8("temperature") + given8("dewpoint")) / 2),
     kelvinAsCelsiusSlip
   ],
   example: { inputs: { pressure: 94300, temperature: 306.15, dewpoint: 301.15 }, gives: 299.919, within: 1e-3 }
@@ -5378,13 +5378,13 @@ var moistStaticEnergyDefinition = moistQuantity({
     { name: "heightAboveDatum", label: "height above the datum", symbol: "z", unit: "m", shownUnit: "m", kind: "difference", shape: "number", range: [-500, 3e4] },
     { ...mixingRatioInput, name: "specificHumidity", label: "specific humidity", symbol: "q", range: [0, 0.1] }
   ],
-  variants: [{ key: "sum", label: "cp T + g z + L q", source: glossary("moist static energy", "common practice"), validity: "hydrostatic air", knownError: "0.7 kJ kg⁻¹ by cp and L", value: ({ given: given7, air }) => air.cp * given7("temperature") + air.g * given7("heightAboveDatum") + air.L(given7("temperature")) * given7("specificHumidity") }],
+  variants: [{ key: "sum", label: "cp T + g z + L q", source: glossary("moist static energy", "common practice"), validity: "hydrostatic air", knownError: "0.7 kJ kg⁻¹ by cp and L", value: ({ given: given8, air }) => air.cp * given8("temperature") + air.g * given8("heightAboveDatum") + air.L(given8("temperature")) * given8("specificHumidity") }],
   constants: ["cp", "g", "cpv", "latentHeat", "cw"],
   inside: ["L"],
-  notedAt: { L: (given7) => [given7("temperature")] },
+  notedAt: { L: (given8) => [given8("temperature")] },
   ask: "The moist static energy cp T + g z + L q per kilogram, with T in kelvin, z above the datum and the specific humidity.",
-  working: ({ given: given7, air }, value19) => {
-    const T10 = given7("temperature"), z3 = given7("heightAboveDatum"), q = given7("specificHumidity"), L = air.L(T10);
+  working: ({ given: given8, air }, value19) => {
+    const T10 = given8("temperature"), z3 = given8("heightAboveDatum"), q = given8("specificHumidity"), L = air.L(T10);
     return [
       { text: "Enthalpy, with T in kelvin", formula: "c_p\\,T", filled: `${texNumber(air.cp / 1e3, 6)} \\cdot ${texNumber(T10, 6)} = ${texQuantity(air.cp * T10 / 1e3, "kJ/kg", 6)}`, value: air.cp * T10, unit: "J/kg" },
       { text: "Geopotential", formula: "g\\,z", filled: `${texNumber(air.g, 6)} \\cdot ${texFactor(z3)} = ${texQuantity(air.g * z3 / 1e3, "kJ/kg", 6)}`, value: air.g * z3, unit: "J/kg" },
@@ -5394,11 +5394,11 @@ var moistStaticEnergyDefinition = moistQuantity({
   },
   slips: [
     moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This counts the temperature from 0 °C: it is counted from 0 K. Differences are right, values are not.", ({ air, right }) => right - air.cp * zeroCelsius),
-    fineMoistSlip("dry", "without L q", "This is the dry static energy: the latent heat of the vapor is missing.", ({ given: given7, air }) => air.cp * given7("temperature") + air.g * given7("heightAboveDatum")),
-    fineMoistSlip("without-height", "without g z", "This leaves out the geopotential g z.", ({ given: given7, air, right }) => given7("heightAboveDatum") === 0 ? null : right - air.g * given7("heightAboveDatum")),
-    moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with the humidity in g per kg: the formula takes kg per kg.", ({ given: given7, again }) => given7("specificHumidity") === 0 ? null : again({ specificHumidity: 1e3 * given7("specificHumidity") })),
+    fineMoistSlip("dry", "without L q", "This is the dry static energy: the latent heat of the vapor is missing.", ({ given: given8, air }) => air.cp * given8("temperature") + air.g * given8("heightAboveDatum")),
+    fineMoistSlip("without-height", "without g z", "This leaves out the geopotential g z.", ({ given: given8, air, right }) => given8("heightAboveDatum") === 0 ? null : right - air.g * given8("heightAboveDatum")),
+    moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with the humidity in g per kg: the formula takes kg per kg.", ({ given: given8, again }) => given8("specificHumidity") === 0 ? null : again({ specificHumidity: 1e3 * given8("specificHumidity") })),
     moistSlip("joules-for-kilojoules", "J given as kJ", "Your number is in joules; the unit beside it says kilojoules.", ({ right }) => right * 1e3),
-    moistSlip("kilojoules-added", "kJ and J added", "This adds g z in joules to terms in kilojoules.", ({ given: given7, air, right }) => given7("heightAboveDatum") === 0 ? null : right + 999 * air.g * given7("heightAboveDatum"))
+    moistSlip("kilojoules-added", "kJ and J added", "This adds g z in joules to terms in kilojoules.", ({ given: given8, air, right }) => given8("heightAboveDatum") === 0 ? null : right + 999 * air.g * given8("heightAboveDatum"))
   ],
   example: { inputs: { temperature: 298.15, heightAboveDatum: 500, specificHumidity: 0.012 }, gives: 333548.6, within: 1 }
 });
@@ -5437,7 +5437,7 @@ var iceCoefficients = [
 ];
 
 // shared/thermo/quantities/pseudoadiabaticWetBulbTemperature.ts
-var lclOf3 = ({ given: given7, constants, formulae }) => lclFunction(constants, formulae)(given7("temperature"), given7("dewpoint"), given7("pressure"));
+var lclOf3 = ({ given: given8, constants, formulae }) => lclFunction(constants, formulae)(given8("temperature"), given8("dewpoint"), given8("pressure"));
 var pseudoadiabaticWetBulbTemperatureDefinition = moistQuantity({
   key: "pseudoadiabatic-wet-bulb-temperature",
   name: "pseudoadiabatic wet-bulb temperature",
@@ -5449,8 +5449,8 @@ var pseudoadiabaticWetBulbTemperatureDefinition = moistQuantity({
   variants: [{ key: "normand", label: "Normand’s rule", source: glossary("wet-bulb temperature", "common practice"), validity: "over liquid water", knownError: "0.1 K by the formulae inside", value: (hand) => pseudoadiabaticWetBulb(hand.given("pressure"), lclOf3(hand), hand.air) }],
   constants: ["R", "Rv", "cp", "kappa", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L", lclTemperatureKey],
-  notedAt: { es: (given7) => [given7("dewpoint")] },
-  remarks: ({ given: given7 }) => [foggy(given7("temperature"), given7("dewpoint"))],
+  notedAt: { es: (given8) => [given8("dewpoint")] },
+  remarks: ({ given: given8 }) => [foggy(given8("temperature"), given8("dewpoint"))],
   ask: "The pseudoadiabatic wet-bulb temperature: lifted dry-adiabatically to condensation, then lowered along the pseudoadiabat to the pressure of the start.",
   working: (hand, value19) => {
     const lcl = lclOf3(hand);
@@ -5460,9 +5460,9 @@ var pseudoadiabaticWetBulbTemperatureDefinition = moistQuantity({
     ];
   },
   slips: [
-    fineMoistSlip("isobaric", "isobaric wet bulb", "This is the isobaric wet bulb: asked is that by lifting and lowering.", ({ given: given7, air }) => given7("dewpoint") >= given7("temperature") ? null : isobaricWetBulb(given7("temperature"), mixingRatioFrom(air.es(given7("dewpoint")), given7("pressure"), air.epsilon), given7("pressure"), air)),
+    fineMoistSlip("isobaric", "isobaric wet bulb", "This is the isobaric wet bulb: asked is that by lifting and lowering.", ({ given: given8, air }) => given8("dewpoint") >= given8("temperature") ? null : isobaricWetBulb(given8("temperature"), mixingRatioFrom(air.es(given8("dewpoint")), given8("pressure"), air.epsilon), given8("pressure"), air)),
     fineMoistSlip("lcl", "temperature at the condensation level", "This is the temperature at the condensation level: it is still to be lowered to the start.", (hand) => hand.given("dewpoint") >= hand.given("temperature") ? null : lclOf3(hand).temperature),
-    fineMoistSlip("mean", "mean of temperature and dewpoint", "This is the mean of temperature and dewpoint.", ({ given: given7 }) => given7("dewpoint") === given7("temperature") ? null : (given7("temperature") + given7("dewpoint")) / 2),
+    fineMoistSlip("mean", "mean of temperature and dewpoint", "This is the mean of temperature and dewpoint.", ({ given: given8 }) => given8("dewpoint") === given8("temperature") ? null : (given8("temperature") + given8("dewpoint")) / 2),
     kelvinAsCelsiusSlip
   ],
   example: { inputs: { pressure: 95461, temperature: 303.15, dewpoint: 296.49 }, gives: 298.1528, within: 1e-4 }
@@ -5487,23 +5487,23 @@ var reversibleAscentTemperatureDefinition = moistQuantity({
     source: { text: "Emanuel (1994), Atmospheric Convection, Eq. 4.5.9", status: "from memory" },
     validity: "saturated air over liquid water",
     knownError: "0.1 K",
-    value: ({ given: given7, air }) => reversibleTemperature(given7("temperature"), given7("pressureStart"), given7("pressureEnd"), mixingRatioFrom(air.es(given7("temperature")), given7("pressureStart"), air.epsilon), air)
+    value: ({ given: given8, air }) => reversibleTemperature(given8("temperature"), given8("pressureStart"), given8("pressureEnd"), mixingRatioFrom(air.es(given8("temperature")), given8("pressureStart"), air.epsilon), air)
   }],
   constants: ["R", "Rv", "cp", "cw", "cpv", "latentHeat", "enhancementFactor"],
   inside: ["es", "L"],
-  notedAt: { es: (given7) => [given7("temperature")], L: (given7) => [given7("temperature")] },
-  remarks: ({ given: given7 }) => [given7("pressureEnd") > given7("pressureStart") ? "The end lies below the start, where the air has no liquid water to evaporate: it would warm dry-adiabatically." : null],
+  notedAt: { es: (given8) => [given8("temperature")], L: (given8) => [given8("temperature")] },
+  remarks: ({ given: given8 }) => [given8("pressureEnd") > given8("pressureStart") ? "The end lies below the start, where the air has no liquid water to evaporate: it would warm dry-adiabatically." : null],
   ask: "The temperature of saturated air after it is lifted reversibly, over liquid water; condensed water stays in the parcel and is cooled with it.",
-  working: ({ given: given7, air }, value19) => {
-    const water2 = mixingRatioFrom(air.es(given7("temperature")), given7("pressureStart"), air.epsilon);
+  working: ({ given: given8, air }, value19) => {
+    const water2 = mixingRatioFrom(air.es(given8("temperature")), given8("pressureStart"), air.epsilon);
     return [
       { text: "All the water of the parcel: saturation at the start", formula: "w_t = w_s(T_1, p_1)", filled: `w_t = ${inGrams(water2)}`, value: water2, unit: "1" },
       { text: "The temperature at the end that keeps the moist entropy, found by a bracket", formula: "(c_p + w_t c_w) \\ln T - R \\ln(p - e_s) + \\frac{L w_s}{T} = \\text{const.}", filled: `T_2 = ${inCelsius(value19)}` }
     ];
   },
   slips: [
-    fineMoistSlip("pseudoadiabatic", "along the pseudoadiabat", "This leaves the condensed water behind: asked is the reversible ascent.", ({ given: given7, air }) => pseudoadiabaticTemperature(given7("temperature"), given7("pressureStart"), given7("pressureEnd"), air)),
-    moistSlip("dry", "dry adiabat", "This goes along the dry adiabat: saturated air cools less as it rises.", ({ given: given7, air }) => given7("temperature") * pow(given7("pressureEnd") / given7("pressureStart"), air.kappa)),
+    fineMoistSlip("pseudoadiabatic", "along the pseudoadiabat", "This leaves the condensed water behind: asked is the reversible ascent.", ({ given: given8, air }) => pseudoadiabaticTemperature(given8("temperature"), given8("pressureStart"), given8("pressureEnd"), air)),
+    moistSlip("dry", "dry adiabat", "This goes along the dry adiabat: saturated air cools less as it rises.", ({ given: given8, air }) => given8("temperature") * pow(given8("pressureEnd") / given8("pressureStart"), air.kappa)),
     kelvinAsCelsiusSlip
   ],
   example: { inputs: { pressureStart: 92500, temperature: 278.15, pressureEnd: 7e4 }, gives: 264.3384, within: 1e-4 }
@@ -5529,16 +5529,16 @@ var reversibleSaturatedLapseRateDefinition = moistQuantity({
   kind: "difference",
   nearZero: 1e-3,
   inputs: [pressureInput2, temperatureInput2, { ...mixingRatioInput, name: "liquidWater", label: "liquid water mixing ratio of the parcel", symbol: "w_l", range: [0, 0.05] }],
-  variants: [{ key: "full", label: "with the heat capacities of vapor and liquid", source: glossary("moist-adiabatic lapse rate"), validity: "saturated air over liquid water", knownError: "0.2 %", value: ({ given: given7, air }) => fullSaturatedRate(given7("temperature"), given7("pressure"), given7("liquidWater"), air) }],
+  variants: [{ key: "full", label: "with the heat capacities of vapor and liquid", source: glossary("moist-adiabatic lapse rate"), validity: "saturated air over liquid water", knownError: "0.2 %", value: ({ given: given8, air }) => fullSaturatedRate(given8("temperature"), given8("pressure"), given8("liquidWater"), air) }],
   constants: ["R", "Rv", "cp", "g", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L"],
-  notedAt: { es: (given7) => [given7("temperature")], L: (given7) => [given7("temperature")] },
+  notedAt: { es: (given8) => [given8("temperature")], L: (given8) => [given8("temperature")] },
   ask: "The reversible saturated adiabatic lapse rate −dT/dz at the temperature and the pressure, over liquid water; condensed water stays in the parcel.",
-  working: ({ given: given7, air }, value19) => {
-    const e = air.es(given7("temperature"));
+  working: ({ given: given8, air }, value19) => {
+    const e = air.es(given8("temperature"));
     return [
-      { ...mixingRatioStep("w_s", "e_s", e, given7("pressure"), air), text: "Saturation mixing ratio" },
-      { text: "All the water of the parcel", formula: "w_t = w_s + w_l", filled: `w_t = ${inGrams(mixingRatioFrom(e, given7("pressure"), air.epsilon) + given7("liquidWater"))}`, value: mixingRatioFrom(e, given7("pressure"), air.epsilon) + given7("liquidWater"), unit: "1" },
+      { ...mixingRatioStep("w_s", "e_s", e, given8("pressure"), air), text: "Saturation mixing ratio" },
+      { text: "All the water of the parcel", formula: "w_t = w_s + w_l", filled: `w_t = ${inGrams(mixingRatioFrom(e, given8("pressure"), air.epsilon) + given8("liquidWater"))}`, value: mixingRatioFrom(e, given8("pressure"), air.epsilon) + given8("liquidWater"), unit: "1" },
       { text: "The water that stays is cooled too", formula: "\\Gamma_{rm} = g\\,\\frac{(1 + w_t)\\left(1 + \\frac{L w_s}{R T}\\right)}{c_p + w_s c_{pv} + w_l c_w + \\frac{L^2 w_s (\\varepsilon + w_s)}{R T^2}}", filled: `\\Gamma_{rm} = ${texQuantity(value19 * 1e3, "K/km")}` }
     ];
   },
@@ -5546,7 +5546,7 @@ var reversibleSaturatedLapseRateDefinition = moistQuantity({
     moistSlip("sign", "sign turned round", "A lapse rate is positive where temperature falls with height.", ({ right }) => -right),
     moistSlip("per-meter", "K m⁻¹ given as K km⁻¹", "Your value is the rate per meter: multiply it by 1000 for the rate per kilometer.", ({ right }) => right / 1e3),
     // with little liquid as small as the spread of accepted formulae
-    smallMoistSlip("pseudoadiabatic", "condensed water left out", "This is the pseudoadiabatic rate, of which the condensed water is no part: asked is the reversible one.", ({ given: given7, air }) => saturatedRate(given7("temperature"), given7("pressure"), air)),
+    smallMoistSlip("pseudoadiabatic", "condensed water left out", "This is the pseudoadiabatic rate, of which the condensed water is no part: asked is the reversible one.", ({ given: given8, air }) => saturatedRate(given8("temperature"), given8("pressure"), air)),
     moistSlip("dry-rate", "Γd for Γm", "This is the dry adiabatic lapse rate g/cp: saturated air cools less as it rises.", ({ air }) => air.g / air.cp)
   ],
   example: { inputs: { pressure: 7e4, temperature: 273.15, liquidWater: 6e-3 }, gives: 5705015e-9, within: 1e-8 }
@@ -5563,18 +5563,18 @@ var saturatedAdiabaticLapseRateDefinition = moistQuantity({
   nearZero: 1e-3,
   inputs: [pressureInput2, temperatureInput2],
   variants: [
-    { key: "approximate", label: "without the heat capacity of the vapor", source: glossary("adiabatic lapse rate"), validity: "saturated air over liquid water", knownError: "1 %", value: ({ given: given7, air }) => saturatedRate(given7("temperature"), given7("pressure"), air) },
-    { key: "full", label: "with the heat capacity of the vapor", source: glossary("moist-adiabatic lapse rate"), validity: "saturated air over liquid water", knownError: "0.2 %", value: ({ given: given7, air }) => fullSaturatedRate(given7("temperature"), given7("pressure"), 0, air) }
+    { key: "approximate", label: "without the heat capacity of the vapor", source: glossary("adiabatic lapse rate"), validity: "saturated air over liquid water", knownError: "1 %", value: ({ given: given8, air }) => saturatedRate(given8("temperature"), given8("pressure"), air) },
+    { key: "full", label: "with the heat capacity of the vapor", source: glossary("moist-adiabatic lapse rate"), validity: "saturated air over liquid water", knownError: "0.2 %", value: ({ given: given8, air }) => fullSaturatedRate(given8("temperature"), given8("pressure"), 0, air) }
   ],
   constants: ["R", "Rv", "cp", "g", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L"],
-  notedAt: { es: (given7) => [given7("temperature")], L: (given7) => [given7("temperature")] },
+  notedAt: { es: (given8) => [given8("temperature")], L: (given8) => [given8("temperature")] },
   ask: "The saturated (pseudo)adiabatic lapse rate Γm = −dT/dz at the temperature and the pressure, over liquid water; condensed water leaves at once.",
-  working: ({ given: given7, air, variant }, value19) => {
-    const T10 = given7("temperature"), e = air.es(T10), w2 = mixingRatioFrom(e, given7("pressure"), air.epsilon), L = air.L(T10);
+  working: ({ given: given8, air, variant }, value19) => {
+    const T10 = given8("temperature"), e = air.es(T10), w2 = mixingRatioFrom(e, given8("pressure"), air.epsilon), L = air.L(T10);
     const a = L * w2 / (air.R * T10), b = L * L * w2 * air.epsilon / (air.R * T10 * T10);
     return [
-      { ...mixingRatioStep("w_s", "e_s", e, given7("pressure"), air), text: "Saturation mixing ratio" },
+      { ...mixingRatioStep("w_s", "e_s", e, given8("pressure"), air), text: "Saturation mixing ratio" },
       { text: "Latent heat", formula: "L", filled: `L = ${texQuantity(L / 1e3, "kJ/kg", 6)}`, value: L, unit: "J/kg" },
       variant === "full" ? { text: "With the heat capacity of the vapor", formula: "\\Gamma_m = g\\,\\frac{(1 + w_s)\\left(1 + \\frac{L w_s}{R T}\\right)}{c_p + w_s c_{pv} + \\frac{L^2 w_s (\\varepsilon + w_s)}{R T^2}}", filled: `\\Gamma_m = ${texQuantity(value19 * 1e3, "K/km")}` } : { text: "The latent heat pays for part of the cooling", formula: "\\Gamma_m = g\\,\\frac{1 + \\frac{L w_s}{R T}}{c_p + \\frac{L^2 w_s \\varepsilon}{R T^2}}", filled: `\\Gamma_m = ${texNumber(air.g)} \\cdot \\frac{1 + ${texNumber(a)}}{${texNumber(air.cp, 6)} + ${texNumber(b)}} = ${texQuantity(value19 * 1e3, "K/km")}` }
     ];
@@ -5586,16 +5586,16 @@ var saturatedAdiabaticLapseRateDefinition = moistQuantity({
     fineMoistSlip("dry-rate", "Γd for Γm", "This is the dry adiabatic lapse rate g/cp: saturated air cools less as it rises.", ({ air }) => air.g / air.cp),
     fineMoistSlip("six", "6 K km⁻¹ as a constant", "This is a round number for the middle latitudes: Γm depends on temperature and pressure.", () => 6e-3),
     fineMoistSlip("six-and-a-half", "6.5 K km⁻¹", "This is the mean lapse rate of the standard atmosphere, which is no saturated rate.", () => 65e-4),
-    moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This comes from R T and R T² with the temperature in °C: they take kelvin.", ({ given: given7, air }) => {
-      const T10 = given7("temperature"), t = T10 - zeroCelsius, w2 = mixingRatioFrom(air.es(T10), given7("pressure"), air.epsilon), L = air.L(T10);
+    moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This comes from R T and R T² with the temperature in °C: they take kelvin.", ({ given: given8, air }) => {
+      const T10 = given8("temperature"), t = T10 - zeroCelsius, w2 = mixingRatioFrom(air.es(T10), given8("pressure"), air.epsilon), L = air.L(T10);
       return Math.abs(t) < 0.5 ? null : air.g * (1 + L * w2 / (air.R * t)) / (air.cp + L * L * w2 * air.epsilon / (air.R * t * t));
     }),
-    fineMoistSlip("numerator", "without 1 + Lw/RT", "This comes without the term L w/(R T) in the numerator.", ({ given: given7, air }) => {
-      const T10 = given7("temperature"), w2 = mixingRatioFrom(air.es(T10), given7("pressure"), air.epsilon), L = air.L(T10);
+    fineMoistSlip("numerator", "without 1 + Lw/RT", "This comes without the term L w/(R T) in the numerator.", ({ given: given8, air }) => {
+      const T10 = given8("temperature"), w2 = mixingRatioFrom(air.es(T10), given8("pressure"), air.epsilon), L = air.L(T10);
       return air.g / (air.cp + L * L * w2 * air.epsilon / (air.R * T10 * T10));
     }),
-    fineMoistSlip("epsilon-left-out", "without ε", "This comes without ε in the denominator, which is R/Rv there.", ({ given: given7, air }) => {
-      const T10 = given7("temperature"), w2 = mixingRatioFrom(air.es(T10), given7("pressure"), air.epsilon), L = air.L(T10);
+    fineMoistSlip("epsilon-left-out", "without ε", "This comes without ε in the denominator, which is R/Rv there.", ({ given: given8, air }) => {
+      const T10 = given8("temperature"), w2 = mixingRatioFrom(air.es(T10), given8("pressure"), air.epsilon), L = air.L(T10);
       return air.g * (1 + L * w2 / (air.R * T10)) / (air.cp + L * L * w2 / (air.R * T10 * T10));
     })
   ],
@@ -5603,9 +5603,9 @@ var saturatedAdiabaticLapseRateDefinition = moistQuantity({
 });
 
 // shared/thermo/saturatedPathDefinition.ts
-var from = ({ given: given7 }) => given7("pressureStart");
-var to = ({ given: given7 }) => given7("pressureEnd");
-var start4 = ({ given: given7 }) => given7("temperature");
+var from = ({ given: given8 }) => given8("pressureStart");
+var to = ({ given: given8 }) => given8("pressureEnd");
+var start4 = ({ given: given8 }) => given8("temperature");
 function saturatedPathDefinition({ direction: direction2, ...named2 }) {
   const path = (hand) => {
     if (direction2 === "up" ? to(hand) > from(hand) : to(hand) < from(hand)) throw new OutOfRangeError("pressureEnd", to(hand), `pressures ${direction2 === "up" ? "up to" : "from"} ${from(hand)} Pa, that of the start: the other way is another quantity`);
@@ -5625,7 +5625,7 @@ function saturatedPathDefinition({ direction: direction2, ...named2 }) {
     variants: [{ key: "pseudoadiabat", label: "pseudoadiabat, integrated in ln p", source: glossary("adiabatic lapse rate"), validity: "saturated air over liquid water", knownError: "0.6 K over 600 hPa by the latent heat", value: path }],
     constants: ["R", "Rv", "cp", "cpv", "latentHeat", "cw", "enhancementFactor"],
     inside: ["es", "L"],
-    notedAt: { es: (given7) => [given7("temperature")], L: (given7) => [given7("temperature")] },
+    notedAt: { es: (given8) => [given8("temperature")], L: (given8) => [given8("temperature")] },
     working: (hand, value19) => {
       const slope = (T10, p10) => pseudoadiabaticSlope(T10, p10, hand.air);
       return [
@@ -5663,7 +5663,7 @@ var saturatedDescentTemperatureDefinition = saturatedPathDefinition({
 });
 
 // shared/thermo/quantities/saturationEquivalentPotentialTemperature.ts
-var by2 = ({ given: given7, air }, variant) => equivalentPotentialTemperature(given7("temperature"), given7("temperature"), given7("pressure"), air, variant);
+var by2 = ({ given: given8, air }, variant) => equivalentPotentialTemperature(given8("temperature"), given8("temperature"), given8("pressure"), air, variant);
 var saturationEquivalentPotentialTemperatureDefinition = moistQuantity({
   key: "saturation-equivalent-potential-temperature",
   name: "saturation equivalent potential temperature",
@@ -5678,14 +5678,14 @@ var saturationEquivalentPotentialTemperatureDefinition = moistQuantity({
   ],
   constants: ["R", "Rv", "cp", "kappa", "enhancementFactor"],
   inside: ["es"],
-  notedAt: { es: (given7) => [given7("temperature")] },
+  notedAt: { es: (given8) => [given8("temperature")] },
   ask: "The saturation equivalent potential temperature by Bolton’s formula: θe of the air if it were saturated over liquid water at its temperature.",
-  working: ({ given: given7, air, variant }, value19) => [
-    { ...mixingRatioStep("w_s", "e_s", air.es(given7("temperature")), given7("pressure"), air), text: "Saturation mixing ratio" },
+  working: ({ given: given8, air, variant }, value19) => [
+    { ...mixingRatioStep("w_s", "e_s", air.es(given8("temperature")), given8("pressure"), air), text: "Saturation mixing ratio" },
     { text: "Bolton’s formula with w in kg per kg; the condensation level is here, TL = T", formula: variant === "bolton-43" ? "\\theta_{es} = T\\left(\\frac{p_0}{p}\\right)^{0.2854\\,(1 - 0.28\\,w_s)}\\exp\\left[\\left(\\frac{3376}{T} - 2.54\\right) w_s\\,(1 + 0.81\\,w_s)\\right]" : "\\theta_{es} = T\\left(\\frac{p_0}{p - e_s}\\right)^{\\kappa}\\exp\\left[\\left(\\frac{3036}{T} - 1.78\\right) w_s\\,(1 + 0.448\\,w_s)\\right]", filled: `\\theta_{es} = ${inKelvin(value19)}` }
   ],
   slips: [
-    fineMoistSlip("theta", "potential temperature", "This is the potential temperature: the latent heat of saturation is not in it.", ({ given: given7, air }) => given7("temperature") * pow(1e5 / given7("pressure"), air.kappa)),
+    fineMoistSlip("theta", "potential temperature", "This is the potential temperature: the latent heat of saturation is not in it.", ({ given: given8, air }) => given8("temperature") * pow(1e5 / given8("pressure"), air.kappa)),
     moistSlip("standard-pressure", "1013.25 hPa for 1000 hPa", "This refers to 1013.25 hPa: θe refers to 1000 hPa.", ({ air, right }) => right * pow(1.01325, air.kappa)),
     celsiusAsKelvinSlip
   ],
@@ -5693,8 +5693,8 @@ var saturationEquivalentPotentialTemperatureDefinition = moistQuantity({
 });
 
 // shared/thermo/quantities/virtualPotentialTemperature.ts
-var wOf2 = ({ given: given7, air }) => mixingRatioFrom(air.es(given7("dewpoint")), given7("pressure"), air.epsilon);
-var exner = ({ given: given7, air }) => pow(1e5 / given7("pressure"), air.kappa);
+var wOf2 = ({ given: given8, air }) => mixingRatioFrom(air.es(given8("dewpoint")), given8("pressure"), air.epsilon);
+var exner = ({ given: given8, air }) => pow(1e5 / given8("pressure"), air.kappa);
 var virtual = (hand, temperature6 = hand.given("temperature")) => hand.variant === "linear" ? temperature6 * (1 + 0.61 * wOf2(hand)) : virtualTemperatureFrom(temperature6, wOf2(hand), hand.air.epsilon);
 var virtualPotentialTemperatureDefinition = moistQuantity({
   key: "virtual-potential-temperature",
@@ -5710,20 +5710,20 @@ var virtualPotentialTemperatureDefinition = moistQuantity({
   ],
   constants: ["R", "Rv", "cp", "kappa", "enhancementFactor"],
   inside: ["es"],
-  notedAt: { es: (given7) => [given7("dewpoint")] },
+  notedAt: { es: (given8) => [given8("dewpoint")] },
   ask: "The virtual potential temperature θv of the air, with the exact virtual factor, referred to 1000 hPa.",
   working: (hand, value19) => {
-    const { given: given7, air } = hand, Tv4 = virtual(hand);
+    const { given: given8, air } = hand, Tv4 = virtual(hand);
     return [
-      { ...mixingRatioStep("w", "e", air.es(given7("dewpoint")), given7("pressure"), air), text: "Mixing ratio, with e = es(Td)" },
+      { ...mixingRatioStep("w", "e", air.es(given8("dewpoint")), given8("pressure"), air), text: "Mixing ratio, with e = es(Td)" },
       { text: "Virtual temperature", formula: hand.variant === "linear" ? "T_v = T\\,(1 + 0.61\\,w)" : "T_v = T\\,\\frac{1 + w/\\varepsilon}{1 + w}", filled: `T_v = ${inKelvin(Tv4)}`, value: Tv4, unit: "K" },
-      { text: "Referred to 1000 hPa", formula: "\\theta_v = T_v\\left(\\frac{p_0}{p}\\right)^{\\kappa}", filled: `\\theta_v = ${texNumber(Tv4, 6)}\\left(\\frac{1000}{${texNumber(given7("pressure") / 100, 6)}}\\right)^{${texNumber(air.kappa)}} = ${inKelvin(value19)}` }
+      { text: "Referred to 1000 hPa", formula: "\\theta_v = T_v\\left(\\frac{p_0}{p}\\right)^{\\kappa}", filled: `\\theta_v = ${texNumber(Tv4, 6)}\\left(\\frac{1000}{${texNumber(given8("pressure") / 100, 6)}}\\right)^{${texNumber(air.kappa)}} = ${inKelvin(value19)}` }
     ];
   },
   slips: [
     fineMoistSlip("theta", "potential temperature", "This is the potential temperature: the vapor is not in it.", (hand) => hand.given("temperature") * exner(hand)),
     fineMoistSlip("virtual-only", "virtual temperature", "This is the virtual temperature: it is still to be referred to 1000 hPa.", (hand) => hand.given("pressure") === 1e5 ? null : virtual(hand)),
-    fineMoistSlip("saturated", "w at T for w at Td", "This takes the saturation mixing ratio at the temperature: the dewpoint tells what the air holds.", ({ given: given7, again }) => given7("dewpoint") === given7("temperature") ? null : again({ dewpoint: given7("temperature") })),
+    fineMoistSlip("saturated", "w at T for w at Td", "This takes the saturation mixing ratio at the temperature: the dewpoint tells what the air holds.", ({ given: given8, again }) => given8("dewpoint") === given8("temperature") ? null : again({ dewpoint: given8("temperature") })),
     moistSlip("standard-pressure", "1013.25 hPa for 1000 hPa", "This refers to 1013.25 hPa: θv refers to 1000 hPa.", ({ air, right }) => right * pow(1.01325, air.kappa)),
     moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This is what comes out with the temperature in °C: Poisson’s relation takes kelvin.", (hand) => hand.given("temperature") === zeroCelsius ? null : zeroCelsius + virtual(hand, hand.given("temperature") - zeroCelsius) * exner(hand)),
     celsiusAsKelvinSlip
@@ -5732,8 +5732,8 @@ var virtualPotentialTemperatureDefinition = moistQuantity({
 });
 
 // shared/thermo/quantities/wetBulbPotentialTemperature.ts
-var lclOf4 = ({ given: given7, constants, formulae }) => lclFunction(constants, formulae)(given7("temperature"), given7("dewpoint"), given7("pressure"));
-var thetaE = ({ given: given7, air }) => equivalentPotentialTemperature(given7("temperature"), given7("dewpoint"), given7("pressure"), air);
+var lclOf4 = ({ given: given8, constants, formulae }) => lclFunction(constants, formulae)(given8("temperature"), given8("dewpoint"), given8("pressure"));
+var thetaE = ({ given: given8, air }) => equivalentPotentialTemperature(given8("temperature"), given8("dewpoint"), given8("pressure"), air);
 var wetBulbPotentialTemperatureDefinition = moistQuantity({
   key: "wet-bulb-potential-temperature",
   name: "wet-bulb potential temperature",
@@ -5748,8 +5748,8 @@ var wetBulbPotentialTemperatureDefinition = moistQuantity({
   ],
   constants: ["R", "Rv", "cp", "kappa", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L", lclTemperatureKey],
-  notedAt: { es: (given7) => [given7("dewpoint")] },
-  remarks: ({ given: given7 }) => [foggy(given7("temperature"), given7("dewpoint"))],
+  notedAt: { es: (given8) => [given8("dewpoint")] },
+  remarks: ({ given: given8 }) => [foggy(given8("temperature"), given8("dewpoint"))],
   ask: "The wet-bulb potential temperature: the temperature that the parcel’s pseudoadiabat has at 1000 hPa.",
   working: (hand, value19) => {
     if (hand.variant === "davies-jones") return [
@@ -5765,7 +5765,7 @@ var wetBulbPotentialTemperatureDefinition = moistQuantity({
   slips: [
     fineMoistSlip("wet-bulb", "wet bulb at its own pressure", "This is the wet-bulb temperature at the parcel’s own pressure: it is still to be taken to 1000 hPa.", (hand) => hand.given("pressure") === 1e5 ? null : pseudoadiabaticWetBulb(hand.given("pressure"), lclOf4(hand), hand.air)),
     fineMoistSlip("dry-down", "down the dry adiabat", "This takes the wet-bulb temperature to 1000 hPa along the dry adiabat: it goes along the pseudoadiabat.", (hand) => hand.given("pressure") === 1e5 ? null : pseudoadiabaticWetBulb(hand.given("pressure"), lclOf4(hand), hand.air) * pow(1e5 / hand.given("pressure"), hand.air.kappa)),
-    fineMoistSlip("theta", "potential temperature", "This is the potential temperature of the parcel.", ({ given: given7, air }) => given7("dewpoint") >= given7("temperature") && given7("pressure") === 1e5 ? null : given7("temperature") * pow(1e5 / given7("pressure"), air.kappa)),
+    fineMoistSlip("theta", "potential temperature", "This is the potential temperature of the parcel.", ({ given: given8, air }) => given8("dewpoint") >= given8("temperature") && given8("pressure") === 1e5 ? null : given8("temperature") * pow(1e5 / given8("pressure"), air.kappa)),
     fineMoistSlip("theta-e", "equivalent potential temperature", "This is the equivalent potential temperature of the parcel.", thetaE),
     kelvinAsCelsiusSlip
   ],
@@ -5810,12 +5810,12 @@ var absoluteHumidityDefinition = moistQuantity({
   shownUnit: "g/m3",
   kind: "ratio",
   inputs: [temperatureInput2, vaporPressureInput],
-  variants: [{ key: "ideal-gas", label: "e/(Rv T)", source: glossary("absolute humidity"), validity: "vapor at less than 100 hPa", knownError: "0.2 %", value: ({ given: given7, air }) => given7("vaporPressure") / (air.Rv * given7("temperature")) }],
+  variants: [{ key: "ideal-gas", label: "e/(Rv T)", source: glossary("absolute humidity"), validity: "vapor at less than 100 hPa", knownError: "0.2 %", value: ({ given: given8, air }) => given8("vaporPressure") / (air.Rv * given8("temperature")) }],
   constants: ["Rv"],
   ask: "The absolute humidity of the air, mass of vapor per volume of air.",
-  working: ({ given: given7, air }, value19) => [{ text: "Equation of state of the vapor, with e in pascal and T in kelvin", formula: "\\rho_v = \\frac{e}{R_v\\,T}", filled: `\\rho_v = \\frac{${texNumber(given7("vaporPressure"))}}{${texNumber(air.Rv)} \\cdot ${texNumber(given7("temperature"))}} = ${texQuantity(value19 * 1e3, "g/m3")}` }],
+  working: ({ given: given8, air }, value19) => [{ text: "Equation of state of the vapor, with e in pascal and T in kelvin", formula: "\\rho_v = \\frac{e}{R_v\\,T}", filled: `\\rho_v = \\frac{${texNumber(given8("vaporPressure"))}}{${texNumber(air.Rv)} \\cdot ${texNumber(given8("temperature"))}} = ${texQuantity(value19 * 1e3, "g/m3")}` }],
   slips: [
-    moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This is what comes out with the temperature in °C: the equation of state takes kelvin.", ({ given: given7, right }) => given7("temperature") === zeroCelsius ? null : right * given7("temperature") / (given7("temperature") - zeroCelsius)),
+    moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This is what comes out with the temperature in °C: the equation of state takes kelvin.", ({ given: given8, right }) => given8("temperature") === zeroCelsius ? null : right * given8("temperature") / (given8("temperature") - zeroCelsius)),
     moistSlip("dry-gas-constant", "gas constant of dry air", "This comes from the gas constant of dry air: the vapor has its own.", ({ air, right }) => right * air.Rv / air.R),
     moistSlip("hectopascal-for-pascal", "hPa put in for Pa", "This is what comes out with the vapor pressure in hPa: it goes in in pascal.", ({ right }) => right / 100),
     moistSlip("kilogram-for-gram", "kg m⁻³ given as g m⁻³", "Your number is in kg m⁻³; the unit beside it says g m⁻³.", ({ right }) => right / 1e3)
@@ -5832,22 +5832,22 @@ var densityOfMoistAirDefinition = moistQuantity({
   shownUnit: "kg/m3",
   kind: "ratio",
   inputs: [pressureInput2, temperatureInput2, vaporPressureInput],
-  variants: [{ key: "ideal-gases", label: "dry air and vapor as ideal gases", source: glossary("equation of state", "common practice"), validity: "180–340 K, below 1200 hPa", knownError: "0.1 %", value: ({ given: given7, air }) => (given7("pressure") - given7("vaporPressure")) / (air.R * given7("temperature")) + given7("vaporPressure") / (air.Rv * given7("temperature")) }],
+  variants: [{ key: "ideal-gases", label: "dry air and vapor as ideal gases", source: glossary("equation of state", "common practice"), validity: "180–340 K, below 1200 hPa", knownError: "0.1 %", value: ({ given: given8, air }) => (given8("pressure") - given8("vaporPressure")) / (air.R * given8("temperature")) + given8("vaporPressure") / (air.Rv * given8("temperature")) }],
   constants: ["R", "Rv"],
   ask: "The density of the moist air, mass of dry air and vapor per volume.",
-  working: ({ given: given7, air }, value19) => {
-    const p10 = given7("pressure"), e = given7("vaporPressure"), T10 = given7("temperature");
+  working: ({ given: given8, air }, value19) => {
+    const p10 = given8("pressure"), e = given8("vaporPressure"), T10 = given8("temperature");
     return [
       { text: "Density of the dry air, with its partial pressure", formula: "\\rho_d = \\frac{p - e}{R\\,T}", filled: `\\rho_d = \\frac{${texNumber(p10 - e, 7)}}{${texNumber(air.R)} \\cdot ${texNumber(T10)}} = ${texQuantity((p10 - e) / (air.R * T10), "kg/m3")}`, value: (p10 - e) / (air.R * T10), unit: "kg/m3" },
       { text: "Together with the vapor", formula: "\\rho = \\rho_d + \\frac{e}{R_v\\,T}", filled: `\\rho = ${texNumber((p10 - e) / (air.R * T10))} + \\frac{${texNumber(e)}}{${texNumber(air.Rv)} \\cdot ${texNumber(T10)}} = ${texQuantity(value19, "kg/m3")}` }
     ];
   },
   slips: [
-    fineMoistSlip("dry", "as if dry", "This is the density of dry air at the pressure: the vapor, which is lighter, is not in it.", ({ given: given7, air }) => given7("pressure") / (air.R * given7("temperature"))),
-    fineMoistSlip("added", "p in place of p − e", "This adds the vapor to dry air at the whole pressure: the dry air has p − e.", ({ given: given7, air }) => given7("pressure") / (air.R * given7("temperature")) + given7("vaporPressure") / (air.Rv * given7("temperature"))),
-    moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This is what comes out with the temperature in °C: the equation of state takes kelvin.", ({ given: given7, right }) => given7("temperature") === zeroCelsius ? null : right * given7("temperature") / (given7("temperature") - zeroCelsius)),
+    fineMoistSlip("dry", "as if dry", "This is the density of dry air at the pressure: the vapor, which is lighter, is not in it.", ({ given: given8, air }) => given8("pressure") / (air.R * given8("temperature"))),
+    fineMoistSlip("added", "p in place of p − e", "This adds the vapor to dry air at the whole pressure: the dry air has p − e.", ({ given: given8, air }) => given8("pressure") / (air.R * given8("temperature")) + given8("vaporPressure") / (air.Rv * given8("temperature"))),
+    moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This is what comes out with the temperature in °C: the equation of state takes kelvin.", ({ given: given8, right }) => given8("temperature") === zeroCelsius ? null : right * given8("temperature") / (given8("temperature") - zeroCelsius)),
     moistSlip("hectopascal-for-pascal", "hPa put in for Pa", "This is what comes out with the pressures in hPa: they go in in pascal.", ({ right }) => right / 100),
-    moistSlip("vapor-gas-constant", "gas constant of vapor", "This comes from the gas constant of water vapor for the whole air.", ({ given: given7, air }) => given7("pressure") / (air.Rv * given7("temperature")))
+    moistSlip("vapor-gas-constant", "gas constant of vapor", "This comes from the gas constant of water vapor for the whole air.", ({ given: given8, air }) => given8("pressure") / (air.Rv * given8("temperature")))
   ],
   example: { inputs: { pressure: 1e5, temperature: 298.15, vaporPressure: 2e3 }, gives: 1.15981, within: 1e-4 }
 });
@@ -5878,22 +5878,22 @@ var dewpointDefinition = moistQuantity({
   shownUnit: "Cel",
   kind: "temperature",
   inputs: [{ ...vaporPressureInput, range: [0.1, 3e4] }],
-  variants: [{ key: "over-water", label: "eₛ(T_d) = e", source: glossary("dewpoint"), validity: "over liquid water, also below 0 °C", knownError: "0.05 K by the formula of eₛ", value: ({ given: given7, constants, formulae }) => dewpointFunction(constants, formulae)(given7("vaporPressure")) }],
+  variants: [{ key: "over-water", label: "eₛ(T_d) = e", source: glossary("dewpoint"), validity: "over liquid water, also below 0 °C", knownError: "0.05 K by the formula of eₛ", value: ({ given: given8, constants, formulae }) => dewpointFunction(constants, formulae)(given8("vaporPressure")) }],
   constants: ["enhancementFactor"],
   inside: ["es"],
   ask: "The dewpoint over liquid water, also below 0 °C: the temperature at which the air’s vapor pressure is that of saturation.",
-  working: ({ given: given7 }, value19) => [{ text: "The temperature at which the vapor pressure is that of saturation", formula: "e_s(T_d) = e", filled: `e_s(${inCelsius(value19)}) = ${inHectopascal(given7("vaporPressure"))}` }],
+  working: ({ given: given8 }, value19) => [{ text: "The temperature at which the vapor pressure is that of saturation", formula: "e_s(T_d) = e", filled: `e_s(${inCelsius(value19)}) = ${inHectopascal(given8("vaporPressure"))}` }],
   slips: [
-    fineMoistSlip("frost-point", "frost point for dewpoint", "This is the frost point, over ice; the dewpoint refers to liquid water, also below 0 °C.", ({ given: given7, constants, formulae, right }) => {
+    fineMoistSlip("frost-point", "frost point for dewpoint", "This is the frost point, over ice; the dewpoint refers to liquid water, also below 0 °C.", ({ given: given8, constants, formulae, right }) => {
       if (right > 273.15) return null;
-      const outcome2 = frostPoint(given7("vaporPressure"), constants, formulae);
-      return outcome2.is === "value" ? outcome2.value : null;
+      const outcome3 = frostPoint(given8("vaporPressure"), constants, formulae);
+      return outcome3.is === "value" ? outcome3.value : null;
     }),
-    moistSlip("base-ten", "log₁₀ for ln", "This comes from the logarithm to base 10 in place of the natural one.", ({ given: given7 }) => {
-      const logarithm = log10(given7("vaporPressure") / 611.2);
+    moistSlip("base-ten", "log₁₀ for ln", "This comes from the logarithm to base 10 in place of the natural one.", ({ given: given8 }) => {
+      const logarithm = log10(given8("vaporPressure") / 611.2);
       return logarithm === 0 ? null : 273.15 + 243.5 * logarithm / (17.67 - logarithm);
     }),
-    moistSlip("pascal-for-hectopascal", "Pa put in for hPa", "This is what comes out with the vapor pressure in pascal where the formula takes hectopascal.", ({ given: given7, again }) => given7("vaporPressure") < 3e4 ? again({ vaporPressure: 100 * given7("vaporPressure") }) : null),
+    moistSlip("pascal-for-hectopascal", "Pa put in for hPa", "This is what comes out with the vapor pressure in pascal where the formula takes hectopascal.", ({ given: given8, again }) => given8("vaporPressure") < 3e4 ? again({ vaporPressure: 100 * given8("vaporPressure") }) : null),
     kelvinAsCelsiusSlip
   ],
   example: { inputs: { vaporPressure: 1401.539 }, gives: 285.15, within: 2e-4 }
@@ -5908,24 +5908,24 @@ var dewpointFromMixingRatioDefinition = moistQuantity({
   shownUnit: "Cel",
   kind: "temperature",
   inputs: [pressureInput2, mixingRatioInput],
-  variants: [{ key: "over-water", label: "eₛ(T_d) = w p/(ε + w)", source: glossary("dewpoint"), validity: "over liquid water, also below 0 °C", knownError: "0.05 K by the formula of eₛ", value: ({ given: given7, air, constants, formulae }) => dewpointFunction(constants, formulae)(vaporPressureFrom(given7("mixingRatio"), given7("pressure"), air.epsilon)) }],
+  variants: [{ key: "over-water", label: "eₛ(T_d) = w p/(ε + w)", source: glossary("dewpoint"), validity: "over liquid water, also below 0 °C", knownError: "0.05 K by the formula of eₛ", value: ({ given: given8, air, constants, formulae }) => dewpointFunction(constants, formulae)(vaporPressureFrom(given8("mixingRatio"), given8("pressure"), air.epsilon)) }],
   constants: ["R", "Rv", "enhancementFactor"],
   inside: ["es"],
   ask: "The dewpoint over liquid water, also below 0 °C, of air with the mixing ratio at the pressure.",
-  working: ({ given: given7, air }, value19) => {
-    const e = vaporPressureFrom(given7("mixingRatio"), given7("pressure"), air.epsilon);
+  working: ({ given: given8, air }, value19) => {
+    const e = vaporPressureFrom(given8("mixingRatio"), given8("pressure"), air.epsilon);
     return [
-      { text: "Vapor pressure, with w in kg per kg", formula: "e = \\frac{w\\,p}{\\varepsilon + w}", filled: `e = \\frac{${texNumber(given7("mixingRatio"))} \\cdot ${texNumber(given7("pressure") / 100, 6)}}{${texNumber(air.epsilon)} + ${texNumber(given7("mixingRatio"))}} = ${inHectopascal(e)}`, value: e, unit: "Pa" },
+      { text: "Vapor pressure, with w in kg per kg", formula: "e = \\frac{w\\,p}{\\varepsilon + w}", filled: `e = \\frac{${texNumber(given8("mixingRatio"))} \\cdot ${texNumber(given8("pressure") / 100, 6)}}{${texNumber(air.epsilon)} + ${texNumber(given8("mixingRatio"))}} = ${inHectopascal(e)}`, value: e, unit: "Pa" },
       { text: "The temperature at which this is saturation", formula: "e_s(T_d) = e", filled: `e_s(${inCelsius(value19)}) = ${inHectopascal(e)}` }
     ];
   },
   slips: [
-    smallMoistSlip("without-w", "w neglected against ε", "This comes from e = w p/ε: in the denominator stands ε + w.", ({ given: given7, air, constants, formulae }) => dewpointFunction(constants, formulae)(given7("mixingRatio") * given7("pressure") / air.epsilon)),
-    moistSlip("epsilon-left-out", "ε left out", "This comes from e = w p: the ratio of the molar masses, ε = 0.622, is missing.", ({ given: given7, constants, formulae }) => dewpointFunction(constants, formulae)(given7("mixingRatio") * given7("pressure"))),
-    fineMoistSlip("frost-point", "frost point for dewpoint", "This is the frost point, over ice; the dewpoint refers to liquid water, also below 0 °C.", ({ given: given7, air, constants, formulae, right }) => {
+    smallMoistSlip("without-w", "w neglected against ε", "This comes from e = w p/ε: in the denominator stands ε + w.", ({ given: given8, air, constants, formulae }) => dewpointFunction(constants, formulae)(given8("mixingRatio") * given8("pressure") / air.epsilon)),
+    moistSlip("epsilon-left-out", "ε left out", "This comes from e = w p: the ratio of the molar masses, ε = 0.622, is missing.", ({ given: given8, constants, formulae }) => dewpointFunction(constants, formulae)(given8("mixingRatio") * given8("pressure"))),
+    fineMoistSlip("frost-point", "frost point for dewpoint", "This is the frost point, over ice; the dewpoint refers to liquid water, also below 0 °C.", ({ given: given8, air, constants, formulae, right }) => {
       if (right > 273.15) return null;
-      const outcome2 = frostPoint(vaporPressureFrom(given7("mixingRatio"), given7("pressure"), air.epsilon), constants, formulae);
-      return outcome2.is === "value" ? outcome2.value : null;
+      const outcome3 = frostPoint(vaporPressureFrom(given8("mixingRatio"), given8("pressure"), air.epsilon), constants, formulae);
+      return outcome3.is === "value" ? outcome3.value : null;
     }),
     kelvinAsCelsiusSlip
   ],
@@ -5941,36 +5941,36 @@ var dewpointFromRelativeHumidityDefinition = moistQuantity({
   shownUnit: "Cel",
   kind: "temperature",
   inputs: [temperatureInput2, relativeHumidityInput],
-  variants: [{ key: "over-water", label: "eₛ(T_d) = RH eₛ(T)", source: glossary("dewpoint"), validity: "over liquid water, also below 0 °C", knownError: "0.05 K by the formula of eₛ", value: ({ given: given7, air, constants, formulae }) => dewpointFunction(constants, formulae)(given7("relativeHumidity") * air.es(given7("temperature"))) }],
+  variants: [{ key: "over-water", label: "eₛ(T_d) = RH eₛ(T)", source: glossary("dewpoint"), validity: "over liquid water, also below 0 °C", knownError: "0.05 K by the formula of eₛ", value: ({ given: given8, air, constants, formulae }) => dewpointFunction(constants, formulae)(given8("relativeHumidity") * air.es(given8("temperature"))) }],
   constants: [],
   inside: ["es"],
-  notedAt: { es: (given7) => [given7("temperature")] },
-  remarks: ({ given: given7 }) => [supersaturated(given7("relativeHumidity"))],
+  notedAt: { es: (given8) => [given8("temperature")] },
+  remarks: ({ given: given8 }) => [supersaturated(given8("relativeHumidity"))],
   ask: "The dewpoint over liquid water, also below 0 °C, from the temperature and the relative humidity e/es.",
-  working: ({ given: given7, air }, value19) => {
-    const es = air.es(given7("temperature")), e = given7("relativeHumidity") * es;
+  working: ({ given: given8, air }, value19) => {
+    const es = air.es(given8("temperature")), e = given8("relativeHumidity") * es;
     return [
-      saturationStep("e_s", "T", given7("temperature"), es),
-      { text: "Vapor pressure", formula: "e = \\mathit{RH}\\,e_s", filled: `e = ${texNumber(given7("relativeHumidity"))} \\cdot ${texNumber(es / 100)} = ${inHectopascal(e)}`, value: e, unit: "Pa" },
+      saturationStep("e_s", "T", given8("temperature"), es),
+      { text: "Vapor pressure", formula: "e = \\mathit{RH}\\,e_s", filled: `e = ${texNumber(given8("relativeHumidity"))} \\cdot ${texNumber(es / 100)} = ${inHectopascal(e)}`, value: e, unit: "Pa" },
       { text: "The temperature at which this is saturation", formula: "e_s(T_d) = e", filled: `e_s(${inCelsius(value19)}) = ${inHectopascal(e)}` }
     ];
   },
   slips: [
-    fineMoistSlip("frost-point", "frost point for dewpoint", "This is the frost point, over ice; the dewpoint refers to liquid water, also below 0 °C.", ({ given: given7, air, constants, formulae, right }) => {
+    fineMoistSlip("frost-point", "frost point for dewpoint", "This is the frost point, over ice; the dewpoint refers to liquid water, also below 0 °C.", ({ given: given8, air, constants, formulae, right }) => {
       if (right > 273.15) return null;
-      const outcome2 = frostPoint(given7("relativeHumidity") * air.es(given7("temperature")), constants, formulae);
-      return outcome2.is === "value" ? outcome2.value : null;
+      const outcome3 = frostPoint(given8("relativeHumidity") * air.es(given8("temperature")), constants, formulae);
+      return outcome3.is === "value" ? outcome3.value : null;
     }),
-    moistSlip("share-of-celsius", "T in °C times RH", "This is the temperature in °C times the relative humidity: the ratio is of vapor pressures.", ({ given: given7 }) => given7("relativeHumidity") === 1 || given7("temperature") === zeroCelsius ? null : zeroCelsius + given7("relativeHumidity") * (given7("temperature") - zeroCelsius)),
-    fineMoistSlip("five-per-kelvin", "T − (100 − RH)/5", "This is the rule of thumb T − (100 − RH)/5: it is within 1 K in damp air only.", ({ given: given7 }) => given7("relativeHumidity") === 1 ? null : given7("temperature") - 20 * (1 - given7("relativeHumidity"))),
-    moistSlip("base-ten", "log₁₀ for ln", "This comes from the logarithm of RH to base 10 in place of the natural one.", ({ given: given7 }) => {
-      const t = given7("temperature") - zeroCelsius, RH = given7("relativeHumidity");
+    moistSlip("share-of-celsius", "T in °C times RH", "This is the temperature in °C times the relative humidity: the ratio is of vapor pressures.", ({ given: given8 }) => given8("relativeHumidity") === 1 || given8("temperature") === zeroCelsius ? null : zeroCelsius + given8("relativeHumidity") * (given8("temperature") - zeroCelsius)),
+    fineMoistSlip("five-per-kelvin", "T − (100 − RH)/5", "This is the rule of thumb T − (100 − RH)/5: it is within 1 K in damp air only.", ({ given: given8 }) => given8("relativeHumidity") === 1 ? null : given8("temperature") - 20 * (1 - given8("relativeHumidity"))),
+    moistSlip("base-ten", "log₁₀ for ln", "This comes from the logarithm of RH to base 10 in place of the natural one.", ({ given: given8 }) => {
+      const t = given8("temperature") - zeroCelsius, RH = given8("relativeHumidity");
       const gamma = log10(RH) + 17.67 * t / (t + 243.5);
       return RH === 1 ? null : zeroCelsius + 243.5 * gamma / (17.67 - gamma);
     }),
-    moistSlip("percent", "percent not divided by 100", "This comes from the relative humidity in percent where the formula takes a fraction.", ({ given: given7 }) => {
-      const t = given7("temperature") - zeroCelsius;
-      const gamma = log(100 * given7("relativeHumidity")) + 17.67 * t / (t + 243.5);
+    moistSlip("percent", "percent not divided by 100", "This comes from the relative humidity in percent where the formula takes a fraction.", ({ given: given8 }) => {
+      const t = given8("temperature") - zeroCelsius;
+      const gamma = log(100 * given8("relativeHumidity")) + 17.67 * t / (t + 243.5);
       return gamma > 14 ? null : zeroCelsius + 243.5 * gamma / (17.67 - gamma);
     }),
     kelvinAsCelsiusSlip
@@ -5987,13 +5987,13 @@ var frostPointDefinition = moistQuantity({
   shownUnit: "Cel",
   kind: "temperature",
   inputs: [{ ...vaporPressureInput, range: [0.01, 5e3] }],
-  variants: [{ key: "over-ice", label: "eᵢ(T_f) = e", source: glossary("frost point"), validity: "up to the triple point", knownError: "0.05 K by the formula of eᵢ", value: ({ given: given7, constants, formulae }) => frostPoint(given7("vaporPressure"), constants, formulae) }],
+  variants: [{ key: "over-ice", label: "eᵢ(T_f) = e", source: glossary("frost point"), validity: "up to the triple point", knownError: "0.05 K by the formula of eᵢ", value: ({ given: given8, constants, formulae }) => frostPoint(given8("vaporPressure"), constants, formulae) }],
   constants: ["enhancementFactor"],
   inside: ["ei"],
   ask: "The frost point: the temperature at which the air’s vapor pressure is that of saturation over ice; not defined where that lies above 0 °C.",
-  working: ({ given: given7 }, value19) => [{ text: "The temperature at which the vapor pressure is that of saturation over ice", formula: "e_i(T_f) = e", filled: `e_i(${inCelsius(value19)}) = ${inHectopascal(given7("vaporPressure"))}` }],
+  working: ({ given: given8 }, value19) => [{ text: "The temperature at which the vapor pressure is that of saturation over ice", formula: "e_i(T_f) = e", filled: `e_i(${inCelsius(value19)}) = ${inHectopascal(given8("vaporPressure"))}` }],
   slips: [
-    fineMoistSlip("dewpoint", "dewpoint for frost point", "This is the dewpoint, over liquid water; the frost point refers to ice and lies higher.", ({ given: given7, constants, formulae }) => dewpointFunction(constants, formulae)(given7("vaporPressure"))),
+    fineMoistSlip("dewpoint", "dewpoint for frost point", "This is the dewpoint, over liquid water; the frost point refers to ice and lies higher.", ({ given: given8, constants, formulae }) => dewpointFunction(constants, formulae)(given8("vaporPressure"))),
     kelvinAsCelsiusSlip
   ],
   example: { inputs: { vaporPressure: 200 }, gives: 260.2325, within: 1e-4 }
@@ -6008,25 +6008,25 @@ var frostPointFromRelativeHumidityDefinition = moistQuantity({
   shownUnit: "Cel",
   kind: "temperature",
   inputs: [{ ...temperatureInput2, range: [180, 310] }, relativeHumidityInput],
-  variants: [{ key: "over-ice", label: "eᵢ(T_f) = RH eₛ(T)", source: glossary("frost point"), validity: "up to the triple point", knownError: "0.05 K by the formulae", value: ({ given: given7, air, constants, formulae }) => frostPoint(given7("relativeHumidity") * air.es(given7("temperature")), constants, formulae) }],
+  variants: [{ key: "over-ice", label: "eᵢ(T_f) = RH eₛ(T)", source: glossary("frost point"), validity: "up to the triple point", knownError: "0.05 K by the formulae", value: ({ given: given8, air, constants, formulae }) => frostPoint(given8("relativeHumidity") * air.es(given8("temperature")), constants, formulae) }],
   constants: [],
   inside: ["es", "ei"],
-  notedAt: { es: (given7) => [given7("temperature")] },
+  notedAt: { es: (given8) => [given8("temperature")] },
   ask: "The frost point, at which the vapor pressure is that of saturation over ice, from the temperature and the relative humidity over liquid water; not defined where that lies above 0 °C.",
-  working: ({ given: given7, air }, value19) => {
-    const es = air.es(given7("temperature")), e = given7("relativeHumidity") * es;
+  working: ({ given: given8, air }, value19) => {
+    const es = air.es(given8("temperature")), e = given8("relativeHumidity") * es;
     return [
-      saturationStep("e_s", "T", given7("temperature"), es),
-      { text: "Vapor pressure", formula: "e = \\mathit{RH}\\,e_s", filled: `e = ${texNumber(given7("relativeHumidity"))} \\cdot ${texNumber(es / 100)} = ${inHectopascal(e)}`, value: e, unit: "Pa" },
+      saturationStep("e_s", "T", given8("temperature"), es),
+      { text: "Vapor pressure", formula: "e = \\mathit{RH}\\,e_s", filled: `e = ${texNumber(given8("relativeHumidity"))} \\cdot ${texNumber(es / 100)} = ${inHectopascal(e)}`, value: e, unit: "Pa" },
       { text: "The temperature at which this is saturation over ice", formula: "e_i(T_f) = e", filled: `e_i(${inCelsius(value19)}) = ${inHectopascal(e)}` }
     ];
   },
   slips: [
-    fineMoistSlip("dewpoint", "dewpoint for frost point", "This is the dewpoint, over liquid water; the frost point refers to ice and lies higher.", ({ given: given7, air, constants, formulae }) => dewpointFunction(constants, formulae)(given7("relativeHumidity") * air.es(given7("temperature")))),
-    fineMoistSlip("humidity-over-ice", "RH taken over ice", "This takes the relative humidity for one over ice; it refers to liquid water.", ({ given: given7, constants, formulae }) => {
-      if (given7("temperature") > 273.15 || given7("relativeHumidity") === 1) return null;
-      const outcome2 = frostPoint(given7("relativeHumidity") * iceSaturationPressureFunction(constants, formulae)(given7("temperature")), constants, formulae);
-      return outcome2.is === "value" ? outcome2.value : null;
+    fineMoistSlip("dewpoint", "dewpoint for frost point", "This is the dewpoint, over liquid water; the frost point refers to ice and lies higher.", ({ given: given8, air, constants, formulae }) => dewpointFunction(constants, formulae)(given8("relativeHumidity") * air.es(given8("temperature")))),
+    fineMoistSlip("humidity-over-ice", "RH taken over ice", "This takes the relative humidity for one over ice; it refers to liquid water.", ({ given: given8, constants, formulae }) => {
+      if (given8("temperature") > 273.15 || given8("relativeHumidity") === 1) return null;
+      const outcome3 = frostPoint(given8("relativeHumidity") * iceSaturationPressureFunction(constants, formulae)(given8("temperature")), constants, formulae);
+      return outcome3.is === "value" ? outcome3.value : null;
     }),
     kelvinAsCelsiusSlip
   ],
@@ -6053,7 +6053,7 @@ function mixingRatioDefinition({ vaporPressure, step, temperatureName, inside, s
     ],
     constants: ["R", "Rv", ...inside.length > 0 ? ["enhancementFactor"] : []],
     inside,
-    notedAt: at === null ? {} : inside.includes("ei") ? { ei: (given7) => [given7(at)] } : { es: (given7) => [given7(at)] },
+    notedAt: at === null ? {} : inside.includes("ei") ? { ei: (given8) => [given8(at)] } : { es: (given8) => [given8(at)] },
     working: (hand, value19) => {
       const e = vaporPressure(hand), p10 = hand.given("pressure"), { epsilon } = hand.air;
       const last = hand.variant === "approximate" ? { text: "Mixing ratio, with e neglected against p", formula: `${named2.symbol} = \\varepsilon\\,\\frac{e}{p}`, filled: `${named2.symbol} = ${texNumber(epsilon)} \\cdot \\frac{${texNumber(e / 100)}}{${texNumber(p10 / 100, 6)}} = ${inGrams(value19)}` } : mixingRatioStep(named2.symbol, "e", e, p10, hand.air);
@@ -6077,8 +6077,8 @@ var mixingRatioDefinition2 = mixingRatioDefinition({
   name: "mixing ratio",
   symbol: "w",
   inputs: [dewpointInput, temperatureForSlips],
-  vaporPressure: ({ given: given7, air }) => air.es(given7("dewpoint")),
-  step: ({ given: given7 }, e) => saturationStep("e", "T_d", given7("dewpoint"), e, "Vapor pressure: that of saturation at the dewpoint"),
+  vaporPressure: ({ given: given8, air }) => air.es(given8("dewpoint")),
+  step: ({ given: given8 }, e) => saturationStep("e", "T_d", given8("dewpoint"), e, "Vapor pressure: that of saturation at the dewpoint"),
   temperatureName: "dewpoint",
   inside: ["es"],
   ask: "The mixing ratio w of the air, mass of vapor per mass of dry air, from its dewpoint over liquid water.",
@@ -6098,7 +6098,7 @@ var mixingRatioFromVaporPressureDefinition = mixingRatioDefinition({
   name: "mixing ratio from the vapor pressure",
   symbol: "w",
   inputs: [vaporPressureInput],
-  vaporPressure: ({ given: given7 }) => given7("vaporPressure"),
+  vaporPressure: ({ given: given8 }) => given8("vaporPressure"),
   step: null,
   temperatureName: null,
   inside: [],
@@ -6108,8 +6108,8 @@ var mixingRatioFromVaporPressureDefinition = mixingRatioDefinition({
 });
 
 // shared/thermo/quantities/mixingRatioFromWetBulb.ts
-var ws = ({ given: given7, air }) => mixingRatioFrom(air.es(given7("wetBulb")), given7("pressure"), air.epsilon);
-var depression = ({ given: given7 }) => given7("temperature") - given7("wetBulb");
+var ws = ({ given: given8, air }) => mixingRatioFrom(air.es(given8("wetBulb")), given8("pressure"), air.epsilon);
+var depression = ({ given: given8 }) => given8("temperature") - given8("wetBulb");
 function checked(hand, w2) {
   if (!(w2 > 0)) throw new OutOfRangeError("wetBulb", hand.given("wetBulb"), "wet-bulb temperatures that dry air or moister reaches");
   return w2;
@@ -6128,19 +6128,19 @@ var mixingRatioFromWetBulbDefinition = moistQuantity({
   ],
   constants: ["R", "Rv", "cp", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L"],
-  notedAt: { es: (given7) => [given7("wetBulb")], L: (given7) => [given7("wetBulb")] },
+  notedAt: { es: (given8) => [given8("wetBulb")], L: (given8) => [given8("wetBulb")] },
   ask: "The mixing ratio w of the air from its (thermodynamic, isobaric) wet-bulb temperature over liquid water.",
   working: (hand, value19) => {
-    const { given: given7, air } = hand, L = air.L(given7("wetBulb"));
+    const { given: given8, air } = hand, L = air.L(given8("wetBulb"));
     return [
-      { ...mixingRatioStep("w_s", "e_s", air.es(given7("wetBulb")), given7("pressure"), air), text: "Saturation mixing ratio at the wet bulb" },
+      { ...mixingRatioStep("w_s", "e_s", air.es(given8("wetBulb")), given8("pressure"), air), text: "Saturation mixing ratio at the wet bulb" },
       { text: "The air’s heat pays for the water that evaporates", formula: hand.variant === "dry-heat" ? "w = w_s - \\frac{c_p\\,(T - T_w)}{L}" : "w = \\frac{L\\,w_s - c_p\\,(T - T_w)}{L + c_{pv}\\,(T - T_w)}", filled: hand.variant === "dry-heat" ? `w = ${texNumber(ws(hand))} - \\frac{${texNumber(air.cp)} \\cdot ${texNumber(depression(hand))}}{${texNumber(L, 6)}} = ${inGrams(value19)}` : `w = \\frac{${texNumber(L, 6)} \\cdot ${texNumber(ws(hand))} - ${texNumber(air.cp)} \\cdot ${texNumber(depression(hand))}}{${texNumber(L, 6)} + ${texNumber(air.cpv)} \\cdot ${texNumber(depression(hand))}} = ${inGrams(value19)}` }
     ];
   },
   slips: [
     fineMoistSlip("saturation", "saturation at the wet bulb", "This is the saturation mixing ratio at the wet bulb: the air holds less, since its heat paid for what evaporated.", ws),
     moistSlip("sign", "added in place of taken away", "What evaporates comes on top of what the air held: it is taken away, not added.", (hand) => depression(hand) === 0 ? null : (hand.air.L(hand.given("wetBulb")) * ws(hand) + hand.air.cp * depression(hand)) / (hand.air.L(hand.given("wetBulb")) - hand.air.cpv * depression(hand))),
-    moistSlip("swapped", "dry and wet bulb swapped", "This comes from the dry and the wet bulb in each other’s place.", ({ given: given7, air }) => given7("temperature") === given7("wetBulb") ? null : mixingRatioFromWetBulb(given7("wetBulb"), given7("temperature"), given7("pressure"), air)),
+    moistSlip("swapped", "dry and wet bulb swapped", "This comes from the dry and the wet bulb in each other’s place.", ({ given: given8, air }) => given8("temperature") === given8("wetBulb") ? null : mixingRatioFromWetBulb(given8("wetBulb"), given8("temperature"), given8("pressure"), air)),
     kilogramSlip
   ],
   example: { inputs: { pressure: 95461, temperature: 303.15, wetBulb: 298.15 }, gives: 0.01921305, within: 1e-8 }
@@ -6155,25 +6155,25 @@ var relativeHumidityDefinition = moistQuantity({
   shownUnit: "%",
   kind: "fraction",
   inputs: [temperatureInput2, dewpointInput],
-  variants: [{ key: "vapor-pressures", label: "e/eₛ, ratio of vapor pressures", source: wmoHumidity, validity: "over liquid water, also below 0 °C", knownError: "0.1 of a percent by the formula of eₛ", value: ({ given: given7, air }) => air.es(given7("dewpoint")) / air.es(given7("temperature")) }],
+  variants: [{ key: "vapor-pressures", label: "e/eₛ, ratio of vapor pressures", source: wmoHumidity, validity: "over liquid water, also below 0 °C", knownError: "0.1 of a percent by the formula of eₛ", value: ({ given: given8, air }) => air.es(given8("dewpoint")) / air.es(given8("temperature")) }],
   constants: [],
   inside: ["es"],
-  notedAt: { es: (given7) => [given7("temperature"), given7("dewpoint")] },
+  notedAt: { es: (given8) => [given8("temperature"), given8("dewpoint")] },
   remarks: (_hand, value19) => [supersaturated(value19)],
   ask: "The relative humidity over liquid water, also below 0 °C, as the ratio of vapor pressures e/es.",
-  working: ({ given: given7, air }, value19) => {
-    const e = air.es(given7("dewpoint")), es = air.es(given7("temperature"));
+  working: ({ given: given8, air }, value19) => {
+    const e = air.es(given8("dewpoint")), es = air.es(given8("temperature"));
     return [
-      saturationStep("e", "T_d", given7("dewpoint"), e, "Vapor pressure: that of saturation at the dewpoint"),
-      saturationStep("e_s", "T", given7("temperature"), es),
+      saturationStep("e", "T_d", given8("dewpoint"), e, "Vapor pressure: that of saturation at the dewpoint"),
+      saturationStep("e_s", "T", given8("temperature"), es),
       { text: "Their ratio", formula: "\\mathit{RH} = \\frac{e}{e_s}", filled: `\\mathit{RH} = \\frac{${texNumber(e / 100)}}{${texNumber(es / 100)}} = ${texQuantity(value19 * 100, "%")}` }
     ];
   },
   slips: [
     moistSlip("swapped", "vapor pressures swapped", "This is es/e: the air holds e, and at saturation it would hold es.", (hand) => swappedSlip2.apply(hand)),
-    moistSlip("celsius-ratio", "ratio of temperatures in °C", "This is Td/T in °C: the ratio is of vapor pressures.", ({ given: given7 }) => given7("temperature") > zeroCelsius + 1 && given7("dewpoint") !== given7("temperature") ? (given7("dewpoint") - zeroCelsius) / (given7("temperature") - zeroCelsius) : null),
-    moistSlip("kelvin-ratio", "ratio of temperatures in kelvin", "This is Td/T in kelvin: the ratio is of vapor pressures.", ({ given: given7 }) => given7("dewpoint") === given7("temperature") ? null : given7("dewpoint") / given7("temperature")),
-    fineMoistSlip("five-per-kelvin", "5 % for each kelvin of T − Td", "This is the rule of thumb of 5 % for each kelvin between temperature and dewpoint.", ({ given: given7 }) => given7("temperature") - given7("dewpoint") < 19 ? 1 - 0.05 * (given7("temperature") - given7("dewpoint")) : null),
+    moistSlip("celsius-ratio", "ratio of temperatures in °C", "This is Td/T in °C: the ratio is of vapor pressures.", ({ given: given8 }) => given8("temperature") > zeroCelsius + 1 && given8("dewpoint") !== given8("temperature") ? (given8("dewpoint") - zeroCelsius) / (given8("temperature") - zeroCelsius) : null),
+    moistSlip("kelvin-ratio", "ratio of temperatures in kelvin", "This is Td/T in kelvin: the ratio is of vapor pressures.", ({ given: given8 }) => given8("dewpoint") === given8("temperature") ? null : given8("dewpoint") / given8("temperature")),
+    fineMoistSlip("five-per-kelvin", "5 % for each kelvin of T − Td", "This is the rule of thumb of 5 % for each kelvin between temperature and dewpoint.", ({ given: given8 }) => given8("temperature") - given8("dewpoint") < 19 ? 1 - 0.05 * (given8("temperature") - given8("dewpoint")) : null),
     fineMoistSlip("ice-for-water", "over ice for over water", "This is relative to saturation over ice; relative humidity refers to liquid water, also below 0 °C.", (hand) => {
       const es = overIce(hand, hand.given("temperature"));
       return es === null ? null : hand.air.es(hand.given("dewpoint")) / es;
@@ -6198,15 +6198,15 @@ var relativeHumidityByMixingRatioDefinition = moistQuantity({
     source: glossary("relative humidity", "common practice"),
     validity: "over liquid water, also below 0 °C",
     knownError: "0.1 of a percent by the formula of eₛ",
-    value: ({ given: given7, air }) => mixingRatioFrom(air.es(given7("dewpoint")), given7("pressure"), air.epsilon) / mixingRatioFrom(air.es(given7("temperature")), given7("pressure"), air.epsilon)
+    value: ({ given: given8, air }) => mixingRatioFrom(air.es(given8("dewpoint")), given8("pressure"), air.epsilon) / mixingRatioFrom(air.es(given8("temperature")), given8("pressure"), air.epsilon)
   }],
   constants: ["R", "Rv", "enhancementFactor"],
   inside: ["es"],
-  notedAt: { es: (given7) => [given7("temperature"), given7("dewpoint")] },
+  notedAt: { es: (given8) => [given8("temperature"), given8("dewpoint")] },
   remarks: (_hand, value19) => [value19 > 1 + 1e-12 ? "Supersaturated: the mixing ratio is above that of saturation over liquid water." : null],
   ask: "The relative humidity over liquid water as the ratio of mixing ratios w/ws, not of vapor pressures.",
-  working: ({ given: given7, air }, value19) => {
-    const e = air.es(given7("dewpoint")), es = air.es(given7("temperature")), p10 = given7("pressure");
+  working: ({ given: given8, air }, value19) => {
+    const e = air.es(given8("dewpoint")), es = air.es(given8("temperature")), p10 = given8("pressure");
     return [
       { ...mixingRatioStep("w", "e", e, p10, air), text: "Mixing ratio, with e = es(Td)" },
       { ...mixingRatioStep("w_s", "e_s", es, p10, air), text: "Saturation mixing ratio at the temperature" },
@@ -6214,7 +6214,7 @@ var relativeHumidityByMixingRatioDefinition = moistQuantity({
     ];
   },
   slips: [
-    fineMoistSlip("vapor-pressures", "e/eₛ for w/wₛ", "This is the ratio of vapor pressures; asked is that of mixing ratios.", ({ given: given7, air }) => air.es(given7("dewpoint")) / air.es(given7("temperature"))),
+    fineMoistSlip("vapor-pressures", "e/eₛ for w/wₛ", "This is the ratio of vapor pressures; asked is that of mixing ratios.", ({ given: given8, air }) => air.es(given8("dewpoint")) / air.es(given8("temperature"))),
     moistSlip("swapped", "mixing ratios swapped", "This is ws/w: the air holds w, and at saturation it would hold ws.", (hand) => swappedSlip2.apply(hand)),
     fractionAsPercentSlip
   ],
@@ -6231,7 +6231,7 @@ var wordsOf = {
 var coefficientInput = { name: "psychrometerCoefficient", label: "psychrometer coefficient A, where it is given", symbol: "A", unit: "1/K", shownUnit: "1/K", kind: "ratio", shape: "number", range: [3e-4, 15e-4], isOptional: true };
 var psychrometerVaporPressure = (atBulb, pressure4, depression2, coefficient) => atBulb - coefficient * pressure4 * depression2;
 var bulbPressure = (hand, bulb) => bulb === "ice" ? iceSaturationPressureFunction(hand.constants, hand.formulae)(hand.given("wetBulb")) : hand.air.es(hand.given("wetBulb"));
-var depressionOf = ({ given: given7 }) => given7("temperature") - given7("wetBulb");
+var depressionOf = ({ given: given8 }) => given8("temperature") - given8("wetBulb");
 var coefficientOf = (hand, bulb) => optionally(hand, "psychrometerCoefficient") ?? (coefficientsOf[bulb].find((one2) => one2.key === hand.variant) ?? coefficientsOf[bulb][0])?.of(hand.given("wetBulb")) ?? NaN;
 function vaporOf2(hand, bulb, coefficient = coefficientOf(hand, bulb), atBulb = bulbPressure(hand, bulb)) {
   const e = psychrometerVaporPressure(atBulb, hand.given("pressure"), depressionOf(hand), coefficient);
@@ -6252,16 +6252,16 @@ function psychrometerDefinition({ bulb, gives, ...named2 }) {
     variants: coefficientsOf[bulb].map(({ key, label, source: source2 }) => ({ key, label, source: source2, validity: wordsOf[bulb], knownError: "0.1 hPa by the coefficients in use", value: (hand) => finish(hand, vaporOf2(hand, bulb)) })),
     constants: isHumidity ? [] : ["enhancementFactor"],
     inside: bulb === "ice" ? isHumidity ? ["ei", "es"] : ["ei"] : ["es"],
-    notedAt: bulb === "ice" ? { ei: (given7) => [given7("wetBulb")] } : { es: (given7) => [given7("wetBulb")] },
-    remarks: ({ given: given7 }) => [given7("wetBulb") > given7("temperature") ? "The wet bulb reads above the dry one: one of the two is wrong, or the air is supersaturated." : null],
+    notedAt: bulb === "ice" ? { ei: (given8) => [given8("wetBulb")] } : { es: (given8) => [given8("wetBulb")] },
+    remarks: ({ given: given8 }) => [given8("wetBulb") > given8("temperature") ? "The wet bulb reads above the dry one: one of the two is wrong, or the air is supersaturated." : null],
     ask: isHumidity ? `The relative humidity over liquid water, e/es, by the readings of ${wordsOf[bulb]}.` : `The vapor pressure e of the air by the readings of ${wordsOf[bulb]}.`,
     working: (hand, value19) => {
       const atBulb = bulbPressure(hand, bulb), A = coefficientOf(hand, bulb), e = withCoefficientPlain(hand, A, atBulb);
       const symbol = bulb === "ice" ? "e_i" : "e_s";
-      const given7 = optionally(hand, "psychrometerCoefficient") !== null;
+      const given8 = optionally(hand, "psychrometerCoefficient") !== null;
       const steps2 = [
         { text: bulb === "ice" ? "Saturation over ice at the bulb" : "Saturation over water at the bulb", formula: `e_w = ${symbol}(T_w)`, filled: `e_w = ${symbol}(${inCelsius(hand.given("wetBulb"))}) = ${inHectopascal(atBulb)}`, value: atBulb, unit: "Pa" },
-        { text: given7 ? "Coefficient, as given" : "Coefficient of the ventilation", formula: `A${given7 ? "" : ` = ${(coefficientsOf[bulb].find((one2) => one2.key === hand.variant) ?? coefficientsOf[bulb][0])?.tex ?? ""}`}`, filled: `A = ${texQuantity(A, "1/K")}`, value: A, unit: "1/K" },
+        { text: given8 ? "Coefficient, as given" : "Coefficient of the ventilation", formula: `A${given8 ? "" : ` = ${(coefficientsOf[bulb].find((one2) => one2.key === hand.variant) ?? coefficientsOf[bulb][0])?.tex ?? ""}`}`, filled: `A = ${texQuantity(A, "1/K")}`, value: A, unit: "1/K" },
         { text: "Psychrometer equation", formula: "e = e_w - A\\,p\\,(T - T_w)", filled: `e = ${texNumber(atBulb / 100)} - ${texNumber(A)} \\cdot ${texNumber(hand.given("pressure") / 100, 6)} \\cdot ${texNumber(depressionOf(hand))} = ${inHectopascal(e)}`, value: e, unit: "Pa" }
       ];
       if (isHumidity) steps2.push({ text: "Over the saturation vapor pressure over liquid water at the dry bulb", formula: "\\mathit{RH} = \\frac{e}{e_s(T)}", filled: `\\mathit{RH} = \\frac{${texNumber(e / 100)}}{${texNumber(hand.air.es(hand.given("temperature")) / 100)}} = ${texQuantity(value19 * 100, "%")}` });
@@ -6282,7 +6282,7 @@ function slipsOf2(bulb, isHumidity, by3) {
     moistSlip("sign", "added in place of taken away", "The evaporation costs vapor: A p (T − Tw) is taken away.", (hand) => depressionOf(hand) === 0 ? null : by3(-coefficientOf(hand, bulb), hand)),
     fineMoistSlip("no-depression", "without the depression", "This takes saturation at the wet bulb for the air’s vapor pressure: A p (T − Tw) is missing.", (hand) => depressionOf(hand) === 0 ? null : by3(0, hand)),
     moistSlip("at-dry-bulb", "saturation at the dry bulb", "This takes the saturation vapor pressure at the dry bulb in the psychrometer equation: it is that at the wet bulb.", (hand) => depressionOf(hand) === 0 ? null : by3(coefficientOf(hand, bulb), hand, hand.air.es(hand.given("temperature")))),
-    ...isHumidity ? [fineMoistSlip("over-wet-bulb", "over saturation at the wet bulb", "This divides by the saturation vapor pressure at the wet bulb: it is that at the dry bulb.", ({ given: given7, air, right }) => right * air.es(given7("temperature")) / air.es(given7("wetBulb"))), fractionAsPercentSlip] : [pascalSlip, kilopascalSlip]
+    ...isHumidity ? [fineMoistSlip("over-wet-bulb", "over saturation at the wet bulb", "This divides by the saturation vapor pressure at the wet bulb: it is that at the dry bulb.", ({ given: given8, air, right }) => right * air.es(given8("temperature")) / air.es(given8("wetBulb"))), fractionAsPercentSlip] : [pascalSlip, kilopascalSlip]
   ];
 }
 
@@ -6322,25 +6322,25 @@ var relativeHumidityOverIceDefinition = moistQuantity({
   shownUnit: "%",
   kind: "fraction",
   inputs: [{ ...temperatureInput2, range: [180, 273.16] }, { ...dewpointInput, range: [160, 275] }],
-  variants: [{ key: "vapor-pressures", label: "e/eᵢ, ratio of vapor pressures", source: wmoHumidity, validity: "below 0 °C", knownError: "0.5 of a percent by the formulae", value: ({ given: given7, air, constants, formulae }) => air.es(given7("dewpoint")) / iceSaturationPressureFunction(constants, formulae)(given7("temperature")) }],
+  variants: [{ key: "vapor-pressures", label: "e/eᵢ, ratio of vapor pressures", source: wmoHumidity, validity: "below 0 °C", knownError: "0.5 of a percent by the formulae", value: ({ given: given8, air, constants, formulae }) => air.es(given8("dewpoint")) / iceSaturationPressureFunction(constants, formulae)(given8("temperature")) }],
   constants: [],
   inside: ["es", "ei"],
-  notedAt: { es: (given7) => [given7("dewpoint")], ei: (given7) => [given7("temperature")] },
+  notedAt: { es: (given8) => [given8("dewpoint")], ei: (given8) => [given8("temperature")] },
   remarks: (_hand, value19) => [value19 > 1 + 1e-12 ? "Supersaturated over ice, as cold air without ice often is." : null],
   ask: "The relative humidity over ice, e over the saturation vapor pressure over ice; the dewpoint refers to liquid water.",
-  working: ({ given: given7, air, constants, formulae }, value19) => {
-    const e = air.es(given7("dewpoint")), ei = iceSaturationPressureFunction(constants, formulae)(given7("temperature"));
+  working: ({ given: given8, air, constants, formulae }, value19) => {
+    const e = air.es(given8("dewpoint")), ei = iceSaturationPressureFunction(constants, formulae)(given8("temperature"));
     return [
-      saturationStep("e", "T_d", given7("dewpoint"), e, "Vapor pressure: that of saturation over water at the dewpoint"),
+      saturationStep("e", "T_d", given8("dewpoint"), e, "Vapor pressure: that of saturation over water at the dewpoint"),
       { text: "Saturation vapor pressure over ice", formula: "e_i(T)", filled: `e_i = ${inHectopascal(ei)}`, value: ei, unit: "Pa" },
       { text: "Their ratio", formula: "\\mathit{RH}_i = \\frac{e}{e_i}", filled: `\\frac{${texNumber(e / 100)}}{${texNumber(ei / 100)}} = ${texQuantity(value19 * 100, "%")}` }
     ];
   },
   slips: [
-    fineMoistSlip("water-for-ice", "over water for over ice", "This is relative to saturation over liquid water; asked is that over ice.", ({ given: given7, air }) => air.es(given7("dewpoint")) / air.es(given7("temperature"))),
-    fineMoistSlip("frost-point", "dewpoint taken for a frost point", "This takes the vapor pressure over ice at the dewpoint; the dewpoint refers to liquid water.", ({ given: given7, constants, formulae }) => {
+    fineMoistSlip("water-for-ice", "over water for over ice", "This is relative to saturation over liquid water; asked is that over ice.", ({ given: given8, air }) => air.es(given8("dewpoint")) / air.es(given8("temperature"))),
+    fineMoistSlip("frost-point", "dewpoint taken for a frost point", "This takes the vapor pressure over ice at the dewpoint; the dewpoint refers to liquid water.", ({ given: given8, constants, formulae }) => {
       const ei = iceSaturationPressureFunction(constants, formulae);
-      return given7("dewpoint") < 273.16 ? ei(given7("dewpoint")) / ei(given7("temperature")) : null;
+      return given8("dewpoint") < 273.16 ? ei(given8("dewpoint")) / ei(given8("temperature")) : null;
     }),
     moistSlip("swapped", "vapor pressures swapped", "This is the ratio turned round.", ({ right }) => right === 1 ? null : 1 / right),
     fractionAsPercentSlip
@@ -6354,8 +6354,8 @@ var saturationMixingRatioDefinition = mixingRatioDefinition({
   name: "saturation mixing ratio over liquid water",
   symbol: "w_s",
   inputs: [temperatureInput2],
-  vaporPressure: ({ given: given7, air }) => air.es(given7("temperature")),
-  step: ({ given: given7 }, e) => saturationStep("e", "T", given7("temperature"), e),
+  vaporPressure: ({ given: given8, air }) => air.es(given8("temperature")),
+  step: ({ given: given8 }, e) => saturationStep("e", "T", given8("temperature"), e),
   temperatureName: "temperature",
   inside: ["es"],
   ask: "The mixing ratio of air that is saturated over liquid water at the temperature and the pressure.",
@@ -6374,15 +6374,15 @@ var saturationMixingRatioOverIceDefinition = mixingRatioDefinition({
   name: "saturation mixing ratio over ice",
   symbol: "w_i",
   inputs: [{ ...temperatureInput2, range: [160, 273.16] }],
-  vaporPressure: ({ given: given7, constants, formulae }) => iceSaturationPressureFunction(constants, formulae)(given7("temperature")),
-  step: ({ given: given7 }, e) => ({ ...saturationStep("e", "T", given7("temperature"), e, "Saturation vapor pressure over ice"), formula: "e = e_i(T)" }),
+  vaporPressure: ({ given: given8, constants, formulae }) => iceSaturationPressureFunction(constants, formulae)(given8("temperature")),
+  step: ({ given: given8 }, e) => ({ ...saturationStep("e", "T", given8("temperature"), e, "Saturation vapor pressure over ice"), formula: "e = e_i(T)" }),
   temperatureName: "temperature",
   inside: ["ei"],
   ask: "The mixing ratio of air that is saturated over ice at the temperature and the pressure.",
   slips: [
-    fineMoistSlip("water-for-ice", "over water for over ice", "This comes from the vapor pressure over liquid water; asked is saturation over ice.", ({ given: given7, air }) => {
-      const e = air.es(given7("temperature"));
-      return air.epsilon * e / (given7("pressure") - e);
+    fineMoistSlip("water-for-ice", "over water for over ice", "This comes from the vapor pressure over liquid water; asked is saturation over ice.", ({ given: given8, air }) => {
+      const e = air.es(given8("temperature"));
+      return air.epsilon * e / (given8("pressure") - e);
     })
   ],
   example: { inputs: { pressure: 7e4, temperature: 258.15 }, gives: 1471929e-9, within: 1e-9 }
@@ -6398,17 +6398,17 @@ var specificEnthalpyOfMoistAirDefinition = moistQuantity({
   kind: "difference",
   nearZero: 1e3,
   inputs: [temperatureInput2, mixingRatioInput],
-  variants: [{ key: "constant-heats", label: "cp t + w (L₀ + cpv t)", source: { text: "ASHRAE Handbook – Fundamentals (2017), SI, ch. 1, Eq. 30", status: "from memory" }, validity: "−50 to 50 °C", knownError: "0.1 kJ kg⁻¹", value: ({ given: given7, air, constants }) => air.cp * (given7("temperature") - zeroCelsius) + given7("mixingRatio") * (constant(constants, "latentHeat") + air.cpv * (given7("temperature") - zeroCelsius)) }],
+  variants: [{ key: "constant-heats", label: "cp t + w (L₀ + cpv t)", source: { text: "ASHRAE Handbook – Fundamentals (2017), SI, ch. 1, Eq. 30", status: "from memory" }, validity: "−50 to 50 °C", knownError: "0.1 kJ kg⁻¹", value: ({ given: given8, air, constants }) => air.cp * (given8("temperature") - zeroCelsius) + given8("mixingRatio") * (constant(constants, "latentHeat") + air.cpv * (given8("temperature") - zeroCelsius)) }],
   constants: ["cp", "cpv", "latentHeat"],
   ask: "The specific enthalpy of the moist air per kilogram of dry air, counted from 0 °C with the water liquid.",
-  working: ({ given: given7, air, constants }, value19) => {
-    const t = given7("temperature") - zeroCelsius, w2 = given7("mixingRatio"), L0 = constant(constants, "latentHeat");
+  working: ({ given: given8, air, constants }, value19) => {
+    const t = given8("temperature") - zeroCelsius, w2 = given8("mixingRatio"), L0 = constant(constants, "latentHeat");
     return [{ text: "Dry air and vapor, with t in °C and L at 0 °C", formula: "h = c_p\\,t + w\\,(L_0 + c_{pv}\\,t)", filled: `h = ${texNumber(air.cp / 1e3)} \\cdot ${texFactor(t)} + ${texNumber(w2)}\\,(${texNumber(L0 / 1e3)} + ${texNumber(air.cpv / 1e3)} \\cdot ${texFactor(t)}) = ${texQuantity(value19 / 1e3, "kJ/kg")}` }];
   },
   slips: [
-    moistSlip("kelvin-for-celsius", "kelvin put in for Celsius", "This counts from 0 K: the enthalpy is counted from 0 °C.", ({ given: given7, again }) => given7("temperature") < 320 ? again({ temperature: given7("temperature") + zeroCelsius }) : null),
-    moistSlip("dry", "without the vapor", "This is cp t alone: the vapor’s part w (L + cpv t) is missing.", ({ given: given7, air }) => given7("temperature") === zeroCelsius ? null : air.cp * (given7("temperature") - zeroCelsius)),
-    moistSlip("latent-only", "without cp t", "This is the vapor’s part alone: cp t of the dry air is missing.", ({ given: given7, air, right }) => given7("temperature") === zeroCelsius ? null : right - air.cp * (given7("temperature") - zeroCelsius)),
+    moistSlip("kelvin-for-celsius", "kelvin put in for Celsius", "This counts from 0 K: the enthalpy is counted from 0 °C.", ({ given: given8, again }) => given8("temperature") < 320 ? again({ temperature: given8("temperature") + zeroCelsius }) : null),
+    moistSlip("dry", "without the vapor", "This is cp t alone: the vapor’s part w (L + cpv t) is missing.", ({ given: given8, air }) => given8("temperature") === zeroCelsius ? null : air.cp * (given8("temperature") - zeroCelsius)),
+    moistSlip("latent-only", "without cp t", "This is the vapor’s part alone: cp t of the dry air is missing.", ({ given: given8, air, right }) => given8("temperature") === zeroCelsius ? null : right - air.cp * (given8("temperature") - zeroCelsius)),
     moistSlip("joules-for-kilojoules", "J given as kJ", "Your number is in joules; the unit beside it says kilojoules.", ({ right }) => right * 1e3),
     moistSlip("sign", "sign turned round", "The enthalpy is counted positive above 0 °C and for the vapor.", ({ right }) => -right)
   ],
@@ -6424,16 +6424,16 @@ function moistHeatDefinition({ tex, dryTex, vaporTex, dry, vapor: vapor2, ...nam
     shownUnit: "J/(kg.K)",
     kind: "ratio",
     inputs: [mixingRatioInput],
-    variants: [{ key: "by-mass", label: "dry air and vapor by mass", source: glossary("specific heat", "common practice"), validity: "near the temperatures of the lower atmosphere", knownError: "0.2 %", value: ({ given: given7, constants }) => whole(constants, given7("mixingRatio")) }],
-    working: ({ given: given7, constants }, value19) => {
-      const w2 = given7("mixingRatio");
+    variants: [{ key: "by-mass", label: "dry air and vapor by mass", source: glossary("specific heat", "common practice"), validity: "near the temperatures of the lower atmosphere", knownError: "0.2 %", value: ({ given: given8, constants }) => whole(constants, given8("mixingRatio")) }],
+    working: ({ given: given8, constants }, value19) => {
+      const w2 = given8("mixingRatio");
       return [{ text: "Dry air and vapor by their masses, with w in kg per kg", formula: `${tex} = \\frac{${dryTex} + w\\,${vaporTex}}{1 + w}`, filled: `${tex} = \\frac{${texNumber(dry(constants), 6)} + ${texNumber(w2)} \\cdot ${texNumber(vapor2(constants))}}{1 + ${texNumber(w2)}} = ${texQuantity(value19, "J/(kg.K)", 6)}` }];
     },
     slips: [
       smallMoistSlip("dry", "as if dry", "This is that of dry air: the vapor, which takes twice as much, is not in it.", ({ constants }) => dry(constants)),
-      smallMoistSlip("per-dry-air", "per kilogram of dry air", "This is per kilogram of dry air: divide by 1 + w.", ({ given: given7, right }) => right * (1 + given7("mixingRatio"))),
-      smallMoistSlip("liquid", "liquid water for vapor", "This comes from the specific heat of liquid water: the air holds vapor.", ({ given: given7, constants }) => (dry(constants) + given7("mixingRatio") * constant(constants, "cw")) / (1 + given7("mixingRatio"))),
-      moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with w in g per kg: the formula takes kg per kg.", ({ given: given7, again }) => again({ mixingRatio: 1e3 * given7("mixingRatio") }))
+      smallMoistSlip("per-dry-air", "per kilogram of dry air", "This is per kilogram of dry air: divide by 1 + w.", ({ given: given8, right }) => right * (1 + given8("mixingRatio"))),
+      smallMoistSlip("liquid", "liquid water for vapor", "This comes from the specific heat of liquid water: the air holds vapor.", ({ given: given8, constants }) => (dry(constants) + given8("mixingRatio") * constant(constants, "cw")) / (1 + given8("mixingRatio"))),
+      moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with w in g per kg: the formula takes kg per kg.", ({ given: given8, again }) => again({ mixingRatio: 1e3 * given8("mixingRatio") }))
     ]
   });
 }
@@ -6477,14 +6477,14 @@ var specificHumidityDefinition = moistQuantity({
   shownUnit: "g/kg",
   kind: "ratio",
   inputs: [mixingRatioInput],
-  variants: [{ key: "exact", label: "w/(1 + w)", source: glossary("specific humidity"), validity: "any", knownError: "none: by definition", value: ({ given: given7 }) => specificHumidityFrom(given7("mixingRatio")) }],
+  variants: [{ key: "exact", label: "w/(1 + w)", source: glossary("specific humidity"), validity: "any", knownError: "none: by definition", value: ({ given: given8 }) => specificHumidityFrom(given8("mixingRatio")) }],
   constants: [],
   ask: "The specific humidity q of the air, mass of vapor per mass of moist air.",
-  working: ({ given: given7 }, value19) => [{ text: "Per kilogram of moist air, with w in kg per kg", formula: "q = \\frac{w}{1 + w}", filled: `q = \\frac{${texNumber(given7("mixingRatio"))}}{1 + ${texNumber(given7("mixingRatio"))}} = ${inGrams(value19)}` }],
+  working: ({ given: given8 }, value19) => [{ text: "Per kilogram of moist air, with w in kg per kg", formula: "q = \\frac{w}{1 + w}", filled: `q = \\frac{${texNumber(given8("mixingRatio"))}}{1 + ${texNumber(given8("mixingRatio"))}} = ${inGrams(value19)}` }],
   slips: [
-    fineMoistSlip("mixing-ratio", "the mixing ratio itself", "This is the mixing ratio, per kilogram of dry air: the specific humidity is per kilogram of moist air.", ({ given: given7 }) => given7("mixingRatio")),
-    fineMoistSlip("turned-round", "conversion turned round", "This is w/(1 − w), the conversion the other way round.", ({ given: given7 }) => given7("mixingRatio") / (1 - given7("mixingRatio"))),
-    moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with w in g per kg: the formula takes kg per kg.", ({ given: given7, again }) => again({ mixingRatio: 1e3 * given7("mixingRatio") })),
+    fineMoistSlip("mixing-ratio", "the mixing ratio itself", "This is the mixing ratio, per kilogram of dry air: the specific humidity is per kilogram of moist air.", ({ given: given8 }) => given8("mixingRatio")),
+    fineMoistSlip("turned-round", "conversion turned round", "This is w/(1 − w), the conversion the other way round.", ({ given: given8 }) => given8("mixingRatio") / (1 - given8("mixingRatio"))),
+    moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with w in g per kg: the formula takes kg per kg.", ({ given: given8, again }) => again({ mixingRatio: 1e3 * given8("mixingRatio") })),
     kilogramSlip
   ],
   example: { inputs: { mixingRatio: 0.015 }, gives: 0.014778, within: 1e-6 }
@@ -6505,17 +6505,17 @@ var specificHumidityFromDewpointDefinition = moistQuantity({
     source: glossary("specific humidity"),
     validity: "e < p",
     knownError: "below 0.5 %: the enhancement factor of moist air",
-    value: ({ given: given7, air }) => specificHumidityFrom(mixingRatioFrom(air.es(given7("dewpoint")), given7("pressure"), air.epsilon))
+    value: ({ given: given8, air }) => specificHumidityFrom(mixingRatioFrom(air.es(given8("dewpoint")), given8("pressure"), air.epsilon))
   }],
   constants: ["R", "Rv", "enhancementFactor"],
   inside: ["es"],
-  notedAt: { es: (given7) => [given7("dewpoint")] },
+  notedAt: { es: (given8) => [given8("dewpoint")] },
   ask: "The specific humidity q of the air, mass of vapor per mass of moist air, from its dewpoint over liquid water.",
-  working: ({ given: given7, air }, value19) => {
-    const e = air.es(given7("dewpoint"));
+  working: ({ given: given8, air }, value19) => {
+    const e = air.es(given8("dewpoint"));
     return [
-      saturationStep("e", "T_d", given7("dewpoint"), e, "Vapor pressure: that of saturation at the dewpoint"),
-      { text: "Per kilogram of moist air", formula: "q = \\frac{\\varepsilon\\,e}{p - (1 - \\varepsilon)\\,e}", filled: `q = \\frac{${texNumber(air.epsilon)} \\cdot ${texNumber(e / 100)}}{${texNumber(given7("pressure") / 100, 6)} - ${texNumber(1 - air.epsilon)} \\cdot ${texNumber(e / 100)}} = ${inGrams(value19)}` }
+      saturationStep("e", "T_d", given8("dewpoint"), e, "Vapor pressure: that of saturation at the dewpoint"),
+      { text: "Per kilogram of moist air", formula: "q = \\frac{\\varepsilon\\,e}{p - (1 - \\varepsilon)\\,e}", filled: `q = \\frac{${texNumber(air.epsilon)} \\cdot ${texNumber(e / 100)}}{${texNumber(given8("pressure") / 100, 6)} - ${texNumber(1 - air.epsilon)} \\cdot ${texNumber(e / 100)}} = ${inGrams(value19)}` }
     ];
   },
   slips: [
@@ -6525,7 +6525,7 @@ var specificHumidityFromDewpointDefinition = moistQuantity({
       const e = overIce(hand, hand.given("dewpoint"));
       return e === null ? null : specificHumidityFrom(mixingRatioFrom(e, hand.given("pressure"), hand.air.epsilon));
     }),
-    moistSlip("epsilon-left-out", "ε left out", "This is e/p: the ratio of the molar masses, ε = 0.622, is missing.", ({ given: given7, air }) => air.es(given7("dewpoint")) / given7("pressure")),
+    moistSlip("epsilon-left-out", "ε left out", "This is e/p: the ratio of the molar masses, ε = 0.622, is missing.", ({ given: given8, air }) => air.es(given8("dewpoint")) / given8("pressure")),
     kilogramSlip
   ],
   example: { inputs: { pressure: 85e3, dewpoint: 285.65 }, gives: 0.01066567, within: 1e-8 }
@@ -6540,16 +6540,16 @@ var vaporPressureDefinition = moistQuantity({
   shownUnit: "hPa",
   kind: "ratio",
   inputs: [dewpointInput, temperatureForSlips],
-  variants: [{ key: "at-dewpoint", label: "that of saturation at the dewpoint", source: glossary("dewpoint"), validity: "as of the formula of eₛ", knownError: "0.1 to 0.3 % by the formula of eₛ", value: ({ given: given7, air }) => air.es(given7("dewpoint")) }],
+  variants: [{ key: "at-dewpoint", label: "that of saturation at the dewpoint", source: glossary("dewpoint"), validity: "as of the formula of eₛ", knownError: "0.1 to 0.3 % by the formula of eₛ", value: ({ given: given8, air }) => air.es(given8("dewpoint")) }],
   constants: ["enhancementFactor"],
   inside: ["es"],
-  notedAt: { es: (given7) => [given7("dewpoint")] },
+  notedAt: { es: (given8) => [given8("dewpoint")] },
   ask: "The vapor pressure e of the air from its dewpoint over liquid water.",
-  working: ({ given: given7 }, value19) => [saturationStep("e", "T_d", given7("dewpoint"), value19, "By the definition of the dewpoint")],
+  working: ({ given: given8 }, value19) => [saturationStep("e", "T_d", given8("dewpoint"), value19, "By the definition of the dewpoint")],
   slips: [
     atTemperatureSlip("the vapor pressure"),
     fineMoistSlip("ice-for-water", "over ice for over water", "This is the vapor pressure over ice at the dewpoint; a dewpoint refers to liquid water, also below 0 °C.", (hand) => overIce(hand, hand.given("dewpoint"))),
-    moistSlip("sign", "sign of the dewpoint lost", "This comes from the dewpoint with its sign turned round.", ({ given: given7, again }) => given7("dewpoint") > 220 && given7("dewpoint") < 330 && given7("dewpoint") !== zeroCelsius ? again({ dewpoint: 2 * zeroCelsius - given7("dewpoint") }) : null),
+    moistSlip("sign", "sign of the dewpoint lost", "This comes from the dewpoint with its sign turned round.", ({ given: given8, again }) => given8("dewpoint") > 220 && given8("dewpoint") < 330 && given8("dewpoint") !== zeroCelsius ? again({ dewpoint: 2 * zeroCelsius - given8("dewpoint") }) : null),
     pascalSlip,
     kilopascalSlip
   ],
@@ -6575,17 +6575,17 @@ var vaporPressureFromMixingRatioDefinition = moistQuantity({
   kind: "ratio",
   inputs: [pressureInput2, mixingRatioInput],
   variants: [
-    { key: "exact", label: "w p/(ε + w)", source: glossary("mixing ratio"), validity: "any", knownError: "0.1 % by the gas constants", value: ({ given: given7, air }) => vaporPressureFrom(given7("mixingRatio"), given7("pressure"), air.epsilon) },
-    { key: "approximate", label: "w p/ε, as an approximation", source: { text: "common practice: w neglected against ε", status: "common practice" }, validity: "cold or dry air", knownError: "1.6 % at 10 g/kg", value: ({ given: given7, air }) => given7("mixingRatio") * given7("pressure") / air.epsilon }
+    { key: "exact", label: "w p/(ε + w)", source: glossary("mixing ratio"), validity: "any", knownError: "0.1 % by the gas constants", value: ({ given: given8, air }) => vaporPressureFrom(given8("mixingRatio"), given8("pressure"), air.epsilon) },
+    { key: "approximate", label: "w p/ε, as an approximation", source: { text: "common practice: w neglected against ε", status: "common practice" }, validity: "cold or dry air", knownError: "1.6 % at 10 g/kg", value: ({ given: given8, air }) => given8("mixingRatio") * given8("pressure") / air.epsilon }
   ],
   constants: ["R", "Rv"],
   ask: "The vapor pressure e of air with the mixing ratio at the pressure.",
-  working: ({ given: given7, air, variant }, value19) => [variant === "approximate" ? { text: "With w neglected against ε", formula: "e = \\frac{w\\,p}{\\varepsilon}", filled: `e = \\frac{${texNumber(given7("mixingRatio"))} \\cdot ${texNumber(given7("pressure") / 100, 6)}}{${texNumber(air.epsilon)}} = ${inHectopascal(value19)}` } : { text: "The mixing ratio solved for e, with w in kg per kg", formula: "e = \\frac{w\\,p}{\\varepsilon + w}", filled: `e = \\frac{${texNumber(given7("mixingRatio"))} \\cdot ${texNumber(given7("pressure") / 100, 6)}}{${texNumber(air.epsilon)} + ${texNumber(given7("mixingRatio"))}} = ${inHectopascal(value19)}` }],
+  working: ({ given: given8, air, variant }, value19) => [variant === "approximate" ? { text: "With w neglected against ε", formula: "e = \\frac{w\\,p}{\\varepsilon}", filled: `e = \\frac{${texNumber(given8("mixingRatio"))} \\cdot ${texNumber(given8("pressure") / 100, 6)}}{${texNumber(air.epsilon)}} = ${inHectopascal(value19)}` } : { text: "The mixing ratio solved for e, with w in kg per kg", formula: "e = \\frac{w\\,p}{\\varepsilon + w}", filled: `e = \\frac{${texNumber(given8("mixingRatio"))} \\cdot ${texNumber(given8("pressure") / 100, 6)}}{${texNumber(air.epsilon)} + ${texNumber(given8("mixingRatio"))}} = ${inHectopascal(value19)}` }],
   slips: [
-    fineMoistSlip("without-w", "w neglected against ε", "This is w p/ε: in the denominator stands ε + w.", ({ given: given7, air, variant }) => variant === "approximate" ? null : given7("mixingRatio") * given7("pressure") / air.epsilon),
-    moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with w in g per kg: the formula takes kg per kg.", ({ given: given7, again }) => again({ mixingRatio: 1e3 * given7("mixingRatio") })),
-    moistSlip("inverted-epsilon", "ε turned round", "This comes from 1/ε, the ratio of the gas constants the other way round.", ({ given: given7, air }) => vaporPressureFrom(given7("mixingRatio"), given7("pressure"), 1 / air.epsilon)),
-    moistSlip("epsilon-left-out", "ε for 1", "This is w p/(1 + w): the ratio of the molar masses, ε = 0.622, is missing.", ({ given: given7 }) => vaporPressureFrom(given7("mixingRatio"), given7("pressure"), 1)),
+    fineMoistSlip("without-w", "w neglected against ε", "This is w p/ε: in the denominator stands ε + w.", ({ given: given8, air, variant }) => variant === "approximate" ? null : given8("mixingRatio") * given8("pressure") / air.epsilon),
+    moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with w in g per kg: the formula takes kg per kg.", ({ given: given8, again }) => again({ mixingRatio: 1e3 * given8("mixingRatio") })),
+    moistSlip("inverted-epsilon", "ε turned round", "This comes from 1/ε, the ratio of the gas constants the other way round.", ({ given: given8, air }) => vaporPressureFrom(given8("mixingRatio"), given8("pressure"), 1 / air.epsilon)),
+    moistSlip("epsilon-left-out", "ε for 1", "This is w p/(1 + w): the ratio of the molar masses, ε = 0.622, is missing.", ({ given: given8 }) => vaporPressureFrom(given8("mixingRatio"), given8("pressure"), 1)),
     pascalSlip,
     kilopascalSlip
   ],
@@ -6610,20 +6610,20 @@ var vaporPressureFromRelativeHumidityDefinition = moistQuantity({
   shownUnit: "hPa",
   kind: "ratio",
   inputs: [temperatureInput2, relativeHumidityInput],
-  variants: [{ key: "share-of-saturation", label: "RH eₛ(T)", source: glossary("relative humidity"), validity: "RH over liquid water, also below 0 °C", knownError: "0.1 to 0.3 % by the formula of eₛ", value: ({ given: given7, air }) => given7("relativeHumidity") * air.es(given7("temperature")) }],
+  variants: [{ key: "share-of-saturation", label: "RH eₛ(T)", source: glossary("relative humidity"), validity: "RH over liquid water, also below 0 °C", knownError: "0.1 to 0.3 % by the formula of eₛ", value: ({ given: given8, air }) => given8("relativeHumidity") * air.es(given8("temperature")) }],
   constants: ["enhancementFactor"],
   inside: ["es"],
-  notedAt: { es: (given7) => [given7("temperature")] },
-  remarks: ({ given: given7 }) => [supersaturated(given7("relativeHumidity"))],
+  notedAt: { es: (given8) => [given8("temperature")] },
+  remarks: ({ given: given8 }) => [supersaturated(given8("relativeHumidity"))],
   ask: "The vapor pressure e of the air from its relative humidity over liquid water, RH = e/es.",
-  working: ({ given: given7, air }, value19) => [
-    saturationStep("e_s", "T", given7("temperature"), air.es(given7("temperature"))),
-    { text: "Of which the air holds its share", formula: "e = \\mathit{RH}\\,e_s", filled: `e = ${texNumber(given7("relativeHumidity"))} \\cdot ${texNumber(air.es(given7("temperature")) / 100)} = ${inHectopascal(value19)}` }
+  working: ({ given: given8, air }, value19) => [
+    saturationStep("e_s", "T", given8("temperature"), air.es(given8("temperature"))),
+    { text: "Of which the air holds its share", formula: "e = \\mathit{RH}\\,e_s", filled: `e = ${texNumber(given8("relativeHumidity"))} \\cdot ${texNumber(air.es(given8("temperature")) / 100)} = ${inHectopascal(value19)}` }
   ],
   slips: [
     moistSlip("factor-100", "a factor of 100: percent not divided, or Pa given as hPa", "Your value is a hundred times too large: a percentage was not divided by 100, or pascal was given as hectopascal.", ({ right }) => right * 100),
-    moistSlip("divided", "divided by RH", "This is es divided by the relative humidity: the air holds a share of it, es times RH.", ({ given: given7, air }) => given7("relativeHumidity") === 1 ? null : air.es(given7("temperature")) / given7("relativeHumidity")),
-    fineMoistSlip("saturation", "saturation vapor pressure", "This is the vapor pressure of saturation: the relative humidity is not in it.", ({ given: given7, air }) => given7("relativeHumidity") === 1 ? null : air.es(given7("temperature"))),
+    moistSlip("divided", "divided by RH", "This is es divided by the relative humidity: the air holds a share of it, es times RH.", ({ given: given8, air }) => given8("relativeHumidity") === 1 ? null : air.es(given8("temperature")) / given8("relativeHumidity")),
+    fineMoistSlip("saturation", "saturation vapor pressure", "This is the vapor pressure of saturation: the relative humidity is not in it.", ({ given: given8, air }) => given8("relativeHumidity") === 1 ? null : air.es(given8("temperature"))),
     fineMoistSlip("ice-for-water", "over ice for over water", "This comes from the saturation vapor pressure over ice; relative humidity refers to liquid water, also below 0 °C.", (hand) => {
       const e = overIce(hand, hand.given("temperature"));
       return e === null ? null : hand.given("relativeHumidity") * e;
@@ -6652,18 +6652,18 @@ var virtualTemperatureDefinition = moistQuantity({
   kind: "temperature",
   inputs: [temperatureInput2, mixingRatioInput],
   variants: [
-    { key: "exact", label: "T (1 + w/ε)/(1 + w)", source: glossary("virtual temperature"), validity: "any", knownError: "none beyond the gas constants", value: ({ given: given7, air }) => virtualTemperatureFrom(given7("temperature"), given7("mixingRatio"), air.epsilon) },
-    { key: "linear", label: "T (1 + 0.61 w), as an approximation", source: glossary("virtual temperature", "common practice"), validity: "w below 20 g/kg", knownError: "0.13 K at 28 g/kg", value: ({ given: given7 }) => given7("temperature") * (1 + 0.61 * given7("mixingRatio")) }
+    { key: "exact", label: "T (1 + w/ε)/(1 + w)", source: glossary("virtual temperature"), validity: "any", knownError: "none beyond the gas constants", value: ({ given: given8, air }) => virtualTemperatureFrom(given8("temperature"), given8("mixingRatio"), air.epsilon) },
+    { key: "linear", label: "T (1 + 0.61 w), as an approximation", source: glossary("virtual temperature", "common practice"), validity: "w below 20 g/kg", knownError: "0.13 K at 28 g/kg", value: ({ given: given8 }) => given8("temperature") * (1 + 0.61 * given8("mixingRatio")) }
   ],
   constants: ["R", "Rv"],
   ask: "The virtual temperature of the air, exactly: T (1 + w/ε)/(1 + w).",
-  working: ({ given: given7, variant, air }, value19) => [variant === "linear" ? { text: "With T in kelvin and w in kg per kg", formula: "T_v = T\\,(1 + 0.61\\,w)", filled: `T_v = ${texNumber(given7("temperature"), 6)}\\,(1 + 0.61 \\cdot ${texNumber(given7("mixingRatio"))}) = ${inKelvin(value19)} = ${inCelsius(value19)}` } : { text: "With T in kelvin and w in kg per kg", formula: "T_v = T\\,\\frac{1 + w/\\varepsilon}{1 + w}", filled: `T_v = ${texNumber(given7("temperature"), 6)} \\cdot \\frac{1 + ${texNumber(given7("mixingRatio"))}/${texNumber(air.epsilon)}}{1 + ${texNumber(given7("mixingRatio"))}} = ${inKelvin(value19)} = ${inCelsius(value19)}` }],
+  working: ({ given: given8, variant, air }, value19) => [variant === "linear" ? { text: "With T in kelvin and w in kg per kg", formula: "T_v = T\\,(1 + 0.61\\,w)", filled: `T_v = ${texNumber(given8("temperature"), 6)}\\,(1 + 0.61 \\cdot ${texNumber(given8("mixingRatio"))}) = ${inKelvin(value19)} = ${inCelsius(value19)}` } : { text: "With T in kelvin and w in kg per kg", formula: "T_v = T\\,\\frac{1 + w/\\varepsilon}{1 + w}", filled: `T_v = ${texNumber(given8("temperature"), 6)} \\cdot \\frac{1 + ${texNumber(given8("mixingRatio"))}/${texNumber(air.epsilon)}}{1 + ${texNumber(given8("mixingRatio"))}} = ${inKelvin(value19)} = ${inCelsius(value19)}` }],
   slips: [
-    moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This is what comes out with the temperature in °C: the factor belongs to kelvin.", ({ given: given7, again }) => given7("temperature") === zeroCelsius ? null : zeroCelsius + again({ temperature: given7("temperature") - zeroCelsius })),
-    moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with w in g per kg: the formula takes kg per kg.", ({ given: given7 }) => given7("temperature") * (1 + 0.61 * 1e3 * given7("mixingRatio"))),
-    moistSlip("cooler", "cooler where it is warmer", "Moist air is lighter than dry air, so its virtual temperature is above its temperature: yours is below.", ({ given: given7, right }) => 2 * given7("temperature") - right),
-    moistSlip("epsilon-left-out", "ε for 0.61", "This comes from 1 + 0.622 w: the factor is 1 + 0.61 w, with 0.61 = 1/ε − 1.", ({ given: given7 }) => given7("mixingRatio") < 0.03 ? null : given7("temperature") * (1 + 0.622 * given7("mixingRatio"))),
-    moistSlip("dry", "w/ε without 1 + w", "This is T (1 + w/ε): the denominator 1 + w is missing.", ({ given: given7, air }) => given7("temperature") * (1 + given7("mixingRatio") / air.epsilon)),
+    moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This is what comes out with the temperature in °C: the factor belongs to kelvin.", ({ given: given8, again }) => given8("temperature") === zeroCelsius ? null : zeroCelsius + again({ temperature: given8("temperature") - zeroCelsius })),
+    moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with w in g per kg: the formula takes kg per kg.", ({ given: given8 }) => given8("temperature") * (1 + 0.61 * 1e3 * given8("mixingRatio"))),
+    moistSlip("cooler", "cooler where it is warmer", "Moist air is lighter than dry air, so its virtual temperature is above its temperature: yours is below.", ({ given: given8, right }) => 2 * given8("temperature") - right),
+    moistSlip("epsilon-left-out", "ε for 0.61", "This comes from 1 + 0.622 w: the factor is 1 + 0.61 w, with 0.61 = 1/ε − 1.", ({ given: given8 }) => given8("mixingRatio") < 0.03 ? null : given8("temperature") * (1 + 0.622 * given8("mixingRatio"))),
+    moistSlip("dry", "w/ε without 1 + w", "This is T (1 + w/ε): the denominator 1 + w is missing.", ({ given: given8, air }) => given8("temperature") * (1 + given8("mixingRatio") / air.epsilon)),
     kelvinAsCelsiusSlip
   ],
   example: { inputs: { temperature: 303.15, mixingRatio: 0.02 }, gives: 306.764, within: 1e-3 }
@@ -6679,30 +6679,30 @@ var wetBulbTemperatureDefinition = moistQuantity({
   kind: "temperature",
   inputs: [pressureInput2, temperatureInput2, dewpointInput],
   variants: [
-    { key: "isobaric", label: "isobaric, with the heat capacity of the vapor", source: glossary("wet-bulb temperature"), validity: "liquid water on the bulb", knownError: "0.05 K by the formulae inside", value: ({ given: given7, air }) => isobaricWetBulb(given7("temperature"), mixingRatioFrom(air.es(given7("dewpoint")), given7("pressure"), air.epsilon), given7("pressure"), air) },
-    { key: "dry-heat", label: "isobaric, with the heat capacity of dry air", source: glossary("wet-bulb temperature", "common practice"), validity: "liquid water on the bulb", knownError: "0.1 K", value: ({ given: given7, air }) => isobaricWetBulb(given7("temperature"), mixingRatioFrom(air.es(given7("dewpoint")), given7("pressure"), air.epsilon), given7("pressure"), air, false) }
+    { key: "isobaric", label: "isobaric, with the heat capacity of the vapor", source: glossary("wet-bulb temperature"), validity: "liquid water on the bulb", knownError: "0.05 K by the formulae inside", value: ({ given: given8, air }) => isobaricWetBulb(given8("temperature"), mixingRatioFrom(air.es(given8("dewpoint")), given8("pressure"), air.epsilon), given8("pressure"), air) },
+    { key: "dry-heat", label: "isobaric, with the heat capacity of dry air", source: glossary("wet-bulb temperature", "common practice"), validity: "liquid water on the bulb", knownError: "0.1 K", value: ({ given: given8, air }) => isobaricWetBulb(given8("temperature"), mixingRatioFrom(air.es(given8("dewpoint")), given8("pressure"), air.epsilon), given8("pressure"), air, false) }
   ],
   constants: ["R", "Rv", "cp", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L"],
-  notedAt: { es: (given7) => [given7("dewpoint")] },
-  remarks: ({ given: given7 }) => [foggy(given7("temperature"), given7("dewpoint"))],
+  notedAt: { es: (given8) => [given8("dewpoint")] },
+  remarks: ({ given: given8 }) => [foggy(given8("temperature"), given8("dewpoint"))],
   ask: "The isobaric wet-bulb temperature over liquid water, at which the air is saturated by water that evaporates into it at constant pressure, not by lifting.",
-  working: ({ given: given7, air }, value19) => [
-    { ...mixingRatioStep("w", "e", air.es(given7("dewpoint")), given7("pressure"), air), text: "Mixing ratio of the air, with e = es(Td)" },
+  working: ({ given: given8, air }, value19) => [
+    { ...mixingRatioStep("w", "e", air.es(given8("dewpoint")), given8("pressure"), air), text: "Mixing ratio of the air, with e = es(Td)" },
     { text: "The temperature at which the air’s heat has paid for saturation, found by a bracket", formula: "(c_p + w\\,c_{pv})\\,(T - T_w) = L\\,[w_s(T_w) - w]", filled: `T_w = ${inCelsius(value19)}` }
   ],
   slips: [
-    fineMoistSlip("pseudoadiabatic", "by lifting and lowering", "This is the pseudoadiabatic wet bulb, by lifting to condensation and lowering: asked is the isobaric one.", ({ given: given7, air, constants, formulae }) => given7("dewpoint") >= given7("temperature") ? null : pseudoadiabaticWetBulb(given7("pressure"), lclFunction(constants, formulae)(given7("temperature"), given7("dewpoint"), given7("pressure")), air)),
-    fineMoistSlip("mean", "mean of temperature and dewpoint", "This is the mean of temperature and dewpoint.", ({ given: given7 }) => given7("dewpoint") === given7("temperature") ? null : (given7("temperature") + given7("dewpoint")) / 2),
-    fineMoistSlip("third", "a third of the way to the dewpoint", "This is the rule of thumb T − (T − Td)/3.", ({ given: given7 }) => given7("dewpoint") === given7("temperature") ? null : given7("temperature") - (given7("temperature") - given7("dewpoint")) / 3),
-    fineMoistSlip("dewpoint", "dewpoint for wet bulb", "This is the dewpoint: the wet bulb lies between it and the temperature.", ({ given: given7 }) => given7("dewpoint") === given7("temperature") ? null : given7("dewpoint")),
+    fineMoistSlip("pseudoadiabatic", "by lifting and lowering", "This is the pseudoadiabatic wet bulb, by lifting to condensation and lowering: asked is the isobaric one.", ({ given: given8, air, constants, formulae }) => given8("dewpoint") >= given8("temperature") ? null : pseudoadiabaticWetBulb(given8("pressure"), lclFunction(constants, formulae)(given8("temperature"), given8("dewpoint"), given8("pressure")), air)),
+    fineMoistSlip("mean", "mean of temperature and dewpoint", "This is the mean of temperature and dewpoint.", ({ given: given8 }) => given8("dewpoint") === given8("temperature") ? null : (given8("temperature") + given8("dewpoint")) / 2),
+    fineMoistSlip("third", "a third of the way to the dewpoint", "This is the rule of thumb T − (T − Td)/3.", ({ given: given8 }) => given8("dewpoint") === given8("temperature") ? null : given8("temperature") - (given8("temperature") - given8("dewpoint")) / 3),
+    fineMoistSlip("dewpoint", "dewpoint for wet bulb", "This is the dewpoint: the wet bulb lies between it and the temperature.", ({ given: given8 }) => given8("dewpoint") === given8("temperature") ? null : given8("dewpoint")),
     kelvinAsCelsiusSlip
   ],
   example: { inputs: { pressure: 95461, temperature: 303.15, dewpoint: 296.49 }, gives: 298.1741, within: 1e-4 }
 });
 
 // shared/thermo/quantities/wetBulbTemperatureFromRelativeHumidity.ts
-var vapor = ({ given: given7, air }) => given7("relativeHumidity") * air.es(given7("temperature"));
+var vapor = ({ given: given8, air }) => given8("relativeHumidity") * air.es(given8("temperature"));
 var solved = (hand, vaporHeat) => isobaricWetBulb(hand.given("temperature"), mixingRatioFrom(vapor(hand), hand.given("pressure"), hand.air.epsilon), hand.given("pressure"), hand.air, vaporHeat);
 var wetBulbTemperatureFromRelativeHumidityDefinition = moistQuantity({
   key: "wet-bulb-temperature-from-relative-humidity",
@@ -6715,20 +6715,20 @@ var wetBulbTemperatureFromRelativeHumidityDefinition = moistQuantity({
   variants: [
     { key: "isobaric", label: "isobaric, with the heat capacity of the vapor", source: glossary("wet-bulb temperature"), validity: "liquid water on the bulb", knownError: "0.05 K by the formulae inside", value: (hand) => solved(hand, true) },
     { key: "dry-heat", label: "isobaric, with the heat capacity of dry air", source: glossary("wet-bulb temperature", "common practice"), validity: "liquid water on the bulb", knownError: "0.1 K", value: (hand) => solved(hand, false) },
-    { key: "stull", label: "Stull’s fit at 1013.25 hPa", source: { text: "Stull (2011), J. Appl. Meteor. Climatol. 50, 2267–2269, Eq. 1", status: "from memory" }, validity: "about 1013.25 hPa, RH 5–99 %, −20 to 50 °C", knownError: "−0.65 to +0.9 K", holds: { pressure: [98e3, 104e3], temperature: [253.15, 323.15], relativeHumidity: [0.05, 0.99] }, value: ({ given: given7 }) => stullWetBulb(given7("temperature"), given7("relativeHumidity")) }
+    { key: "stull", label: "Stull’s fit at 1013.25 hPa", source: { text: "Stull (2011), J. Appl. Meteor. Climatol. 50, 2267–2269, Eq. 1", status: "from memory" }, validity: "about 1013.25 hPa, RH 5–99 %, −20 to 50 °C", knownError: "−0.65 to +0.9 K", holds: { pressure: [98e3, 104e3], temperature: [253.15, 323.15], relativeHumidity: [0.05, 0.99] }, value: ({ given: given8 }) => stullWetBulb(given8("temperature"), given8("relativeHumidity")) }
   ],
   constants: ["R", "Rv", "cp", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L"],
-  notedAt: { es: (given7) => [given7("temperature")] },
-  remarks: ({ given: given7 }) => [supersaturated(given7("relativeHumidity"))],
+  notedAt: { es: (given8) => [given8("temperature")] },
+  remarks: ({ given: given8 }) => [supersaturated(given8("relativeHumidity"))],
   ask: "The isobaric wet-bulb temperature over liquid water, from the temperature, the relative humidity e/es and the pressure.",
   working: (hand, value19) => hand.variant === "stull" ? [{ text: "Stull’s fit, with t in °C and RH in percent", formula: "T_w = t \\arctan[0.151977\\,(\\mathit{RH} + 8.313659)^{1/2}] + \\arctan(t + \\mathit{RH}) - \\arctan(\\mathit{RH} - 1.676331) + 0.00391838\\,\\mathit{RH}^{3/2}\\arctan(0.023101\\,\\mathit{RH}) - 4.686035", filled: `T_w = ${inCelsius(value19)}` }] : [
     { ...mixingRatioStep("w", "e", vapor(hand), hand.given("pressure"), hand.air), text: "Mixing ratio of the air, with e = RH es(T)" },
     { text: "The temperature at which the air’s heat has paid for saturation, found by a bracket", formula: "(c_p + w\\,c_{pv})\\,(T - T_w) = L\\,[w_s(T_w) - w]", filled: `T_w = ${inCelsius(value19)}` }
   ],
   slips: [
-    fineMoistSlip("stull", "Stull’s fit", "This is a fit that holds at 1013.25 hPa only: asked is the wet bulb at this pressure.", ({ given: given7, variant }) => variant === "stull" || given7("relativeHumidity") > 1 ? null : stullWetBulb(given7("temperature"), given7("relativeHumidity"))),
-    moistSlip("share-of-celsius", "T in °C times RH", "This is the temperature in °C times the relative humidity.", ({ given: given7 }) => given7("relativeHumidity") === 1 || given7("temperature") === zeroCelsius ? null : zeroCelsius + given7("relativeHumidity") * (given7("temperature") - zeroCelsius)),
+    fineMoistSlip("stull", "Stull’s fit", "This is a fit that holds at 1013.25 hPa only: asked is the wet bulb at this pressure.", ({ given: given8, variant }) => variant === "stull" || given8("relativeHumidity") > 1 ? null : stullWetBulb(given8("temperature"), given8("relativeHumidity"))),
+    moistSlip("share-of-celsius", "T in °C times RH", "This is the temperature in °C times the relative humidity.", ({ given: given8 }) => given8("relativeHumidity") === 1 || given8("temperature") === zeroCelsius ? null : zeroCelsius + given8("relativeHumidity") * (given8("temperature") - zeroCelsius)),
     kelvinAsCelsiusSlip
   ],
   example: { inputs: { pressure: 101325, temperature: 293.15, relativeHumidity: 0.5 }, gives: 286.9318, within: 1e-4 }
@@ -7152,7 +7152,7 @@ function parcelDefinition(origin, result2, isVirtual, example) {
   const words2 = origins[origin];
   const inputs2 = words2.inputs;
   const correction = !result2.hasVirtual ? "" : isVirtual ? ", with the virtual temperature for both" : ", with the temperature itself for both, no virtual correction";
-  const outcomeOf = (given7, constants, formulae, variant) => result2.outcome(parcelContext(given7, constants, formulae), origin, isVirtual, variant);
+  const outcomeOf = (given8, constants, formulae, variant) => result2.outcome(parcelContext(given8, constants, formulae), origin, isVirtual, variant);
   return {
     key: `${origin}-parcel-${result2.key}${isVirtual ? "-virtual" : ""}`,
     name: `${result2.name} of the ${words2.title}${isVirtual ? ", with virtual correction" : ""}`,
@@ -7162,27 +7162,27 @@ function parcelDefinition(origin, result2, isVirtual, example) {
     kind: result2.kind,
     nearZero: result2.nearZero,
     inputs: inputs2,
-    variants: result2.variants.map((variant) => ({ ...variant, evaluate: (given7, constants, formulae) => outcomeOf(given7, constants, formulae, variant.key) })),
+    variants: result2.variants.map((variant) => ({ ...variant, evaluate: (given8, constants, formulae) => outcomeOf(given8, constants, formulae, variant.key) })),
     constants: ascentConstants,
     uses: origin === "most-unstable" ? [...ascentUses, equivalentKey] : ascentUses,
-    notes: (given7) => notesOf2(given7),
+    notes: (given8) => notesOf2(given8),
     classLimits: result2.classLimits,
     ask: `${result2.ask} The parcel is ${words2.ask}, lifted dry to its condensation level and along the pseudoadiabat above${result2.hasVirtual ? `; it is compared with its surroundings at one pressure${correction}` : ""}. Between rows temperature is linear in ln p.`,
-    trace(given7, constants, variant, formulae) {
-      const context = parcelContext(given7, constants, formulae), parcel = context.parcel(origin);
+    trace(given8, constants, variant, formulae) {
+      const context = parcelContext(given8, constants, formulae), parcel = context.parcel(origin);
       if (!parcel) return [{ text: "The data end within the layer of the parcel", formula: "p_{top}", filled: "p_{top}" }];
-      const lcl = context.lcl(parcel), outcome2 = outcomeOf(given7, constants, formulae, variant);
+      const lcl = context.lcl(parcel), outcome3 = outcomeOf(given8, constants, formulae, variant);
       const first3 = [
         { text: `The parcel: ${words2.short}`, formula: "p,\\,T,\\,T_d,\\,w", filled: `p = ${texQuantity(parcel.pressure / 100, "hPa")},\\ T = ${texQuantity(parcel.temperature - zeroCelsius, "Cel")},\\ T_d = ${texQuantity(parcel.dewpoint - zeroCelsius, "Cel")},\\ w = ${texQuantity(parcel.mixingRatio * 1e3, "g/kg")}` },
         { text: "Its condensation level", formula: "p_{LCL},\\,T_{LCL}", filled: `p_{LCL} = ${texQuantity(lcl.pressure / 100, "hPa")},\\ T_{LCL} = ${texQuantity(lcl.temperature - zeroCelsius, "Cel")}` }
       ];
-      return outcome2.is === "value" ? [...first3, ...result2.trace(context, origin, isVirtual, outcome2.value)] : first3;
+      return outcome3.is === "value" ? [...first3, ...result2.trace(context, origin, isVirtual, outcome3.value)] : first3;
     },
     slips: result2.slips(origin, isVirtual),
     example: { inputs: { ...exampleSounding, ...exampleMore[origin] }, ...example }
   };
-  function notesOf2(given7) {
-    const supersaturated2 = seriesOf(given7, "dewpoint").some((Td, at) => Td > (seriesOf(given7, "temperature")[at] ?? Infinity));
+  function notesOf2(given8) {
+    const supersaturated2 = seriesOf(given8, "dewpoint").some((Td, at) => Td > (seriesOf(given8, "temperature")[at] ?? Infinity));
     return supersaturated2 ? ["In some rows the dewpoint lies above the temperature; they are taken as they stand."] : [];
   }
 }
@@ -7213,7 +7213,7 @@ var ofLevels = (of) => (inputs2, constants, _right, formulae) => {
   return levels && of(levels, inputs2, constants, formulae);
 };
 function indexDefinition({ source: source2, isAscent, of, steps: steps2, slips, gives, within, ask, ...named2 }) {
-  const outcome2 = (inputs2, constants, formulae) => {
+  const outcome3 = (inputs2, constants, formulae) => {
     const levels = threeLevels(inputs2, constants, formulae);
     return levels ? { is: "value", value: of(levels, inputs2, constants, formulae) } : { is: "not_defined", why: "The ground lies above 850 hPa, or the data end below 500 hPa: nothing is extrapolated." };
   };
@@ -7227,7 +7227,7 @@ function indexDefinition({ source: source2, isAscent, of, steps: steps2, slips, 
       source: { text: source2, status: "common practice" },
       validity: "soundings from below 850 to above 500 hPa",
       knownError: isAscent ? "latent heat by temperature or constant, up to 0.35 K" : "rounding of the levels",
-      evaluate: outcome2
+      evaluate: outcome3
     }],
     constants: isAscent ? ascentConstants : [],
     uses: isAscent ? ascentUses : [],
@@ -7300,7 +7300,7 @@ function layerMeanDefinition(mean2, by3, example) {
   const isTheta = mean2 === "theta", isByPressure = by3 === "pressure";
   const of = isByPressure ? meanByPressure : meanByHeight;
   const symbol = isTheta ? "\\bar\\theta" : "\\bar w", name = isTheta ? "potential temperature" : "mixing ratio";
-  const outcome2 = (inputs2, constants, formulae) => {
+  const outcome3 = (inputs2, constants, formulae) => {
     const found = of(inputs2, constants, formulae);
     return found ? { is: "value", value: found[mean2] } : { is: "not_reached", why: "The data end below the layer’s top." };
   };
@@ -7323,7 +7323,7 @@ function layerMeanDefinition(mean2, by3, example) {
       source: { text: "common practice: layer means by the trapezoidal rule", status: "common practice" },
       validity: "rows without gaps",
       knownError: "the spacing of the rows",
-      evaluate: outcome2
+      evaluate: outcome3
     }],
     constants: ascentConstants,
     uses: ["saturation-vapor-pressure"],
@@ -7367,10 +7367,10 @@ var pseudoadiabatic = (entry) => ({
 function otherAscents(of, weigh = fineSlip) {
   const valueOf = (inputs2, constants, formulae, origin, isVirtual) => {
     const context = parcelContext(inputs2, constants, formulae);
-    const outcome2 = of(context, origin, isVirtual);
-    if (outcome2.is !== "value" || outcome2.value === 0) return null;
+    const outcome3 = of(context, origin, isVirtual);
+    if (outcome3.is !== "value" || outcome3.value === 0) return null;
     const lcl = context.ascent(origin, isVirtual)?.lcl.pressure ?? 0;
-    return Math.abs(outcome2.value - lcl) <= 1e-9 * lcl ? null : outcome2.value;
+    return Math.abs(outcome3.value - lcl) <= 1e-9 * lcl ? null : outcome3.value;
   };
   return (origin, isVirtual) => [
     isVirtual ? weigh("virtual-left-out", "virtual correction left out", "This leaves the virtual correction out: the ask takes the virtual temperature of parcel and surroundings.", (inputs2, constants, _right, formulae) => valueOf(inputs2, constants, formulae, origin, false)) : weigh("virtual-put-in", "virtual correction put in", "This has the virtual correction in it: the ask takes the temperatures themselves.", (inputs2, constants, _right, formulae) => valueOf(inputs2, constants, formulae, origin, true)),
@@ -8110,11 +8110,11 @@ function endPointRate(ends) {
   return kelvinPerMeter((ends.lowTemperature - ends.highTemperature) / (ends.highHeight - ends.lowHeight));
 }
 function dryClassLimits(_inputs, constants) {
-  const rate3 = dryRateOf(constants);
+  const rate4 = dryRateOf(constants);
   const tolerance = constant(constants, "neutralTolerance");
   return [
-    { label: "Γd less the tolerance of a neutral layer", value: rate3 - tolerance },
-    { label: "Γd with the tolerance of a neutral layer", value: rate3 + tolerance }
+    { label: "Γd less the tolerance of a neutral layer", value: rate4 - tolerance },
+    { label: "Γd with the tolerance of a neutral layer", value: rate4 + tolerance }
   ];
 }
 
@@ -8143,10 +8143,10 @@ var bruntVaisalaFrequencySquaredFromLapseRateDefinition = {
   classLimits: (inputs2, constants) => dryClassLimits(inputs2, constants).map(({ label, value: value19 }) => ({ label, value: constant(constants, "g") / numberOf(inputs2, "temperature") * (dryRateOf(constants) - value19) })),
   ask: "The Brunt–Väisälä frequency squared N² = (g/T)(Γd − Γ) of the dry layer with Γd = g/cp, negative where the layer is superadiabatic.",
   trace(inputs2, constants) {
-    const value19 = squared3(inputs2, constants), dry = dryRateOf(constants), rate3 = numberOf(inputs2, "lapseRate");
+    const value19 = squared3(inputs2, constants), dry = dryRateOf(constants), rate4 = numberOf(inputs2, "lapseRate");
     return [
       { text: "Dry adiabatic lapse rate", formula: "\\Gamma_d = \\frac{g}{c_p}", filled: `\\Gamma_d = ${texQuantity(dry * 1e3, "K/km")}`, value: dry, unit: "K/m" },
-      { text: "Frequency squared", formula: "N^2 = \\frac{g}{T} (\\Gamma_d - \\Gamma)", filled: `N^2 = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(numberOf(inputs2, "temperature"), 6)}} \\times (${texNumber(dry)} - ${texFactor(rate3)})\\,\\mathrm{s^{-2}} = ${texQuantity(value19, "s-2")}`, value: value19, unit: "s-2" }
+      { text: "Frequency squared", formula: "N^2 = \\frac{g}{T} (\\Gamma_d - \\Gamma)", filled: `N^2 = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(numberOf(inputs2, "temperature"), 6)}} \\times (${texNumber(dry)} - ${texFactor(rate4)})\\,\\mathrm{s^{-2}} = ${texQuantity(value19, "s-2")}`, value: value19, unit: "s-2" }
     ];
   },
   slips: [
@@ -8284,6 +8284,53 @@ var bulkRichardsonNumberFromWindsDefinition = {
 };
 var layer3 = (inputs2) => ({ bottom: numberOf(inputs2, "virtualPotentialTemperatureBottom"), top: numberOf(inputs2, "virtualPotentialTemperatureTop"), depth: numberOf(inputs2, "depth") });
 var number = (inputs2, constants) => bulkRichardson({ ...layer3(inputs2), ...windDifference(inputs2) }, constants);
+
+// shared/thermo/quantities/fittedTemperatureAtZeroHeight.ts
+var fittedTemperatureAtZeroHeightDefinition = oneFormula({
+  key: "fitted-temperature-at-zero-height",
+  name: "fitted temperature at height zero",
+  symbol: "T₀",
+  unit: "K",
+  shownUnit: "Cel",
+  kind: "temperature",
+  inputs: layerInputs2(3),
+  constants: [],
+  formula: {
+    key: "ordinary",
+    label: "ordinary least squares of T on z, at z = 0",
+    source: { text: "ordinary least squares; NIST StRD linear regression for the arithmetic", status: "common practice" },
+    validity: "any layer with two heights",
+    knownError: "none: the rows alone decide"
+  },
+  value: intercept,
+  ask: "The temperature at height 0 of the straight line by ordinary least squares of temperature on height over all your rows; height 0 is that of the heights as given.",
+  working(inputs2, _constants, value19) {
+    const line = lineOf(inputs2);
+    return [
+      { text: `Means of the ${line.count} rows`, formula: "\\bar z,\\ \\bar T", filled: `\\bar z = ${texQuantity(line.meanX, "m", 6)},\\quad \\bar T = ${texQuantity(line.meanY - zeroCelsius, "Cel")}` },
+      { text: "Slope", formula: "\\frac{dT}{dz} = \\frac{\\sum (z - \\bar z)(T - \\bar T)}{\\sum (z - \\bar z)^2}", filled: `\\frac{dT}{dz} = \\frac{${texNumber(line.sumXY)}}{${texNumber(line.sumXX)}}\\,\\mathrm{K\\,m^{-1}} = ${texQuantity(line.slope * 1e3, "K/km")}` },
+      { text: "At height 0", formula: "T_0 = \\bar T - \\frac{dT}{dz}\\,\\bar z", filled: `T_0 = ${texQuantity(value19 - zeroCelsius, "Cel", 5)}`, value: value19, unit: "K" }
+    ];
+  },
+  slips: [
+    slip("slope-turned", "slope with its sign turned", "This goes down the line in the wrong direction: T₀ = T̄ − (dT/dz) z̄.", (inputs2) => 2 * lineOf(inputs2).meanY - intercept(inputs2)),
+    fineSlip("lowest-row", "lowest row in place of the intercept", "This is the temperature of the lowest row: the ask takes the line at height 0.", lowestTemperature),
+    fineSlip("mean", "mean in place of the intercept", "This is the mean temperature of the rows: the ask takes the line at height 0.", (inputs2) => lineOf(inputs2).meanY)
+  ],
+  example: { inputs: { height: [100, 150, 200, 250, 300], temperature: [288.15, 287.75, 287.25, 286.85, 286.05] }, gives: 289.25, within: 1e-9 }
+});
+function intercept(inputs2) {
+  const line = lineOf(inputs2);
+  return line.meanY - line.slope * line.meanX;
+}
+function lowestTemperature(inputs2) {
+  const heights2 = heightsOf(inputs2), temperatures = temperaturesOf(inputs2);
+  let lowest = 0;
+  heights2.forEach((height2, at) => {
+    if (height2 < (heights2[lowest] ?? height2)) lowest = at;
+  });
+  return temperatures[lowest] ?? null;
+}
 
 // shared/thermo/inversion.ts
 var profileInputs = (least2) => [
@@ -8926,19 +8973,19 @@ var lapseRateTheilSenDefinition = {
     validity: "any layer with two heights, 3 to 3000 rows",
     knownError: "none: the rows alone decide",
     evaluate(inputs2) {
-      const { rate: rate3, pairs, tiedPairs } = theilSenRate(inputs2);
+      const { rate: rate4, pairs, tiedPairs } = theilSenRate(inputs2);
       const notes = tiedPairs > 0 ? [`${tiedPairs} pairs of rows at one height are left out.`] : void 0;
-      return { is: "value", value: rate3, notes, more: { pairs } };
+      return { is: "value", value: rate4, notes, more: { pairs } };
     }
   }],
   constants: [],
   classLimits: dryClassLimits,
   ask: "The lapse rate Γ by the Theil–Sen estimator: the median of −ΔT/Δz over all pairs of your rows, pairs at one height left out, positive where temperature falls with height.",
   trace(inputs2) {
-    const { rate: rate3, pairs } = theilSenRate(inputs2);
+    const { rate: rate4, pairs } = theilSenRate(inputs2);
     return [
       { text: "Slopes between all pairs of rows at different heights", formula: "\\Gamma_{ij} = -\\frac{T_j - T_i}{z_j - z_i},\\quad i < j", filled: `N = ${pairs}` },
-      { text: "Their median", formula: "\\Gamma = \\mathrm{median}\\,\\Gamma_{ij}", filled: `\\Gamma = ${texQuantity(rate3 * 1e3, "K/km")}\\quad (N = ${texNumber(pairs, 7)})`, value: rate3, unit: "K/m" }
+      { text: "Their median", formula: "\\Gamma = \\mathrm{median}\\,\\Gamma_{ij}", filled: `\\Gamma = ${texQuantity(rate4 * 1e3, "K/km")}\\quad (N = ${texNumber(pairs, 7)})`, value: rate4, unit: "K/m" }
     ];
   },
   slips: [
@@ -9474,6 +9521,7 @@ var profiles = {
     lapseRateEndPointsStandardErrorDefinition,
     lapseRateLeastSquaresDefinition,
     lapseRateStandardErrorDefinition,
+    fittedTemperatureAtZeroHeightDefinition,
     lapseRateTheilSenDefinition,
     lapseRateTheilSenStandardErrorDefinition,
     lapseRateLagOneCorrelationDefinition,
@@ -9500,8 +9548,234 @@ var profiles = {
   ]
 };
 
+// shared/thermo/observedQuantity.ts
+function observedQuantity({ key, measured, symbol, unit, shownUnit, kind, range, nearZero, shown: shown3, slips, example }) {
+  const input2 = { name: "station", label: `${measured} by the station`, symbol, unit, shownUnit, kind, shape: "number", range };
+  return oneFormula({
+    key,
+    name: `own reading of the ${measured}`,
+    symbol,
+    unit,
+    shownUnit,
+    kind,
+    ...nearZero === void 0 ? {} : { nearZero },
+    inputs: [input2],
+    constants: [],
+    formula: {
+      key: "beside-the-station",
+      label: "compared with the station",
+      source: { text: "WMO-No. 8, vol. I, ch. 1: two instruments compared within their stated uncertainties", status: "common practice" },
+      validity: "read at the station, at the time that is asked",
+      knownError: "the accuracies of both instruments, which the lab states"
+    },
+    value: (inputs2) => numberOf(inputs2, "station"),
+    ask: `Your own reading of the ${measured}, on the instrument you were given, at the place and time stated.`,
+    working: (_inputs, _constants, value19) => [{ text: "The station read", formula: symbol, filled: `${symbol} = ${texQuantity(shown3(value19), shownUnit)}`, value: value19, unit }],
+    slips,
+    example: { inputs: { station: example }, gives: example, within: 0 }
+  });
+}
+
+// shared/thermo/quantities/observedAirTemperature.ts
+var observedAirTemperatureDefinition = observedQuantity({
+  key: "observed-air-temperature",
+  measured: "air temperature",
+  symbol: "T",
+  unit: "K",
+  shownUnit: "Cel",
+  kind: "temperature",
+  range: [200, 335],
+  shown: (si) => si - zeroCelsius,
+  slips: [slip("fahrenheit", "°F given as °C", "Your number fits the scale in degrees Fahrenheit; the unit beside it says Celsius.", (_i, _c, right) => (right - zeroCelsius) * 1.8 + 32 + zeroCelsius)],
+  example: 293.15
+});
+
+// shared/thermo/quantities/observedPressure.ts
+var observedPressureDefinition = observedQuantity({
+  key: "observed-pressure",
+  measured: "pressure",
+  symbol: "p",
+  unit: "Pa",
+  shownUnit: "hPa",
+  kind: "ratio",
+  range: [3e4, 11e4],
+  shown: (si) => si / 100,
+  slips: [
+    slip("millimeters-of-mercury", "mmHg given as hPa", "Your number fits the scale in millimeters of mercury; the unit beside it says hPa.", (_i, _c, right) => right / 1.333224),
+    slip("inches-of-mercury", "inHg given as hPa", "Your number fits the scale in inches of mercury; the unit beside it says hPa.", (_i, _c, right) => right / 33.86389)
+  ],
+  example: 98e3
+});
+
+// shared/thermo/quantities/observedRelativeHumidity.ts
+var observedRelativeHumidityDefinition = observedQuantity({
+  key: "observed-relative-humidity",
+  measured: "relative humidity",
+  symbol: "U",
+  unit: "1",
+  shownUnit: "%",
+  kind: "fraction",
+  range: [0, 1.1],
+  nearZero: 0.05,
+  shown: (si) => si * 100,
+  slips: [slip("dryness", "100 % less the reading", "This is what is missing to 100 %.", (_i, _c, right) => 1 - right)],
+  example: 0.65
+});
+
+// shared/thermo/quantities/observedWetBulbTemperature.ts
+var observedWetBulbTemperatureDefinition = observedQuantity({
+  key: "observed-wet-bulb-temperature",
+  measured: "wet-bulb temperature",
+  symbol: "T_w",
+  unit: "K",
+  shownUnit: "Cel",
+  kind: "temperature",
+  range: [200, 335],
+  shown: (si) => si - zeroCelsius,
+  slips: [slip("fahrenheit", "°F given as °C", "Your number fits the scale in degrees Fahrenheit; the unit beside it says Celsius.", (_i, _c, right) => (right - zeroCelsius) * 1.8 + 32 + zeroCelsius)],
+  example: 288.15
+});
+
+// shared/thermo/quantities/observedWindSpeed.ts
+var observedWindSpeedDefinition = observedQuantity({
+  key: "observed-wind-speed",
+  measured: "wind speed",
+  symbol: "V",
+  unit: "m/s",
+  shownUnit: "m/s",
+  kind: "ratio",
+  range: [0, 75],
+  nearZero: 0.5,
+  shown: (si) => si,
+  slips: [
+    slip("knots", "knots given as m/s", "Your number fits the scale in knots; the unit beside it says meters per second.", (_i, _c, right) => right / 0.514444),
+    slip("kilometers-per-hour", "km/h given as m/s", "Your number fits the scale in kilometers per hour; the unit beside it says meters per second.", (_i, _c, right) => right * 3.6)
+  ],
+  example: 4.2
+});
+
+// shared/thermo/quantities/lapseRateOfTwoReadings.ts
+var lapseRateOfTwoReadingsDefinition = oneFormula({
+  key: "lapse-rate-of-two-readings",
+  name: "lapse rate between two readings",
+  symbol: "Γ",
+  unit: "K/m",
+  shownUnit: "K/km",
+  kind: "difference",
+  nearZero: 1e-3,
+  inputs: [
+    lengthInput("lowerHeight", "height of the lower reading", "z₁", [-500, 1e5]),
+    temperatureInput("lowerTemperature", "temperature of the lower reading", "T₁"),
+    lengthInput("upperHeight", "height of the upper reading", "z₂", [-500, 1e5]),
+    temperatureInput("upperTemperature", "temperature of the upper reading", "T₂")
+  ],
+  constants: [],
+  classLimits: dryClassLimits,
+  formula: {
+    key: "difference",
+    label: "difference quotient of two readings",
+    source: { text: 'AMS Glossary of Meteorology, "lapse rate", as a difference quotient', status: "common practice" },
+    validity: "two heights that differ",
+    knownError: "what the two readings are good to"
+  },
+  value: rate3,
+  ask: "The lapse rate Γ = −(T₂ − T₁)/(z₂ − z₁) between the two readings, positive where temperature falls with height.",
+  working(inputs2, _constants, value19) {
+    const [z1, T12, z22, T23] = given7(inputs2);
+    return [
+      { text: "Differences", formula: "T_2 - T_1,\\quad z_2 - z_1", filled: `T_2 - T_1 = ${texQuantity(T23 - T12, "K")},\\quad z_2 - z_1 = ${texQuantity(z22 - z1, "m", 6)}` },
+      { text: "Lapse rate", formula: "\\Gamma = -\\frac{T_2 - T_1}{z_2 - z_1}", filled: `\\Gamma = -\\frac{${texNumber(T23 - T12)}}{${texNumber(z22 - z1)}}\\,\\mathrm{K\\,m^{-1}} = ${texQuantity(value19 * 1e3, "K/km")}`, value: value19, unit: "K/m" }
+    ];
+  },
+  slips: [
+    signSlip("A lapse rate is positive where temperature falls with height: it is the difference quotient with its sign turned."),
+    perMeterSlip,
+    per100MetersSlip,
+    slip("upper-height", "height in place of the difference of heights", "This divides by the upper height: the difference of the two heights is needed.", (inputs2) => {
+      const [, T12, z22, T23] = given7(inputs2);
+      return z22 === 0 ? null : -(T23 - T12) / z22;
+    })
+  ],
+  example: { inputs: { lowerHeight: 20, lowerTemperature: 291.15, upperHeight: 220, upperTemperature: 289.35 }, gives: 9e-3, within: 1e-12 }
+});
+var given7 = (inputs2) => [numberOf(inputs2, "lowerHeight"), numberOf(inputs2, "lowerTemperature"), numberOf(inputs2, "upperHeight"), numberOf(inputs2, "upperTemperature")];
+function rate3(inputs2) {
+  const [z1, T12, z22, T23] = given7(inputs2);
+  if (z1 === z22) throw new OutOfRangeError("upperHeight", z22, "a height other than the lower one");
+  return -(T23 - T12) / (z22 - z1);
+}
+
+// shared/thermo/quantities/profileTemperatureAtHeight.ts
+var profileTemperatureAtHeightDefinition = {
+  key: "profile-temperature-at-height",
+  name: "temperature of a profile at a height",
+  symbol: "T(z)",
+  unit: "K",
+  shownUnit: "Cel",
+  kind: "temperature",
+  inputs: [...layerInputs2(2), lengthInput("level", "height that is asked for", "z", [-500, 1e5])],
+  variants: [{
+    key: "linear",
+    label: "linear in height between the nearest rows",
+    source: { text: "linear interpolation between levels", status: "common practice" },
+    validity: "between the lowest and the highest row",
+    knownError: "the spacing of the rows",
+    evaluate: outcome2
+  }],
+  constants: [],
+  ask: 'The temperature at the given height, linear in height between the nearest row below and the nearest row above; "not reached" where the data do not reach it.',
+  trace(inputs2) {
+    const found = bracketOf(inputs2), level = numberOf(inputs2, "level");
+    if (!found) return [{ text: "The data do not reach the height", formula: "z_{\\min} \\le z \\le z_{\\max}", filled: `z = ${texQuantity(level, "m", 6)}` }];
+    const value19 = between2(found, level);
+    return [
+      { text: "Nearest rows", formula: "z_1,\\,T_1;\\quad z_2,\\,T_2", filled: `z_1 = ${texQuantity(found.lowHeight, "m", 6)},\\ T_1 = ${texQuantity(found.lowTemperature - zeroCelsius, "Cel")};\\quad z_2 = ${texQuantity(found.highHeight, "m", 6)},\\ T_2 = ${texQuantity(found.highTemperature - zeroCelsius, "Cel")}` },
+      { text: "Linear between them", formula: "T = T_1 + (T_2 - T_1)\\frac{z - z_1}{z_2 - z_1}", filled: `T = ${texQuantity(value19 - zeroCelsius, "Cel", 5)}`, value: value19, unit: "K" }
+    ];
+  },
+  slips: [
+    fineSlip("row-below", "row below in place of interpolation", "This is the row below: the ask goes on linearly to the height.", (inputs2) => bracketOf(inputs2)?.lowTemperature ?? null),
+    fineSlip("row-above", "row above in place of interpolation", "This is the row above: the ask stays linear up to the height.", (inputs2) => bracketOf(inputs2)?.highTemperature ?? null),
+    fineSlip("parts-exchanged", "parts of the way exchanged", "This goes from the upper row down as far as it should have gone up from the lower one.", (inputs2) => {
+      const found = bracketOf(inputs2);
+      return found && found.lowTemperature + found.highTemperature - between2(found, numberOf(inputs2, "level"));
+    })
+  ],
+  example: { inputs: { height: [100, 150, 200], temperature: [288.15, 287.75, 287.25], level: 175 }, gives: 287.5, within: 1e-9 }
+};
+function bracketOf(inputs2) {
+  const heights2 = heightsOf(inputs2), temperatures = temperaturesOf(inputs2), level = numberOf(inputs2, "level");
+  let low = -1, high2 = -1;
+  heights2.forEach((height2, at) => {
+    if (height2 <= level && (low < 0 || height2 > (heights2[low] ?? height2))) low = at;
+    if (height2 >= level && (high2 < 0 || height2 < (heights2[high2] ?? height2))) high2 = at;
+  });
+  if (low < 0 || high2 < 0) return null;
+  return { lowHeight: heights2[low] ?? level, lowTemperature: temperatures[low] ?? 0, highHeight: heights2[high2] ?? level, highTemperature: temperatures[high2] ?? 0 };
+}
+var between2 = (rows, level) => rows.highHeight === rows.lowHeight ? rows.lowTemperature : rows.lowTemperature + (rows.highTemperature - rows.lowTemperature) * ((level - rows.lowHeight) / (rows.highHeight - rows.lowHeight));
+function outcome2(inputs2) {
+  const found = bracketOf(inputs2);
+  return found ? { is: "value", value: between2(found, numberOf(inputs2, "level")) } : { is: "not_reached", why: "The data do not reach this height." };
+}
+
+// shared/thermo/groups/readings.ts
+var readings = {
+  key: "readings",
+  title: "Readings, off a plot and one’s own",
+  quantities: [
+    profileTemperatureAtHeightDefinition,
+    lapseRateOfTwoReadingsDefinition,
+    observedAirTemperatureDefinition,
+    observedWetBulbTemperatureDefinition,
+    observedPressureDefinition,
+    observedRelativeHumidityDefinition,
+    observedWindSpeedDefinition
+  ]
+};
+
 // shared/thermo/registry.ts
-var quantityGroups = [dryAir, hydrostatics, moisture, moistProcesses, profiles, parcels, instruments];
+var quantityGroups = [dryAir, hydrostatics, moisture, moistProcesses, profiles, parcels, instruments, readings];
 var quantities = quantityGroups.flatMap((group) => group.quantities);
 var byKey = new Map(quantities.map((definition) => [definition.key, definition]));
 var findQuantity = (key) => byKey.get(key) ?? null;
@@ -9778,8 +10052,8 @@ function valuesOfWays(definition, convention, pinned, inputs2) {
   if (last && last.definition === definition && last.convention === convention && last.pinned === pinned && last.inputs === inputs2) return last.values;
   const values = [];
   const add2 = (way) => {
-    const outcome2 = evaluateQuantity(definition, inputs2, way.constants, way.variant, way.formulae);
-    if (outcome2.is === "value") values.push({ way, value: outcome2.value });
+    const outcome3 = evaluateQuantity(definition, inputs2, way.constants, way.variant, way.formulae);
+    if (outcome3.is === "value") values.push({ way, value: outcome3.value });
   };
   acceptedWays(definition, convention, pinned).forEach(add2);
   const own = values[0];
@@ -9860,6 +10134,14 @@ function makeBand(definition, question, inputs2, center, unit, carried = {}) {
   if (lowest < center || highest > center) parts.push(part("formulae", "accepted formulae and constants", center - lowest, highest - center));
   const granted = grantedWidth(definition, question.granted, center);
   if (granted > 0) parts.push(part("granted", "granted by the author", granted, granted));
+  for (const [name, half2] of Object.entries(question.readOff ?? {})) {
+    const spread = name === "result" ? { below: half2, above: half2 } : carriedSpread(definition, question, inputs2, center, name, half2);
+    if (spread.below > 0 || spread.above > 0) parts.push(part("reading", name === "result" ? "half a division of the axis" : `half a division of the axis (${labelOf(definition, name)})`, spread.below, spread.above));
+  }
+  if (question.accuracy) {
+    parts.push(part("reading", "accuracy of the station’s sensor", question.accuracy.stationSi, question.accuracy.stationSi));
+    parts.push(part("reading", "accuracy of your own instrument", question.accuracy.ownSi, question.accuracy.ownSi));
+  }
   for (const [name, half2] of Object.entries(carried)) {
     const spread = carriedSpread(definition, question, inputs2, center, name, half2);
     if (spread.below > 0 || spread.above > 0) parts.push(part("carried", `digits of your earlier value (${labelOf(definition, name)})`, spread.below, spread.above));
@@ -9887,8 +10169,8 @@ function carriedSpread(definition, question, inputs2, center, name, half) {
   if (typeof value19 !== "number" || !(half > 0)) return { below: 0, above: 0 };
   const at = [value19 - half, value19 + half].map((moved) => {
     try {
-      const { outcome: outcome2 } = referenceOf(definition, question, { ...inputs2, [name]: moved });
-      return outcome2.is === "value" ? outcome2.value : center;
+      const { outcome: outcome3 } = referenceOf(definition, question, { ...inputs2, [name]: moved });
+      return outcome3.is === "value" ? outcome3.value : center;
     } catch {
       return center;
     }
@@ -9932,8 +10214,38 @@ function withinStep(pointsMilli, maxMilli) {
   assertWhole(maxMilli);
   return Math.min(Math.max(pointsMilli, 0), Math.max(maxMilli, 0));
 }
+function earnedMilli(of, value19) {
+  if (value19.isAccepted) return withinStep(of.maxMilli - (value19.hasDigits ? 0 : of.digitsMilli ?? 0), of.maxMilli);
+  if (value19.isSlip) return withinStep(of.slipMilli ?? 0, of.maxMilli);
+  return withinStep(value19.isNear ? of.near?.milli ?? 0 : 0, of.maxMilli);
+}
+function showMilli(milli, places) {
+  assertWhole(milli);
+  const step = [1e3, 100, 10, 1][places] ?? 1;
+  const size2 = Math.abs(milli);
+  const whole = Math.floor((2 * size2 + step) / (2 * step));
+  const digits = String(whole).padStart(places + 1, "0");
+  const sign = milli < 0 && whole > 0 ? "−" : "";
+  return places === 0 ? `${sign}${digits}` : `${sign}${digits.slice(0, -places)}.${digits.slice(-places)}`;
+}
 function assertWhole(milli) {
   if (!Number.isSafeInteger(milli)) throw new Error(`${milli} is no whole number of thousandths`);
+}
+
+// shared/marking/choice.ts
+var optionsIn = (typed) => [...new Set(typed.split(/[\s,;]+/).filter((part) => part !== ""))];
+function judgedChoice(choice, maxMilli, answer, blank2) {
+  const chosen = answer.reading === "class" ? optionsIn(answer.typed) : [];
+  const isRight = chosen.length === choice.right.length && choice.right.every((key) => chosen.includes(key));
+  return {
+    ...blank2,
+    outcome: "class",
+    classes: choice.right,
+    isAccepted: isRight,
+    acceptedBy: isRight ? "word" : null,
+    pointsMilli: isRight ? withinStep(maxMilli, maxMilli) : 0,
+    trace: choice.why.map((text) => ({ text, formula: "", filled: "" }))
+  };
 }
 
 // shared/marking/slips.ts
@@ -10021,17 +10333,18 @@ var blank = {
 };
 var refused = (refusalCode, reason) => ({ ...blank, outcome: "refused", refusalCode, reason });
 function judged(question, answer) {
+  if (question.choice) return judgedChoice(question.choice, question.maxMilli, answer, blank);
   const definition = findQuantity(question.quantity);
   if (!definition) return refused("unknown_quantity", `There is no quantity ${question.quantity}.`);
   const unit = checkedUnit(definition, question);
-  const { outcome: outcome2, way } = referenceOf(definition, question, question.inputs);
+  const { outcome: outcome3, way } = referenceOf(definition, question, question.inputs);
   const carried = withCarried(definition, question);
   const carriedNote = carried.notes.length > 0 ? carried.notes.join(" ") : null;
   const trace = definition.trace(question.inputs, way.constants, way.variant, way.formulae);
-  const notes = "notes" in outcome2 ? outcome2.notes ?? [] : [];
-  if (outcome2.is === "class") return judgedClass(definition, question, answer, carried, { ...blank, outcome: "class", carriedNote, trace, notes });
-  if (outcome2.is !== "value") return judgedWord(definition, question, answer, unit, carried, { ...blank, outcome: outcome2.is, reason: outcome2.why, carriedNote, trace, notes });
-  return judgedValue(definition, question, answer, unit, outcome2.value, carried, { ...blank, outcome: "value", carriedNote, trace, notes });
+  const notes = "notes" in outcome3 ? outcome3.notes ?? [] : [];
+  if (outcome3.is === "class") return judgedClass(definition, question, answer, carried, { ...blank, outcome: "class", carriedNote, trace, notes });
+  if (outcome3.is !== "value") return judgedWord(definition, question, answer, unit, carried, { ...blank, outcome: outcome3.is, reason: outcome3.why, carriedNote, trace, notes });
+  return judgedValue(definition, question, answer, unit, outcome3.value, carried, { ...blank, outcome: "value", carriedNote, trace, notes });
 }
 function checkedUnit(definition, question) {
   const unit = findUnit(question.unit);
@@ -10051,6 +10364,10 @@ function judgedValue(definition, question, answer, unit, center, carried, base) 
   const isAccepted = acceptedBy !== null;
   const notes = [...base.notes];
   if (acceptedBy === "carried") notes.push(carriedWords);
+  const digits = hasDigits(definition, question, answer, center, unit);
+  if (isAccepted && !digits && (question.digitsMilli ?? 0) > 0) notes.push(`Right, with fewer digits than asked: ${showMilli(question.digitsMilli ?? 0, 2)} of the marks are for them.`);
+  const nearMiss = !isAccepted && slip2 === null && question.near !== void 0 && answer.reading === "ok" && isWithinWidths(band, near, question.near.widths);
+  if (nearMiss && (question.near?.milli ?? 0) > 0) notes.push(`A near miss: within ${question.near?.widths} half-widths of the reference.`);
   return {
     ...base,
     band,
@@ -10060,7 +10377,7 @@ function judgedValue(definition, question, answer, unit, center, carried, base) 
     notes,
     slip: slip2 && acceptedBy === null ? named(slip2, unit, question, definition) : null,
     slipValues: ranges.map(({ slip: { key, label }, value: value19 }) => ({ key, label, value: value19 })),
-    pointsMilli: withinStep(isAccepted ? question.maxMilli : slip2 ? question.slipMilli ?? 0 : 0, question.maxMilli)
+    pointsMilli: earnedMilli(question, { isAccepted, hasDigits: digits, isSlip: slip2 !== null, isNear: nearMiss })
   };
 }
 function judgedWord(definition, question, answer, unit, carried, base) {
@@ -10087,6 +10404,15 @@ function isNear(band, answer) {
   const half = answer.halfUnitSi ?? 0;
   return answer.decimal !== null && (isIn(band, answer.decimal) || answer.valueSi !== null && answer.valueSi >= band.low - half && answer.valueSi <= band.high + half);
 }
+function hasDigits(definition, question, answer, center, unit) {
+  if (definition.kind === "temperature") return (answer.halfUnitSi ?? 0) <= halfUnitAsked(definition, center, unit, question.digits) * (1 + 1e-9);
+  return (answer.digits ?? 0) >= question.digits || (answer.halfUnitSi ?? Infinity) <= halfUnitAsked(definition, center, unit, question.digits) * (1 + 1e-9);
+}
+function isWithinWidths(band, answer, widths) {
+  if (answer.valueSi === null) return false;
+  const away = answer.valueSi - band.center;
+  return Math.abs(away) <= widths * (away < 0 ? band.center - band.low : band.high - band.center) * (1 + 1e-9);
+}
 var isIn = (band, decimal2) => liesWithin(decimal2, band.lowDecimal, band.highDecimal);
 function named(range, unit, question, definition) {
   const inUnit = (range.value - (definition.kind === "temperature" ? Number(unit.offset.numerator) / Number(unit.offset.denominator) : 0)) / (Number(unit.factor.numerator) / Number(unit.factor.denominator));
@@ -10095,8 +10421,8 @@ function named(range, unit, question, definition) {
 }
 function bandOf(definition, question, inputs2, unit, halfUnits) {
   try {
-    const { outcome: outcome2 } = referenceOf(definition, question, inputs2);
-    return outcome2.is === "value" ? makeBand(definition, question, inputs2, outcome2.value, unit, halfUnits) : null;
+    const { outcome: outcome3 } = referenceOf(definition, question, inputs2);
+    return outcome3.is === "value" ? makeBand(definition, question, inputs2, outcome3.value, unit, halfUnits) : null;
   } catch (error2) {
     if (error2 instanceof OutOfRangeError || error2 instanceof SeriesError || error2 instanceof RangeError) return null;
     throw error2;
@@ -10134,8 +10460,8 @@ function judgedClass(definition, question, answer, carried, base) {
 function classesOf(definition, question, inputs2) {
   const found = [];
   for (const way of acceptedWays(definition, question.convention, question.variant)) {
-    const outcome2 = evaluateQuantity(definition, inputs2, way.constants, way.variant, way.formulae);
-    if (outcome2.is === "class" && !found.includes(outcome2.key)) found.push(outcome2.key);
+    const outcome3 = evaluateQuantity(definition, inputs2, way.constants, way.variant, way.formulae);
+    if (outcome3.is === "class" && !found.includes(outcome3.key)) found.push(outcome3.key);
   }
   return found;
 }

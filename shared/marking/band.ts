@@ -1,6 +1,7 @@
 /**
  * The interval of values that earn the marks: the hull of what accepted formulae and constants give, then what the author grants, rounding at
- * the digits asked, and half units of carried values. Sensors' accuracy is no part of it: both sides use the same rows.
+ * the digits asked, half divisions of a plot that is read off, and half units of carried values. Sensors' accuracy is no part of it where both
+ * sides use the same rows; where students read an instrument of their own, both accuracies are.
  * The parts add up to the edges exactly: low = center − (Σ below), high = center + (Σ above), summed in their order.
  */
 import type { Inputs, QuantityDefinition } from '../thermo/definition'
@@ -37,6 +38,14 @@ export function makeBand(definition: QuantityDefinition, question: StepQuestion,
   if (lowest < center || highest > center) parts.push(part('formulae', 'accepted formulae and constants', center - lowest, highest - center))
   const granted = grantedWidth(definition, question.granted, center)
   if (granted > 0) parts.push(part('granted', 'granted by the author', granted, granted))
+  for (const [name, half] of Object.entries(question.readOff ?? {})) {
+    const spread = name === 'result' ? { below: half, above: half } : carriedSpread(definition, question, inputs, center, name, half)
+    if (spread.below > 0 || spread.above > 0) parts.push(part('reading', name === 'result' ? 'half a division of the axis' : `half a division of the axis (${labelOf(definition, name)})`, spread.below, spread.above))
+  }
+  if (question.accuracy) {
+    parts.push(part('reading', 'accuracy of the station’s sensor', question.accuracy.stationSi, question.accuracy.stationSi))
+    parts.push(part('reading', 'accuracy of your own instrument', question.accuracy.ownSi, question.accuracy.ownSi))
+  }
   for (const [name, half] of Object.entries(carried)) {
     const spread = carriedSpread(definition, question, inputs, center, name, half)
     if (spread.below > 0 || spread.above > 0) parts.push(part('carried', `digits of your earlier value (${labelOf(definition, name)})`, spread.below, spread.above))

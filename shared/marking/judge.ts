@@ -11,7 +11,9 @@ import { acceptedWays } from './alternatives'
 import { makeBand, QuestionFault, referenceOf, type CarriedHalfUnits } from './band'
 import { liesWithin, outwardDecimals } from './decimalEdges'
 import { withCarried, type CarriedInputs } from './graph'
-import { withinStep } from './points'
+import { judgedChoice } from './choice'
+import { earnedMilli, showMilli, withinStep } from './points'
+import { halfUnitAsked } from './rounding'
 import { explainingSlip, sentenceOf, slipRanges, type SlipRange } from './slips'
 import type { Accepted, Band, Judgement, ReadAnswer, StepQuestion } from './types'
 
@@ -45,6 +47,7 @@ const blank: Omit<Judgement, 'outcome'> = {
 const refused = (refusalCode: string, reason: string): Judgement => ({ ...blank, outcome: 'refused', refusalCode, reason })
 
 function judged(question: StepQuestion, answer: ReadAnswer): Judgement {
+  if (question.choice) return judgedChoice(question.choice, question.maxMilli, answer, blank)
   const definition = findQuantity(question.quantity)
   if (!definition) return refused('unknown_quantity', `There is no quantity ${question.quantity}.`)
   const unit = checkedUnit(definition, question)
@@ -79,12 +82,16 @@ function judgedValue(definition: QuantityDefinition, question: StepQuestion, ans
   const isAccepted = acceptedBy !== null
   const notes = [...base.notes]
   if (acceptedBy === 'carried') notes.push(carriedWords)
+  const digits = hasDigits(definition, question, answer, center, unit)
+  if (isAccepted && !digits && (question.digitsMilli ?? 0) > 0) notes.push(`Right, with fewer digits than asked: ${showMilli(question.digitsMilli ?? 0, 2)} of the marks are for them.`)
+  const nearMiss = !isAccepted && slip === null && question.near !== undefined && answer.reading === 'ok' && isWithinWidths(band, near, question.near.widths)
+  if (nearMiss && (question.near?.milli ?? 0) > 0) notes.push(`A near miss: within ${question.near?.widths} half-widths of the reference.`)
   return {
     ...base,
     band, carriedBand, acceptedBy, isAccepted, notes,
     slip: slip && acceptedBy === null ? named(slip, unit, question, definition) : null,
     slipValues: ranges.map(({ slip: { key, label }, value }) => ({ key, label, value })),
-    pointsMilli: withinStep(isAccepted ? question.maxMilli : slip ? question.slipMilli ?? 0 : 0, question.maxMilli),
+    pointsMilli: earnedMilli(question, { isAccepted, hasDigits: digits, isSlip: slip !== null, isNear: nearMiss }),
   }
 }
 
@@ -113,6 +120,18 @@ function onNearestTurn(answer: ReadAnswer, center: number, unit: Unit): ReadAnsw
 function isNear(band: Band, answer: ReadAnswer): boolean {
   const half = answer.halfUnitSi ?? 0
   return answer.decimal !== null && (isIn(band, answer.decimal) || (answer.valueSi !== null && answer.valueSi >= band.low - half && answer.valueSi <= band.high + half))
+}
+
+/** Whether the digits asked are there: by their place for a temperature, whose zero is arbitrary, else by their number, counted in the student's favor. */
+function hasDigits(definition: QuantityDefinition, question: StepQuestion, answer: ReadAnswer, center: number, unit: Unit): boolean {
+  if (definition.kind === 'temperature') return (answer.halfUnitSi ?? 0) <= halfUnitAsked(definition, center, unit, question.digits) * (1 + 1e-9)
+  return (answer.digits ?? 0) >= question.digits || (answer.halfUnitSi ?? Infinity) <= halfUnitAsked(definition, center, unit, question.digits) * (1 + 1e-9)
+}
+
+function isWithinWidths(band: Band, answer: ReadAnswer, widths: number): boolean {
+  if (answer.valueSi === null) return false
+  const away = answer.valueSi - band.center
+  return Math.abs(away) <= widths * (away < 0 ? band.center - band.low : band.high - band.center) * (1 + 1e-9)
 }
 
 const isIn = (band: Band, decimal: string): boolean => liesWithin(decimal, band.lowDecimal, band.highDecimal)

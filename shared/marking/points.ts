@@ -28,6 +28,13 @@ export function withinStep(pointsMilli: number, maxMilli: number): number {
   return Math.min(Math.max(pointsMilli, 0), Math.max(maxMilli, 0))
 }
 
+/** What a value earns: the whole, less the digits' part where they are missing; else what the author gives for a named slip or a near miss. */
+export function earnedMilli(of: { maxMilli: number, digitsMilli?: number, slipMilli?: number, near?: { milli: number } }, value: { isAccepted: boolean, hasDigits: boolean, isSlip: boolean, isNear: boolean }): number {
+  if (value.isAccepted) return withinStep(of.maxMilli - (value.hasDigits ? 0 : of.digitsMilli ?? 0), of.maxMilli)
+  if (value.isSlip) return withinStep(of.slipMilli ?? 0, of.maxMilli)
+  return withinStep(value.isNear ? of.near?.milli ?? 0 : 0, of.maxMilli)
+}
+
 /** Thousandths as a decimal with some places, half away from zero: the one rounding, for display. Thresholds compare thousandths. */
 export function showMilli(milli: number, places: 0 | 1 | 2 | 3): string {
   assertWhole(milli)

@@ -40,6 +40,16 @@ export interface StepQuestion {
   slipMilli?: number
   /** Inputs that come from the student's own earlier steps. Judged on the true value and on this, the better counts. */
   carried?: Readonly<Record<string, { valueSi: number, halfUnitSi: number } | { notCarried: string }>>
+  /** Part of `maxMilli` that a right value earns only with the digits asked. */
+  digitsMilli?: number
+  /** A value within so many half-widths of the band that no slip explains earns part. */
+  near?: { widths: number, milli: number }
+  /** Half a division of the axis from which an input was read off, SI, by input; `result` for the value itself. */
+  readOff?: Readonly<Record<string, number>>
+  /** Where the student read an instrument of their own: what either may be off, SI. */
+  accuracy?: { stationSi: number, ownSi: number }
+  /** In place of a quantity: options of which one or several are right. `quantity` then is `choice`. */
+  choice?: { options: readonly { key: string, label: string }[], right: readonly string[], why: readonly string[] }
   /** What rulings have added: a slip that counts as right here, an interval, or a variant. */
   accepted?: readonly Accepted[]
 }

@@ -65,6 +65,13 @@ export const servedColumn = z.object({ name: z.string(), quantity: z.string(), u
 
 export const workStep = z.object({
   key: stepKey, no: z.number().int(), title: z.string(), ask: z.string(), textHtml: z.string(), pointsMilli: z.number().int(), unit: z.string(), digits: z.number().int(),
+  kind: z.enum(['number', 'diagram', 'reading', 'fit', 'table', 'choice']),
+  /** The fit or table that it is a part of, and its place there. */
+  block: z.object({ key: z.string(), title: z.string(), part: z.string(), row: z.number().int().nullable(), /** The row of the data that a row of a table is about. */ dataRow: z.number().int().nullable() }).nullable(),
+  /** What is read off the plot of the share, and how finely its axis is divided. */
+  readOff: z.object({ column: z.string(), division: z.number(), unit: z.string() }).nullable(),
+  /** For a choice: what can be chosen, in the author's order. */
+  options: z.array(z.object({ key: z.string(), html: z.string() })), isSeveral: z.boolean(),
   /** Numbers of the earlier steps from which this one goes on. */
   from: z.array(z.number().int()),
 })

@@ -6,9 +6,10 @@ import { moistProcesses } from './groups/moistProcesses'
 import { moisture } from './groups/moisture'
 import { parcels } from './groups/parcels'
 import { profiles } from './groups/profiles'
+import { readings } from './groups/readings'
 
 /** Every quantity by its group, in the order in which a course meets them. A test sees to it that each file of `quantities/` is in one. */
-export const quantityGroups: readonly QuantityGroup[] = [dryAir, hydrostatics, moisture, moistProcesses, profiles, parcels, instruments]
+export const quantityGroups: readonly QuantityGroup[] = [dryAir, hydrostatics, moisture, moistProcesses, profiles, parcels, instruments, readings]
 
 export const quantities: readonly QuantityDefinition[] = quantityGroups.flatMap(group => group.quantities)
 

@@ -1,6 +1,7 @@
 import { refuse } from '#shared/errors'
 import type { Accepted } from '#shared/marking/types'
 import type { DisputeDetail } from '#shared/schemas/disputes'
+import { askedSteps, isNumber } from '#shared/schemas/askedSteps'
 import { findQuantity } from '#shared/thermo/registry'
 import type { Read } from '../../db/writer'
 import { erasedText, readPrivateTexts } from '../ledger/readPrivateTexts'
@@ -31,8 +32,9 @@ export async function describeDispute(read: Read, evidence: DisputeEvidence, ask
     read.selectFrom('ruling').selectAll().where('dispute_id', '=', disputeId).orderBy('at').execute(),
   ])
   const reasons = await readPrivateTexts(read, rulings.map(ruling => ruling.reason_digest))
-  const at = loaded.revision.body.steps.findIndex(step => step.key === ground.stepKey)
-  const step = loaded.revision.body.steps[at]
+  const steps = askedSteps(loaded.revision.body)
+  const at = steps.findIndex(step => step.key === ground.stepKey)
+  const step = steps[at]
   const own = stored.find(each => each.stepKey === ground.stepKey)
   if (!step || !own?.evaluation) return refuse('not_found')
   const student = await actorName(read, ground.studentIds[0] ?? '')
@@ -56,7 +58,7 @@ export async function describeDispute(read: Read, evidence: DisputeEvidence, ask
     takenBy: ground.state === 'taken' && ground.takenBy !== null ? await actorName(read, ground.takenBy) : null,
     isMine: ground.takenBy === asker.actorId,
     mayNotRule,
-    options: isStudent || mayNotRule !== null ? [] : await optionsOf(read, evidence.reference, ground, step.quantity, own.evaluation),
+    options: isStudent || mayNotRule !== null ? [] : await optionsOf(read, evidence.reference, ground, isNumber(step) ? step.quantity : null, own.evaluation),
     earlierRulings: isStudent ? [] : await earlierRulings(read, ground, loaded),
   }
 }
@@ -88,9 +90,9 @@ async function notesOf(read: Read, disputeId: string, isStudent: boolean): Promi
 }
 
 /** Readings that explain the value as a slip does, and variants of the quantity that are not accepted yet, with whose marks each would move. */
-async function optionsOf(read: Read, reference: Reference, ground: DisputeGround, quantity: string, row: Parameters<typeof judgementOfRow>[0]): Promise<DisputeDetail['options']> {
+async function optionsOf(read: Read, reference: Reference, ground: DisputeGround, quantity: string | null, row: Parameters<typeof judgementOfRow>[0]): Promise<DisputeDetail['options']> {
   const { slip } = judgementOfRow(row)
-  const variants = findQuantity(quantity)?.variants ?? []
+  const variants = quantity === null ? [] : findQuantity(quantity)?.variants ?? []
   const candidates: { kind: 'slip' | 'variant', key: string, label: string, accept: Accepted }[] = [
     ...(slip ? [{ kind: 'slip' as const, key: slip.key, label: slip.label, accept: { kind: 'slip' as const, slip: slip.key, ruling: '' } }] : []),
     ...variants.map(variant => ({ kind: 'variant' as const, key: variant.key, label: variant.label, accept: { kind: 'variant' as const, variant: variant.key, ruling: '' } })),
@@ -108,6 +110,6 @@ async function earlierRulings(read: Read, ground: DisputeGround, loaded: LoadedS
     .select(['dispute.id', 'dispute.step_key', 'ruling.kind', 'ruling.reason_digest', 'ruling.by_actor_id', 'ruling.at']).where('share.lab_id', '=', ground.labId).where('dispute.id', '!=', ground.id).orderBy('ruling.at', 'desc').limit(5).execute()
   const reasons = await readPrivateTexts(read, rows.map(row => row.reason_digest))
   return Promise.all(rows.map(async row => ({
-    disputeId: row.id, stepNo: loaded.revision.body.steps.findIndex(step => step.key === row.step_key) + 1, kind: row.kind, reason: reasons.get(row.reason_digest) ?? erasedText, by: await actorName(read, row.by_actor_id), at: iso(row.at),
+    disputeId: row.id, stepNo: askedSteps(loaded.revision.body).findIndex(step => step.key === row.step_key) + 1, kind: row.kind, reason: reasons.get(row.reason_digest) ?? erasedText, by: await actorName(read, row.by_actor_id), at: iso(row.at),
   })))
 }

@@ -2,7 +2,8 @@ import { DomainError, type FieldProblem } from '#shared/errors'
 import { judgeStep } from '#shared/marking/judge'
 import { checkBand } from '#shared/marking/proof'
 import type { Band, Judgement, ReadAnswer } from '#shared/marking/types'
-import type { NumberStep, SupplyItem } from '#shared/schemas/lab'
+import { askedSteps, isNumber, type AskedStep } from '#shared/schemas/askedSteps'
+import type { SupplyItem } from '#shared/schemas/lab'
 import type { HeightBar } from '#shared/schemas/marks'
 import { findQuantity } from '#shared/thermo/registry'
 import { formatUnit } from '#shared/units/formatQuantity'
@@ -72,15 +73,15 @@ export function checkShare(lab: PreparedLab, item: SupplyItem): CheckedShare {
   const ground = { rows, convention: lab.convention, share: { item }, revision: { body: lab.revision.body } }
   return {
     no: lab.items.indexOf(item) + 1, title: shareTitle(lab, item), versionId: item.versionId, leg: item.leg, lowM: item.lowM, highM: item.highM, used: rows.use.filter(Boolean).length, rows: rows.count,
-    steps: lab.revision.body.steps.map(step => checkStep(step, asks[step.key] ?? '', askedQuestion(ground, step.key, {}))),
+    steps: askedSteps(lab.revision.body).map(step => checkStep(step, asks[step.key] ?? '', askedQuestion(ground, step.key, {}))),
   }
 }
 
-function checkStep(step: NumberStep, ask: string, asked: ReturnType<typeof askedQuestion>): CheckedStep {
-  const bare = { key: step.key, title: step.title, ask, unit: step.unit, band: null, trace: [] }
+function checkStep(step: AskedStep, ask: string, asked: ReturnType<typeof askedQuestion>): CheckedStep {
+  const bare = { key: step.key, title: step.title, ask, unit: isNumber(step) ? step.unit : '1', band: null, trace: [] }
   if (!('question' in asked)) return { ...bare, ok: false, code: 'share_degenerate', reason: asked.reason, outcome: 'refused', words: 'not computed' }
   const judgement = judgeStep(asked.question, nothing)
-  const { ok, reasons } = checkBand(asked.question)
+  const { ok, reasons } = isNumber(step) ? checkBand(asked.question) : { ok: true, reasons: [] }
   return {
     ...bare, ok, code: ok ? null : judgement.outcome === 'value' ? 'band_too_wide' : 'share_degenerate', reason: ok ? null : reasons.join(' '), outcome: judgement.outcome, words: wordsOf(step, judgement),
     band: judgement.band ? barWithSlips(judgement.band, judgement.slipValues) : null,
@@ -96,7 +97,8 @@ function barWithSlips(band: Band, slips: Judgement['slipValues']): HeightBar {
 
 const texLine = (formula: string): string => formula === '' ? '' : renderInline(`$\\displaystyle ${formula}$`)
 
-function wordsOf(step: NumberStep, judgement: Judgement): string {
+function wordsOf(step: AskedStep, judgement: Judgement): string {
+  if (!isNumber(step)) return step.options.filter(option => option.isRight).map(option => option.text).join('; ')
   if (judgement.band) {
     const shown = heightBarOf(judgement.band, { decimal: null })
     const unit = formatUnit(step.unit)

@@ -1,11 +1,12 @@
 import { refuse } from '#shared/errors'
+import { askedSteps } from '#shared/schemas/askedSteps'
 import { lateRule } from '#shared/schemas/lab'
 import type { Read } from '../../db/writer'
 import type { Observations } from '../../observations/chunks'
 import { bindingProblems } from './bindingProblems'
 import { prepareLab } from './prepareLab'
 import { renderLabText } from './renderLabText'
-import { generalAsks } from './writeRevision'
+import { asksOf } from './askOf'
 
 /** A lab as its authors see it: what they wrote, the asks printed from it, what is not bound yet, and where it is posted. */
 export async function describeLab(read: Read, observations: Observations, labId: string) {
@@ -23,8 +24,8 @@ export async function describeLab(read: Read, observations: Observations, labId:
     revision: { id: revision.id, no: revision.no, isFrozen: revision.frozenAt !== null, body: revision.body },
     convention: { title: convention.title, source: convention.source, constants: convention.constants },
     html: renderLabText(revision.body.text),
-    stepHtml: Object.fromEntries(revision.body.steps.map(step => [step.key, step.text === '' ? '' : renderLabText(step.text)])),
-    asks: generalAsks(revision.body, convention),
+    stepHtml: Object.fromEntries(askedSteps(revision.body).map(step => [step.key, step.text === '' ? '' : renderLabText(step.text)])),
+    asks: asksOf(revision.body, convention, null),
     problems: bindingProblems(prepared),
     courseLateRule: lateRule.parse(JSON.parse(course.late_rule_json)),
     sections: sections.map(section => ({ id: section.id, name: section.name, students: Number(section.students) })),

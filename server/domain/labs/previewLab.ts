@@ -1,3 +1,4 @@
+import { askedSteps } from '#shared/schemas/askedSteps'
 import type { LabBody } from '#shared/schemas/lab'
 import type { Read } from '../../db/writer'
 import type { Observations } from '../../observations/chunks'
@@ -6,7 +7,7 @@ import { bindingProblems } from './bindingProblems'
 import { checkShare, shareTitle } from './checkLab'
 import { prepareLab } from './prepareLab'
 import { renderLabText } from './renderLabText'
-import { generalAsks } from './writeRevision'
+import { asksOf } from './askOf'
 
 /** What an author is writing, as a student would see it: text, asks, and one share with its data, the worked values beside it. Nothing is kept. */
 export async function previewLab(read: Read, observations: Observations, input: { labId: string, text: string, body: LabBody | null, shareNo?: number | undefined }) {
@@ -19,8 +20,8 @@ export async function previewLab(read: Read, observations: Observations, input: 
   const shown = canShow ? lab.serve(item) : null
   return {
     html, problems,
-    asks: generalAsks(input.body, lab.convention),
-    stepHtml: Object.fromEntries(input.body.steps.map(step => [step.key, step.text === '' ? '' : renderLabText(step.text)])),
+    asks: asksOf(input.body, lab.convention, null),
+    stepHtml: Object.fromEntries(askedSteps(input.body).map(step => [step.key, step.text === '' ? '' : renderLabText(step.text)])),
     share: canShow && shown
       ? {
           no: input.shareNo ?? 0, of: lab.items.length, title: shareTitle(lab, item),

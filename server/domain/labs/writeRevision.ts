@@ -1,31 +1,23 @@
 import type { Convention } from '#shared/marking/types'
 import type { LabBody } from '#shared/schemas/lab'
-import { findQuantity } from '#shared/thermo/registry'
+import { askedSteps } from '#shared/schemas/askedSteps'
 import type { Trx } from '../../db/writer'
-import { askOf } from './askOf'
-
-/** The asks of a body by step key, as far as they hold for every share. A step whose quantity is not known yet has none. */
-export function generalAsks(body: LabBody, convention: Convention): Record<string, string> {
-  const titles = Object.fromEntries(body.steps.map(step => [step.key, step.title]))
-  return Object.fromEntries(body.steps.map((step) => {
-    const definition = findQuantity(step.quantity)
-    return [step.key, definition ? askOf(step, definition, convention, titles, null) : '']
-  }))
-}
+import { asksOf } from './askOf'
 
 /** Writes the steps of a draft's revision anew. The database refuses it once the revision is frozen. */
 export async function writeSteps(trx: Trx, revisionId: string, body: LabBody, convention: Convention): Promise<void> {
   await trx.deleteFrom('step_edge').where('lab_revision_id', '=', revisionId).execute()
   await trx.deleteFrom('step').where('lab_revision_id', '=', revisionId).execute()
   if (body.steps.length === 0) return
-  const asks = generalAsks(body, convention)
-  const rankOf = new Map(body.steps.map((step, rank) => [step.key, rank]))
-  await trx.insertInto('step').values(body.steps.map((step, rank) => ({
+  const asks = asksOf(body, convention, null)
+  const steps = askedSteps(body)
+  const rankOf = new Map(steps.map((step, rank) => [step.key, rank]))
+  await trx.insertInto('step').values(steps.map((step, rank) => ({
     lab_revision_id: revisionId, step_key: step.key, rank, kind: step.kind, points_milli: step.pointsMilli,
-    binding_json: JSON.stringify({ quantity: step.quantity, variant: step.variant, inputs: step.inputs, unit: step.unit, digits: step.digits }),
-    ask: asks[step.key] ?? '', band_json: JSON.stringify({ granted: step.granted, slipMilli: step.slipMilli }),
+    binding_json: JSON.stringify(step.kind === 'choice' ? { options: step.options, isSeveral: step.isSeveral } : { quantity: step.quantity, variant: step.variant, inputs: step.inputs, unit: step.unit, digits: step.digits, block: step.block }),
+    ask: asks[step.key] ?? '', band_json: JSON.stringify(step.kind === 'choice' ? {} : { granted: step.granted, slipMilli: step.slipMilli, digitsMilli: step.digitsMilli, near: step.near, divisions: step.divisions, accuracy: step.accuracy }),
   }))).execute()
-  const edges = body.steps.flatMap(step => [...new Set(Object.values(step.inputs).flatMap(source => source.from === 'step' ? [source.key] : []))].map(from => ({
+  const edges = steps.flatMap(step => [...new Set(Object.values(step.kind === 'choice' ? {} : step.inputs).flatMap(source => source.from === 'step' ? [source.key] : []))].map(from => ({
     lab_revision_id: revisionId, from_key: from, to_key: step.key, from_rank: rankOf.get(from) ?? -1, to_rank: rankOf.get(step.key) ?? -1,
   })))
   if (edges.length > 0) await trx.insertInto('step_edge').values(edges).execute()

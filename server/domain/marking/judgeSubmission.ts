@@ -1,5 +1,6 @@
 import { refuse } from '#shared/errors'
 import type { Accepted } from '#shared/marking/types'
+import { askedSteps } from '#shared/schemas/askedSteps'
 import type { AcceptedTable } from '../../db/schema/labs'
 import { questionFor } from '../shares/questionFor'
 import type { EarlierReadings, LoadedShare } from '../shares/loadedShare'
@@ -14,7 +15,7 @@ import type { Judged } from './storedEvaluation'
  * @throws {DomainError} `nothing_to_submit` when every field is empty, `invalid` for a step that the lab does not have
  */
 export function judgeSubmission(reference: Reference, loaded: LoadedShare, typed: Readonly<Record<string, string>>, accepted: readonly Pick<AcceptedTable, 'step_key' | 'body_json'>[] = []): Judged[] {
-  const steps = loaded.revision.body.steps
+  const steps = askedSteps(loaded.revision.body)
   const unknown = Object.keys(typed).filter(key => !steps.some(step => step.key === key))
   if (unknown.length > 0) refuse('invalid', {}, unknown.map(key => ({ path: `answers.${key}`, message: 'This lab has no such step.' })))
   if (steps.every(step => (typed[step.key] ?? '').trim() === '')) refuse('nothing_to_submit')

@@ -1,5 +1,6 @@
 import type { Judgement } from '#shared/marking/types'
-import { labBody, type NumberStep } from '#shared/schemas/lab'
+import { askedSteps, type AskedStep } from '#shared/schemas/askedSteps'
+import { labBody } from '#shared/schemas/lab'
 import type { MarkedStep } from '#shared/schemas/marks'
 import { renderInline } from '../labs/renderLabText'
 import { carriedNoteOf } from './carriedNoteOf'
@@ -10,10 +11,11 @@ import { judgementOfRow, questionOfRow } from './storedEvaluation'
 
 const noConvention = { key: '', title: '', source: '', constants: {}, variants: {}, accepted: [] } as const
 
-export const stepsOfBody = (bodyJson: string): NumberStep[] => labBody.parse(JSON.parse(bodyJson)).steps
+/** Everything that a stored revision asks, in its order. */
+export const stepsOfBody = (bodyJson: string): AskedStep[] => askedSteps(labBody.parse(JSON.parse(bodyJson)))
 
 /** One step as its student sees it once marks are released: value, band and where its width comes from, and the working with numbers put in. */
-export function markedStep(step: NumberStep, no: number, ask: string, stored: StoredStep): MarkedStep {
+export function markedStep(step: AskedStep, no: number, ask: string, stored: StoredStep): MarkedStep {
   const evaluation = stored.evaluation
   if (!evaluation) throw new Error(`Step ${step.key} of submission ${stored.submissionId} has no evaluation.`)
   const judgement = judgementOfRow(evaluation)
@@ -33,11 +35,11 @@ export function markedStep(step: NumberStep, no: number, ask: string, stored: St
 const texLine = (formula: string): string => formula === '' ? '' : renderInline(`$\\displaystyle ${formula}$`)
 
 /** A number has one digit more than was asked, so that rounding can be followed. */
-function workedValue(step: NumberStep, judgement: Judgement): { value: string, unit: string } {
+function workedValue(step: AskedStep, judgement: Judgement): { value: string, unit: string } {
   if (judgement.band) {
     const bar = heightBarOf(judgement.band, { decimal: null })
     return { value: bar.center.toFixed(bar.digits), unit: bar.unit }
   }
-  const words: Record<Judgement['outcome'], string> = { value: '', class: judgement.classes.map(key => classLabel(step.quantity, key)).join(' or '), none: 'none', not_reached: 'not reached', not_defined: 'not defined', refused: 'not computed' }
+  const words: Record<Judgement['outcome'], string> = { value: '', class: judgement.classes.map(key => step.kind === 'choice' ? step.options.find(option => option.key === key)?.text ?? key : classLabel(step.quantity, key)).join(step.kind === 'choice' ? '; ' : ' or '), none: 'none', not_reached: 'not reached', not_defined: 'not defined', refused: 'not computed' }
   return { value: words[judgement.outcome], unit: '' }
 }

@@ -2,7 +2,7 @@ import { refuse } from '#shared/errors'
 import { carriedFrom } from '#shared/marking/graph'
 import { judgeStep } from '#shared/marking/judge'
 import type { Granted, ReadAnswer, StepQuestion } from '#shared/marking/types'
-import type { NumberStep } from '#shared/schemas/lab'
+import { askedSteps, type AskedNumber, type AskedStep } from '#shared/schemas/askedSteps'
 import type { InputDefinition } from '#shared/thermo/definition'
 import { findQuantity } from '#shared/thermo/registry'
 import type { EarlierReadings, LoadedShare } from './loadedShare'
@@ -26,16 +26,22 @@ export function questionFor(loaded: ShareGround, stepKey: string, earlier: Earli
 
 /** As `questionFor`, with a missing input told and not refused: for the check before posting. */
 export function askedQuestion(loaded: ShareGround, stepKey: string, earlier: EarlierReadings): AskedQuestion {
-  const step = loaded.revision.body.steps.find(entry => entry.key === stepKey)
+  const step = askedSteps(loaded.revision.body).find(entry => entry.key === stepKey)
+  if (step?.kind === 'choice') return { question: choiceQuestion(step, loaded.convention) }
   const definition = step ? findQuantity(step.quantity) : undefined
   if (!step || !definition) return { missing: 'quantity', reason: `There is no step "${stepKey}" with a quantity of the reference.` }
   const resolved = stepInputs(step, groundOf(loaded))
   if (!('inputs' in resolved)) return resolved
-  const carried = carriedInputs(step, definition.inputs, earlier)
+  const own = ownReadings(step, definition.inputs, earlier, loaded.revision.body)
+  const carried = carriedInputs(step, definition.inputs.filter(input => own[input.name] === undefined), earlier)
+  const readOff = Object.fromEntries(Object.entries(step.divisions).map(([name, { division, unit }]) => [name, siWidth(division, unit) / 2]))
   return {
     question: {
-      quantity: step.quantity, ...(step.variant === null ? {} : { variant: step.variant }), inputs: resolved.inputs, convention: loaded.convention,
+      quantity: step.quantity, ...(step.variant === null ? {} : { variant: step.variant }), inputs: { ...resolved.inputs, ...own }, convention: loaded.convention,
       granted: grantedSi(step), digits: step.digits, unit: step.unit, maxMilli: step.pointsMilli, slipMilli: step.slipMilli,
+      ...(step.digitsMilli > 0 ? { digitsMilli: step.digitsMilli } : {}), ...(step.near ? { near: step.near } : {}),
+      ...(Object.keys(readOff).length > 0 ? { readOff } : {}),
+      ...(step.accuracy ? { accuracy: { stationSi: siWidth(step.accuracy.station, step.unit), ownSi: siWidth(step.accuracy.own, step.unit) } } : {}),
       ...(Object.keys(carried).length > 0 ? { carried } : {}),
     },
   }
@@ -57,7 +63,25 @@ function groundOf(loaded: ShareGround): InputGround {
   return ground
 }
 
-function grantedSi(step: NumberStep): Granted {
+function choiceQuestion(step: Extract<AskedStep, { kind: 'choice' }>, convention: StepQuestion['convention']): StepQuestion {
+  const right = step.options.filter(option => option.isRight)
+  return {
+    quantity: 'choice', inputs: {}, convention, granted: {}, digits: 1, unit: '1', maxMilli: step.pointsMilli,
+    choice: { options: step.options.map(option => ({ key: option.key, label: option.text })), right: right.map(option => option.key), why: right.map(option => option.why === '' ? option.text : `${option.text}: ${option.why}`) },
+  }
+}
+
+/** Inputs that the student read on an instrument of their own: what they read stands in place of the station's value, where it can be. */
+function ownReadings(step: AskedNumber, inputs: readonly InputDefinition[], earlier: EarlierReadings, body: LoadedShare['revision']['body']): Record<string, number> {
+  const readings = new Set(body.steps.flatMap(entry => entry.kind === 'reading' ? [entry.key] : []))
+  return Object.fromEntries(inputs.flatMap((input) => {
+    const source = step.inputs[input.name]
+    const carried = source?.from === 'step' && readings.has(source.key) ? carriedFrom(input, earlier[source.key]) : null
+    return carried && 'valueSi' in carried ? [[input.name, carried.valueSi]] : []
+  }))
+}
+
+function grantedSi(step: AskedNumber): Granted {
   return {
     ...(step.granted.absolute === undefined ? {} : { absoluteSi: siWidth(step.granted.absolute, step.unit) }),
     ...(step.granted.relative === undefined ? {} : { relative: step.granted.relative }),
@@ -65,7 +89,7 @@ function grantedSi(step: NumberStep): Granted {
 }
 
 /** A blank or unread earlier step carries nothing: the later one is judged on the true value, and nothing is lost twice. */
-function carriedInputs(step: NumberStep, inputs: readonly InputDefinition[], earlier: EarlierReadings): NonNullable<StepQuestion['carried']> {
+function carriedInputs(step: AskedNumber, inputs: readonly InputDefinition[], earlier: EarlierReadings): NonNullable<StepQuestion['carried']> {
   return Object.fromEntries(inputs.flatMap((input) => {
     const source = step.inputs[input.name]
     const carried = source?.from === 'step' ? carriedFrom(input, earlier[source.key]) : null

@@ -1,8 +1,8 @@
 import type { Convention } from '#shared/marking/types'
+import { askedSteps } from '#shared/schemas/askedSteps'
 import type { LabBody, SupplyItem } from '#shared/schemas/lab'
-import { findQuantity } from '#shared/thermo/registry'
 import { formatUnit } from '#shared/units/formatQuantity'
-import { askOf, constantWords, datumWords } from '../labs/askOf'
+import { asksOf, constantWords, datumWords } from '../labs/askOf'
 import { legWords } from './legs'
 import type { ServedRows } from './loadedShare'
 import { csvOf, serveRows, type Flight, type ServedFlight } from './servedData'
@@ -22,11 +22,7 @@ export interface ServedShare {
 /** Everything that one item of the supply shows: made from flight, revision and convention alone, so that the same bytes come out at any later time. */
 export function serveShare(serving: Serving, flight: Flight, served: ServedFlight, item: Pick<SupplyItem, 'leg' | 'lowM' | 'highM'>): ServedShare {
   const rows = serveRows(served, item)
-  const titles = Object.fromEntries(serving.body.steps.map(step => [step.key, step.title]))
-  const asks = Object.fromEntries(serving.body.steps.map((step) => {
-    const definition = findQuantity(step.quantity)
-    return [step.key, definition ? askOf(step, definition, serving.convention, titles, { item, heightDatum: flight.heightDatum, rows }) : '']
-  }))
+  const asks = asksOf(serving.body, serving.convention, { item, heightDatum: flight.heightDatum, rows })
   const head = headOf(serving, flight, item, rows, asks)
   return { rows, asks, head, csv: csvOf(head, rows) }
 }
@@ -38,7 +34,7 @@ function headOf({ body, convention }: Serving, flight: Flight, item: Pick<Supply
     `Data: ${flight.title}, version ${flight.versionNo}, root SHA-256 ${flight.rootSha256}`,
     `Your share: ${item.lowM} m to ${item.highM} m ${datumWords(flight.heightDatum)}, both bounds included; ${legWords[item.leg]}`,
     `Use the ${used} of ${rows.count} rows with use = 1. Rows with use = 0 lie outside the layer or the leg, or a value that a step needs is missing or flagged. An empty cell is a missing value.`,
-    ...body.steps.map((step, at) => `Step ${at + 1}, ${step.title}: ${asks[step.key] ?? ''}`),
+    ...askedSteps(body).map((step, at) => `Step ${at + 1}, ${step.title}: ${asks[step.key] ?? ''}`),
     `Constants (${convention.title}): ${Object.entries(convention.constants).flatMap(([name, value]) => constantWords(name, value) ?? []).join('; ')}`,
     `Columns: ${rows.columns.map(column => `${column.name} in ${formatUnit(column.unit)}`).join('; ')}`,
     'Times are UTC. The worked value is computed from the digits in this file.',

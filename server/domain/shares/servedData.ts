@@ -1,4 +1,5 @@
 import { createHash } from 'node:crypto'
+import { askedNumbers } from '#shared/schemas/askedSteps'
 import type { LabBody, SupplyItem } from '#shared/schemas/lab'
 import { rowsOfLeg } from './legs'
 import type { ServedColumn, ServedRows } from './loadedShare'
@@ -41,7 +42,7 @@ export function servedText(value: number, decimals: number | null): string {
 /** Quantities that some step takes from the share. */
 export function neededQuantities(body: LabBody): string[] {
   const needed = new Set<string>()
-  for (const step of body.steps) for (const source of Object.values(step.inputs)) if (source.from === 'share' && source.read !== 'lowBound' && source.read !== 'highBound') needed.add(source.column)
+  for (const step of askedNumbers(body)) for (const source of Object.values(step.inputs)) if (source.from === 'share' && source.read !== 'lowBound' && source.read !== 'highBound') needed.add(source.column)
   return [...needed]
 }
 
@@ -51,7 +52,7 @@ export function neededQuantities(body: LabBody): string[] {
  */
 function isServed(column: FlightColumn, body: LabBody, needed: readonly string[]): boolean {
   if (column.role !== 'value' || column.quantity === 'other') return false
-  return needed.includes(column.quantity) || !body.steps.some(step => step.quantity === column.quantity)
+  return needed.includes(column.quantity) || !askedNumbers(body).some(step => step.quantity === column.quantity)
 }
 
 /** The first column of a quantity is the one that steps use; a second sensor's stays beside it. */

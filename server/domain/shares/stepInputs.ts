@@ -1,8 +1,9 @@
 import type { Convention } from '#shared/marking/types'
-import type { InputSource, LabBody, NumberStep, SupplyItem } from '#shared/schemas/lab'
+import type { AskedNumber } from '#shared/schemas/askedSteps'
+import type { InputSource, LabBody, SupplyItem } from '#shared/schemas/lab'
 import type { InputDefinition, Inputs, InputValue } from '#shared/thermo/definition'
 import { findQuantity } from '#shared/thermo/registry'
-import { edgeRow } from '../labs/askOf'
+import { edgeRow, tableRow } from '../labs/rowsOfLayer'
 import type { ServedRows } from './loadedShare'
 import { columnOf } from './servedData'
 import { siFromText } from './units'
@@ -20,7 +21,7 @@ export interface InputGround {
 export type ResolvedInputs = { inputs: Inputs } | { missing: string, reason: string }
 
 /** The inputs of a step in SI, from the digits that were served. A missing one is told with its reason and is never filled in. */
-export function stepInputs(step: NumberStep, ground: InputGround): ResolvedInputs {
+export function stepInputs(step: AskedNumber, ground: InputGround): ResolvedInputs {
   const definition = findQuantity(step.quantity)
   if (!definition) return { missing: 'quantity', reason: `The reference has no quantity "${step.quantity}".` }
   const inputs: Record<string, InputValue> = {}
@@ -54,6 +55,10 @@ function readShare(input: InputDefinition, source: Extract<InputSource, { from: 
   const inSi = (row: number) => siFromText(column.texts[row] ?? '', column.unit, input.kind)
   if (source.read === 'lowest' || source.read === 'highest') {
     const row = edgeRow(rows, source.read)
+    return row === null ? null : inSi(row)
+  }
+  if (source.read === 'row') {
+    const row = source.row ? tableRow(rows, source.row.no, source.row.of) : null
     return row === null ? null : inSi(row)
   }
   const series = rows.use.flatMap((isUsed, row) => isUsed ? inSi(row) ?? [] : [])

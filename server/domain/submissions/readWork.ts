@@ -1,8 +1,10 @@
 import { refuse } from '#shared/errors'
 import { constantDefinitions } from '#shared/thermo/constants'
+import { askedSteps, type AskedStep } from '#shared/schemas/askedSteps'
 import type { Work } from '#shared/schemas/work'
 import type { Read } from '../../db/writer'
-import { renderLabText } from '../labs/renderLabText'
+import { tableRow } from '../labs/rowsOfLayer'
+import { renderInline, renderLabText } from '../labs/renderLabText'
 import type { LoadedShare } from '../shares/loadedShare'
 import { postedGround, readGround } from './ground'
 import { listSubmissions } from './listSubmissions'
@@ -25,20 +27,37 @@ export async function readWork(read: Read, loadShare: (shareId: string) => Promi
   if (!dataSet) return refuse('not_found')
   const { body } = loaded.revision
   const closesAt = closingOf(ground)
-  const numberOf = new Map(body.steps.map((step, at) => [step.key, at + 1]))
+  const steps = askedSteps(body)
+  const numberOf = new Map(steps.map((step, at) => [step.key, at + 1]))
   return {
     share: { id: who.shareId, no: loaded.share.ordinal + 1, lowM: loaded.share.item.lowM, highM: loaded.share.item.highM, leg: loaded.share.item.leg, dataSet: `${dataSet.title}, version ${dataSet.no}` },
-    lab: { id: ground.labId, title: ground.labTitle, revisionNo: loaded.revision.no, textHtml: renderLabText(body.text), maxMilli: body.steps.reduce((sum, step) => sum + step.pointsMilli, 0) },
+    lab: { id: ground.labId, title: ground.labTitle, revisionNo: loaded.revision.no, textHtml: renderLabText(body.text), maxMilli: steps.reduce((sum, step) => sum + step.pointsMilli, 0) },
     convention: { title: loaded.convention.title, constants: constantDefinitions.flatMap(({ name, label, unit }) => loaded.convention.constants[name] === undefined ? [] : [{ name, label, unit, value: loaded.convention.constants[name] }]) },
     opensAt: new Date(ground.opensAt).toISOString(), dueAt: new Date(personalDue(ground)).toISOString(), isOwnDue: personalDue(ground) > ground.dueAt, closesAt: closesAt === null ? null : new Date(closesAt).toISOString(),
     zone: ground.zone, lateRule: ground.lateRule, attempts: ground.attempts, keep: ground.keep, feedback: ground.feedback, isReleased: ground.releasedAt !== null,
-    steps: body.steps.map((step, at) => ({
-      key: step.key, no: at + 1, title: step.title, ask: loaded.asks[step.key] ?? step.title, textHtml: step.text === '' ? '' : renderLabText(step.text), pointsMilli: step.pointsMilli, unit: step.unit, digits: step.digits,
-      from: [...new Set(Object.values(step.inputs).flatMap(source => source.from === 'step' ? numberOf.get(source.key) ?? [] : []))].sort((a, b) => a - b),
+    steps: steps.map((step, at) => ({
+      key: step.key, no: at + 1, title: step.title, ask: loaded.asks[step.key] ?? step.title, textHtml: step.text === '' ? '' : renderLabText(step.text), pointsMilli: step.pointsMilli, kind: step.kind, block: step.block && { ...step.block, dataRow: dataRowOf(step, loaded) }, readOff: readOffOf(step),
+      ...(step.kind === 'choice' ? { unit: '1', digits: 1, options: step.options.map(({ key, text }) => ({ key, html: renderInline(text) })), isSeveral: step.isSeveral } : { unit: step.unit, digits: step.digits, options: [], isSeveral: false }),
+      from: [...new Set(Object.values(step.kind === 'choice' ? {} : step.inputs).flatMap(source => source.from === 'step' ? numberOf.get(source.key) ?? [] : []))].sort((a, b) => a - b),
     })),
     rows: { times: [...loaded.rows.times], use: [...loaded.rows.use], columns: loaded.rows.columns.map(column => ({ name: column.name, quantity: column.quantity, unit: column.unit, texts: [...column.texts] })) },
     drafts,
     made,
     stopped: stoppedBy(ground, now), now: new Date(now).toISOString(),
   }
+}
+
+/** Row number, as the file counts, of the data that a table's row is about. */
+function dataRowOf(step: AskedStep, loaded: LoadedShare): number | null {
+  const of = step.kind === 'table' ? Object.values(step.inputs).flatMap(source => source.from === 'share' && source.row ? [source.row] : [])[0] : undefined
+  const row = of ? tableRow(loaded.rows, of.no, of.of) : null
+  return row === null ? null : row + 1
+}
+
+/** The column from whose plot a step is read off, with the division of its axis. */
+function readOffOf(step: AskedStep): { column: string, division: number, unit: string } | null {
+  if (step.kind !== 'diagram') return null
+  const columns = Object.values(step.inputs).flatMap(source => source.from === 'share' && source.column !== 'height' && source.read !== 'lowBound' && source.read !== 'highBound' ? [source.column] : [])
+  const division = step.divisions.result ?? Object.values(step.divisions)[0]
+  return division ? { column: columns[0] ?? 'air-temperature', ...division } : null
 }

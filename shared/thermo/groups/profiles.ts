@@ -4,6 +4,7 @@ import { bruntVaisalaFrequencySquaredDefinition } from '../quantities/bruntVaisa
 import { bruntVaisalaFrequencySquaredFromLapseRateDefinition } from '../quantities/bruntVaisalaFrequencySquaredFromLapseRate'
 import { bulkRichardsonNumberDefinition } from '../quantities/bulkRichardsonNumber'
 import { bulkRichardsonNumberFromWindsDefinition } from '../quantities/bulkRichardsonNumberFromWinds'
+import { fittedTemperatureAtZeroHeightDefinition } from '../quantities/fittedTemperatureAtZeroHeight'
 import { freezingLevelDefinition } from '../quantities/freezingLevel'
 import { gradientRichardsonNumberDefinition } from '../quantities/gradientRichardsonNumber'
 import { inversionBaseDefinition } from '../quantities/inversionBase'
@@ -35,6 +36,7 @@ export const profiles: QuantityGroup = {
     lapseRateEndPointsStandardErrorDefinition,
     lapseRateLeastSquaresDefinition,
     lapseRateStandardErrorDefinition,
+    fittedTemperatureAtZeroHeightDefinition,
     lapseRateTheilSenDefinition,
     lapseRateTheilSenStandardErrorDefinition,
     lapseRateLagOneCorrelationDefinition,

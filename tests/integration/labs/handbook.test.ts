@@ -2,6 +2,7 @@ import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import { isAskedNow } from '../../../server/domain/handbook/isAskedNow'
 import { openTemporary } from '../../fixtures/openTemporary'
 import { body, workingCourse } from '../../fixtures/workingCourse'
+import { askedNumbers } from '../../../shared/schemas/askedSteps'
 
 let db: Awaited<ReturnType<typeof openTemporary>>
 beforeEach(async () => {
@@ -14,7 +15,7 @@ describe('the calculator of a student', () => {
     await workingCourse(db, { students: 1, times: { zone: 'America/Chicago', opens: '2026-10-12T08:00', due: '2026-10-16T17:00' }, lateRule: { kind: 'none' } })
     const { section_id: section, id } = await db.read.selectFrom('membership').select(['id', 'section_id']).where('role', '=', 'student').executeTakeFirstOrThrow()
     const student = { memberships: [{ id, courseId: 'course-1', role: 'student' as const, sectionIds: [section ?? ''] }] }
-    const asked = body.steps[0]?.quantity ?? ''
+    const asked = askedNumbers(body)[0]?.quantity ?? ''
     const during = Date.parse('2026-10-14T20:00:00Z')
     expect(await isAskedNow(db.read, student, asked, during)).toBe(true)
     expect(await isAskedNow(db.read, student, 'no-such-quantity', during)).toBe(false)

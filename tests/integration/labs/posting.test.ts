@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest'
-import { labBody, type LabBody, type SupplyItem } from '../../../shared/schemas/lab'
+import { labBody, type LabBody, type NumberStep, type SupplyItem } from '../../../shared/schemas/lab'
 import { defaultConvention } from '../../../shared/thermo/conventions'
 import { ensureConvention } from '../../../server/domain/labs/conventions'
 import { createLab } from '../../../server/domain/labs/createLab'
@@ -29,8 +29,8 @@ let department: Awaited<ReturnType<typeof smallDepartment>>
 let flights: string[]
 const seed = Buffer.from('00112233445566778899aabbccddeeff', 'hex')
 
-const step = (more: Partial<LabBody['steps'][number]> = {}): LabBody['steps'][number] => ({
-  key: 'rate', kind: 'number', title: 'Lapse rate of the layer', text: '', pointsMilli: 3000, quantity: 'lapse-rate-least-squares', variant: null, unit: 'K/km', digits: 3, granted: {}, slipMilli: 0,
+const step = (more: Partial<NumberStep> = {}): NumberStep => ({
+  key: 'rate', kind: 'number', title: 'Lapse rate of the layer', text: '', pointsMilli: 3000, quantity: 'lapse-rate-least-squares', variant: null, unit: 'K/km', digits: 3, granted: {}, slipMilli: 0, digitsMilli: 0, near: null,
   inputs: { height: { from: 'share', column: 'height', read: 'layer' }, temperature: { from: 'share', column: 'air-temperature', read: 'layer' } }, ...more,
 })
 const body = (supply: SupplyItem[], steps = [step()]): LabBody => labBody.parse({ title: 'Rates', text: 'Find $\\Gamma$.', supply, steps })

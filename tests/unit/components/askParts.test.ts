@@ -19,7 +19,7 @@ describe('the parts of an ask', () => {
   it('keep every word, for each quantity', () => {
     const words = (text: string) => text.replace(/[.:]/g, '').split(/\s+/).filter(word => word !== '')
     for (const definition of quantities) {
-      const ask = askOf({ key: 's', kind: 'number', title: 'S', text: '', pointsMilli: 1000, quantity: definition.key, variant: null, inputs: {}, unit: definition.shownUnit, digits: 3, granted: {}, slipMilli: 0 }, definition, defaultConvention, {}, null)
+      const ask = askOf({ key: 's', kind: 'number', title: 'S', text: '', pointsMilli: 1000, quantity: definition.key, variant: null, inputs: {}, unit: definition.shownUnit, digits: 3, granted: {}, slipMilli: 0, digitsMilli: 0, near: null, block: null, divisions: {}, accuracy: null }, definition, defaultConvention, {}, null)
       const { lead, pinned, answer } = askParts(ask)
       expect(words([lead, ...pinned.map(pin => `${pin.name} ${pin.text}`), answer].join(' '))).toEqual(words(ask))
       expect(answer).toMatch(/^Answer /)

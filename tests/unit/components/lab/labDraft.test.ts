@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
-import { draftOf, freeKey, problemAt, readDraft, typedNumber } from '../../../../components/lab/labDraft'
+import { draftOf, freeKey, problemAt } from '../../../../components/lab/labDraft'
+import { readDraft, typedNumber } from '../../../../components/lab/readDraft'
 import { readPost, type PostDraft } from '../../../../components/lab/postDraft'
 import { labBody } from '../../../../shared/schemas/lab'
 

@@ -1,18 +1,19 @@
 import { describe, expect, it } from 'vitest'
-import type { NumberStep } from '../../../../../shared/schemas/lab'
+import type { AskedNumber } from '../../../../../shared/schemas/askedSteps'
 import { defaultConvention } from '../../../../../shared/thermo/conventions'
 import { findQuantity, quantities } from '../../../../../shared/thermo/registry'
-import { askOf, edgeRow } from '../../../../../server/domain/labs/askOf'
+import { askOf } from '../../../../../server/domain/labs/askOf'
+import { edgeRow } from '../../../../../server/domain/labs/rowsOfLayer'
 import type { ServedRows } from '../../../../../server/domain/shares/loadedShare'
 
 const column = (name: string, quantity: string, unit: string, values: (number | null)[]) => ({ name, quantity, unit, decimals: 1, texts: values.map(value => value === null ? '' : value.toFixed(1)), values })
 const rows = (heights: (number | null)[], use: boolean[]): ServedRows => ({ columns: [column('height_m', 'height', 'm', heights), column('t_c', 'air-temperature', 'Cel', heights.map(() => 15)), column('p_hpa', 'pressure', 'hPa', heights.map(() => 980))], use, times: heights.map(() => ''), count: heights.length })
 const share = { item: { leg: 'down' as const, lowM: -20, highM: 300 }, heightDatum: 'launch point', rows: rows([310, 300, 120, 40, 40, -20], [false, true, true, true, true, true]) }
 
-function ask(quantity: string, more: Partial<NumberStep>, of: typeof share | null = share): string {
+function ask(quantity: string, more: Partial<AskedNumber>, of: typeof share | null = share): string {
   const definition = findQuantity(quantity)
   if (!definition) throw new Error(quantity)
-  return askOf({ key: 's', kind: 'number', title: 'S', text: '', pointsMilli: 1000, quantity, variant: null, inputs: {}, unit: definition.shownUnit, digits: 3, granted: {}, slipMilli: 0, ...more }, definition, defaultConvention, { rate: 'Lapse rate' }, of)
+  return askOf({ key: 's', kind: 'number', title: 'S', text: '', pointsMilli: 1000, quantity, variant: null, inputs: {}, unit: definition.shownUnit, digits: 3, granted: {}, slipMilli: 0, digitsMilli: 0, near: null, block: null, divisions: {}, accuracy: null, ...more }, definition, defaultConvention, { rate: 'Lapse rate' }, of)
 }
 
 describe('the ask', () => {

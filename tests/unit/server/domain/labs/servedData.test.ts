@@ -1,15 +1,15 @@
 import { describe, expect, it } from 'vitest'
-import type { LabBody } from '../../../../../shared/schemas/lab'
+import type { LabBody, NumberStep } from '../../../../../shared/schemas/lab'
 import { rowsOfLeg } from '../../../../../server/domain/shares/legs'
 import { csvOf, servedText, serveFlight, serveRows as serveItem, type Flight } from '../../../../../server/domain/shares/servedData'
 
 const serveRows = (given: Flight, item: { leg: 'up' | 'down' | 'all', lowM: number, highM: number }, of: LabBody) => serveItem(serveFlight(given, of), item)
 
-const body: LabBody = {
-  title: 'Rates', text: '', supply: [],
-  steps: [{ key: 'rate', kind: 'number', title: 'Rate', text: '', pointsMilli: 3000, quantity: 'layer-lapse-rate', variant: null, unit: 'K/km', digits: 3, granted: {}, slipMilli: 0,
-    inputs: { temperature: { from: 'share', column: 'air-temperature', read: 'layer' }, height: { from: 'share', column: 'height', read: 'layer' } } }],
+const rate: NumberStep = {
+  key: 'rate', kind: 'number', title: 'Rate', text: '', pointsMilli: 3000, quantity: 'layer-lapse-rate', variant: null, unit: 'K/km', digits: 3, granted: {}, slipMilli: 0, digitsMilli: 0, near: null,
+  inputs: { temperature: { from: 'share', column: 'air-temperature', read: 'layer' }, height: { from: 'share', column: 'height', read: 'layer' } },
 }
+const body: LabBody = { title: 'Rates', text: '', supply: [], steps: [rate] }
 
 function flight(heights: number[], temperatures: number[], more: Partial<Flight> = {}): Flight {
   return {
@@ -55,7 +55,7 @@ describe('served rows', () => {
       { name: 'theta', quantity: 'potential-temperature', unit: 'K', decimals: 1, role: 'value', values: [300, 301] },
       { name: 'quality', quantity: 'height', unit: 'm', decimals: 0, role: 'quality', values: [0, 0] },
       { name: 'x', quantity: 'other', unit: '1', decimals: 0, role: 'value', values: [0, 0] }] },
-    { leg: 'all', lowM: 0, highM: 9 }, { ...body, steps: [...body.steps, { ...body.steps[0]!, key: 'theta', quantity: 'potential-temperature' }] })
+    { leg: 'all', lowM: 0, highM: 9 }, { ...body, steps: [...body.steps, { ...rate, key: 'theta', quantity: 'potential-temperature' }] })
     expect(rows.columns.map(column => column.name)).toEqual(['height_m', 'temperature_c'])
   })
 })
