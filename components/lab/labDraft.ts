@@ -1,4 +1,5 @@
-import type { FitStep, InputSource, LabBody, LabStep, NumberStep, StepKind } from '#shared/schemas/lab'
+import type { LabBody } from '#shared/schemas/lab'
+import type { FitStep, InputSource, LabStep, NumberStep, StepKind } from '#shared/schemas/steps'
 
 /** What stands in the editor's fields: numbers as they were typed, so that nothing that cannot be read yet is lost. */
 export interface DraftSource { from: '' | InputSource['from'], column: string, read: string, value: string, unit: string, name: string, key: string }

@@ -1,5 +1,6 @@
 import { askedOf } from '#shared/schemas/askedSteps'
-import type { LabBody, StepKind } from '#shared/schemas/lab'
+import type { LabBody } from '#shared/schemas/lab'
+import type { StepKind } from '#shared/schemas/steps'
 import type { DraftStep } from './labDraft'
 
 /** The kinds of step, as an author chooses among them. */

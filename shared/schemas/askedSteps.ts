@@ -1,4 +1,4 @@
-import type { ChoiceStep, DiagramStep, FitStep, InputSource, LabStep, NumberStep, ReadingStep, TableStep } from './lab'
+import type { ChoiceStep, DiagramStep, FitStep, InputSource, LabStep, NumberStep, ReadingStep, TableStep } from './steps'
 
 /**
  * What a lab asks, one entry each: a step as it is written asks once, a fit for its slope, intercept and standard error, a table for each of its

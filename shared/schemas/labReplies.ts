@@ -1,5 +1,6 @@
 import { z } from 'zod'
-import { inputSource, labBody, lateRule, leg } from './lab'
+import { labBody, lateRule, leg } from './lab'
+import { inputSource } from './steps'
 import { heightBar } from './marks'
 
 /** Answers of the lab routes. Rows count epoch milliseconds; JSON says ISO 8601 with Z: the one converter of these routes is here. */

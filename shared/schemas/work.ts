@@ -1,5 +1,6 @@
 import { z } from 'zod'
-import { lateRule, stepKey } from './lab'
+import { lateRule } from './lab'
+import { stepKey } from './steps'
 import { labStanding } from './marks'
 
 /** What a student sends while working and when submitting: one definition for form, route and row. */

@@ -1,4 +1,4 @@
-import type { InputSource } from '#shared/schemas/lab'
+import type { InputSource } from '#shared/schemas/steps'
 import type { InputDefinition, QuantityDefinition } from '#shared/thermo/definition'
 import { quantityGroups } from '#shared/thermo/registry'
 import { formatUnit } from '#shared/units/formatQuantity'

@@ -1,6 +1,7 @@
 import type { Convention } from '#shared/marking/types'
 import type { AskedNumber } from '#shared/schemas/askedSteps'
-import type { InputSource, LabBody, SupplyItem } from '#shared/schemas/lab'
+import type { LabBody, SupplyItem } from '#shared/schemas/lab'
+import type { InputSource } from '#shared/schemas/steps'
 import type { InputDefinition, Inputs, InputValue } from '#shared/thermo/definition'
 import { findQuantity } from '#shared/thermo/registry'
 import { edgeRow, tableRow } from '../labs/rowsOfLayer'

@@ -1,5 +1,6 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest'
-import { labBody, type LabBody, type NumberStep, type SupplyItem } from '../../../shared/schemas/lab'
+import { labBody, type LabBody, type SupplyItem } from '../../../shared/schemas/lab'
+import type { NumberStep } from '../../../shared/schemas/steps'
 import { defaultConvention } from '../../../shared/thermo/conventions'
 import { ensureConvention } from '../../../server/domain/labs/conventions'
 import { createLab } from '../../../server/domain/labs/createLab'

@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import { refuse } from '#shared/errors'
-import { stepKey } from '#shared/schemas/lab'
+import { stepKey } from '#shared/schemas/steps'
 import { draftBody, savedDraft } from '#shared/schemas/work'
 import { saveDraft } from '../../../../domain/submissions/saveDraft'
 import { defineApiHandler } from '../../../../utils/defineApiHandler'

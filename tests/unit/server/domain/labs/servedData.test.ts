@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
-import type { LabBody, NumberStep } from '../../../../../shared/schemas/lab'
+import type { LabBody } from '../../../../../shared/schemas/lab'
+import type { NumberStep } from '../../../../../shared/schemas/steps'
 import { rowsOfLeg } from '../../../../../server/domain/shares/legs'
 import { csvOf, servedText, serveFlight, serveRows as serveItem, type Flight } from '../../../../../server/domain/shares/servedData'
 
