@@ -68,6 +68,7 @@ export const policies = {
   'lab:edit': { scope: 'course', roles: [...teachers, 'ta'] },
   'lab:flights': { scope: 'course', roles: [...teachers, 'ta'] },
   'lab:preview': { scope: 'course', roles: [...teachers, 'ta'] },
+  'lab:own-finding': { scope: 'course', roles: teachers, openTerm: true },
   'lab:post': { scope: 'course', roles: teachers, openTerm: true },
   'lab:release': { scope: 'course', roles: teachers },
   'lab:class': { scope: 'section', roles: staff },

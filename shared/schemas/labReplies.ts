@@ -44,7 +44,27 @@ export const checkedStepReply = z.object({
 export const checkedShareReply = z.object({
   no: z.number(), title: z.string(), versionId: z.string(), leg, lowM: z.number(), highM: z.number(), used: z.number(), rows: z.number(), steps: z.array(checkedStepReply),
 })
-export const labCheckReply = z.object({ version: z.number(), isReady: z.boolean(), problems: z.array(fieldProblem), shares: z.array(checkedShareReply) })
+const provedStepReply = z.object({
+  ways: z.array(z.object({ label: z.string(), typed: z.string(), isInside: z.boolean() })),
+  slips: z.array(z.object({ key: z.string(), label: z.string(), typed: z.string(), pointsMilli: z.number(), isOutside: z.boolean(), isQuiet: z.boolean() })),
+  relativeWidth: z.number().nullable(), toClassLimit: z.number().nullable(), triesToFind: z.number().nullable(),
+})
+const playerKey = z.enum(['spreadsheet', 'notebook', 'early', 'swapped', 'plot', 'guesser'])
+export const provedShareReply = checkedShareReply.extend({
+  proofs: z.record(z.string(), provedStepReply),
+  played: z.array(z.object({ player: playerKey, earnedMilli: z.number(), steps: z.array(z.object({ key: z.string(), typed: z.string(), pointsMilli: z.number(), isAccepted: z.boolean() })) })),
+})
+/** What the proof run found on a lab as it stands. */
+export const proofReply = z.object({
+  version: z.number(), isReady: z.boolean(), maxMilli: z.number(), problems: z.array(fieldProblem), shares: z.array(provedShareReply),
+  reds: z.array(z.object({
+    key: z.string(), kind: z.enum(['method_loses', 'slip_wins', 'guesser_wins', 'unequal']), shareNo: z.number(), stepKey: z.string(), text: z.string(),
+    owned: z.object({ by: z.string(), at: instant, reason: z.string() }).nullable(),
+  })),
+  players: z.array(z.object({ key: playerKey, name: z.string(), says: z.string(), isRight: z.boolean() })),
+})
+export const ownedBody = z.object({ keys: z.array(z.string().min(1).max(200)).min(1).max(2000), reason: z.string().trim().min(3, 'Say why, in a few words.').max(1000) })
+export const ownedReply = z.object({ owned: z.number() })
 
 export const servedReply = z.object({
   columns: z.array(z.object({ name: z.string(), quantity: z.string(), unit: z.string(), unitLabel: z.string(), texts: z.array(z.string()) })),

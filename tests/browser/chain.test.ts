@@ -70,7 +70,7 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
     await page.getByRole('button', { name: 'Save draft' }).click()
     await page.getByText('saved', { exact: true }).waitFor()
 
-    await page.getByRole('link', { name: 'Check every share' }).click()
+    await page.getByRole('link', { name: 'Proof run' }).click()
     await page.getByRole('region', { name: 'Every share and step' }).waitFor()
     expect(await page.getByText(/cannot be asked|range too wide/).count()).toBe(0)
 

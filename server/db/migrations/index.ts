@@ -4,6 +4,7 @@ import { openCourses } from './0002_open_courses'
 import { termVersions } from './0003_term_versions'
 import { privateReasons } from './0004_private_reasons'
 import { filesOfPeople } from './0005_files_of_people'
+import { ownedReds } from './0006_owned_reds'
 
 /** Every migration, by name, in order. A test holds this list against the folder. */
 export const migrations: Record<string, Migration> = {
@@ -12,4 +13,5 @@ export const migrations: Record<string, Migration> = {
   '0003_term_versions': termVersions,
   '0004_private_reasons': privateReasons,
   '0005_files_of_people': filesOfPeople,
+  '0006_owned_reds': ownedReds,
 }

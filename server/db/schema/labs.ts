@@ -47,6 +47,15 @@ export interface AcceptedTable {
   revoked_at: number | null
 }
 
+export interface OwnedRedTable {
+  id: string
+  lab_id: string
+  red_key: string
+  reason: string
+  by_actor_id: string
+  at: number
+}
+
 export interface PostingTable {
   id: string
   lab_id: string

@@ -1,6 +1,6 @@
 import type { SourceFileTable, UploadTable, SensorTable, SensorAccuracyTable, RecipeRevisionTable, DataSetTable, DataSetVersionTable, DataSetVersionSourceTable, DataColumnTable } from './data'
 import type { TermTable, CourseTable, CourseListingTable, SectionTable, MembershipTable, TaSectionTable, ConflictOfInterestTable } from './department'
-import type { LabTable, LabRevisionTable, StepTable, StepEdgeTable, AcceptedTable, PostingTable, AllowanceTable, StandingTable, HolderTable, HolderMemberTable, DrawTable, ShareTable } from './labs'
+import type { LabTable, LabRevisionTable, StepTable, StepEdgeTable, AcceptedTable, OwnedRedTable, PostingTable, AllowanceTable, StandingTable, HolderTable, HolderMemberTable, DrawTable, ShareTable } from './labs'
 import type { LedgerChainTable, LedgerEntryTable, PrivateBodyTable, WorkFileTable, LedgerAnchorTable } from './ledger'
 import type { CounterTable, RequestKeyTable, JobTable, OutboxTable, AccessLogTable, InstallationTable } from './machinery'
 import type { DisputeTable, DisputeNoteTable, RulingTable, MarkingRunTable, MarkingRunItemTable } from './moderation'
@@ -39,6 +39,7 @@ export interface Database {
   step: StepTable
   step_edge: StepEdgeTable
   accepted: AcceptedTable
+  owned_red: OwnedRedTable
   posting: PostingTable
   allowance: AllowanceTable
   standing: StandingTable

@@ -52,7 +52,9 @@ export function askOf(step: AskedNumber, definition: QuantityDefinition, convent
   return [
     sentence(definition.ask),
     methodOf(step, definition, convention),
-    ...definition.inputs.filter(input => !input.isForSlips).flatMap(input => inputOf(step.inputs[input.name], input, titles, share)),
+    ...(step.accuracy ? ['Compared with what the station read.'] : []),
+    // where the student reads an instrument, what the station read is not told beforehand
+    ...definition.inputs.filter(input => !input.isForSlips && !step.accuracy).flatMap(input => inputOf(step.inputs[input.name], input, titles, share)),
     share ? boundsOf(share, step) : generalBounds(step),
     constantsOf(definition, convention, step),
     readOffWords(step, definition),
@@ -97,7 +99,7 @@ function readingWords({ column, read, row: rowOf }: Extract<InputSource, { from:
   return `${named} in ${which} row with use = 1${row === null ? '' : ` (row ${row + 1})`}`
 }
 
-const takesRows = (step: AskedNumber): boolean => Object.values(step.inputs).some(source => source.from === 'share')
+const takesRows = (step: AskedNumber): boolean => !step.accuracy && Object.values(step.inputs).some(source => source.from === 'share')
 
 function boundsOf(share: AskedShare, step: AskedNumber): string {
   if (!takesRows(step)) return ''

@@ -9,9 +9,9 @@ import { appendEntry, courseChain } from '../ledger/appendEntry'
 import { currentDraw, giveShares, insertDraw, type DrawnSupply } from '../shares/draws'
 import type { DrawnItem } from '../shares/loadedShare'
 import { sha256Hex } from '../shares/servedData'
-import { bindingProblems } from './bindingProblems'
-import { checkPrepared, firstRefusal } from './checkLab'
+import { firstRefusal } from './checkShare'
 import { prepareLab, type PreparedLab } from './prepareLab'
+import { proveLab } from './proof/proofRun'
 import { resolveDates, type ResolvedDates } from './resolveDates'
 import { writeSteps } from './writeRevision'
 
@@ -25,9 +25,9 @@ export interface PostedLab {
 }
 
 /**
- * Gives a lab to sections: checks every share, freezes the revision, draws, and writes the dates as instants of the term's zone.
+ * Gives a lab to sections: proves every share, freezes the revision, draws, and writes the dates as instants of the term's zone.
  * A later section joins the draw that is there; nobody who has a share is moved.
- * @throws {DomainError} `band_too_wide` or `share_degenerate` with the share that causes it, `binding_invalid`, `dates_invalid`, `changed_meanwhile`, `already_exists`
+ * @throws {DomainError} `proof_open` while a finding of the proof run is neither settled nor owned, `band_too_wide` or `share_degenerate` with the share that causes it, `binding_invalid`, `dates_invalid`, `changed_meanwhile`, `already_exists`
  */
 export async function postLab({ read, write }: Stores, observations: Observations, input: Asked & PostLab, now: number): Promise<PostedLab> {
   // Judged outside the unit of work. A repeated request finds its stored answer before what was refused here matters.
@@ -67,8 +67,11 @@ async function prepareFor(read: Read, observations: Observations, input: PostLab
   if (lab.lab.state === 'withdrawn' || lab.lab.state === 'archived') return refuse('lab_withdrawn')
   const hasDraw = await read.selectFrom('draw').select('id').where('lab_id', '=', input.labId).executeTakeFirst() !== undefined
   if (hasDraw) return { lab, dates, hasDraw, supply: { conventionRevisionId: lab.conventionRevisionId, items: [] } }
-  const refused = bindingProblems(lab).length > 0 ? firstRefusal(lab, []) : firstRefusal(lab, await checkPrepared(lab))
+  const { shares, reds } = await proveLab(read, lab)
+  const refused = firstRefusal(lab, shares)
   if (refused) throw refused
+  const open = reds.filter(red => red.owned === null)
+  if (open[0]) return refuse('proof_open', { count: open.length, first: open[0].text })
   const items = lab.items.map((item, no) => drawnItem(lab, item, no))
   return { lab, dates, hasDraw, supply: { conventionRevisionId: lab.conventionRevisionId, items } }
 }

@@ -4,7 +4,7 @@ import type { NumberStep } from '../../../shared/schemas/steps'
 import { defaultConvention } from '../../../shared/thermo/conventions'
 import { ensureConvention } from '../../../server/domain/labs/conventions'
 import { createLab } from '../../../server/domain/labs/createLab'
-import { checkLab } from '../../../server/domain/labs/checkLab'
+import { proofRun } from '../../../server/domain/labs/proof/proofRun'
 import { describeLab } from '../../../server/domain/labs/describeLab'
 import { listLabs } from '../../../server/domain/labs/listLabs'
 import { postLab } from '../../../server/domain/labs/postLab'
@@ -257,7 +257,7 @@ describe('what cannot be posted', () => {
   it('refuses a band that is wider than half the way to a slip, and names share and step', async () => {
     const lab = await make(body(layers(), [step({ granted: { absolute: 8 } })]))
     await expect(post(lab.id, 1)).rejects.toMatchObject({ code: 'band_too_wide', facts: { share: 1, step: 'Lapse rate of the layer', reason: expect.stringContaining('half the way') } })
-    const told = await checkLab(stores.read, observations, lab.id)
+    const told = await proofRun(stores.read, observations, lab.id)
     expect(told.isReady).toBe(false)
     expect(told.shares).toHaveLength(9)
     expect(told.shares[0]!.steps[0]).toMatchObject({ ok: false, code: 'band_too_wide' })
@@ -270,7 +270,7 @@ describe('what cannot be posted', () => {
     const heat = step({ key: 'heat', title: 'Heat', quantity: 'isobaric-heat', unit: 'kJ/kg', granted: { absolute: 0.02 }, inputs: {
       temperatureStart: { from: 'share', column: 'air-temperature', read: 'lowest' }, temperatureEnd: { from: 'share', column: 'air-temperature', read: 'highest' } } })
     const lab = await make(body([...layers(), { versionId: flat, leg: 'up' as const, lowM: 0, highM: 400 }], [heat]))
-    const told = await checkLab(stores.read, observations, lab.id)
+    const told = await proofRun(stores.read, observations, lab.id)
     const refused = told.shares.filter(share => share.steps.some(entry => !entry.ok))
     expect(refused.map(share => share.title)).toEqual(['Flat, up, 0–400 m'])
     expect(refused[0]!.steps[0]!.reason).toContain('sign')

@@ -2,7 +2,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { labBody, type LabBody } from '../../../shared/schemas/lab'
 import { defaultConvention } from '../../../shared/thermo/conventions'
 import { bindingProblems } from '../../../server/domain/labs/bindingProblems'
-import { checkLab } from '../../../server/domain/labs/checkLab'
+import { proofRun } from '../../../server/domain/labs/proof/proofRun'
 import { ensureConvention } from '../../../server/domain/labs/conventions'
 import { createLab } from '../../../server/domain/labs/createLab'
 import { postLab } from '../../../server/domain/labs/postLab'
@@ -43,7 +43,7 @@ beforeAll(async () => {
   department = await smallDepartment(stores)
   const { id } = await stores.write(trx => ensureConvention(trx, defaultConvention, now))
   await stores.write(trx => trx.updateTable('course').set({ convention_revision_id: id }).where('id', '=', department.courseId).execute())
-  flight = await smallFlight(stores, stores.dataDir, { ownerCourseId: department.courseId, title: 'Morning', rows: climb(400, 10, 6.5), actorId: department.asked.actorId }, now)
+  flight = await smallFlight(stores, stores.dataDir, { ownerCourseId: department.courseId, title: 'Morning', rows: climb(400, 10, 6.5, 12.3), actorId: department.asked.actorId }, now)
   observations = openObservations(stores.dataDir)
   reference = await referenceIn(stores.write)
 })
@@ -57,8 +57,9 @@ describe('a lab of every kind of step', () => {
   it('is bound, checked on its share, and posted', async () => {
     const made = await createLab(stores, { ...department.asked, courseId: department.courseId, body: body() }, now)
     labId = made.id
-    const checked = await checkLab(stores.read, observations, labId)
+    const checked = await proofRun(stores.read, observations, labId)
     expect(checked.problems).toEqual([])
+    expect(checked.reds.map(red => red.text)).toEqual([])
     expect(checked.shares[0]?.steps.filter(step => !step.ok).map(step => `${step.key}: ${step.reason}`)).toEqual([])
     expect(checked.shares[0]?.steps.map(step => step.key)).toEqual(['line-slope', 'line-intercept', 'line-error', 'theta-1-a', 'theta-2-a', 'theta-3-a', 'at', 'own', 'theta-own', 'why'])
     await postLab(stores, observations, { ...department.asked, labId, seenVersion: 1, seed: Buffer.alloc(16, 3), posting: { sections: [{ sectionId: department.sectionA, opensLocal: '2026-10-12T08:00', dueLocal: '2026-10-23T17:00' }], attempts: 3, keep: 'best', feedback: 'after_release' } }, now)
@@ -119,7 +120,7 @@ describe('a lab of every kind of step', () => {
   ])('names %s', async (_what, step, path) => {
     const made = await createLab(stores, { ...department.asked, courseId: department.courseId, body: { ...body([step]), supply: [{ versionId: flight, leg: 'up', lowM: 0, highM: 100 }] } }, now)
     const lab = await prepareLab(stores.read, observations, made.id)
-    if (path === null) expect((await checkLab(stores.read, observations, made.id)).shares[0]?.steps.some(each => each.code === 'share_degenerate')).toBe(true)
+    if (path === null) expect((await proofRun(stores.read, observations, made.id)).shares[0]?.steps.some(each => each.code === 'share_degenerate')).toBe(true)
     else expect(bindingProblems(lab).map(problem => problem.path)).toContain(`steps.0.${path}`)
   })
 })

@@ -1,4 +1,4 @@
-import { DomainError, type FieldProblem } from '#shared/errors'
+import { DomainError } from '#shared/errors'
 import { judgeStep } from '#shared/marking/judge'
 import { checkBand } from '#shared/marking/proof'
 import type { Band, Judgement, ReadAnswer } from '#shared/marking/types'
@@ -7,13 +7,11 @@ import type { SupplyItem } from '#shared/schemas/lab'
 import type { HeightBar } from '#shared/schemas/marks'
 import { findQuantity } from '#shared/thermo/registry'
 import { formatUnit } from '#shared/units/formatQuantity'
-import type { Read } from '../../db/writer'
-import type { Observations } from '../../observations/chunks'
 import { legNames } from '../shares/legs'
 import { heightBarOf, shownScale } from '../marking/heightBar'
 import { askedQuestion } from '../shares/questionFor'
 import { bindingProblems } from './bindingProblems'
-import { prepareLab, type PreparedLab } from './prepareLab'
+import type { PreparedLab } from './prepareLab'
 import { renderInline } from './renderLabText'
 
 export interface CheckedStep {
@@ -31,27 +29,8 @@ export interface CheckedStep {
   trace: { text: string, formulaHtml: string, filledHtml: string }[]
 }
 export interface CheckedShare { no: number, title: string, versionId: string, leg: SupplyItem['leg'], lowM: number, highM: number, used: number, rows: number, steps: CheckedStep[] }
-export interface CheckedLab { version: number, isReady: boolean, problems: FieldProblem[], shares: CheckedShare[] }
 
 const nothing: ReadAnswer = { typed: '', reading: 'empty', valueSi: null, decimal: null, unitUcum: null, digits: null, halfUnitSi: null, message: '' }
-
-/** Works every share of a lab as it stands: nothing is written. */
-export async function checkLab(read: Read, observations: Observations, labId: string): Promise<CheckedLab> {
-  const lab = await prepareLab(read, observations, labId)
-  const problems = bindingProblems(lab)
-  const shares = problems.length > 0 ? [] : await checkPrepared(lab)
-  return { version: lab.lab.version, isReady: problems.length === 0 && shares.every(share => share.steps.every(step => step.ok)), problems, shares }
-}
-
-/** Every share of a lab that is bound, one after the other; other requests get their turn between two. */
-export async function checkPrepared(lab: PreparedLab): Promise<CheckedShare[]> {
-  const shares: CheckedShare[] = []
-  for (const item of lab.items) {
-    shares.push(checkShare(lab, item))
-    await new Promise(setImmediate)
-  }
-  return shares
-}
 
 /** The first thing that stops a posting, as a refusal that names share and step; null where nothing does. */
 export function firstRefusal(lab: PreparedLab, shares: readonly CheckedShare[]): DomainError | null {
