@@ -3,10 +3,12 @@ import type { Read, Stores } from '../../../db/writer'
 import { doOnce, type Asked } from '../../asked'
 import { newId } from '../../ids'
 import { actorName } from '../../disputes/rulers'
-import type { Red } from './proofRun'
+
+/** Who answers for a finding, and why. */
+export interface Owned { by: string, at: number, reason: string }
 
 /** Which findings of a lab somebody answers for, by their key. */
-export async function readOwned(read: Read, labId: string): Promise<Map<string, NonNullable<Red['owned']>>> {
+export async function readOwned(read: Read, labId: string): Promise<Map<string, Owned>> {
   const rows = await read.selectFrom('owned_red').select(['red_key', 'reason', 'by_actor_id', 'at']).where('lab_id', '=', labId).execute()
   return new Map(await Promise.all(rows.map(async row => [row.red_key, { by: await actorName(read, row.by_actor_id), at: row.at, reason: row.reason }] as const)))
 }

@@ -8,7 +8,7 @@ import { askedQuestion } from '../../shares/questionFor'
 import { bindingProblems } from '../bindingProblems'
 import { checkShare, type CheckedShare } from '../checkShare'
 import { prepareLab, type PreparedLab } from '../prepareLab'
-import { readOwned } from './ownRed'
+import { readOwned, type Owned } from './ownRed'
 import { players, playShare, type PlayedShare, type PlayerKey } from './playedStudents'
 
 /** Something that an author must settle or own by name before the lab is posted: a correct method that loses, a slip that wins, a lucky guess, a share unlike the others. */
@@ -19,7 +19,7 @@ export interface Red {
   shareNo: number
   stepKey: string
   text: string
-  owned: { by: string, at: number, reason: string } | null
+  owned: Owned | null
 }
 
 export interface ProvedShare extends CheckedShare { proofs: Record<string, ProvedStep>, played: PlayedShare[] }
