@@ -37,6 +37,17 @@ export const vaporPressureFrom = (mixingRatio: number, pressure: number, epsilon
 export const specificHumidityFrom = (mixingRatio: number): number => mixingRatio / (1 + mixingRatio)
 
 /**
+ * Mixing ratio of air with a specific humidity.
+ *
+ *   w = q / (1 − q)
+ *
+ * Source: AMS Glossary of Meteorology, "specific humidity", solved for w. Valid: q < 1.
+ *
+ * @example mixingRatioOfSpecificHumidity(0.0147783) // 0.015 kg kg⁻¹
+ */
+export const mixingRatioOfSpecificHumidity = (specificHumidity: number): number => specificHumidity / (1 - specificHumidity)
+
+/**
  * Virtual temperature: that of dry air of the same density at the same pressure.
  *
  *   Tv = T (1 + w/ε) / (1 + w)

@@ -30,6 +30,42 @@ export function lagOneCorrelation(inputs: Inputs): number | null {
 }
 
 /**
+ * Lag-1 correlation of what the rows leave about a straight line of any rate, in the order of the rows.
+ *
+ *   r₁ = Σᵢ (eᵢ − ē)(eᵢ₊₁ − ē) / Σᵢ (eᵢ − ē)²,   e = T + Γ z     the line's height above its origin falls out with the mean
+ *
+ * Source: Wilks (2011), Statistical Methods in the Atmospheric Sciences, 3rd ed., Eq. 3.32 (from memory). Null where the rows lie on one such line.
+ *
+ * @example lagOneCorrelationAbout({ height: [0, 1, 2, 3], temperature: [280, 281, 280, 281] }, 0) // −0.75
+ */
+export function lagOneCorrelationAbout(inputs: Inputs, rate: number): number | null {
+  const z = heightsOf(inputs), T = temperaturesOf(inputs), bottom = z[0] ?? 0, first = T[0] ?? 0
+  const rest = T.map((one, at) => (one - first) + rate * ((z[at] ?? 0) - bottom))
+  const mean = rest.reduce((sum, one) => sum + one, 0) / rest.length
+  let squares = 0, products = 0, before = 0
+  rest.forEach((one, at) => {
+    const residual = one - mean
+    squares += residual * residual
+    if (at > 0) products += residual * before
+    before = residual
+  })
+  return Math.sqrt(squares / rest.length) > noScatter ? products / squares : null
+}
+
+/**
+ * How many independent rows the mean of `count` neighbors is worth: one at least, and never more than there are.
+ *
+ *   n′ = n (1 − r₁)/(1 + r₁)     n where r₁ is negative, 1 where it comes out below 1
+ *
+ * Source: Wilks (2011), section 5.2.4 (from memory).
+ * @example effectiveRows(10, 0.5) // 3.333
+ */
+export function effectiveRows(count: number, correlation: number): number {
+  if (correlation <= 0) return count
+  return Math.max(1, count * (1 - correlation) / (1 + correlation))
+}
+
+/**
  * By what the standard error of a slope grows where residuals follow a first-order autoregression.
  *
  *   √[(1 + r₁)/(1 − r₁)]     1 where r₁ is negative: an error is never made smaller by it

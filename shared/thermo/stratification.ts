@@ -11,6 +11,10 @@ export const thetaLayerInputs: readonly InputDefinition[] = [
   { name: 'depth', label: 'depth of the layer', symbol: 'Δz', unit: 'm', shownUnit: 'm', kind: 'difference', shape: 'number', range: [0.1, 50_000], trivialWithin: 0 },
 ]
 
+/** Of moist air: what stands in the place of T and of Γ where the gradient of the vapor is to count. */
+export const virtualTemperatureInput = (label: string): InputDefinition => ({ name: 'virtualTemperature', label, symbol: 'T_v', unit: 'K', shownUnit: 'Cel', kind: 'temperature', shape: 'number', range: [150, 400] })
+export const virtualRateInput: InputDefinition = { name: 'virtualLapseRate', label: 'lapse rate of the virtual temperature', symbol: 'Γ_v', unit: 'K/m', shownUnit: 'K/km', kind: 'difference', shape: 'number', range: [-1, 1] }
+
 /**
  * Brunt–Väisälä frequency squared of a layer, with its sign.
  *

@@ -20,6 +20,7 @@ import { standardAtmosphereTemperatureDefinition } from '../quantities/standardA
 import { standardAtmosphereTemperatureAtGeometricHeightDefinition } from '../quantities/standardAtmosphereTemperatureAtGeometricHeight'
 import { stationPressureDefinition } from '../quantities/stationPressure'
 import { stationPressureIsothermalDefinition } from '../quantities/stationPressureIsothermal'
+import { geopotentialDefinition } from '../quantities/geopotential'
 
 export const hydrostatics: QuantityGroup = {
   key: 'hydrostatics',
@@ -40,6 +41,7 @@ export const hydrostatics: QuantityGroup = {
     autoconvectiveLapseRateDefinition,
     geopotentialHeightDefinition,
     geometricHeightDefinition,
+    geopotentialDefinition,
     standardAtmosphereTemperatureDefinition,
     standardAtmospherePressureDefinition,
     standardAtmosphereDensityDefinition,

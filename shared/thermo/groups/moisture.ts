@@ -35,6 +35,8 @@ import { vaporPressureFromScreenPsychrometerDefinition } from '../quantities/vap
 import { virtualTemperatureDefinition } from '../quantities/virtualTemperature'
 import { wetBulbTemperatureDefinition } from '../quantities/wetBulbTemperature'
 import { wetBulbTemperatureFromRelativeHumidityDefinition } from '../quantities/wetBulbTemperatureFromRelativeHumidity'
+import { latentHeatOfFusionDefinition } from '../quantities/latentHeatOfFusion'
+import { mixingRatioFromSpecificHumidityDefinition } from '../quantities/mixingRatioFromSpecificHumidity'
 
 export const moisture: QuantityGroup = {
   key: 'moisture',
@@ -44,11 +46,13 @@ export const moisture: QuantityGroup = {
     saturationVaporPressureOverIceDefinition,
     latentHeatOfVaporizationDefinition,
     latentHeatOfSublimationDefinition,
+    latentHeatOfFusionDefinition,
     vaporPressureDefinition,
     vaporPressureFromRelativeHumidityDefinition,
     vaporPressureFromMixingRatioDefinition,
     mixingRatioDefinition,
     mixingRatioFromVaporPressureDefinition,
+    mixingRatioFromSpecificHumidityDefinition,
     saturationMixingRatioDefinition,
     saturationMixingRatioOverIceDefinition,
     specificHumidityDefinition,

@@ -27,6 +27,17 @@ import { vectorWindDifferenceDefinition } from '../quantities/vectorWindDifferen
 import { layerStabilityDefinition } from '../quantities/layerStability'
 import { equivalentPotentialTemperatureGradientDefinition } from '../quantities/equivalentPotentialTemperatureGradient'
 import { potentialStabilityDefinition } from '../quantities/potentialStability'
+import { lapseRateEndPointsLagOneCorrelationDefinition } from '../quantities/lapseRateEndPointsLagOneCorrelation'
+import { lapseRateEndPointsInflatedStandardErrorDefinition } from '../quantities/lapseRateEndPointsInflatedStandardError'
+import { lapseRateTheilSenLagOneCorrelationDefinition } from '../quantities/lapseRateTheilSenLagOneCorrelation'
+import { lapseRateTheilSenInflatedStandardErrorDefinition } from '../quantities/lapseRateTheilSenInflatedStandardError'
+import { lapseRateBinnedLeastSquaresDefinition } from '../quantities/lapseRateBinnedLeastSquares'
+import { virtualTemperatureLapseRateEndPointsDefinition } from '../quantities/virtualTemperatureLapseRateEndPoints'
+import { virtualTemperatureLapseRateLeastSquaresDefinition } from '../quantities/virtualTemperatureLapseRateLeastSquares'
+import { virtualTemperatureLapseRateTheilSenDefinition } from '../quantities/virtualTemperatureLapseRateTheilSen'
+import { staticStabilityByVirtualTemperatureDefinition } from '../quantities/staticStabilityByVirtualTemperature'
+import { virtualPotentialTemperatureGradientDefinition } from '../quantities/virtualPotentialTemperatureGradient'
+import { bruntVaisalaFrequencySquaredFromVirtualLapseRateDefinition } from '../quantities/bruntVaisalaFrequencySquaredFromVirtualLapseRate'
 
 export const profiles: QuantityGroup = {
   key: 'profiles',
@@ -34,20 +45,31 @@ export const profiles: QuantityGroup = {
   quantities: [
     lapseRateEndPointsDefinition,
     lapseRateEndPointsStandardErrorDefinition,
+    lapseRateEndPointsLagOneCorrelationDefinition,
+    lapseRateEndPointsInflatedStandardErrorDefinition,
     lapseRateLeastSquaresDefinition,
     lapseRateStandardErrorDefinition,
     fittedTemperatureAtZeroHeightDefinition,
     lapseRateTheilSenDefinition,
     lapseRateTheilSenStandardErrorDefinition,
+    lapseRateTheilSenLagOneCorrelationDefinition,
+    lapseRateTheilSenInflatedStandardErrorDefinition,
     lapseRateLagOneCorrelationDefinition,
     lapseRateInflatedStandardErrorDefinition,
+    lapseRateBinnedLeastSquaresDefinition,
+    virtualTemperatureLapseRateEndPointsDefinition,
+    virtualTemperatureLapseRateLeastSquaresDefinition,
+    virtualTemperatureLapseRateTheilSenDefinition,
     staticStabilityDefinition,
+    staticStabilityByVirtualTemperatureDefinition,
     layerStabilityDefinition,
     potentialStabilityDefinition,
     equivalentPotentialTemperatureGradientDefinition,
     potentialTemperatureGradientDefinition,
+    virtualPotentialTemperatureGradientDefinition,
     bruntVaisalaFrequencySquaredDefinition,
     bruntVaisalaFrequencySquaredFromLapseRateDefinition,
+    bruntVaisalaFrequencySquaredFromVirtualLapseRateDefinition,
     bruntVaisalaFrequencyDefinition,
     gradientRichardsonNumberDefinition,
     bulkRichardsonNumberDefinition,
