@@ -232,7 +232,7 @@ export const overWaterForms: readonly SaturationForm[] = [
 export const overIceForms: readonly SaturationForm[] = [
   {
     key: 'murphy-koop', label: 'Murphy & Koop (2005)', source: { ...murphyKoop, text: 'Murphy & Koop (2005), Q. J. R. Meteorol. Soc. 131, 1539–1565, Eq. 7' },
-    validity: '110 K to 0.01 °C', knownError: '0.05 %', holds: [110, 273.16],
+    validity: '110 K to 0.01 °C', knownError: '0.07 % above −80 °C', holds: [110, 273.16],
     ...long(ice, '\\ln e_i = 9.550426 - \\frac{5723.265}{T} + 3.53068 \\ln T - 0.00728332\\,T', murphyKoopOverIce),
   },
   {

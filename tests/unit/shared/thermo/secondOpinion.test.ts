@@ -6,6 +6,7 @@ import { defaultConvention } from '#shared/thermo/conventions/index'
 import type { Inputs } from '#shared/thermo/definition'
 import { evaluateQuantity } from '#shared/thermo/evaluate'
 import { findQuantity } from '#shared/thermo/registry'
+import { stullWetBulb } from '#shared/thermo/wetBulb'
 import { fraction, randomSource, seedFromNumber } from '#shared/numerics/random'
 
 type Library = Readonly<Record<string, number | ((...numbers: number[]) => number)>>
@@ -64,6 +65,14 @@ describe.skipIf(!second)('PsychroLib agrees', () => {
       const its = by('GetTWetBulbFromRelHum', t, RH, p)
       return its < 0.1 ? 0 : value('wet-bulb-temperature-from-relative-humidity', { pressure: p, temperature: t + 273.15, relativeHumidity: RH }) - 273.15 - its
     })).toBeLessThan(0.03)
+  })
+  it('on the error of Stull’s fit: −1.2 to +1.3 K above 0 °C, 0.4 K in the mean', () => {
+    const errors: number[] = []
+    for (let t = 0; t <= 50; t += 2.5) for (let RH = 5; RH <= 99; RH += 2) errors.push(stullWetBulb(t + 273.15, RH / 100) - 273.15 - by('GetTWetBulbFromRelHum', t, RH / 100, 101_325))
+    expect(Math.min(...errors)).toBeGreaterThan(-1.2)
+    expect(Math.max(...errors)).toBeLessThan(1.35)
+    expect(errors.reduce((sum, one) => sum + Math.abs(one), 0) / errors.length).toBeLessThan(0.4)
+    expect(findQuantity('wet-bulb-temperature-from-relative-humidity')?.variants.find(one => one.key === 'stull')?.knownError).toContain('−1.2 to +1.3 K')
   })
   it('on enthalpy and density of moist air, to 0.3 %', () => {
     const w = ({ t, RH, p }: { t: number, RH: number, p: number }) => by('GetHumRatioFromRelHum', t, RH, p)
