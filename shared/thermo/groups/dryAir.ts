@@ -69,6 +69,7 @@ import { temperatureChangeFromHeatAndPressureChangeDefinition } from '../quantit
 import { temperatureChangeFromHeatAndWorkDefinition } from '../quantities/temperatureChangeFromHeatAndWork'
 import { temperatureFromPotentialTemperatureDefinition } from '../quantities/temperatureFromPotentialTemperature'
 import { workFromHeatAndInternalEnergyDefinition } from '../quantities/workFromHeatAndInternalEnergy'
+import { specificVolumeFromHeatAndEnthalpyDefinition } from '../quantities/specificVolumeFromHeatAndEnthalpy'
 
 export const dryAir: QuantityGroup = {
   key: 'dry-air',
@@ -133,6 +134,7 @@ export const dryAir: QuantityGroup = {
     heatFromEnthalpyAndPressureChangeDefinition,
     temperatureChangeFromHeatAndPressureChangeDefinition,
     pressureChangeFromHeatAndEnthalpyDefinition,
+    specificVolumeFromHeatAndEnthalpyDefinition,
     heatFromEnthalpyAndGeopotentialDefinition,
     temperatureChangeFromHeatAndHeightChangeDefinition,
     heightChangeFromHeatAndEnthalpyDefinition,
