@@ -116,15 +116,15 @@ const high = halves[1] === 0x3FF00000 ? 1 : 0
 /** The logarithm's leading part and what is left: in an array, because a number that a module keeps in a variable is allocated anew at each change. */
 const result = new Float64Array(2)
 
-/** Puts log x in `result`, with about 66 good bits; x positive and finite. */
-function logInto(x: number): void {
+/** Puts log x in `result`, with about 66 good bits; x, positive and finite, stands in `words`, because a number that is handed to a function too large to be put into its caller is allocated too. */
+function logIntoResult(): void {
   let e = 0
-  let positive = x
+  let positive = words[0] ?? 0
   if (positive < 2.2250738585072014e-308) {
     positive *= 18014398509481984 // 2⁵⁴
+    words[0] = positive
     e = -54
   }
-  words[0] = positive
   const power = ((halves[high] ?? 0) >>> 20) - 1023
   e = (e + power) | 0
   // exact: a power of two
@@ -133,8 +133,9 @@ function logInto(x: number): void {
     m *= 0.5
     e = (e + 1) | 0
   }
-  const k = Math.round(m * steps) | 0
-  const c = k / steps
+  // the nearest 128th; what is added to is positive and exact, so that cutting off rounds
+  const k = (m * steps + 0.5) | 0
+  const c = k * (1 / steps)
   const d = m - c
   const r = d / c
   const rTop = leading27(r)
@@ -165,7 +166,8 @@ function leading27(value: number): number {
 export function log(x: number): number {
   if (!(x > 0)) return x === 0 ? -Infinity : NaN
   if (x === Infinity) return x
-  logInto(x)
+  words[0] = x
+  logIntoResult()
   return result[0] ?? 0
 }
 
@@ -173,14 +175,32 @@ export function log(x: number): number {
 export function log10(x: number): number {
   if (!(x > 0)) return x === 0 ? -Infinity : NaN
   if (x === Infinity) return x
-  logInto(x)
+  words[0] = x
+  logIntoResult()
   const hi = result[0] ?? 0, lo = result[1] ?? 0
   const product = hi * perLn10.hi
   return product + (productError(hi, perLn10.hi, product) + (hi * perLn10.lo + lo * perLn10.hi))
 }
 
-/** x to the y, with the special cases of the language's own. */
+/** x to the y, with the special cases of the language's own. Short, so that engines put it into the formula that calls it. */
 export function pow(x: number, y: number): number {
+  if (!(x > 0 && x < Infinity && y > -Infinity && y < Infinity) || y === 0 || y === 1 || x === 1) return specialPower(x, y)
+  return powerOf(x, y)
+}
+
+/** x to the y for a positive finite x and a finite y. */
+function powerOf(x: number, y: number): number {
+  words[0] = x
+  logIntoResult()
+  const hi = result[0] ?? 0
+  const exponent = y * hi
+  if (exponent > 709.79) return Infinity
+  if (exponent < -745.2) return 0
+  return expOf(exponent, productError(y, hi, exponent) + y * (result[1] ?? 0))
+}
+
+/** Powers of what is not positive and finite, and those that need no computing. */
+function specialPower(x: number, y: number): number {
   if (y === 0) return 1
   if (x !== x || y !== y) return NaN
   if (y === Infinity || y === -Infinity) {
@@ -198,10 +218,5 @@ export function pow(x: number, y: number): number {
   if (isNegative && !isWhole) return NaN
   if (size === 1) return sign
   if (y === 1) return x
-  logInto(size)
-  const hi = result[0] ?? 0
-  const exponent = y * hi
-  if (exponent > 709.79) return sign * Infinity
-  if (exponent < -745.2) return sign * 0
-  return sign * expOf(exponent, productError(y, hi, exponent) + y * (result[1] ?? 0))
+  return sign * powerOf(size, y)
 }

@@ -1,7 +1,8 @@
 /* The ascents of shared/thermo/parcelAscent.ts and the equivalent potential temperature of equivalentPotential.ts in plain C: the same steps in the
-   same order, with the functions of the C library. Reads what ascent.ts writes; prints results and the CPU time that they took, one line a command.
+   same order. With -DSAME exp, log and pow are those of the product, in C (elementary.h); without it those of the C library, which are quicker and differ
+   between libraries in their last bits. Reads what ascents.ts writes; prints results and the CPU time that they took.
 
-     gcc -O2 -o ascent ascent.c -lm
+     gcc -O2 -ffp-contract=off -DSAME -o ascent ascent.c -lm
      ascent FILE REPEATS
 
    FILE: cp R Rv g kappa, then the number of rows, then p T Td of each row in SI. */
@@ -9,6 +10,11 @@
 #include <stdio.h>
 #include <stdlib.h>
 #include <time.h>
+#ifdef SAME
+#include "elementary.h"
+#else
+static void make_tables(void) {}
+#endif
 
 #define MOST 4096
 static const double longest_step = 0.05, neutral = 1e-9, p0 = 100000.0;
@@ -222,6 +228,7 @@ static void three_ascents(double moved) {
 
 int main(int argc, char **argv) {
   if (argc != 3) return 2;
+  make_tables();
   FILE *file = fopen(argv[1], "r");
   long repeats = atol(argv[2]);
   if (!file || fscanf(file, "%lf %lf %lf %lf %lf %d", &cp, &R, &Rv, &g, &kappa, &count) != 6 || count > MOST / 2) return 2;

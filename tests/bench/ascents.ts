@@ -13,7 +13,6 @@ import { moistAir, type MoistAir } from '#shared/thermo/moistAir'
 import { mixedLayerParcel, mostUnstableParcel, surfaceParcel } from '#shared/thermo/parcel'
 import { lift, type Ascent } from '#shared/thermo/parcelAscent'
 import { makeSounding, roomForSounding, type Sounding } from '#shared/thermo/sounding'
-import { saturationPressureFunction } from '#shared/thermo/saturationFunction'
 
 const { constants } = defaultConvention, formulae = formulaeOf(defaultConvention)
 const source = fileURLToPath(new URL('./ascent.c', import.meta.url))
@@ -32,8 +31,8 @@ export function afternoon(levels: number): Columns {
   return { pressure, temperature, dewpoint }
 }
 
-/** Air whose saturation vapor pressure is looked up in the convention at each use: right, and slow. What a bench must see. */
-const lookedUpEachTime = (air: MoistAir): MoistAir => ({ ...air, es: temperature => saturationPressureFunction(constants, formulae)(temperature) })
+/** Air that is made of the convention anew at each use of its saturation vapor pressure: right, and slow. What a bench must see. */
+const lookedUpEachTime = (air: MoistAir): MoistAir => ({ ...air, es: temperature => moistAir(constants, formulae).es(temperature) })
 
 export class Ascents {
   private readonly air: MoistAir
@@ -83,13 +82,17 @@ export function seconds(start: NodeJS.CpuUsage): number {
 
 export interface InC { ascents: number, thetas: number, thetaSum: number, found: number[] }
 
+/** Which exp, log and pow the C program has: those of the product in C (elementary.h), step by step, or those of the C library. */
+export type FunctionsInC = 'same' | 'library'
+
 /** The C program, compiled with -O2, on the same sounding. */
 export class AscentsInC {
   private readonly dir = mkdtempSync(join(tmpdir(), 'tetherhouse-ascent-'))
   private readonly program = join(this.dir, 'ascent')
   private readonly file = join(this.dir, 'sounding.txt')
-  constructor({ pressure, temperature, dewpoint }: Columns) {
-    execFileSync('gcc', ['-O2', '-o', this.program, source, '-lm'])
+  constructor({ pressure, temperature, dewpoint }: Columns, functions: FunctionsInC) {
+    // products and sums are not contracted: the same bits are asked of both
+    execFileSync('gcc', ['-O2', '-ffp-contract=off', ...functions === 'same' ? ['-DSAME'] : [], '-o', this.program, source, '-lm'])
     const { cp, R, Rv, g } = constants
     writeFileSync(this.file, [`${cp} ${R} ${Rv} ${g} ${moistAir(constants, formulae).kappa}`, pressure.length, ...pressure.map((p, at) => `${p} ${temperature[at]} ${dewpoint[at]}`)].join('\n'))
   }
@@ -103,12 +106,12 @@ export class AscentsInC {
   }
 }
 
-/** @throws {Error} where the two do not agree to nine digits */
-export function assertSame(ours: readonly number[], theirs: readonly number[]): void {
+/** @throws {Error} where the two do not agree: to the bit with the same functions, to nine digits with those of a library */
+export function assertSame(ours: readonly number[], theirs: readonly number[], functions: FunctionsInC): void {
   if (ours.length !== theirs.length) throw new Error(`${ours.length} results here, ${theirs.length} in C`)
   ours.forEach((value, at) => {
     const other = theirs[at] ?? NaN
-    if (!(Math.abs(value - other) <= 1e-9 * Math.abs(other))) throw new Error(`Result ${at} is ${value} here and ${other} in C.`)
+    if (functions === 'same' ? !Object.is(value, other) : !(Math.abs(value - other) <= 1e-9 * Math.abs(other))) throw new Error(`Result ${at} is ${value} here and ${other} in C.`)
   })
 }
 

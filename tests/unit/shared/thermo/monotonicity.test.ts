@@ -48,7 +48,7 @@ const cases: readonly Case[] = [
   ['specific-heat-of-moist-air', { mixingRatio: w }, { mixingRatio: 1 }],
   ['moist-unsaturated-lapse-rate', { mixingRatio: w }, { mixingRatio: -1 }],
   ['saturated-adiabatic-lapse-rate', { pressure: p, temperature: T }, { pressure: 1, temperature: -1 }],
-  ['reversible-saturated-lapse-rate', { pressure: p, temperature: T, liquidWater: between(0.0005, 0.006) }, { pressure: 1, temperature: -1, liquidWater: -1 }],
+  ['reversible-saturated-lapse-rate', { pressure: p, temperature: T, liquidWater: between(0.0005, 0.006) }, { pressure: 1, temperature: -1 }],
   ['saturated-ascent-temperature', { pressureStart: between(90_000, 102_000), temperature: T, pressureEnd: between(40_000, 80_000) }, { pressureStart: -1, temperature: 1, pressureEnd: 1 }],
   ['saturation-equivalent-potential-temperature', { pressure: p, temperature: T }, { pressure: -1, temperature: 1 }],
   ['brunt-vaisala-frequency-squared', { potentialTemperatureBottom: between(290, 300), potentialTemperatureTop: between(300.5, 312), depth: between(50, 2000) }, { potentialTemperatureBottom: -1, potentialTemperatureTop: 1, depth: -1 }],
