@@ -80,7 +80,7 @@ export function murphyKoopSublimation(temperature: number): number {
  *
  *   L = 2834.1 − 0.29 t − 0.004 t²     t in °C, kJ kg⁻¹
  *
- * Source: Rogers & Yau (1989), A Short Course in Cloud Physics, Table 2.1, as a fit (from memory). Valid: −40 to 0 °C.
+ * Source: Rogers & Yau (1989), A Short Course in Cloud Physics, Table 2.1, as a fit (read in transcriptions). Valid: −40 to 0 °C.
  *
  * @example quadraticSublimation(253.15) // 2838300 J kg⁻¹
  */
@@ -135,14 +135,14 @@ export const sublimationForms: readonly LatentHeatForm[] = [
     filled: (_temperature, _constants, value) => `L_s = ${shown(value)}`,
   },
   {
-    key: 'murphy-koop', label: 'Murphy & Koop (2005)', source: { text: 'Murphy & Koop (2005), Q. J. R. Meteorol. Soc. 131, 1539–1565, Eq. 5', status: 'from memory' },
+    key: 'murphy-koop', label: 'Murphy & Koop (2005)', source: { text: 'Murphy & Koop (2005), Q. J. R. Meteorol. Soc. 131, 1539–1565, Eq. 5; coefficients read in transcriptions', status: 'verified' },
     validity: '30 K to 0.01 °C', knownError: '0.1 %', holds: [30, 273.16], constants: [],
     of: () => murphyKoopSublimation,
     formula: 'L_s = \\frac{46782.5 + 35.8925\\,T - 0.07414\\,T^2 + 541.5 \\exp[-(T/123.75)^2]}{0.018015}',
     filled: (temperature, _constants, value) => `L_s(${texQuantity(temperature, 'K', 6)}) = ${shown(value)}`,
   },
   {
-    key: 'quadratic', label: 'quadratic in the temperature', source: { text: 'Rogers & Yau (1989), A Short Course in Cloud Physics, Table 2.1, as a fit', status: 'from memory' },
+    key: 'quadratic', label: 'quadratic in the temperature', source: { text: 'Rogers & Yau (1989), A Short Course in Cloud Physics, Table 2.1, as a fit; coefficients read in transcriptions', status: 'verified' },
     validity: '−40 to 0 °C', knownError: '0.1 %', holds: [233.15, 273.16], constants: [],
     of: () => quadraticSublimation,
     formula: 'L_s = 2834.1 - 0.29\\,t - 0.004\\,t^2',

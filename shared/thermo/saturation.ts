@@ -183,7 +183,7 @@ export function goffGratchOverIce(temperature: number): number {
 
 const water = 'e_s', ice = 'e_i'
 const murphyKoop: Source = { text: 'Murphy & Koop (2005), Q. J. R. Meteorol. Soc. 131, 1539–1565, Eq. 10', status: 'verified' }
-const goffGratch: Source = { text: 'Goff & Gratch (1946), Trans. ASHVE 52, 95–121; Smithsonian Meteorological Tables (List 1951), Table 94', status: 'from memory' }
+const goffGratch: Source = { text: 'Goff & Gratch (1946), Trans. ASHVE 52, 95–121; Smithsonian Meteorological Tables (List 1951), Table 94; coefficients read in transcriptions', status: 'verified' }
 
 /** The first is the default; where a convention says "next", the order is that of the ranges. */
 export const overWaterForms: readonly SaturationForm[] = [
@@ -218,12 +218,12 @@ export const overWaterForms: readonly SaturationForm[] = [
     ...long(water, '\\log_{10} e_s = -7.90298\\left(\\frac{T_s}{T} - 1\\right) + 5.02808 \\log_{10}\\frac{T_s}{T} - 1.3816\\times 10^{-7}\\left(10^{11.344(1 - T/T_s)} - 1\\right) + 8.1328\\times 10^{-3}\\left(10^{-3.49149(T_s/T - 1)} - 1\\right) + \\log_{10} 1013.246', goffGratchOverWater),
   },
   {
-    key: 'buck', label: 'Buck (1981)', source: { text: 'Buck (1981), J. Appl. Meteor. 20, 1527–1532, Table 2, e_w1', status: 'from memory' },
+    key: 'buck', label: 'Buck (1981)', source: { text: 'Buck (1981), J. Appl. Meteor. 20, 1527–1532, Table 2, e_w1; coefficients read in transcriptions', status: 'verified' },
     validity: '−20 to 50 °C', knownError: '0.14 %', holds: [253.15, 323.15],
     ...magnus({ a: 611.21, b: 17.502, c: 240.97 }, water),
   },
   {
-    key: 'tetens', label: 'Tetens (1930)', source: { text: 'Tetens (1930), Z. Geophys. 6, 297–309, with the coefficients 17.27 and 237.3', status: 'from memory' },
+    key: 'tetens', label: 'Tetens (1930)', source: { text: 'Tetens (1930), Z. Geophys. 6, 297–309, with the coefficients 17.27 and 237.3 of FAO Irrigation and Drainage Paper 56, Eq. 11', status: 'verified' },
     validity: '0 to 40 °C', knownError: '0.13 % within; −0.7 % at −20 °C', holds: [273.15, 313.15],
     ...magnus({ a: 610.78, b: 17.27, c: 237.3 }, water),
   },
@@ -241,12 +241,12 @@ export const overIceForms: readonly SaturationForm[] = [
     ...long(ice, '\\ln\\frac{e_i}{p_t} = \\frac{1}{\\theta}\\left(a_1\\theta^{b_1} + a_2\\theta^{b_2} + a_3\\theta^{b_3}\\right),\\quad \\theta = \\frac{T}{273.16}', sublimationPressure),
   },
   {
-    key: 'wmo', label: 'Magnus form of WMO-No. 8', source: { text: 'WMO-No. 8, Guide to Instruments and Methods of Observation, Annex 4.B', status: 'from memory' },
+    key: 'wmo', label: 'Magnus form of WMO-No. 8', source: { text: 'WMO-No. 8, Guide to Instruments and Methods of Observation, Annex 4.B; coefficients read in transcriptions', status: 'verified' },
     validity: '−65 to 0 °C', knownError: '0.25 %', holds: [208.15, 273.16],
     ...magnus({ a: 611.2, b: 22.46, c: 272.62 }, ice),
   },
   {
-    key: 'goff-gratch', label: 'Goff & Gratch (1946)', source: { ...goffGratch, text: 'Goff & Gratch (1946), Trans. ASHVE 52, 95–121; Smithsonian Meteorological Tables (List 1951), Table 96' },
+    key: 'goff-gratch', label: 'Goff & Gratch (1946)', source: { ...goffGratch, text: 'Goff & Gratch (1946), Trans. ASHVE 52, 95–121; Smithsonian Meteorological Tables (List 1951), Table 96; coefficients read in transcriptions' },
     validity: '−100 to 0 °C', knownError: '0.35 %', holds: [173.15, 273.16],
     ...long(ice, '\\log_{10} e_i = -9.09718\\left(\\frac{T_0}{T} - 1\\right) - 3.56654 \\log_{10}\\frac{T_0}{T} + 0.876793\\left(1 - \\frac{T}{T_0}\\right) + \\log_{10} 6.1071', goffGratchOverIce),
   },

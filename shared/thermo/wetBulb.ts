@@ -49,8 +49,8 @@ export function pseudoadiabaticWetBulb(pressure: number, lcl: LiftingCondensatio
  *
  *   T_w = t atan[0.151977 (RH + 8.313659)^½] + atan(t + RH) − atan(RH − 1.676331) + 0.00391838 RH^1.5 atan(0.023101 RH) − 4.686035     °C, RH in %
  *
- * Source: Stull (2011), J. Appl. Meteor. Climatol. 50, 2267–2269, Eq. 1. Valid: 1013.25 hPa, RH 5–99 %, −20 to 50 °C. Error: −1.2 to +1.3 K there, above 0 °C as measured against another program.
- * The fit leaves out air that is both cold and dry.
+ * Source: Stull (2011), J. Appl. Meteor. Climatol. 50, 2267–2269, Eq. 1. Valid: 1013.25 hPa, RH 5–99 %, −20 to 50 °C. Error: −1.0 to +0.65 K by the paper,
+ * which leaves out air both cold and dry; −1.2 to +1.3 K above 0 °C as measured against another program.
  *
  * @example stullWetBulb(293.15, 0.5) // 286.85 K
  */

@@ -24,7 +24,7 @@ export const mixingRatioFromWetBulbDefinition = moistQuantity({
   unit: '1', shownUnit: 'g/kg', kind: 'ratio',
   inputs: [pressureInput, temperatureInput, wetBulbInput],
   variants: [
-    { key: 'isobaric', label: 'with the heat capacity of the vapor', source: { text: 'ASHRAE Handbook – Fundamentals (2017), SI, ch. 1, Eq. 33', status: 'from memory' }, validity: 'liquid water on the bulb', knownError: '0.5 %', value: hand => checked(hand, mixingRatioFromWetBulb(hand.given('temperature'), hand.given('wetBulb'), hand.given('pressure'), hand.air)) },
+    { key: 'isobaric', label: 'with the heat capacity of the vapor', source: { text: 'ASHRAE Handbook – Fundamentals (2017), SI, ch. 1, Eq. 33; read in the documentation of PsychroLib', status: 'verified' }, validity: 'liquid water on the bulb', knownError: '0.5 %', value: hand => checked(hand, mixingRatioFromWetBulb(hand.given('temperature'), hand.given('wetBulb'), hand.given('pressure'), hand.air)) },
     { key: 'dry-heat', label: 'with the heat capacity of dry air', source: { text: 'AMS Glossary of Meteorology, "wet-bulb temperature" (isobaric)', status: 'common practice' }, validity: 'liquid water on the bulb', knownError: '0.5 %', value: hand => checked(hand, mixingRatioFromWetBulb(hand.given('temperature'), hand.given('wetBulb'), hand.given('pressure'), hand.air, false)) },
   ],
   constants: ['R', 'Rv', 'cp', 'cpv', 'latentHeat', 'cw', 'enhancementFactor'],

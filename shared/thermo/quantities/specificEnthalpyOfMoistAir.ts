@@ -12,7 +12,7 @@ export const specificEnthalpyOfMoistAirDefinition = moistQuantity({
   unit: 'J/kg', shownUnit: 'kJ/kg', kind: 'difference',
   nearZero: 1000,
   inputs: [temperatureInput, mixingRatioInput],
-  variants: [{ key: 'constant-heats', label: 'cp t + w (L₀ + cpv t)', source: { text: 'ASHRAE Handbook – Fundamentals (2017), SI, ch. 1, Eq. 30', status: 'from memory' }, validity: '−50 to 50 °C', knownError: '0.1 kJ kg⁻¹', value: ({ given, air, constants }) => air.cp * (given('temperature') - zeroCelsius) + given('mixingRatio') * (constant(constants, 'latentHeat') + air.cpv * (given('temperature') - zeroCelsius)) }],
+  variants: [{ key: 'constant-heats', label: 'cp t + w (L₀ + cpv t)', source: { text: 'ASHRAE Handbook – Fundamentals (2017), SI, ch. 1, Eq. 30; read in the documentation of PsychroLib', status: 'verified' }, validity: '−50 to 50 °C', knownError: '0.1 kJ kg⁻¹', value: ({ given, air, constants }) => air.cp * (given('temperature') - zeroCelsius) + given('mixingRatio') * (constant(constants, 'latentHeat') + air.cpv * (given('temperature') - zeroCelsius)) }],
   constants: ['cp', 'cpv', 'latentHeat'],
   ask: 'The specific enthalpy of the moist air per kilogram of dry air, counted from 0 °C with the water liquid.',
   working: ({ given, air, constants }, value) => {

@@ -19,7 +19,7 @@ export const wetBulbPotentialTemperatureDefinition = moistQuantity({
   inputs: [pressureInput, temperatureInput, dewpointInput],
   variants: [
     { key: 'pseudoadiabat', label: 'down the pseudoadiabat to 1000 hPa', source: { text: 'AMS Glossary of Meteorology, "wet-bulb potential temperature"', status: 'verified' }, validity: 'over liquid water', knownError: '0.2 K by the latent heat', value: hand => pseudoadiabaticWetBulb(100_000, lclOf(hand), hand.air) },
-    { key: 'davies-jones', label: 'Davies-Jones’ fit to θe', source: { text: 'Davies-Jones (2008), Mon. Wea. Rev. 136, 2764–2785, Eq. 3.8', status: 'from memory' }, validity: 'θe 257–377 K', knownError: '0.02 K of its pseudoadiabats', value: hand => daviesJonesWetBulbPotential(thetaE(hand)) },
+    { key: 'davies-jones', label: 'Davies-Jones’ fit to θe', source: { text: 'Davies-Jones (2008), Mon. Wea. Rev. 136, 2764–2785, Eq. 3.8; coefficients read in transcriptions', status: 'verified' }, validity: 'θe 257–377 K', knownError: '0.02 K of its pseudoadiabats', value: hand => daviesJonesWetBulbPotential(thetaE(hand)) },
   ],
   constants: ['R', 'Rv', 'cp', 'kappa', 'cpv', 'latentHeat', 'cw', 'enhancementFactor'],
   inside: ['es', 'L', lclTemperatureKey],

@@ -20,7 +20,7 @@ export const wetBulbTemperatureFromRelativeHumidityDefinition = moistQuantity({
   variants: [
     { key: 'isobaric', label: 'isobaric, with the heat capacity of the vapor', source: glossary('wet-bulb temperature'), validity: 'liquid water on the bulb', knownError: '0.05 K by the formulae inside', value: hand => solved(hand, true) },
     { key: 'dry-heat', label: 'isobaric, with the heat capacity of dry air', source: glossary('wet-bulb temperature', 'common practice'), validity: 'liquid water on the bulb', knownError: '0.1 K', value: hand => solved(hand, false) },
-    { key: 'stull', label: 'Stull’s fit at 1013.25 hPa', source: { text: 'Stull (2011), J. Appl. Meteor. Climatol. 50, 2267–2269, Eq. 1', status: 'from memory' }, validity: 'about 1013.25 hPa, RH 5–99 %, −20 to 50 °C', knownError: '−1.2 to +1.3 K, farthest where it is dry; 0.4 K in the mean', holds: { pressure: [98_000, 104_000], temperature: [253.15, 323.15], relativeHumidity: [0.05, 0.99] }, value: ({ given }) => stullWetBulb(given('temperature'), given('relativeHumidity')) },
+    { key: 'stull', label: 'Stull’s fit at 1013.25 hPa', source: { text: 'Stull (2011), J. Appl. Meteor. Climatol. 50, 2267–2269, Eq. 1; coefficients read in transcriptions', status: 'verified' }, validity: 'about 1013.25 hPa, RH 5–99 %, −20 to 50 °C', knownError: '−1.0 to +0.65 K by its paper, which leaves out air both cold and dry; −1.2 to +1.3 K above 0 °C as measured, farthest where it is dry', holds: { pressure: [98_000, 104_000], temperature: [253.15, 323.15], relativeHumidity: [0.05, 0.99] }, value: ({ given }) => stullWetBulb(given('temperature'), given('relativeHumidity')) },
   ],
   constants: ['R', 'Rv', 'cp', 'cpv', 'latentHeat', 'cw', 'enhancementFactor'],
   inside: ['es', 'L'],
