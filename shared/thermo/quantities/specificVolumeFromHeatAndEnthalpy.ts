@@ -1,5 +1,6 @@
 import { constant } from '../constants'
 import type { Constants, Inputs } from '../definition'
+import { OutOfRangeError } from '../errors'
 import { specificEnergyInput, temperatureChangeInput } from '../inputKinds'
 import { numberOf } from '../inputs'
 import { oneFormula } from '../oneFormula'
@@ -9,7 +10,11 @@ import { texFactor, texNumber, worked } from '../tex'
 const q = (inputs: Inputs) => numberOf(inputs, 'heat')
 const change = (inputs: Inputs) => numberOf(inputs, 'temperatureChange')
 const pressureChange = (inputs: Inputs) => numberOf(inputs, 'pressureChange')
-const value = (inputs: Inputs, constants: Constants) => (constant(constants, 'cp') * change(inputs) - q(inputs)) / pressureChange(inputs)
+/** @throws {OutOfRangeError} where the pressure does not change */
+function value(inputs: Inputs, constants: Constants): number {
+  if (pressureChange(inputs) === 0) throw new OutOfRangeError('pressureChange', 0, 'a change that is not 0')
+  return (constant(constants, 'cp') * change(inputs) - q(inputs)) / pressureChange(inputs)
+}
 
 /**
  * Mean specific volume of a small change, from the first law in its enthalpy form.
@@ -30,14 +35,14 @@ export const specificVolumeFromHeatAndEnthalpyDefinition = oneFormula({
   inputs: [
     specificEnergyInput('heat', 'heat taken up by the air, per kilogram', 'q'),
     temperatureChangeInput(),
-    { name: 'pressureChange', label: 'change of pressure, a fall', symbol: 'Δp', unit: 'Pa', shownUnit: 'hPa', kind: 'difference', shape: 'number', range: [-50_000, -1], trivialWithin: 1 },
+    { name: 'pressureChange', label: 'change of pressure, not 0', symbol: 'Δp', unit: 'Pa', shownUnit: 'hPa', kind: 'difference', shape: 'number', range: [-50_000, 50_000], trivialWithin: 1 },
   ],
   constants: ['cp'],
   formula: {
     key: 'first-law', label: 'first law, enthalpy', source: { text: 'AMS Glossary of Meteorology, "first law of thermodynamics"', status: 'common practice' },
     validity: '200–350 K, Δp small beside p', knownError: 'cp 1004 to 1005.7: 0.17 % of the term with ΔT',
   },
-  ask: 'The mean specific volume α = (cp ΔT − q)/Δp of the air during a small change in which its pressure falls.',
+  ask: 'The mean specific volume α = (cp ΔT − q)/Δp of the air during a small change in which its pressure does not stay.',
   value,
   working(inputs, constants, result) {
     const c = constant(constants, 'cp')

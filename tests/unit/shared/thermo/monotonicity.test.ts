@@ -90,7 +90,7 @@ const pairs: readonly (readonly [forward: string, back: string, drawn: Readonly<
   ['vapor-pressure', 'dewpoint', { dewpoint: T }, 'dewpoint', 'vaporPressure', 1e-8],
   ['vapor-pressure-from-mixing-ratio', 'mixing-ratio-from-vapor-pressure', { pressure: p, mixingRatio: w }, 'mixingRatio', 'vaporPressure', 1e-14],
   ['specific-humidity', 'mixing-ratio-from-specific-humidity', { mixingRatio: w }, 'mixingRatio', 'specificHumidity', 1e-14],
-  ['adiabatic-pressure-from-temperature', 'parcel-temperature-by-pressure', { pressureStart: p, temperatureStart: between(280, 300), temperatureEnd: between(260, 300) }, 'temperatureEnd', 'pressureEnd', 1e-9],
+  ['adiabatic-pressure-from-temperature', 'parcel-temperature-by-pressure', { pressureStart: between(60_000, 90_000), temperatureStart: between(285, 300), temperatureEnd: between(260, 295) }, 'temperatureEnd', 'pressureEnd', 1e-9],
   ['adiabatic-specific-volume-from-temperature', 'adiabatic-temperature-from-specific-volume', { specificVolumeStart: between(0.7, 1.2), temperatureStart: between(280, 300), temperatureEnd: between(260, 300) }, 'temperatureEnd', 'specificVolumeEnd', 1e-9],
   ['adiabatic-specific-volume-from-pressure', 'adiabatic-pressure-from-specific-volume', { specificVolumeStart: between(0.7, 1.2), pressureStart: p, pressureEnd: p }, 'pressureEnd', 'specificVolumeEnd', 1e-6],
   ['density', 'temperature-by-equation-of-state', { pressure: p, temperature: T }, 'temperature', 'density', 1e-10],
