@@ -28,8 +28,8 @@ var times = (a, b) => rational(a.numerator * b.numerator, a.denominator * b.deno
 var over = (a, b) => rational(a.numerator * b.denominator, a.denominator * b.numerator);
 var absolute = (a) => a.numerator < 0n ? { numerator: -a.numerator, denominator: a.denominator } : a;
 function compare(a, b) {
-  const difference2 = a.numerator * b.denominator - b.numerator * a.denominator;
-  return difference2 < 0n ? -1 : difference2 > 0n ? 1 : 0;
+  const difference3 = a.numerator * b.denominator - b.numerator * a.denominator;
+  return difference3 < 0n ? -1 : difference3 > 0n ? 1 : 0;
 }
 function power(base, exponent2) {
   const size2 = Math.abs(exponent2);
@@ -46,31 +46,31 @@ function fromDecimal(text) {
   return shift2 >= 0 ? rational(digits * tenTo(shift2)) : rational(digits, tenTo(-shift2));
 }
 var view = new DataView(new ArrayBuffer(8));
-function fromDouble(value19) {
-  if (!Number.isFinite(value19)) throw new Error(`${String(value19)} is no fraction`);
-  view.setFloat64(0, value19);
+function fromDouble(value23) {
+  if (!Number.isFinite(value23)) throw new Error(`${String(value23)} is no fraction`);
+  view.setFloat64(0, value23);
   const bits2 = view.getBigUint64(0);
   const exponent2 = Number(bits2 >> 52n & 0x7FFn);
   const fraction = bits2 & 0xFFFFFFFFFFFFFn;
   const mantissa = exponent2 === 0 ? fraction : fraction | 0x10000000000000n;
   const shift2 = Math.max(exponent2, 1) - 1075;
-  const signed = value19 < 0 ? -mantissa : mantissa;
+  const signed = value23 < 0 ? -mantissa : mantissa;
   return shift2 >= 0 ? rational(signed << BigInt(shift2)) : rational(signed, 1n << BigInt(-shift2));
 }
-function toDouble(value19) {
-  if (value19.numerator === 0n) return 0;
-  return Number(toDecimal(value19, 40));
+function toDouble(value23) {
+  if (value23.numerator === 0n) return 0;
+  return Number(toDecimal(value23, 40));
 }
-function leadingExponent(value19) {
-  const size2 = value19.numerator < 0n ? -value19.numerator : value19.numerator;
+function leadingExponent(value23) {
+  const size2 = value23.numerator < 0n ? -value23.numerator : value23.numerator;
   if (size2 === 0n) return 0;
-  let guess = size2.toString().length - value19.denominator.toString().length;
-  const atLeast = guess >= 0 ? compare({ numerator: size2, denominator: value19.denominator }, rational(tenTo(guess))) >= 0 : compare({ numerator: size2, denominator: value19.denominator }, rational(1n, tenTo(-guess))) >= 0;
+  let guess = size2.toString().length - value23.denominator.toString().length;
+  const atLeast = guess >= 0 ? compare({ numerator: size2, denominator: value23.denominator }, rational(tenTo(guess))) >= 0 : compare({ numerator: size2, denominator: value23.denominator }, rational(1n, tenTo(-guess))) >= 0;
   if (!atLeast) guess -= 1;
   return guess;
 }
-function toPlace(value19, place, rounding = "half") {
-  const scaled2 = place <= 0 ? rational(value19.numerator * tenTo(-place), value19.denominator) : rational(value19.numerator, value19.denominator * tenTo(place));
+function toPlace(value23, place, rounding = "half") {
+  const scaled2 = place <= 0 ? rational(value23.numerator * tenTo(-place), value23.denominator) : rational(value23.numerator, value23.denominator * tenTo(place));
   let whole = scaled2.numerator / scaled2.denominator;
   const rest = scaled2.numerator - whole * scaled2.denominator;
   if (rest !== 0n) {
@@ -84,17 +84,17 @@ function toPlace(value19, place, rounding = "half") {
   digits = digits.padStart(1 - place, "0");
   return `${sign}${digits.slice(0, place)}.${digits.slice(place)}`;
 }
-function toDecimal(value19, digits) {
-  const text = toPlace(value19, leadingExponent(value19) - digits + 1);
+function toDecimal(value23, digits) {
+  const text = toPlace(value23, leadingExponent(value23) - digits + 1);
   return text.includes(".") ? text.replace(/0+$/, "").replace(/\.$/, "") : text;
 }
 
 // shared/thermo/errors.ts
 var OutOfRangeError = class extends Error {
-  constructor(input2, value19, validRange) {
-    super(`${input2} = ${String(value19)} lies outside ${validRange}`);
+  constructor(input2, value23, validRange) {
+    super(`${input2} = ${String(value23)} lies outside ${validRange}`);
     this.input = input2;
-    this.value = value19;
+    this.value = value23;
     this.validRange = validRange;
   }
   input;
@@ -133,52 +133,52 @@ var UnknownInputError = class extends Error {
 
 // shared/thermo/inputs.ts
 function numberOf(inputs2, name) {
-  const value19 = inputs2[name];
-  if (typeof value19 !== "number") throw new MissingInputError(name);
-  return value19;
+  const value23 = inputs2[name];
+  if (typeof value23 !== "number") throw new MissingInputError(name);
+  return value23;
 }
 function seriesOf(inputs2, name) {
-  const value19 = inputs2[name];
-  if (!Array.isArray(value19)) throw new MissingInputError(name);
-  return value19;
+  const value23 = inputs2[name];
+  if (!Array.isArray(value23)) throw new MissingInputError(name);
+  return value23;
 }
 function checkInputs(definitions, inputs2) {
   let length2 = null;
   for (const definition of definitions) {
-    const value19 = inputs2[definition.name];
-    if (value19 === void 0 || value19 === null) {
+    const value23 = inputs2[definition.name];
+    if (value23 === void 0 || value23 === null) {
       if (definition.isOptional) continue;
       throw new MissingInputError(definition.name);
     }
     if (definition.shape === "number") {
-      if (typeof value19 !== "number") throw new SeriesError(definition.name, "one number is needed, not a series");
-      checkRange(definition, value19);
+      if (typeof value23 !== "number") throw new SeriesError(definition.name, "one number is needed, not a series");
+      checkRange(definition, value23);
       continue;
     }
-    if (!Array.isArray(value19)) throw new SeriesError(definition.name, "a series is needed, not one number");
-    checkSeries(definition, value19);
-    if (length2 !== null && value19.length !== length2) throw new SeriesError(definition.name, `${value19.length} values where the series before it has ${length2}`);
-    length2 = value19.length;
+    if (!Array.isArray(value23)) throw new SeriesError(definition.name, "a series is needed, not one number");
+    checkSeries(definition, value23);
+    if (length2 !== null && value23.length !== length2) throw new SeriesError(definition.name, `${value23.length} values where the series before it has ${length2}`);
+    length2 = value23.length;
   }
   for (const name of Object.keys(inputs2)) {
     if (!definitions.some((definition) => definition.name === name)) throw new UnknownInputError(name, definitions.map((definition) => definition.name));
   }
 }
-function checkRange({ name, range, unit }, value19) {
-  if (typeof value19 !== "number" || !(value19 >= range[0] && value19 <= range[1])) {
-    throw new OutOfRangeError(name, typeof value19 === "number" ? value19 : NaN, `${range[0]} to ${range[1]} ${unit}`);
+function checkRange({ name, range, unit }, value23) {
+  if (typeof value23 !== "number" || !(value23 >= range[0] && value23 <= range[1])) {
+    throw new OutOfRangeError(name, typeof value23 === "number" ? value23 : NaN, `${range[0]} to ${range[1]} ${unit}`);
   }
 }
 function checkSeries(definition, values) {
   const { least: least2 = 1, order = "none" } = definition.needs ?? {};
   if (values.length < least2) throw new SeriesError(definition.name, `${values.length} values; at least ${least2} are needed`);
   let before = null;
-  for (const value19 of values) {
-    checkRange(definition, value19);
-    if (typeof value19 !== "number") continue;
-    if (before !== null && order === "ascending" && !(value19 > before)) throw new SeriesError(definition.name, `the values have to rise; ${value19} follows ${before}`);
-    if (before !== null && order === "descending" && !(value19 < before)) throw new SeriesError(definition.name, `the values have to fall; ${value19} follows ${before}`);
-    before = value19;
+  for (const value23 of values) {
+    checkRange(definition, value23);
+    if (typeof value23 !== "number") continue;
+    if (before !== null && order === "ascending" && !(value23 > before)) throw new SeriesError(definition.name, `the values have to rise; ${value23} follows ${before}`);
+    if (before !== null && order === "descending" && !(value23 < before)) throw new SeriesError(definition.name, `the values have to fall; ${value23} follows ${before}`);
+    before = value23;
   }
 }
 
@@ -193,9 +193,9 @@ function chooseVariant(definition, inputs2, formulae, key) {
   const named2 = variantOf(definition, key ?? formulae.variants[definition.key]);
   const beyond = firstBeyond(named2, inputs2);
   if (beyond === null) return { variant: named2, note: null };
-  const [input2, value19, range] = beyond;
+  const [input2, value23, range] = beyond;
   const unit = definition.inputs.find((one2) => one2.name === input2)?.unit ?? "";
-  if (formulae.beyond === "refuse") throw new OutOfRangeError(input2, value19, `${range[0]} to ${range[1]} ${unit}, where “${named2.label}” holds`);
+  if (formulae.beyond === "refuse") throw new OutOfRangeError(input2, value23, `${range[0]} to ${range[1]} ${unit}, where “${named2.label}” holds`);
   if (formulae.beyond === "next") {
     const next = definition.variants.slice(definition.variants.indexOf(named2) + 1).find((one2) => firstBeyond(one2, inputs2) === null);
     if (next) return { variant: next, note: `Computed by “${next.label}”: “${named2.label}” holds for ${named2.validity}.` };
@@ -205,8 +205,8 @@ function chooseVariant(definition, inputs2, formulae, key) {
 function firstBeyond(variant, inputs2) {
   for (const [name, range] of Object.entries(variant.holds ?? {})) {
     const given8 = inputs2[name];
-    for (const value19 of typeof given8 === "number" ? [given8] : given8 ?? []) {
-      if (value19 < range[0] || value19 > range[1]) return [name, value19, range];
+    for (const value23 of typeof given8 === "number" ? [given8] : given8 ?? []) {
+      if (value23 < range[0] || value23 > range[1]) return [name, value23, range];
     }
   }
   return null;
@@ -282,20 +282,20 @@ function pairedLog(numerator, denominator) {
 var ln2 = pairedLog(2, 1);
 var ln10 = add(multiply(pair(3), ln2), pairedLog(10, 8));
 var perLn10 = divide(pair(1), ln10);
-function leading(value19, bits2) {
+function leading(value23, bits2) {
   let scale = 1;
   for (let n = bits2; n < 53; n++) scale *= 2;
-  const big = value19 * (scale + 1);
-  return big - (big - value19);
+  const big = value23 * (scale + 1);
+  return big - (big - value23);
 }
 var powers = new Float64Array(2098);
 for (let n = 0, up = 1; n <= 1023; n++, up *= 2) powers[n + 1074] = up;
 for (let n = 0, down = 1; n <= 1074; n++, down /= 2) powers[1074 - n] = down;
 var twoTo = (n) => powers[n + 1074] ?? 0;
-function scaled(value19, n) {
-  if (n > 1023) return value19 * twoTo(1023) * twoTo(n - 1023);
-  if (n < -1022) return value19 * twoTo(n + 54) * twoTo(-54);
-  return value19 * twoTo(n);
+function scaled(value23, n) {
+  if (n > 1023) return value23 * twoTo(1023) * twoTo(n - 1023);
+  if (n < -1022) return value23 * twoTo(n + 54) * twoTo(-54);
+  return value23 * twoTo(n);
 }
 var rootHi = new Float64Array(steps);
 var rootLo = new Float64Array(steps);
@@ -338,9 +338,9 @@ var most = 181;
 var logHi = new Float64Array(most + 1);
 var logLo = new Float64Array(most + 1);
 for (let k = least; k <= most; k++) {
-  const value19 = k === steps ? pair(0) : pairedLog(k, steps);
-  logHi[k] = value19.hi;
-  logLo[k] = value19.lo;
+  const value23 = k === steps ? pair(0) : pairedLog(k, steps);
+  logHi[k] = value23.hi;
+  logLo[k] = value23.lo;
 }
 var ln2Hi = leading(ln2.hi, 40);
 var ln2Lo = ln2.hi - ln2Hi + ln2.lo;
@@ -349,14 +349,14 @@ var halves = new Uint32Array(words.buffer);
 words[0] = 1;
 var high = halves[1] === 1072693248 ? 1 : 0;
 var result = new Float64Array(2);
-function logInto(x) {
+function logIntoResult() {
   let e = 0;
-  let positive = x;
+  let positive = words[0] ?? 0;
   if (positive < 22250738585072014e-324) {
     positive *= 18014398509481984;
+    words[0] = positive;
     e = -54;
   }
-  words[0] = positive;
   const power2 = ((halves[high] ?? 0) >>> 20) - 1023;
   e = e + power2 | 0;
   let m = positive * (powers[1074 - power2] ?? 0);
@@ -364,8 +364,8 @@ function logInto(x) {
     m *= 0.5;
     e = e + 1 | 0;
   }
-  const k = Math.round(m * steps) | 0;
-  const c2 = k / steps;
+  const k = m * steps + 0.5 | 0;
+  const c2 = k * (1 / steps);
   const d = m - c2;
   const r = d / c2;
   const rTop = leading27(r);
@@ -386,25 +386,40 @@ function logInto(x) {
   result[0] = leadingPart;
   result[1] = rest - (leadingPart - sum);
 }
-function leading27(value19) {
-  const big = value19 * 134217729;
-  return big - (big - value19);
+function leading27(value23) {
+  const big = value23 * 134217729;
+  return big - (big - value23);
 }
 function log(x) {
   if (!(x > 0)) return x === 0 ? -Infinity : NaN;
   if (x === Infinity) return x;
-  logInto(x);
+  words[0] = x;
+  logIntoResult();
   return result[0] ?? 0;
 }
 function log10(x) {
   if (!(x > 0)) return x === 0 ? -Infinity : NaN;
   if (x === Infinity) return x;
-  logInto(x);
+  words[0] = x;
+  logIntoResult();
   const hi = result[0] ?? 0, lo = result[1] ?? 0;
   const product = hi * perLn10.hi;
   return product + (productError(hi, perLn10.hi, product) + (hi * perLn10.lo + lo * perLn10.hi));
 }
 function pow(x, y) {
+  if (!(x > 0 && x < Infinity && y > -Infinity && y < Infinity) || y === 0 || y === 1 || x === 1) return specialPower(x, y);
+  return powerOf(x, y);
+}
+function powerOf(x, y) {
+  words[0] = x;
+  logIntoResult();
+  const hi = result[0] ?? 0;
+  const exponent2 = y * hi;
+  if (exponent2 > 709.79) return Infinity;
+  if (exponent2 < -745.2) return 0;
+  return expOf(exponent2, productError(y, hi, exponent2) + y * (result[1] ?? 0));
+}
+function specialPower(x, y) {
   if (y === 0) return 1;
   if (x !== x || y !== y) return NaN;
   if (y === Infinity || y === -Infinity) {
@@ -422,20 +437,15 @@ function pow(x, y) {
   if (isNegative && !isWhole) return NaN;
   if (size2 === 1) return sign;
   if (y === 1) return x;
-  logInto(size2);
-  const hi = result[0] ?? 0;
-  const exponent2 = y * hi;
-  if (exponent2 > 709.79) return sign * Infinity;
-  if (exponent2 < -745.2) return sign * 0;
-  return sign * expOf(exponent2, productError(y, hi, exponent2) + y * (result[1] ?? 0));
+  return sign * powerOf(size2, y);
 }
 
 // shared/units/brands.ts
 function mint(label) {
-  const isFinite = (value19) => Number.isFinite(value19);
-  return (value19) => {
-    if (!isFinite(value19)) throw new RangeError(`${String(value19)} ${label} is no value`);
-    return value19;
+  const isFinite = (value23) => Number.isFinite(value23);
+  return (value23) => {
+    if (!isFinite(value23)) throw new RangeError(`${String(value23)} ${label} is no value`);
+    return value23;
   };
 }
 var kelvin = mint("K");
@@ -448,9 +458,9 @@ var kilogramPerCubicMeter = mint("kg/m3");
 // shared/thermo/constants.ts
 var enhancementOf = (constants) => constants.enhancementFactor ?? 1;
 function constant(constants, name) {
-  const value19 = constants[name];
-  if (value19 === void 0 || !Number.isFinite(value19)) throw new Error(`the convention sets no ${name}`);
-  return value19;
+  const value23 = constants[name];
+  if (value23 === void 0 || !Number.isFinite(value23)) throw new Error(`the convention sets no ${name}`);
+  return value23;
 }
 var kappaOf = (constants) => constants.kappa ?? constant(constants, "R") / constant(constants, "cp");
 var dryRateOf = (constants) => constant(constants, "g") / constant(constants, "cp");
@@ -476,20 +486,20 @@ var vaporGasConstant = 461.5;
 var universalGasConstant = 8.314462618;
 
 // shared/thermo/tex.ts
-function texNumber(value19, digits = 5) {
-  if (value19 === 0) return "0";
-  const text = value19.toPrecision(digits);
+function texNumber(value23, digits = 5) {
+  if (value23 === 0) return "0";
+  const text = value23.toPrecision(digits);
   const [mantissa = "0", exponent2] = text.split("e");
   const short = mantissa.includes(".") ? mantissa.replace(/0+$/, "").replace(/\.$/, "") : mantissa;
   if (exponent2 !== void 0) return `${short} \\times 10^{${Number(exponent2)}}`;
-  const size2 = Math.abs(value19);
+  const size2 = Math.abs(value23);
   if (size2 < 1e-3) {
-    const [small = "0", power2 = "0"] = value19.toExponential(digits - 1).split("e");
+    const [small = "0", power2 = "0"] = value23.toExponential(digits - 1).split("e");
     return `${small.includes(".") ? small.replace(/0+$/, "").replace(/\.$/, "") : small} \\times 10^{${Number(power2)}}`;
   }
   return short;
 }
-var texFactor = (value19, digits = 5) => value19 < 0 ? `(${texNumber(value19, digits)})` : texNumber(value19, digits);
+var texFactor = (value23, digits = 5) => value23 < 0 ? `(${texNumber(value23, digits)})` : texNumber(value23, digits);
 var units = {
   "K": "K",
   "Pa": "Pa",
@@ -533,9 +543,9 @@ function texUnit(code) {
   if (known === void 0) throw new Error(`no TeX for the unit ${code}`);
   return known === "" ? "" : `\\,\\mathrm{${known}}`;
 }
-var texQuantity = (value19, unit, digits = 5) => `${texNumber(value19, digits)}${texUnit(unit)}`;
-function worked(text, formula, filled, value19, unit, shown3, digits = 6) {
-  return { text, formula, filled: `${filled} = ${texQuantity(shown3?.value ?? value19, shown3?.unit ?? unit, digits)}`, value: value19, unit };
+var texQuantity = (value23, unit, digits = 5) => `${texNumber(value23, digits)}${texUnit(unit)}`;
+function worked(text, formula, filled, value23, unit, shown3, digits = 6) {
+  return { text, formula, filled: `${filled} = ${texQuantity(shown3?.value ?? value23, shown3?.unit ?? unit, digits)}`, value: value23, unit };
 }
 
 // shared/thermo/firstLaw.ts
@@ -561,7 +571,7 @@ function endOf(process, inputs2, constants) {
 var polytropicPower = (inputs2) => (numberOf(inputs2, "polytropicExponent") - 1) / numberOf(inputs2, "polytropicExponent");
 var changeOf = (process, inputs2, constants) => endOf(process, inputs2, constants) - start(inputs2);
 function perKilogram(of) {
-  const value19 = (inputs2, constants) => of.sign * constant(constants, of.coefficient) * changeOf(of.process, inputs2, constants);
+  const value23 = (inputs2, constants) => of.sign * constant(constants, of.coefficient) * changeOf(of.process, inputs2, constants);
   return {
     key: of.key,
     name: of.name,
@@ -577,11 +587,11 @@ function perKilogram(of) {
       source: { text: 'AMS Glossary of Meteorology, "first law of thermodynamics"', status: "common practice" },
       validity: "200–350 K, where the specific heats of dry air are constant",
       knownError: "cp 1004 to 1005.7: 0.17 %",
-      evaluate: (inputs2, constants) => ({ is: "value", value: value19(inputs2, constants) })
+      evaluate: (inputs2, constants) => ({ is: "value", value: value23(inputs2, constants) })
     }],
     constants: of.process === "adiabatic" ? ["cp", "cv", "R", "kappa"] : [of.coefficient],
     ask: of.ask,
-    trace: (inputs2, constants) => processTrace(of, inputs2, constants, value19(inputs2, constants)),
+    trace: (inputs2, constants) => processTrace(of, inputs2, constants, value23(inputs2, constants)),
     slips: processSlips(of),
     example: of.example
   };
@@ -627,15 +637,15 @@ function forGivenMass(base, name, example) {
     example
   };
 }
-function processTrace(of, inputs2, constants, value19) {
+function processTrace(of, inputs2, constants, value23) {
   const steps2 = changeSteps(of.process, inputs2, constants);
-  const change = changeOf(of.process, inputs2, constants);
+  const change2 = changeOf(of.process, inputs2, constants);
   const minus2 = of.sign < 0 ? "-" : "";
   steps2.push({
     text: "First law",
     formula: `${of.tex} = ${minus2}${texOf[of.coefficient]}\\,\\Delta T`,
-    filled: `${of.tex} = ${minus2}${texNumber(constant(constants, of.coefficient), 6)} \\cdot ${texFactor(change)} = ${texQuantity(value19 / 1e3, "kJ/kg")}`,
-    value: value19,
+    filled: `${of.tex} = ${minus2}${texNumber(constant(constants, of.coefficient), 6)} \\cdot ${texFactor(change2)} = ${texQuantity(value23 / 1e3, "kJ/kg")}`,
+    value: value23,
     unit: "J/kg"
   });
   return steps2;
@@ -653,8 +663,8 @@ function changeSteps(process, inputs2, constants) {
       unit: "K"
     });
   }
-  const change = end - start(inputs2);
-  steps2.push({ text: "Change of temperature", formula: "\\Delta T = T_2 - T_1", filled: `\\Delta T = ${texNumber(end, 6)} - ${texNumber(start(inputs2), 6)} = ${texQuantity(change, "K")}`, value: change, unit: "K" });
+  const change2 = end - start(inputs2);
+  steps2.push({ text: "Change of temperature", formula: "\\Delta T = T_2 - T_1", filled: `\\Delta T = ${texNumber(end, 6)} - ${texNumber(start(inputs2), 6)} = ${texQuantity(change2, "K")}`, value: change2, unit: "K" });
   return steps2;
 }
 function processSlips(of) {
@@ -670,8 +680,8 @@ function processSlips(of) {
     return slips;
   }
   const along = (end) => (inputs2, constants) => {
-    const value19 = end(inputs2, constants);
-    return value19 === null || !Number.isFinite(value19) ? null : of.sign * constant(constants, of.coefficient) * (value19 - start(inputs2));
+    const value23 = end(inputs2, constants);
+    return value23 === null || !Number.isFinite(value23) ? null : of.sign * constant(constants, of.coefficient) * (value23 - start(inputs2));
   };
   const ratio2 = (inputs2) => numberOf(inputs2, "pressureEnd") / numberOf(inputs2, "pressureStart");
   if (of.process === "polytropic") {
@@ -759,15 +769,15 @@ var adiabaticInternalEnergyChangeDefinition = perKilogram({
 var adiabaticInternalEnergyChangeOfMassDefinition = forGivenMass(adiabaticInternalEnergyChangeDefinition, "change of internal energy of a given mass, adiabatic", { inputs: { mass: 2, temperatureStart: 293.15, pressureStart: 1e5, pressureEnd: 7e4 }, gives: -40742, within: 10 });
 
 // shared/thermo/composedSlips.ts
-var finite = (value19) => Number.isFinite(value19) ? value19 : null;
+var finite = (value23) => Number.isFinite(value23) ? value23 : null;
 var celsiusSlip = (formula, name, comesOutAs = "SI") => slip("celsius-for-kelvin", "Celsius put in for kelvin", "This is what comes out with the temperature in °C: the formula takes kelvin.", (inputs2, constants, _right, formulae) => finite(formula({ ...inputs2, [name]: numberOf(inputs2, name) - zeroCelsius }, constants, formulae) + (comesOutAs === "Cel" ? zeroCelsius : 0)));
 var hectopascalSlip = (formula, name) => slip("hectopascal-for-pascal", "hPa put in for Pa", "This is what comes out with the pressure in hPa: with constants in SI it goes in in pascal.", (inputs2, constants, _right, formulae) => finite(formula({ ...inputs2, [name]: numberOf(inputs2, name) / 100 }, constants, formulae)));
 var swappedSlip = (formula, first3, second3, key, label, sentence) => slip(key, label, sentence, (inputs2, constants, _right, formulae) => finite(formula({ ...inputs2, [first3]: numberOf(inputs2, second3), [second3]: numberOf(inputs2, first3) }, constants, formulae)));
 var feetSlip = (formula, name) => slip("feet-for-meters", "feet taken for meters", "This comes from the height in feet where meters go in.", (inputs2, constants, _right, formulae) => finite(formula({ ...inputs2, [name]: numberOf(inputs2, name) / 0.3048 }, constants, formulae)));
 var printed2 = { cp: "cp", cv: "cv", R: "R" };
 var otherConstantSlip = (formula, right, taken) => slip(`${taken.toLowerCase()}-for-${right.toLowerCase()}`, `${printed2[taken]} for ${printed2[right]}`, `This comes from ${printed2[taken]} in place of ${printed2[right]}.`, (inputs2, constants, _right, formulae) => {
-  const value19 = constants[taken];
-  return value19 === void 0 ? null : finite(formula(inputs2, { ...constants, [right]: value19 }, formulae));
+  const value23 = constants[taken];
+  return value23 === void 0 ? null : finite(formula(inputs2, { ...constants, [right]: value23 }, formulae));
 });
 var vaporConstantSlip = (formula) => slip("vapor-gas-constant", "gas constant of vapor", "This comes from the gas constant of water vapor in place of that of dry air.", (inputs2, constants, _right, formulae) => finite(formula(inputs2, { ...constants, R: vaporGasConstant }, formulae)));
 var zero273Slip = (formula, name) => constantSlip("zero-273", "273 for 273.15", "This comes from 273 in place of 273.15 between °C and kelvin.", (inputs2, constants, _right, formulae) => finite(formula({ ...inputs2, [name]: numberOf(inputs2, name) - 0.15 }, constants, formulae)));
@@ -784,11 +794,11 @@ var temperatureChangeInput = (name = "temperatureChange", label = "change of tem
 var timeInput = (name, label, symbol, range) => ({ name, label, symbol, unit: "s", shownUnit: "h", kind: "difference", shape: "number", range });
 
 // shared/thermo/oneFormula.ts
-function oneFormula({ formula, value: value19, working, ...rest }) {
+function oneFormula({ formula, value: value23, working, ...rest }) {
   return {
     ...rest,
-    variants: [{ ...formula, evaluate: (inputs2, constants, formulae) => ({ is: "value", value: value19(inputs2, constants, formulae) }) }],
-    trace: (inputs2, constants, _variant, formulae) => working(inputs2, constants, value19(inputs2, constants, formulae), formulae)
+    variants: [{ ...formula, evaluate: (inputs2, constants, formulae) => ({ is: "value", value: value23(inputs2, constants, formulae) }) }],
+    trace: (inputs2, constants, _variant, formulae) => working(inputs2, constants, value23(inputs2, constants, formulae), formulae)
   };
 }
 
@@ -822,7 +832,7 @@ function input(variable, at) {
 }
 function adiabaticRelation({ key, name, of, from: from2, ask, moreSlips = [], example }) {
   const names = { start: `${of}Start`, fromStart: `${from2}Start`, fromEnd: `${from2}End` };
-  const value19 = (inputs2, constants) => adiabaticState(of, numberOf(inputs2, names.start), from2, numberOf(inputs2, names.fromStart), numberOf(inputs2, names.fromEnd), constants);
+  const value23 = (inputs2, constants) => adiabaticState(of, numberOf(inputs2, names.start), from2, numberOf(inputs2, names.fromStart), numberOf(inputs2, names.fromEnd), constants);
   const x = shown[of], y = shown[from2];
   return oneFormula({
     key,
@@ -841,7 +851,7 @@ function adiabaticRelation({ key, name, of, from: from2, ask, moreSlips = [], ex
       knownError: "κ 0.2854 to 0.286: 0.02 % of the temperature for each 30 % of the pressure"
     },
     ask,
-    value: value19,
+    value: value23,
     working(inputs2, constants, result2) {
       const exponent2 = adiabaticExponent(of, from2, constants);
       const start5 = numberOf(inputs2, names.start) / x.factor, before = numberOf(inputs2, names.fromStart) / y.factor, after = numberOf(inputs2, names.fromEnd) / y.factor;
@@ -851,24 +861,24 @@ function adiabaticRelation({ key, name, of, from: from2, ask, moreSlips = [], ex
         worked("Poisson’s relation, with temperatures in kelvin", `${x.tex}_2 = ${x.tex}_1 \\left(\\frac{${y.tex}_2}{${y.tex}_1}\\right)^{${power2}}`, `${x.tex}_2 = ${texNumber(start5, 6)} \\left(\\frac{${texNumber(after, 6)}}{${texNumber(before, 6)}}\\right)^{${texNumber(exponent2)}}`, result2, x.unit, { value: result2 / x.factor, unit: of === "pressure" ? "hPa" : x.unit })
       ];
     },
-    slips: [...relationSlips(of, from2, names, value19), ...moreSlips],
+    slips: [...relationSlips(of, from2, names, value23), ...moreSlips],
     example
   });
 }
-function relationSlips(of, from2, names, value19) {
+function relationSlips(of, from2, names, value23) {
   const raised3 = (power2) => (inputs2, constants) => {
     const result2 = numberOf(inputs2, names.start) * pow(numberOf(inputs2, names.fromEnd) / numberOf(inputs2, names.fromStart), power2(adiabaticExponent(of, from2, constants), constants));
     return Number.isFinite(result2) ? result2 : null;
   };
   const slips = [
-    swappedSlip(value19, names.fromStart, names.fromEnd, "inverted-ratio", "ratio turned round", "This has the ratio of start and end turned round."),
+    swappedSlip(value23, names.fromStart, names.fromEnd, "inverted-ratio", "ratio turned round", "This has the ratio of start and end turned round."),
     slip("inverted-exponent", "exponent turned round", "This comes from the exponent turned round, its inverse.", raised3((exponent2) => 1 / exponent2)),
     slip("exponent-left-out", "exponent left out", "This takes the two in plain proportion: along a dry adiabat the ratio has an exponent.", raised3((exponent2) => exponent2 < 0 ? -1 : 1))
   ];
   if (of === "pressure" || of === "temperature") {
     slips.push(slip("other-pair", "exponent of another pair", "This takes the exponent that belongs to another pair of p, T and α.", raised3((exponent2, constants) => (exponent2 < 0 ? -1 : 1) * Math.abs(adiabaticExponent(of, from2 === "specificVolume" ? of === "pressure" ? "temperature" : "pressure" : "specificVolume", constants)))));
   }
-  if (of === "temperature") slips.push(celsiusSlip(value19, names.start, "Cel"), endUnitSlip("Cel"));
+  if (of === "temperature") slips.push(celsiusSlip(value23, names.start, "Cel"), endUnitSlip("Cel"));
   if (from2 === "temperature") {
     slips.push(slip("celsius-for-kelvin", "Celsius put in for kelvin", "This is what comes out with the temperatures in °C: the formula takes kelvin.", (inputs2, constants) => {
       const before = numberOf(inputs2, names.fromStart) - zeroCelsius, after = numberOf(inputs2, names.fromEnd) - zeroCelsius;
@@ -973,10 +983,10 @@ var densityDefinition = {
   constants: ["R"],
   ask: "The density ρ of dry air by the equation of state, with the temperature in kelvin.",
   trace(inputs2, constants) {
-    const p10 = numberOf(inputs2, "pressure"), T10 = numberOf(inputs2, "temperature"), R = constant(constants, "R");
-    const value19 = density(pascal(p10), kelvin(T10), constants);
+    const p10 = numberOf(inputs2, "pressure"), T11 = numberOf(inputs2, "temperature"), R = constant(constants, "R");
+    const value23 = density(pascal(p10), kelvin(T11), constants);
     return [
-      { text: "Equation of state, with p in pascal and T in kelvin", formula: "\\rho = \\frac{p}{R\\,T}", filled: `\\rho = \\frac{${texNumber(p10, 7)}}{${texNumber(R)} \\cdot ${texNumber(T10)}} = ${texQuantity(value19, "kg/m3")}`, value: value19, unit: "kg/m3" }
+      { text: "Equation of state, with p in pascal and T in kelvin", formula: "\\rho = \\frac{p}{R\\,T}", filled: `\\rho = \\frac{${texNumber(p10, 7)}}{${texNumber(R)} \\cdot ${texNumber(T11)}} = ${texQuantity(value23, "kg/m3")}`, value: value23, unit: "kg/m3" }
     ];
   },
   slips: [
@@ -1026,8 +1036,8 @@ var dryAdiabaticLapseRateDefinition = {
   ask: "The dry adiabatic lapse rate Γd = −dT/dz of a parcel, positive since it cools as it rises.",
   trace(_inputs, constants, variant) {
     if (variant === "as-printed") return [{ text: "As usually printed", formula: "\\Gamma_d", filled: `\\Gamma_d = ${texQuantity(printedDryRate * 1e3, "K/km")}`, value: printedDryRate, unit: "K/m" }];
-    const value19 = dryAdiabaticLapseRate(constants);
-    return [{ text: "Rising dry air pays for its height with enthalpy: cp dT = −g dz", formula: "\\Gamma_d = \\frac{g}{c_p}", filled: `\\Gamma_d = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(constant(constants, "cp"), 6)}} = ${texQuantity(value19 * 1e3, "K/km")}`, value: value19, unit: "K/m" }];
+    const value23 = dryAdiabaticLapseRate(constants);
+    return [{ text: "Rising dry air pays for its height with enthalpy: cp dT = −g dz", formula: "\\Gamma_d = \\frac{g}{c_p}", filled: `\\Gamma_d = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(constant(constants, "cp"), 6)}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }];
   },
   slips: [
     signSlip("A lapse rate is positive where temperature falls with height."),
@@ -1150,7 +1160,7 @@ var unitsOf = (form, unknown) => {
 function firstLawQuantity(of) {
   const { form, unknown } = of;
   const shape = forms[form], { factor, ...units3 } = unitsOf(form, unknown);
-  const value19 = (inputs2, constants) => firstLawTerm(form, unknown, inputs2, constants);
+  const value23 = (inputs2, constants) => firstLawTerm(form, unknown, inputs2, constants);
   const tex = unknown === "heat" ? "q" : unknown === "temperatureChange" ? "\\Delta T" : shape.other.tex;
   return oneFormula({
     key: of.key,
@@ -1172,7 +1182,7 @@ function firstLawQuantity(of) {
       knownError: "cp 1004 to 1005.7: 0.17 % of the term with ΔT"
     },
     ask: of.ask,
-    value: value19,
+    value: value23,
     working(inputs2, constants, result2) {
       const c2 = constant(constants, shape.coefficient);
       const put = (name) => texFactor(numberOf(inputs2, name), 6);
@@ -1184,15 +1194,15 @@ function firstLawQuantity(of) {
         other: {
           formula: form === "internal-energy" ? "w = q - c_v\\,\\Delta T" : minus2 ? "\\Delta p = \\frac{c_p\\,\\Delta T - q}{\\alpha}" : "\\Delta z = \\frac{q - c_p\\,\\Delta T}{g}",
           filled: () => {
-            const difference2 = `${put("heat")} - ${texNumber(c2, 6)} \\cdot ${put("temperatureChange")}`;
-            if (form === "internal-energy") return `w = ${difference2}`;
-            return minus2 ? `\\Delta p = \\frac{${texNumber(c2, 6)} \\cdot ${put("temperatureChange")} - ${put("heat")}}{${texNumber(numberOf(inputs2, "specificVolume"))}}` : `\\Delta z = \\frac{${difference2}}{${texNumber(constant(constants, "g"), 6)}}`;
+            const difference3 = `${put("heat")} - ${texNumber(c2, 6)} \\cdot ${put("temperatureChange")}`;
+            if (form === "internal-energy") return `w = ${difference3}`;
+            return minus2 ? `\\Delta p = \\frac{${texNumber(c2, 6)} \\cdot ${put("temperatureChange")} - ${put("heat")}}{${texNumber(numberOf(inputs2, "specificVolume"))}}` : `\\Delta z = \\frac{${difference3}}{${texNumber(constant(constants, "g"), 6)}}`;
           }
         }
       }[unknown];
       return [worked(`First law, solved for ${unknown === "heat" ? "the heat" : unknown === "temperatureChange" ? "the change of temperature" : of.name}`, solved2.formula, solved2.filled(), result2, units3.unit, { value: result2 / factor, unit: tex === "\\Delta T" ? "K" : units3.shownUnit })];
     },
-    slips: firstLawSlips(of, value19),
+    slips: firstLawSlips(of, value23),
     example: of.example
   });
 }
@@ -1201,15 +1211,15 @@ var leftOut = {
   "enthalpy": "This leaves out the term α Δp, or takes Δp in hPa, which makes it a hundred times too small.",
   "geopotential": "This leaves out the term g Δz, or takes Δz in km, which makes it a thousand times too small."
 };
-function firstLawSlips({ form, unknown, signSentence }, value19) {
+function firstLawSlips({ form, unknown, signSentence }, value23) {
   const shape = forms[form];
-  const changed = (name, change) => (inputs2, constants) => numberOf(inputs2, name) === 0 ? null : value19({ ...inputs2, [name]: change(numberOf(inputs2, name)) }, constants);
+  const changed = (name, change2) => (inputs2, constants) => numberOf(inputs2, name) === 0 ? null : value23({ ...inputs2, [name]: change2(numberOf(inputs2, name)) }, constants);
   const first3 = unknown === "heat" ? "temperatureChange" : "heat";
   const otherTurned = (inputs2, constants) => numberOf(inputs2, first3) === 0 ? null : changed(shape.other.name, (x) => -x)(inputs2, constants);
   const otherCoefficient = shape.coefficient === "cp" ? "cv" : "cp";
   const slips = [
     signSlip(signSentence),
-    slip(`${otherCoefficient}-for-${shape.coefficient}`, `${otherCoefficient} for ${shape.coefficient}`, `This comes from ${otherCoefficient} where this form of the first law has ${shape.coefficient}.`, (inputs2, constants) => value19(inputs2, { ...constants, [shape.coefficient]: constant(constants, otherCoefficient) }))
+    slip(`${otherCoefficient}-for-${shape.coefficient}`, `${otherCoefficient} for ${shape.coefficient}`, `This comes from ${otherCoefficient} where this form of the first law has ${shape.coefficient}.`, (inputs2, constants) => value23(inputs2, { ...constants, [shape.coefficient]: constant(constants, otherCoefficient) }))
   ];
   if (unknown !== "other") {
     slips.push(
@@ -1218,12 +1228,12 @@ function firstLawSlips({ form, unknown, signSentence }, value19) {
     );
   } else {
     slips.push(
-      slip("heat-sign", "sign of the heat turned round", "This counts the heat taken up as given off.", (inputs2, constants) => numberOf(inputs2, "temperatureChange") === 0 ? null : changed("heat", (q) => -q)(inputs2, constants)),
+      slip("heat-sign", "sign of the heat turned round", "This counts the heat taken up as given off.", (inputs2, constants) => numberOf(inputs2, "temperatureChange") === 0 ? null : changed("heat", (q2) => -q2)(inputs2, constants)),
       slip("heat-left-out", "heat left out", "This leaves the heat out, as if the change were adiabatic.", changed("heat", () => 0))
     );
   }
-  if (unknown !== "temperatureChange") slips.push(differenceAsTemperatureSlip(value19, "temperatureChange"));
-  if (unknown === "temperatureChange") slips.push(slip("kilojoules-put-in", "kJ put in for J", "This comes from the heat in kJ beside constants in J.", changed("heat", (q) => q / 1e3)));
+  if (unknown !== "temperatureChange") slips.push(differenceAsTemperatureSlip(value23, "temperatureChange"));
+  if (unknown === "temperatureChange") slips.push(slip("kilojoules-put-in", "kJ put in for J", "This comes from the heat in kJ beside constants in J.", changed("heat", (q2) => q2 / 1e3)));
   if (unitsOf(form, unknown).unit === "J/kg") slips.push(joulesSlip, kilojoulesSlip);
   return slips;
 }
@@ -1296,10 +1306,10 @@ var heatingRateDefinition = oneFormula({
   ask: `The rate q̇/cp at which heating warms the air, positive where it warms, ${heatingAssumption}.`,
   value: temperatureTendency,
   working(inputs2, _constants, result2) {
-    const change = numberOf(inputs2, "temperatureEnd") - numberOf(inputs2, "temperatureStart"), hours = numberOf(inputs2, "timeBetween") / 3600;
+    const change2 = numberOf(inputs2, "temperatureEnd") - numberOf(inputs2, "temperatureStart"), hours = numberOf(inputs2, "timeBetween") / 3600;
     return [
-      worked("Change of temperature", "\\Delta T = T_2 - T_1", `\\Delta T = ${texNumber(numberOf(inputs2, "temperatureEnd"), 6)} - ${texNumber(numberOf(inputs2, "temperatureStart"), 6)}`, change, "K"),
-      worked("Without advection and vertical motion heating alone changes the temperature", "\\frac{\\dot q}{c_p} = \\frac{\\Delta T}{\\Delta t}", `\\frac{\\dot q}{c_p} = \\frac{${texFactor(change)}}{${texNumber(hours)}}`, result2, "K/s", { value: result2 * 3600, unit: "K/h" }, 5)
+      worked("Change of temperature", "\\Delta T = T_2 - T_1", `\\Delta T = ${texNumber(numberOf(inputs2, "temperatureEnd"), 6)} - ${texNumber(numberOf(inputs2, "temperatureStart"), 6)}`, change2, "K"),
+      worked("Without advection and vertical motion heating alone changes the temperature", "\\frac{\\dot q}{c_p} = \\frac{\\Delta T}{\\Delta t}", `\\frac{\\dot q}{c_p} = \\frac{${texFactor(change2)}}{${texNumber(hours)}}`, result2, "K/s", { value: result2 * 3600, unit: "K/h" }, 5)
     ];
   },
   slips: [
@@ -1451,7 +1461,7 @@ function isothermalWork(temperature6, from2, to2, constants) {
   return constant(constants, "R") * temperature6 * log(from2 / to2);
 }
 function isothermalQuantity(of) {
-  const value19 = (inputs2, constants) => isothermalWork(kelvin(numberOf(inputs2, "temperature")), pascal(numberOf(inputs2, "pressureStart")), pascal(numberOf(inputs2, "pressureEnd")), constants);
+  const value23 = (inputs2, constants) => isothermalWork(kelvin(numberOf(inputs2, "temperature")), pascal(numberOf(inputs2, "pressureStart")), pascal(numberOf(inputs2, "pressureEnd")), constants);
   const ratio2 = (inputs2) => numberOf(inputs2, "pressureStart") / numberOf(inputs2, "pressureEnd");
   return oneFormula({
     ...of,
@@ -1468,7 +1478,7 @@ function isothermalQuantity(of) {
       validity: "an ideal gas at constant temperature",
       knownError: "R 287 to 287.05: 0.02 %"
     },
-    value: value19,
+    value: value23,
     working(inputs2, constants, result2) {
       const logarithm = log(ratio2(inputs2));
       return [
@@ -1478,7 +1488,7 @@ function isothermalQuantity(of) {
     },
     slips: [
       signSlip(of.signSentence),
-      celsiusSlip(value19, "temperature"),
+      celsiusSlip(value23, "temperature"),
       slip("log10-for-ln", "logarithm to base 10", "This comes from the logarithm to base 10: the formula has the natural one.", (inputs2, _c, right) => right * log10(ratio2(inputs2)) / log(ratio2(inputs2))),
       slip("logarithm-left-out", "difference for the logarithm", "This takes (p₁ − p₂)/p₁ for ln(p₁/p₂): the pressure falls along the way.", (inputs2, _c, right) => right * (1 - 1 / ratio2(inputs2)) / log(ratio2(inputs2))),
       slip("vapor-gas-constant", "gas constant of vapor", "This comes from the gas constant of water vapor in place of that of dry air.", (_i, constants, right) => right * vaporGasConstant / constant(constants, "R")),
@@ -1679,8 +1689,8 @@ var parcelLapseRateInEnvironmentDefinition = oneFormula({
 });
 
 // shared/thermo/quantities/parcelTemperatureByHeight.ts
-function parcelTemperatureByHeight(temperature6, height2, rate4) {
-  return kelvin(temperature6 - rate4 * height2);
+function parcelTemperatureByHeight(temperature6, height2, rate7) {
+  return kelvin(temperature6 - rate7 * height2);
 }
 var start2 = (inputs2) => numberOf(inputs2, "temperature");
 var height = (inputs2) => numberOf(inputs2, "heightDifference");
@@ -1718,11 +1728,11 @@ var parcelTemperatureByHeightDefinition = {
   constants: ["g", "cp"],
   ask: "The temperature of the parcel after it is lifted dry-adiabatically by the height, at Γd.",
   trace(inputs2, constants, variant) {
-    const rate4 = rateOf(inputs2, constants, variant);
-    const value19 = parcelTemperatureByHeight(kelvin(start2(inputs2)), meter(height(inputs2)), kelvinPerMeter(rate4));
+    const rate7 = rateOf(inputs2, constants, variant);
+    const value23 = parcelTemperatureByHeight(kelvin(start2(inputs2)), meter(height(inputs2)), kelvinPerMeter(rate7));
     return [
-      typeof inputs2.lapseRate === "number" || variant === "printed-rate" ? { text: "Dry adiabatic lapse rate, as given", formula: "\\Gamma_d", filled: `\\Gamma_d = ${texQuantity(rate4 * 1e3, "K/km")}`, value: rate4, unit: "K/m" } : { text: "Dry adiabatic lapse rate", formula: "\\Gamma_d = \\frac{g}{c_p}", filled: `\\Gamma_d = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(constant(constants, "cp"), 6)}} = ${texQuantity(rate4 * 1e3, "K/km")}`, value: rate4, unit: "K/m" },
-      { text: "Along the height", formula: "T(z) = T_0 - \\Gamma_d\\,\\Delta z", filled: `T(z) = ${texNumber(start2(inputs2), 6)} - ${texNumber(rate4 * 1e3)} \\cdot ${texFactor(height(inputs2) / 1e3)} = ${texQuantity(value19, "K", 6)} = ${texQuantity(value19 - zeroCelsius, "Cel")}`, value: value19, unit: "K" }
+      typeof inputs2.lapseRate === "number" || variant === "printed-rate" ? { text: "Dry adiabatic lapse rate, as given", formula: "\\Gamma_d", filled: `\\Gamma_d = ${texQuantity(rate7 * 1e3, "K/km")}`, value: rate7, unit: "K/m" } : { text: "Dry adiabatic lapse rate", formula: "\\Gamma_d = \\frac{g}{c_p}", filled: `\\Gamma_d = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(constant(constants, "cp"), 6)}} = ${texQuantity(rate7 * 1e3, "K/km")}`, value: rate7, unit: "K/m" },
+      { text: "Along the height", formula: "T(z) = T_0 - \\Gamma_d\\,\\Delta z", filled: `T(z) = ${texNumber(start2(inputs2), 6)} - ${texNumber(rate7 * 1e3)} \\cdot ${texFactor(height(inputs2) / 1e3)} = ${texQuantity(value23, "K", 6)} = ${texQuantity(value23 - zeroCelsius, "Cel")}`, value: value23, unit: "K" }
     ];
   },
   slips: [
@@ -1776,7 +1786,7 @@ function polytropicWork(inputs2, constants) {
 var polytropicHeat = (inputs2, constants) => constant(constants, "cv") * changeOf("polytropic", inputs2, constants) + polytropicWork(inputs2, constants);
 function polytropicQuantity(of) {
   const isHeat = of.of === "heat";
-  const value19 = isHeat ? polytropicHeat : polytropicWork;
+  const value23 = isHeat ? polytropicHeat : polytropicWork;
   const { of: _which, signSentence, ...rest } = of;
   return oneFormula({
     ...rest,
@@ -1793,19 +1803,19 @@ function polytropicQuantity(of) {
       validity: "an ideal gas with constant specific heats",
       knownError: "R 287 to 287.05, cv 717 to 718.7: 0.2 %"
     },
-    value: value19,
+    value: value23,
     working(inputs2, constants, result2) {
-      const change = changeOf("polytropic", inputs2, constants), work = polytropicWork(inputs2, constants);
+      const change2 = changeOf("polytropic", inputs2, constants), work = polytropicWork(inputs2, constants);
       const steps2 = [
         ...changeSteps("polytropic", inputs2, constants),
-        exponent(inputs2) === 1 ? worked("Work done by the air: with n = 1 the process is isothermal", "w = R\\,T\\,\\ln\\frac{p_1}{p_2}", "w", work, "J/kg", { value: work / 1e3, unit: "kJ/kg" }, 5) : worked("Work done by the air", "w = \\frac{-R\\,\\Delta T}{n - 1}", `w = \\frac{-${texNumber(constant(constants, "R"))} \\cdot ${texFactor(change)}}{${texNumber(exponent(inputs2))} - 1}`, work, "J/kg", { value: work / 1e3, unit: "kJ/kg" }, 5)
+        exponent(inputs2) === 1 ? worked("Work done by the air: with n = 1 the process is isothermal", "w = R\\,T\\,\\ln\\frac{p_1}{p_2}", "w", work, "J/kg", { value: work / 1e3, unit: "kJ/kg" }, 5) : worked("Work done by the air", "w = \\frac{-R\\,\\Delta T}{n - 1}", `w = \\frac{-${texNumber(constant(constants, "R"))} \\cdot ${texFactor(change2)}}{${texNumber(exponent(inputs2))} - 1}`, work, "J/kg", { value: work / 1e3, unit: "kJ/kg" }, 5)
       ];
-      if (isHeat) steps2.push(worked("First law", "q = c_v\\,\\Delta T + w", `q = ${texNumber(constant(constants, "cv"), 6)} \\cdot ${texFactor(change)} + ${texFactor(work)}`, result2, "J/kg", { value: result2 / 1e3, unit: "kJ/kg" }, 5));
+      if (isHeat) steps2.push(worked("First law", "q = c_v\\,\\Delta T + w", `q = ${texNumber(constant(constants, "cv"), 6)} \\cdot ${texFactor(change2)} + ${texFactor(work)}`, result2, "J/kg", { value: result2 / 1e3, unit: "kJ/kg" }, 5));
       return steps2;
     },
     slips: [
       signSlip(signSentence),
-      swappedSlip(value19, "pressureStart", "pressureEnd", "inverted-ratio", "ratio of pressures turned round", "This comes from p₁/p₂ in place of p₂/p₁."),
+      swappedSlip(value23, "pressureStart", "pressureEnd", "inverted-ratio", "ratio of pressures turned round", "This comes from p₁/p₂ in place of p₂/p₁."),
       slip("n-for-n-minus-1", "n for n − 1", "This divides by n in place of n − 1.", (inputs2, constants) => {
         const work = polytropicWork(inputs2, constants) * (exponent(inputs2) - 1) / exponent(inputs2);
         return isHeat ? work + constant(constants, "cv") * changeOf("polytropic", inputs2, constants) : work;
@@ -1816,7 +1826,7 @@ function polytropicQuantity(of) {
         slip("work-sign", "sign of the work turned round", "This takes the work done by the air as done on it.", (inputs2, constants) => constant(constants, "cv") * changeOf("polytropic", inputs2, constants) - polytropicWork(inputs2, constants))
       ] : [
         slip("adiabatic-work", "adiabatic work", "This is −cv ΔT, the work of an adiabatic process.", (inputs2, constants) => -constant(constants, "cv") * changeOf("polytropic", inputs2, constants)),
-        otherConstantSlip(value19, "R", "cp")
+        otherConstantSlip(value23, "R", "cp")
       ],
       joulesSlip,
       kilojoulesSlip
@@ -1900,10 +1910,10 @@ var potentialTemperatureDefinition = {
   ask: "The potential temperature θ, referred to 1000 hPa, with κ = R/cp.",
   trace(inputs2, constants) {
     const kappa = kappaOf(constants);
-    const value19 = potentialTemperature(kelvin(T2(inputs2)), pascal(numberOf(inputs2, "pressure")), constants);
+    const value23 = potentialTemperature(kelvin(T2(inputs2)), pascal(numberOf(inputs2, "pressure")), constants);
     return [
       constants.kappa === void 0 ? { text: "Exponent", formula: "\\kappa = \\frac{R}{c_p}", filled: `\\kappa = \\frac{${texNumber(constant(constants, "R"))}}{${texNumber(constant(constants, "cp"), 6)}} = ${texNumber(kappa)}`, value: kappa, unit: "1" } : { text: "Exponent, as the convention names it", formula: "\\kappa", filled: `\\kappa = ${texNumber(kappa)}`, value: kappa, unit: "1" },
-      { text: "Poisson’s relation, with T in kelvin", formula: "\\theta = T \\left(\\frac{p_0}{p}\\right)^{\\kappa}", filled: `\\theta = ${texNumber(T2(inputs2))} \\left(\\frac{${texNumber(constant(constants, "p0") / 100)}}{${texNumber(numberOf(inputs2, "pressure") / 100)}}\\right)^{${texNumber(kappa)}} = ${texQuantity(value19, "K")}`, value: value19, unit: "K" }
+      { text: "Poisson’s relation, with T in kelvin", formula: "\\theta = T \\left(\\frac{p_0}{p}\\right)^{\\kappa}", filled: `\\theta = ${texNumber(T2(inputs2))} \\left(\\frac{${texNumber(constant(constants, "p0") / 100)}}{${texNumber(numberOf(inputs2, "pressure") / 100)}}\\right)^{${texNumber(kappa)}} = ${texQuantity(value23, "K")}`, value: value23, unit: "K" }
     ];
   },
   slips: [
@@ -1921,8 +1931,8 @@ var potentialTemperatureDefinition = {
     }),
     slip("inverted-ratio", "ratio of pressures turned round", "This comes from p/p₀ in place of p₀/p.", (inputs2, constants) => T2(inputs2) * pow(ratio(inputs2, constants), -kappaOf(constants))),
     slip("inverted-exponent", "exponent turned round", "This comes from the exponent cp/R in place of R/cp.", (inputs2, constants) => {
-      const value19 = T2(inputs2) * pow(ratio(inputs2, constants), 1 / kappaOf(constants));
-      return Number.isFinite(value19) ? value19 : null;
+      const value23 = T2(inputs2) * pow(ratio(inputs2, constants), 1 / kappaOf(constants));
+      return Number.isFinite(value23) ? value23 : null;
     }),
     slip("cv-for-cp", "cv for cp", "This comes from the exponent R/cv in place of R/cp.", (inputs2, constants) => T2(inputs2) * pow(ratio(inputs2, constants), constant(constants, "R") / constant(constants, "cv"))),
     slip("end-unit", "°C given as kelvin", "Your number is the temperature in °C; the unit beside it says kelvin.", (_i, _c, right) => right > zeroCelsius ? right - zeroCelsius : null),
@@ -2038,10 +2048,10 @@ var specificHeatingRateDefinition = oneFormula({
   ask: `The heating q̇ of the air per kilogram, positive where it is heated, ${heatingAssumption}.`,
   value: value6,
   working(inputs2, constants, result2) {
-    const rate4 = temperatureTendency(inputs2);
+    const rate7 = temperatureTendency(inputs2);
     return [
-      worked("Rate of temperature, in seconds", "\\frac{\\Delta T}{\\Delta t} = \\frac{T_2 - T_1}{\\Delta t}", `\\frac{\\Delta T}{\\Delta t} = \\frac{${texNumber(numberOf(inputs2, "temperatureEnd"), 6)} - ${texNumber(numberOf(inputs2, "temperatureStart"), 6)}}{${texNumber(numberOf(inputs2, "timeBetween"), 6)}}`, rate4, "K/s", void 0, 5),
-      worked("Without advection and vertical motion heating alone changes the temperature", "\\dot q = c_p \\frac{\\Delta T}{\\Delta t}", `\\dot q = ${texNumber(constant(constants, "cp"), 6)} \\cdot ${texFactor(rate4)}`, result2, "W/kg", void 0, 5)
+      worked("Rate of temperature, in seconds", "\\frac{\\Delta T}{\\Delta t} = \\frac{T_2 - T_1}{\\Delta t}", `\\frac{\\Delta T}{\\Delta t} = \\frac{${texNumber(numberOf(inputs2, "temperatureEnd"), 6)} - ${texNumber(numberOf(inputs2, "temperatureStart"), 6)}}{${texNumber(numberOf(inputs2, "timeBetween"), 6)}}`, rate7, "K/s", void 0, 5),
+      worked("Without advection and vertical motion heating alone changes the temperature", "\\dot q = c_p \\frac{\\Delta T}{\\Delta t}", `\\dot q = ${texNumber(constant(constants, "cp"), 6)} \\cdot ${texFactor(rate7)}`, result2, "W/kg", void 0, 5)
     ];
   },
   slips: [
@@ -2223,6 +2233,50 @@ var workFromHeatAndInternalEnergyDefinition = firstLawQuantity({
   example: { inputs: { heat: 10040, temperatureChange: 10 }, gives: 2870, within: 0.1 }
 });
 
+// shared/thermo/quantities/specificVolumeFromHeatAndEnthalpy.ts
+var q = (inputs2) => numberOf(inputs2, "heat");
+var change = (inputs2) => numberOf(inputs2, "temperatureChange");
+var pressureChange = (inputs2) => numberOf(inputs2, "pressureChange");
+function value10(inputs2, constants) {
+  if (pressureChange(inputs2) === 0) throw new OutOfRangeError("pressureChange", 0, "a change that is not 0");
+  return (constant(constants, "cp") * change(inputs2) - q(inputs2)) / pressureChange(inputs2);
+}
+var specificVolumeFromHeatAndEnthalpyDefinition = oneFormula({
+  key: "specific-volume-from-heat-and-enthalpy",
+  name: "mean specific volume, from the heat and the changes of temperature and pressure",
+  symbol: "α",
+  unit: "m3/kg",
+  shownUnit: "m3/kg",
+  kind: "ratio",
+  inputs: [
+    specificEnergyInput("heat", "heat taken up by the air, per kilogram", "q"),
+    temperatureChangeInput(),
+    { name: "pressureChange", label: "change of pressure, not 0", symbol: "Δp", unit: "Pa", shownUnit: "hPa", kind: "difference", shape: "number", range: [-5e4, 5e4], trivialWithin: 1 }
+  ],
+  constants: ["cp"],
+  formula: {
+    key: "first-law",
+    label: "first law, enthalpy",
+    source: { text: 'AMS Glossary of Meteorology, "first law of thermodynamics"', status: "common practice" },
+    validity: "200–350 K, Δp small beside p",
+    knownError: "cp 1004 to 1005.7: 0.17 % of the term with ΔT"
+  },
+  ask: "The mean specific volume α = (cp ΔT − q)/Δp of the air during a small change in which its pressure does not stay.",
+  value: value10,
+  working(inputs2, constants, result2) {
+    const c2 = constant(constants, "cp");
+    return [worked("First law, solved for the specific volume", "\\alpha = \\frac{c_p\\,\\Delta T - q}{\\Delta p}", `\\alpha = \\frac{${texNumber(c2, 6)} \\cdot ${texFactor(change(inputs2), 6)} - ${texFactor(q(inputs2), 6)}}{${texNumber(pressureChange(inputs2), 6)}}`, result2, "m3/kg")];
+  },
+  slips: [
+    signSlip("A specific volume is positive: q = cp ΔT − α Δp."),
+    slip("heat-added", "q with the wrong sign", "The heat went in with its sign turned: α = (cp ΔT − q)/Δp.", (inputs2, constants) => q(inputs2) === 0 ? null : (constant(constants, "cp") * change(inputs2) + q(inputs2)) / pressureChange(inputs2)),
+    slip("cv-for-cp", "cv for cp", "This comes from cv in place of cp: the form with the pressure has the enthalpy.", (inputs2, constants) => (constant(constants, "cv") * change(inputs2) - q(inputs2)) / pressureChange(inputs2)),
+    slip("hectopascal-for-pascal", "hPa put in for Pa", "This is what comes out with the pressure in hPa: with constants in SI it goes in in pascal.", (_i, _c, right) => 100 * right),
+    slip("inverse", "density for specific volume", "This is the density: the specific volume is one over it.", (_i, _c, right) => 1 / right)
+  ],
+  example: { inputs: { heat: 0, temperatureChange: -2, pressureChange: -2360 }, gives: 0.850847, within: 1e-6 }
+});
+
 // shared/thermo/groups/dryAir.ts
 var dryAir = {
   key: "dry-air",
@@ -2287,6 +2341,7 @@ var dryAir = {
     heatFromEnthalpyAndPressureChangeDefinition,
     temperatureChangeFromHeatAndPressureChangeDefinition,
     pressureChangeFromHeatAndEnthalpyDefinition,
+    specificVolumeFromHeatAndEnthalpyDefinition,
     heatFromEnthalpyAndGeopotentialDefinition,
     temperatureChangeFromHeatAndHeightChangeDefinition,
     heightChangeFromHeatAndEnthalpyDefinition,
@@ -2387,7 +2442,7 @@ var geometricOfGeopotential = (geopotentialHeight, earthRadius2) => meter(earthR
 
 // shared/thermo/quantities/geometricHeight.ts
 var H = (inputs2) => numberOf(inputs2, "geopotentialHeight");
-var value10 = (inputs2, constants) => geometricOfGeopotential(meter(H(inputs2)), constant(constants, "earthRadius"));
+var value11 = (inputs2, constants) => geometricOfGeopotential(meter(H(inputs2)), constant(constants, "earthRadius"));
 var geometricHeightDefinition = oneFormula({
   key: "geometric-height",
   name: "geometric height of a geopotential height",
@@ -2406,7 +2461,7 @@ var geometricHeightDefinition = oneFormula({
     knownError: "radius 6356.766 or 6371 km: 0.04 m at 10 km"
   },
   ask: "The geometric height z of the geopotential height H, both above mean sea level.",
-  value: value10,
+  value: value11,
   working: (inputs2, constants, result2) => [
     worked("Gravity falls by the square of the distance from the earth’s center", "z = \\frac{a\\,H}{a - H}", `z = \\frac{${texNumber(constant(constants, "earthRadius"), 7)} \\cdot ${texFactor(H(inputs2), 7)}}{${texNumber(constant(constants, "earthRadius"), 7)} - ${texFactor(H(inputs2), 7)}}`, result2, "m", void 0, 7)
   ],
@@ -2414,14 +2469,14 @@ var geometricHeightDefinition = oneFormula({
     fineSlip("other-way", "geopotential for geometric", "This goes the other way: a geometric height is larger than its geopotential one.", (inputs2, constants) => geopotentialOfGeometric(meter(H(inputs2)), constant(constants, "earthRadius"))),
     fineSlip("unchanged", "left as it was", "This is the geopotential height itself.", (inputs2) => H(inputs2)),
     slip("kilometers", "km given as m", "Your number is in kilometers; the unit beside it says meters.", (_i, _c, right) => right / 1e3),
-    feetSlip(value10, "geopotentialHeight")
+    feetSlip(value11, "geopotentialHeight")
   ],
   example: { inputs: { geopotentialHeight: 1e4 }, gives: 10015.756, within: 1e-3 }
 });
 
 // shared/thermo/quantities/geopotentialHeight.ts
 var z2 = (inputs2) => numberOf(inputs2, "geometricHeight");
-var value11 = (inputs2, constants) => geopotentialOfGeometric(meter(z2(inputs2)), constant(constants, "earthRadius"));
+var value12 = (inputs2, constants) => geopotentialOfGeometric(meter(z2(inputs2)), constant(constants, "earthRadius"));
 var geopotentialHeightDefinition = oneFormula({
   key: "geopotential-height",
   name: "geopotential height of a geometric height",
@@ -2440,7 +2495,7 @@ var geopotentialHeightDefinition = oneFormula({
     knownError: "radius 6356.766 or 6371 km: 0.04 m at 10 km"
   },
   ask: "The geopotential height H of the geometric height z, both above mean sea level.",
-  value: value11,
+  value: value12,
   working: (inputs2, constants, result2) => [
     worked("Gravity falls by the square of the distance from the earth’s center", "H = \\frac{a\\,z}{a + z}", `H = \\frac{${texNumber(constant(constants, "earthRadius"), 7)} \\cdot ${texFactor(z2(inputs2), 7)}}{${texNumber(constant(constants, "earthRadius"), 7)} + ${texFactor(z2(inputs2), 7)}}`, result2, "m", void 0, 7)
   ],
@@ -2449,7 +2504,7 @@ var geopotentialHeightDefinition = oneFormula({
     fineSlip("unchanged", "left as it was", "This is the geometric height itself.", (inputs2) => z2(inputs2)),
     slip("geopotential", "multiplied by g", "This is the geopotential in J kg⁻¹: divide it by 9.80665.", (_i, _c, right) => right * 9.80665),
     slip("kilometers", "km given as m", "Your number is in kilometers; the unit beside it says meters.", (_i, _c, right) => right / 1e3),
-    feetSlip(value11, "geometricHeight")
+    feetSlip(value12, "geometricHeight")
   ],
   example: { inputs: { geometricHeight: 1e4 }, gives: 9984.293, within: 1e-3 }
 });
@@ -2486,12 +2541,12 @@ var hypsometricThicknessDefinition = {
   ask: "The thickness Δz of the layer between the two pressures by the hypsometric equation, with the mean virtual temperature in kelvin.",
   trace(inputs2, constants) {
     const scale = constant(constants, "R") * Tv(inputs2) / constant(constants, "g");
-    const value19 = hypsometricThickness(pascal(bottom(inputs2)), pascal(top(inputs2)), kelvin(Tv(inputs2)), constants);
+    const value23 = hypsometricThickness(pascal(bottom(inputs2)), pascal(top(inputs2)), kelvin(Tv(inputs2)), constants);
     const ratio2 = log(bottom(inputs2) / top(inputs2));
     return [
       { text: "Scale height, with T̄v in kelvin", formula: "H = \\frac{R\\,\\overline{T_v}}{g}", filled: `H = \\frac{${texNumber(constant(constants, "R"))} \\cdot ${texNumber(Tv(inputs2))}}{${texNumber(constant(constants, "g"), 6)}} = ${texQuantity(scale, "m", 6)}`, value: scale, unit: "m" },
       { text: "Natural logarithm of the ratio of pressures", formula: "\\ln\\frac{p_1}{p_2}", filled: `\\ln\\frac{${texNumber(bottom(inputs2) / 100, 6)}}{${texNumber(top(inputs2) / 100, 6)}} = ${texNumber(ratio2, 6)}`, value: ratio2, unit: "1" },
-      { text: "Thickness", formula: "\\Delta z = H \\ln\\frac{p_1}{p_2}", filled: `\\Delta z = ${texNumber(scale, 6)} \\cdot ${texNumber(ratio2, 6)} = ${texQuantity(value19, "m", 6)}`, value: value19, unit: "m" }
+      { text: "Thickness", formula: "\\Delta z = H \\ln\\frac{p_1}{p_2}", filled: `\\Delta z = ${texNumber(scale, 6)} \\cdot ${texNumber(ratio2, 6)} = ${texQuantity(value23, "m", 6)}`, value: value23, unit: "m" }
     ];
   },
   slips: [
@@ -2522,9 +2577,9 @@ function hypsometricHeightAboveLaunch(inputs2, constants) {
   const thickness = to2 < from2 ? hypsometricThickness(pascal(from2), pascal(to2), kelvin(Tv2(inputs2)), constants) : -hypsometricThickness(pascal(to2), pascal(from2), kelvin(Tv2(inputs2)), constants);
   return datum(inputs2) + thickness;
 }
-var value12 = hypsometricHeightAboveLaunch;
-var without = (name) => (inputs2, constants) => optional(inputs2, name) === 0 ? null : value12({ ...inputs2, [name]: 0 }, constants);
-var turned = (name) => (inputs2, constants) => optional(inputs2, name) === 0 ? null : value12({ ...inputs2, [name]: -optional(inputs2, name) }, constants);
+var value13 = hypsometricHeightAboveLaunch;
+var without = (name) => (inputs2, constants) => optional(inputs2, name) === 0 ? null : value13({ ...inputs2, [name]: 0 }, constants);
+var turned = (name) => (inputs2, constants) => optional(inputs2, name) === 0 ? null : value13({ ...inputs2, [name]: -optional(inputs2, name) }, constants);
 var hypsometricHeightAboveLaunchDefinition = oneFormula({
   key: "hypsometric-height-above-launch",
   name: "height above the launch point from pressure",
@@ -2551,7 +2606,7 @@ var hypsometricHeightAboveLaunchDefinition = oneFormula({
     knownError: "g 9.81 or 9.80665, R 287 to 287.05: 0.05 %"
   },
   ask: "The height z of the sonde above the launch point by the hypsometric equation from the station pressure at the barometer, with the corrections that are given: the barometer’s height above the launch point, the tendency of the station pressure since the launch, the sonde’s offset on the ground.",
-  value: value12,
+  value: value13,
   working(inputs2, constants, result2) {
     const rise = result2 - datum(inputs2);
     return [
@@ -2562,9 +2617,9 @@ var hypsometricHeightAboveLaunchDefinition = oneFormula({
     ];
   },
   slips: [
-    slip("standard-pressure", "1013.25 hPa for the station pressure", "This starts from 1013.25 hPa: the anchor is the station pressure at the barometer.", (inputs2, constants) => value12({ ...inputs2, stationPressure: 101325, pressureTendency: 0 }, constants)),
+    slip("standard-pressure", "1013.25 hPa for the station pressure", "This starts from 1013.25 hPa: the anchor is the station pressure at the barometer.", (inputs2, constants) => value13({ ...inputs2, stationPressure: 101325, pressureTendency: 0 }, constants)),
     slip("pressure-altitude", "pressure altitude for height", "This is the pressure altitude, the height in the standard atmosphere: asked is the height above the launch point.", (inputs2) => standardHeight(pascal(p5(inputs2)))),
-    celsiusSlip(value12, "meanVirtualTemperature"),
+    celsiusSlip(value13, "meanVirtualTemperature"),
     fineSlip("fixed-anchor", "pressure of the launch throughout", "This keeps the station pressure of the launch: it has changed since.", without("pressureTendency")),
     fineSlip("offset-left-in", "offset left in", "This leaves in the offset that the sonde showed on the ground.", without("pressureOffset")),
     fineSlip("offset-sign", "offset added", "This adds the sonde’s offset where it has to be taken off.", turned("pressureOffset")),
@@ -2613,10 +2668,10 @@ function straightLine(x, y) {
 }
 function mean(values) {
   let sum = 0;
-  for (const value19 of values) sum += value19;
+  for (const value23 of values) sum += value23;
   const first3 = sum / values.length;
   let rest = 0;
-  for (const value19 of values) rest += value19 - first3;
+  for (const value23 of values) rest += value23 - first3;
   return first3 + rest / values.length;
 }
 
@@ -2649,7 +2704,7 @@ var p6 = (inputs2) => seriesOf(inputs2, "pressure");
 var T5 = (inputs2) => seriesOf(inputs2, "temperature");
 var bottom2 = (inputs2) => pascal(p6(inputs2)[0] ?? NaN);
 var top2 = (inputs2) => pascal(p6(inputs2)[p6(inputs2).length - 1] ?? NaN);
-var value13 = (inputs2, constants) => hypsometricThickness(bottom2(inputs2), top2(inputs2), logPressureMean(p6(inputs2), T5(inputs2)), constants);
+var value14 = (inputs2, constants) => hypsometricThickness(bottom2(inputs2), top2(inputs2), logPressureMean(p6(inputs2), T5(inputs2)), constants);
 var hypsometricThicknessOfLevelsDefinition = oneFormula({
   key: "hypsometric-thickness-of-levels",
   name: "hypsometric thickness of a layer from its levels",
@@ -2667,7 +2722,7 @@ var hypsometricThicknessOfLevelsDefinition = oneFormula({
     knownError: "g 9.81 or 9.80665: 2 m in 1000–500 hPa"
   },
   ask: "The thickness Δz between the lowest and the highest level by the hypsometric equation, each layer between two levels with the mean of their virtual temperatures in kelvin.",
-  value: value13,
+  value: value14,
   working(inputs2, constants, result2) {
     const average = logPressureMean(p6(inputs2), T5(inputs2)), ratio2 = log(bottom2(inputs2) / top2(inputs2));
     return [
@@ -2694,7 +2749,7 @@ var hypsometricThicknessOfLevelsDefinition = oneFormula({
 // shared/thermo/quantities/layerMeanTemperature.ts
 var p7 = (inputs2) => seriesOf(inputs2, "pressure");
 var T6 = (inputs2) => seriesOf(inputs2, "temperature");
-var value14 = (inputs2) => logPressureMean(p7(inputs2), T6(inputs2));
+var value15 = (inputs2) => logPressureMean(p7(inputs2), T6(inputs2));
 function pressureMean(pressures2, temperatures) {
   let sum = 0;
   for (let at = 1; at < pressures2.length; at++) sum += ((pressures2[at - 1] ?? NaN) - (pressures2[at] ?? NaN)) * ((temperatures[at - 1] ?? NaN) + (temperatures[at] ?? NaN)) / 2;
@@ -2717,7 +2772,7 @@ var layerMeanTemperatureDefinition = oneFormula({
     knownError: "what the temperature does between the levels"
   },
   ask: "The mean temperature T̄ of the layer, weighted by the logarithm of pressure: between two levels the mean of both, over all levels that are given.",
-  value: value14,
+  value: value15,
   working(inputs2, _constants, result2) {
     const pressures2 = p7(inputs2), first3 = pressures2[0] ?? NaN, last = pressures2[pressures2.length - 1] ?? NaN, depth = log(first3 / last);
     return [
@@ -2744,7 +2799,7 @@ function layerMeanVirtualTemperature(bottom3, top4, thickness, constants) {
 var p1 = (inputs2) => numberOf(inputs2, "pressureBottom");
 var p22 = (inputs2) => numberOf(inputs2, "pressureTop");
 var dz = (inputs2) => numberOf(inputs2, "thickness");
-var value15 = (inputs2, constants) => layerMeanVirtualTemperature(p1(inputs2), p22(inputs2), dz(inputs2), constants);
+var value16 = (inputs2, constants) => layerMeanVirtualTemperature(p1(inputs2), p22(inputs2), dz(inputs2), constants);
 var layerMeanVirtualTemperatureDefinition = oneFormula({
   key: "layer-mean-virtual-temperature",
   name: "mean virtual temperature of a layer from its thickness",
@@ -2762,7 +2817,7 @@ var layerMeanVirtualTemperatureDefinition = oneFormula({
     knownError: "g 9.81 or 9.80665, R 287 to 287.05: 0.15 K"
   },
   ask: "The mean virtual temperature T̄v of the layer from its thickness, by the hypsometric equation.",
-  value: value15,
+  value: value16,
   working(inputs2, constants, result2) {
     const ratio2 = log(p1(inputs2) / p22(inputs2));
     return [
@@ -2783,7 +2838,7 @@ var layerMeanVirtualTemperatureDefinition = oneFormula({
 
 // shared/thermo/quantities/pressureAltitude.ts
 var p8 = (inputs2) => numberOf(inputs2, "pressure");
-var value16 = (inputs2) => standardHeight(pascal(p8(inputs2)));
+var value17 = (inputs2) => standardHeight(pascal(p8(inputs2)));
 var { gravity, gasConstant, temperature: temperature2, pressure: groundPressure } = standardConstants;
 var pressureAltitudeDefinition = oneFormula({
   key: "pressure-altitude",
@@ -2803,7 +2858,7 @@ var pressureAltitudeDefinition = oneFormula({
     knownError: "R 287.05 for 287.05287: 0.3 m at 3 km"
   },
   ask: "The pressure altitude: the geopotential height at which the standard atmosphere has the pressure. It is not the height of the instrument.",
-  value: value16,
+  value: value17,
   working(inputs2, _constants, result2) {
     const shown3 = texNumber(p8(inputs2) / 100, 6);
     if (result2 <= 11e3) {
@@ -2830,7 +2885,7 @@ var pressureAltitudeDefinition = oneFormula({
 var p9 = (inputs2) => numberOf(inputs2, "pressure");
 var Tv3 = (inputs2) => numberOf(inputs2, "meanVirtualTemperature");
 var dz2 = (inputs2) => numberOf(inputs2, "heightDifference");
-var value17 = (inputs2, constants) => pressureAtHeight(pascal(p9(inputs2)), meter(dz2(inputs2)), kelvin(Tv3(inputs2)), constants);
+var value18 = (inputs2, constants) => pressureAtHeight(pascal(p9(inputs2)), meter(dz2(inputs2)), kelvin(Tv3(inputs2)), constants);
 var pressureAtHeightDefinition = oneFormula({
   key: "pressure-at-height",
   name: "pressure at a height above a level",
@@ -2852,7 +2907,7 @@ var pressureAtHeightDefinition = oneFormula({
     knownError: "g 9.81 or 9.80665: 0.03 % of Δz"
   },
   ask: "The pressure p₂ at the height Δz above the level, by the hypsometric equation with the mean virtual temperature in kelvin.",
-  value: value17,
+  value: value18,
   working(inputs2, constants, result2) {
     const scale = constant(constants, "R") * Tv3(inputs2) / constant(constants, "g");
     return [
@@ -2862,14 +2917,14 @@ var pressureAtHeightDefinition = oneFormula({
   },
   slips: [
     slip("sign", "higher where it is lower", "Pressure falls with height: your value goes the other way.", (inputs2, _c, right) => p9(inputs2) * p9(inputs2) / right),
-    celsiusSlip(value17, "meanVirtualTemperature"),
-    feetSlip(value17, "heightDifference"),
+    celsiusSlip(value18, "meanVirtualTemperature"),
+    feetSlip(value18, "heightDifference"),
     slip("linear", "first term of the exponential", "This takes 1 − x for the exponential of −x: the density falls along the way.", (inputs2, _c, right) => p9(inputs2) * (1 + log(right / p9(inputs2)))),
     slip("base-10", "10 to the power for e", "This raises 10 where the formula raises e.", (inputs2, constants) => {
-      const wrong = value17({ ...inputs2, heightDifference: dz2(inputs2) * 2.302585092994046 }, constants);
+      const wrong = value18({ ...inputs2, heightDifference: dz2(inputs2) * 2.302585092994046 }, constants);
       return Number.isFinite(wrong) ? wrong : null;
     }),
-    vaporConstantSlip(value17),
+    vaporConstantSlip(value18),
     slip("eight-meters", "1 hPa for each 8 m", "This takes 1 hPa for each 8 m of height, a rule for the lowest few hundred meters.", (inputs2) => p9(inputs2) - dz2(inputs2) / 8 * 100)
   ],
   example: { inputs: { pressure: 1e5, heightDifference: 1500, meanVirtualTemperature: 283.15 }, gives: 83437.1, within: 0.1 }
@@ -2880,7 +2935,7 @@ function scaleHeight(temperature6, constants) {
   return meter(constant(constants, "R") * temperature6 / constant(constants, "g"));
 }
 var T7 = (inputs2) => numberOf(inputs2, "temperature");
-var value18 = (inputs2, constants) => scaleHeight(kelvin(T7(inputs2)), constants);
+var value19 = (inputs2, constants) => scaleHeight(kelvin(T7(inputs2)), constants);
 var scaleHeightDefinition = oneFormula({
   key: "scale-height",
   name: "scale height of pressure",
@@ -2898,14 +2953,14 @@ var scaleHeightDefinition = oneFormula({
     knownError: "g 9.81 or 9.80665: 0.03 %"
   },
   ask: "The scale height H = R T/g of pressure in an isothermal column, with the temperature in kelvin.",
-  value: value18,
+  value: value19,
   working: (inputs2, constants, result2) => [
     worked("Scale height, with T in kelvin", "H = \\frac{R\\,T}{g}", `H = \\frac{${texNumber(constant(constants, "R"))} \\cdot ${texNumber(T7(inputs2), 6)}}{${texNumber(constant(constants, "g"), 6)}}`, result2, "m", { value: result2 / 1e3, unit: "km" })
   ],
   slips: [
-    celsiusSlip(value18, "temperature"),
-    vaporConstantSlip(value18),
-    otherConstantSlip(value18, "R", "cp"),
+    celsiusSlip(value19, "temperature"),
+    vaporConstantSlip(value19),
+    otherConstantSlip(value19, "R", "cp"),
     slip("meters-for-kilometers", "m given as km", "Your number is in meters; the unit beside it says kilometers.", (_i, _c, right) => right * 1e3),
     slip("not-divided", "not divided by g", "This is R T: divide it by g.", (_i, constants, right) => right * constant(constants, "g"))
   ],
@@ -2916,11 +2971,11 @@ var scaleHeightDefinition = oneFormula({
 function seaLevelReduction(of) {
   const from2 = of.to === "sea level" ? "stationPressure" : "seaLevelPressure";
   const sign = of.to === "sea level" ? -1 : 1;
-  const rate4 = of.mean === "isothermal" ? 0 : reductionLapseRate;
-  const p10 = (inputs2) => numberOf(inputs2, from2), T10 = (inputs2) => numberOf(inputs2, "stationTemperature"), z3 = (inputs2) => numberOf(inputs2, "stationHeight");
-  const through = (inputs2, constants, mean2, direction2 = sign) => pressureAtHeight(pascal(p10(inputs2)), meter(direction2 * z3(inputs2)), kelvin(mean2), constants);
-  const meanOf = (inputs2) => fictitiousMeanTemperature(kelvin(T10(inputs2)), meter(z3(inputs2)), rate4);
-  const value19 = (inputs2, constants) => through(inputs2, constants, meanOf(inputs2));
+  const rate7 = of.mean === "isothermal" ? 0 : reductionLapseRate;
+  const p10 = (inputs2) => numberOf(inputs2, from2), T11 = (inputs2) => numberOf(inputs2, "stationTemperature"), z4 = (inputs2) => numberOf(inputs2, "stationHeight");
+  const through = (inputs2, constants, mean2, direction2 = sign) => pressureAtHeight(pascal(p10(inputs2)), meter(direction2 * z4(inputs2)), kelvin(mean2), constants);
+  const meanOf = (inputs2) => fictitiousMeanTemperature(kelvin(T11(inputs2)), meter(z4(inputs2)), rate7);
+  const value23 = (inputs2, constants) => through(inputs2, constants, meanOf(inputs2));
   return oneFormula({
     key: of.key,
     name: of.name,
@@ -2942,21 +2997,21 @@ function seaLevelReduction(of) {
       knownError: "the mean temperature of air that is not there: 0.2 hPa at 320 m, 2 hPa at 1000 m"
     },
     ask: of.ask,
-    value: value19,
+    value: value23,
     working(inputs2, constants, result2) {
       const mean2 = meanOf(inputs2);
-      const first3 = of.mean === "isothermal" ? worked("Mean temperature of the fictitious layer: the station’s, isothermal", "\\overline{T} = T", "\\overline{T}", mean2, "K") : worked("Mean temperature of the fictitious layer, half way along 6.5 K km⁻¹", "\\overline{T} = T + \\tfrac12 \\cdot 0.0065\\,z", `\\overline{T} = ${texNumber(T10(inputs2), 6)} + \\tfrac12 \\cdot 0.0065 \\cdot ${texFactor(z3(inputs2), 6)}`, mean2, "K");
+      const first3 = of.mean === "isothermal" ? worked("Mean temperature of the fictitious layer: the station’s, isothermal", "\\overline{T} = T", "\\overline{T}", mean2, "K") : worked("Mean temperature of the fictitious layer, half way along 6.5 K km⁻¹", "\\overline{T} = T + \\tfrac12 \\cdot 0.0065\\,z", `\\overline{T} = ${texNumber(T11(inputs2), 6)} + \\tfrac12 \\cdot 0.0065 \\cdot ${texFactor(z4(inputs2), 6)}`, mean2, "K");
       const minus2 = sign > 0 ? "-" : "", symbols = of.to === "sea level" ? ["p_0", "p_s"] : ["p_s", "p_0"];
-      return [first3, worked("Hydrostatic balance through the layer", `${symbols[0]} = ${symbols[1]} \\exp\\frac{${minus2}g\\,z}{R\\,\\overline{T}}`, `${symbols[0]} = ${texNumber(p10(inputs2) / 100, 6)} \\exp\\frac{${minus2}${texNumber(constant(constants, "g"), 6)} \\cdot ${texFactor(z3(inputs2), 6)}}{${texNumber(constant(constants, "R"))} \\cdot ${texNumber(mean2, 6)}}`, result2, "Pa", { value: result2 / 100, unit: "hPa" })];
+      return [first3, worked("Hydrostatic balance through the layer", `${symbols[0]} = ${symbols[1]} \\exp\\frac{${minus2}g\\,z}{R\\,\\overline{T}}`, `${symbols[0]} = ${texNumber(p10(inputs2) / 100, 6)} \\exp\\frac{${minus2}${texNumber(constant(constants, "g"), 6)} \\cdot ${texFactor(z4(inputs2), 6)}}{${texNumber(constant(constants, "R"))} \\cdot ${texNumber(mean2, 6)}}`, result2, "Pa", { value: result2 / 100, unit: "hPa" })];
     },
     slips: [
       slip("wrong-way", "reduced the other way", "Sea level has the higher pressure of the two: your value goes the other way.", (inputs2, constants) => through(inputs2, constants, meanOf(inputs2), -sign)),
-      celsiusSlip(value19, "stationTemperature"),
-      feetSlip(value19, "stationHeight"),
-      fineSlip("linear", "first term of the exponential", "This takes 1 + x for the exponential of x.", (inputs2, constants) => p10(inputs2) * (1 - sign * constant(constants, "g") * z3(inputs2) / (constant(constants, "R") * meanOf(inputs2)))),
-      fineSlip("other-mean", of.mean === "isothermal" ? "6.5 K km⁻¹ for isothermal" : "isothermal for 6.5 K km⁻¹", of.mean === "isothermal" ? "This takes the mean temperature along 6.5 K km⁻¹: here the layer is isothermal." : "This takes the station’s temperature for the whole layer: here it rises downwards at 6.5 K km⁻¹.", (inputs2, constants) => through(inputs2, constants, fictitiousMeanTemperature(kelvin(T10(inputs2)), meter(z3(inputs2)), reductionLapseRate - rate4))),
-      ...of.mean === "isothermal" ? [] : [fineSlip("lapse-sign", "cooled downwards", "This cools the fictitious air downwards: it is warmer below.", (inputs2, constants) => through(inputs2, constants, fictitiousMeanTemperature(kelvin(T10(inputs2)), meter(z3(inputs2)), -reductionLapseRate)))],
-      otherConstantSlip(value19, "R", "cp"),
+      celsiusSlip(value23, "stationTemperature"),
+      feetSlip(value23, "stationHeight"),
+      fineSlip("linear", "first term of the exponential", "This takes 1 + x for the exponential of x.", (inputs2, constants) => p10(inputs2) * (1 - sign * constant(constants, "g") * z4(inputs2) / (constant(constants, "R") * meanOf(inputs2)))),
+      fineSlip("other-mean", of.mean === "isothermal" ? "6.5 K km⁻¹ for isothermal" : "isothermal for 6.5 K km⁻¹", of.mean === "isothermal" ? "This takes the mean temperature along 6.5 K km⁻¹: here the layer is isothermal." : "This takes the station’s temperature for the whole layer: here it rises downwards at 6.5 K km⁻¹.", (inputs2, constants) => through(inputs2, constants, fictitiousMeanTemperature(kelvin(T11(inputs2)), meter(z4(inputs2)), reductionLapseRate - rate7))),
+      ...of.mean === "isothermal" ? [] : [fineSlip("lapse-sign", "cooled downwards", "This cools the fictitious air downwards: it is warmer below.", (inputs2, constants) => through(inputs2, constants, fictitiousMeanTemperature(kelvin(T11(inputs2)), meter(z4(inputs2)), -reductionLapseRate)))],
+      otherConstantSlip(value23, "R", "cp"),
       slip("pascal-for-hectopascal", "Pa given as hPa", "Your number is in pascal; the unit beside it says hectopascal.", (_i, _c, right) => right * 100)
     ],
     example: of.example
@@ -2993,8 +3048,8 @@ function standardAtmosphereQuantity(of) {
   const isGeometric = of.by === "geometric";
   const name = isGeometric ? "geometricHeight" : "geopotentialHeight";
   const [unit, shownUnit] = units2[of.of];
-  const heightOf2 = (inputs2) => isGeometric ? geopotentialOfGeometric(meter(numberOf(inputs2, name)), earthRadius) : meter(numberOf(inputs2, name));
-  const value19 = (inputs2) => standardAtmosphere(heightOf2(inputs2))[of.of];
+  const heightOf3 = (inputs2) => isGeometric ? geopotentialOfGeometric(meter(numberOf(inputs2, name)), earthRadius) : meter(numberOf(inputs2, name));
+  const value23 = (inputs2) => standardAtmosphere(heightOf3(inputs2))[of.of];
   return oneFormula({
     key: of.key,
     name: of.name,
@@ -3012,9 +3067,9 @@ function standardAtmosphereQuantity(of) {
       knownError: "R 287.05 for 287.05287: 0.03 % of the pressure"
     },
     ask: of.ask,
-    value: value19,
+    value: value23,
     working(inputs2, _constants, result2) {
-      const height2 = heightOf2(inputs2), air = standardAtmosphere(height2);
+      const height2 = heightOf3(inputs2), air = standardAtmosphere(height2);
       const steps2 = [];
       if (isGeometric) steps2.push(worked("Geopotential height", "H = \\frac{a\\,z}{a + z}", `H = \\frac{${texNumber(earthRadius, 7)} \\cdot ${texFactor(numberOf(inputs2, name), 6)}}{${texNumber(earthRadius, 7)} + ${texFactor(numberOf(inputs2, name), 6)}}`, height2, "m", void 0, 7));
       steps2.push(...temperatureSteps(height2, air));
@@ -3022,7 +3077,7 @@ function standardAtmosphereQuantity(of) {
       if (of.of === "density") steps2.push(worked("Density by the equation of state, with the standard’s R", "\\rho = \\frac{p}{R\\,T}", `\\rho = \\frac{${texNumber(air.pressure, 7)}}{${texNumber(gasConstant2, 8)} \\cdot ${texNumber(air.temperature, 6)}}`, result2, unit));
       return of.of === "temperature" ? steps2.map((step, at) => at < steps2.length - 1 ? step : { ...step, filled: `${step.filled} = ${texQuantity(result2 - zeroCelsius, "Cel")}` }) : steps2;
     },
-    slips: slipsOf(of, name, value19, heightOf2),
+    slips: slipsOf(of, name, value23, heightOf3),
     example: of.example
   });
 }
@@ -3042,22 +3097,22 @@ function pressureStep(height2, air) {
   }
   return worked("Pressure, hydrostatic with a constant lapse rate above 20 km", "p = p_{20} \\left(\\frac{216.65}{T}\\right)^{g_0/(0.001\\,R)}", `p = ${texNumber(base.pressure / 100, 6)} \\left(\\frac{216.65}{${texNumber(air.temperature, 6)}}\\right)^{${texNumber(gravity2 / (gasConstant2 * 1e-3), 6)}}`, air.pressure, "Pa", shown3);
 }
-function slipsOf(of, name, value19, heightOf2) {
+function slipsOf(of, name, value23, heightOf3) {
   const { of: what } = of;
-  const slips = [feetSlip(value19, name)];
+  const slips = [feetSlip(value23, name)];
   if (what === "temperature") {
     slips.push(
       slip("sign", "warmed where it cools", "The standard atmosphere is colder aloft: your value goes the other way.", (_i, _c, right) => 2 * groundTemperature - right),
-      slip("dry-adiabat", "9.8 K km⁻¹ for 6.5", "This comes from the dry adiabatic lapse rate: the standard atmosphere has 6.5 K km⁻¹.", (inputs2) => groundTemperature - 98e-4 * heightOf2(inputs2)),
-      slip("no-tropopause", "6.5 K km⁻¹ beyond 11 km", "This goes on with 6.5 K km⁻¹ above 11 km, where the temperature of the standard atmosphere stays.", (inputs2) => heightOf2(inputs2) > tropopause ? groundTemperature - 65e-4 * heightOf2(inputs2) : null),
+      slip("dry-adiabat", "9.8 K km⁻¹ for 6.5", "This comes from the dry adiabatic lapse rate: the standard atmosphere has 6.5 K km⁻¹.", (inputs2) => groundTemperature - 98e-4 * heightOf3(inputs2)),
+      slip("no-tropopause", "6.5 K km⁻¹ beyond 11 km", "This goes on with 6.5 K km⁻¹ above 11 km, where the temperature of the standard atmosphere stays.", (inputs2) => heightOf3(inputs2) > tropopause ? groundTemperature - 65e-4 * heightOf3(inputs2) : null),
       endUnitSlip("Cel")
     );
     return slips;
   }
-  const isothermal = (inputs2, temperature6) => groundPressure2 * exp(-gravity2 * heightOf2(inputs2) / (gasConstant2 * temperature6)) / (what === "density" ? gasConstant2 * standardAtmosphere(meter(heightOf2(inputs2))).temperature : 1);
+  const isothermal = (inputs2, temperature6) => groundPressure2 * exp(-gravity2 * heightOf3(inputs2) / (gasConstant2 * temperature6)) / (what === "density" ? gasConstant2 * standardAtmosphere(meter(heightOf3(inputs2))).temperature : 1);
   slips.push(
     slip("isothermal", "one temperature throughout", "This takes 288.15 K all the way up: the standard atmosphere is colder aloft.", (inputs2) => isothermal(inputs2, groundTemperature)),
-    slip("local-temperature", "temperature of the level for the mean", "This takes the temperature at the level for the whole way to it.", (inputs2) => isothermal(inputs2, standardAtmosphere(meter(heightOf2(inputs2))).temperature))
+    slip("local-temperature", "temperature of the level for the mean", "This takes the temperature at the level for the whole way to it.", (inputs2) => isothermal(inputs2, standardAtmosphere(meter(heightOf3(inputs2))).temperature))
   );
   if (what === "pressure") {
     slips.push(
@@ -3066,7 +3121,7 @@ function slipsOf(of, name, value19, heightOf2) {
     );
   } else {
     slips.push(
-      slip("ground-temperature", "temperature of the ground", "This puts the temperature of the ground into the equation of state.", (inputs2, _c, right) => right * standardAtmosphere(meter(heightOf2(inputs2))).temperature / groundTemperature),
+      slip("ground-temperature", "temperature of the ground", "This puts the temperature of the ground into the equation of state.", (inputs2, _c, right) => right * standardAtmosphere(meter(heightOf3(inputs2))).temperature / groundTemperature),
       slip("hectopascal-for-pascal", "hPa put in for Pa", "This is what comes out with the pressure in hPa.", (_i, _c, right) => right / 100)
     );
   }
@@ -3162,6 +3217,43 @@ var stationPressureIsothermalDefinition = seaLevelReduction({
   example: { inputs: { seaLevelPressure: 101325, stationHeight: 320, stationTemperature: 283.15 }, gives: 97485.49, within: 0.01 }
 });
 
+// shared/thermo/quantities/geopotential.ts
+var z3 = (inputs2) => numberOf(inputs2, "geometricHeight");
+var heightOf = (inputs2, constants) => geopotentialOfGeometric(meter(z3(inputs2)), constant(constants, "earthRadius"));
+var value20 = (inputs2, constants) => constant(constants, "g") * heightOf(inputs2, constants);
+var geopotentialDefinition = oneFormula({
+  key: "geopotential",
+  name: "geopotential of a geometric height",
+  symbol: "Φ",
+  unit: "J/kg",
+  shownUnit: "kJ/kg",
+  kind: "difference",
+  nearZero: 100,
+  inputs: [lengthInput("geometricHeight", "geometric height above mean sea level", "z", [-500, 1e5])],
+  constants: ["earthRadius", "g"],
+  formula: {
+    key: "inverse-square",
+    label: "g a z/(a + z)",
+    source: { text: "U.S. Standard Atmosphere 1976, Eqs. 14 to 18", status: "from memory" },
+    validity: "gravity that falls by the square of the distance from the earth’s center",
+    knownError: "g 9.80665 or 9.81: 0.03 %; radius 6356.766 or 6371 km: 0.04 m at 10 km"
+  },
+  ask: "The geopotential Φ of the geometric height z above mean sea level, with gravity that falls by the square of the distance from the earth’s center.",
+  value: value20,
+  working: (inputs2, constants, result2) => [
+    worked("Geopotential height: gravity falls by the square of the distance from the earth’s center", "H = \\frac{a\\,z}{a + z}", `H = \\frac{${texNumber(constant(constants, "earthRadius"), 7)} \\cdot ${texFactor(z3(inputs2), 7)}}{${texNumber(constant(constants, "earthRadius"), 7)} + ${texFactor(z3(inputs2), 7)}}`, heightOf(inputs2, constants), "m", void 0, 7),
+    worked("Geopotential", "\\Phi = g\\,H", `\\Phi = ${texNumber(constant(constants, "g"), 6)} \\cdot ${texFactor(heightOf(inputs2, constants), 7)}`, result2, "J/kg", { value: result2 / 1e3, unit: "kJ/kg" }, 6)
+  ],
+  slips: [
+    fineSlip("constant-gravity", "gravity taken for constant", "This is g z, with gravity taken for constant: it falls with height.", (inputs2, constants) => constant(constants, "g") * z3(inputs2)),
+    slip("height", "the geopotential height itself", "This is the geopotential height: multiply it by g.", (_i, constants, right) => right / constant(constants, "g")),
+    joulesSlip,
+    kilojoulesSlip,
+    feetSlip(value20, "geometricHeight")
+  ],
+  example: { inputs: { geometricHeight: 1e4 }, gives: 97945.91, within: 0.01 }
+});
+
 // shared/thermo/groups/hydrostatics.ts
 var hydrostatics = {
   key: "hydrostatics",
@@ -3182,6 +3274,7 @@ var hydrostatics = {
     autoconvectiveLapseRateDefinition,
     geopotentialHeightDefinition,
     geometricHeightDefinition,
+    geopotentialDefinition,
     standardAtmosphereTemperatureDefinition,
     standardAtmospherePressureDefinition,
     standardAtmosphereDensityDefinition,
@@ -3209,8 +3302,8 @@ function takeLeading(scaledValue, length2) {
   const top4 = scaledValue >> BigInt(shift2);
   return { part: timesTwoTo(Number(top4), shift2 - Number(bits)), rest: scaledValue - (top4 << BigInt(shift2)) };
 }
-function timesTwoTo(value19, exponent2) {
-  let x = value19;
+function timesTwoTo(value23, exponent2) {
+  let x = value23;
   for (let n = exponent2; n < 0; n++) x /= 2;
   for (let n = exponent2; n > 0; n--) x *= 2;
   return x;
@@ -3252,9 +3345,9 @@ function reduceExactly(x) {
     whole *= 2;
     shift2 -= 1n;
   }
-  const value19 = BigInt(whole) << bits + shift2;
-  let n = value19 / halfPiScaled;
-  let rest = value19 - n * halfPiScaled;
+  const value23 = BigInt(whole) << bits + shift2;
+  let n = value23 / halfPiScaled;
+  let rest = value23 - n * halfPiScaled;
   if (2n * rest > halfPiScaled) {
     n += 1n;
     rest -= halfPiScaled;
@@ -3273,33 +3366,33 @@ for (let n = 1; n <= 20; n++) factorial.push((factorial[n - 1] ?? 1) * n);
 var per = (n) => 1 / (factorial[n] ?? 1);
 var s = [3, 5, 7, 9, 11, 13, 15, 17, 19].map((n, at) => at % 2 === 0 ? -per(n) : per(n));
 var c = [4, 6, 8, 10, 12, 14, 16, 18, 20].map((n, at) => at % 2 === 0 ? per(n) : -per(n));
-function polynomial(coefficients, z3) {
+function polynomial(coefficients, z4) {
   let sum = 0;
-  for (let n = coefficients.length - 1; n >= 0; n--) sum = sum * z3 + (coefficients[n] ?? 0);
+  for (let n = coefficients.length - 1; n >= 0; n--) sum = sum * z4 + (coefficients[n] ?? 0);
   return sum;
 }
 function sinOfRest() {
-  const z3 = restHi * restHi;
-  return restHi + (restHi * z3 * polynomial(s, z3) + restLo * (1 - 0.5 * z3));
+  const z4 = restHi * restHi;
+  return restHi + (restHi * z4 * polynomial(s, z4) + restLo * (1 - 0.5 * z4));
 }
 function cosOfRest() {
-  const z3 = restHi * restHi;
-  const half = 0.5 * z3;
+  const z4 = restHi * restHi;
+  const half = 0.5 * z4;
   const w2 = 1 - half;
-  return w2 + (1 - w2 - half + (z3 * z3 * polynomial(c, z3) - restHi * restLo));
+  return w2 + (1 - w2 - half + (z4 * z4 * polynomial(c, z4) - restHi * restLo));
 }
 function sin(x) {
   if (!Number.isFinite(x)) return NaN;
   if (x === 0) return x;
   reduce(x);
-  const value19 = quadrant % 2 === 0 ? sinOfRest() : cosOfRest();
-  return quadrant < 2 ? value19 : -value19;
+  const value23 = quadrant % 2 === 0 ? sinOfRest() : cosOfRest();
+  return quadrant < 2 ? value23 : -value23;
 }
 function cos(x) {
   if (!Number.isFinite(x)) return NaN;
   reduce(x);
-  const value19 = quadrant % 2 === 0 ? cosOfRest() : sinOfRest();
-  return quadrant === 0 || quadrant === 3 ? value19 : -value19;
+  const value23 = quadrant % 2 === 0 ? cosOfRest() : sinOfRest();
+  return quadrant === 0 || quadrant === 3 ? value23 : -value23;
 }
 var arcHi = new Float64Array(65);
 var arcLo = new Float64Array(65);
@@ -3327,8 +3420,8 @@ function arcInto(a, b) {
   const at = k / 64;
   const below = 1 + t * at;
   const u = (t - at + tLo) / below;
-  const z3 = u * u;
-  const series3 = u * z3 * (-1 / 3 + z3 * (1 / 5 + z3 * (-1 / 7 + z3 * (1 / 9 - z3 * (1 / 11)))));
+  const z4 = u * u;
+  const series3 = u * z4 * (-1 / 3 + z4 * (1 / 5 + z4 * (-1 / 7 + z4 * (1 / 9 - z4 * (1 / 11)))));
   const uProduct = u * below;
   const belowLo = productError(t, at, t * at) + sumError(1, t * at, below);
   const uLo = (t - at - uProduct - productError(u, below, uProduct) + tLo - u * belowLo) / below;
@@ -3453,8 +3546,8 @@ function windComponentDefinition(part) {
     constants: [],
     ask: `The ${towards} component ${part} of the wind, positive where the air moves ${isEastward ? "to the east" : "to the north"}; the direction is that from which the wind comes, clockwise from north.`,
     trace(inputs2) {
-      const s2 = numberOf(inputs2, "windSpeed"), d = numberOf(inputs2, "windDirection"), value19 = windComponents(s2, d)[part];
-      return [{ text: `${isEastward ? "Eastward" : "Northward"} component`, formula: `${part} = -s ${functionTex} d`, filled: `${part} = -${texNumber(s2)} ${functionTex} ${texNumber(d / perDegree)}^{\\circ}\\,\\mathrm{m\\,s^{-1}} = ${texQuantity(value19, "m/s")}`, value: value19, unit: "m/s" }];
+      const s2 = numberOf(inputs2, "windSpeed"), d = numberOf(inputs2, "windDirection"), value23 = windComponents(s2, d)[part];
+      return [{ text: `${isEastward ? "Eastward" : "Northward"} component`, formula: `${part} = -s ${functionTex} d`, filled: `${part} = -${texNumber(s2)} ${functionTex} ${texNumber(d / perDegree)}^{\\circ}\\,\\mathrm{m\\,s^{-1}} = ${texQuantity(value23, "m/s")}`, value: value23, unit: "m/s" }];
     },
     slips: [
       slip("sign", "sign turned round", "The direction is where the wind comes from: the air moves the other way.", (_i, _c, right) => -right),
@@ -3517,8 +3610,8 @@ var frictionVelocityDefinition = {
   constants: ["vonKarman"],
   ask: "The friction velocity u_* = k (u₂ − u₁) / ln[(z₂ − d)/(z₁ − d)] from the wind at two heights; d is 0 where no displacement height is given.",
   trace(inputs2, constants) {
-    const { low, high: high2, lowSpeed, highSpeed } = twoHeightsOf(inputs2), value19 = frictionVelocity(twoHeightsOf(inputs2), constants);
-    return [{ text: "Friction velocity", formula: "u_* = \\frac{k (u_2 - u_1)}{\\ln (z_2 / z_1)}", filled: `u_* = \\frac{${texNumber(constant(constants, "vonKarman"))} \\times ${texFactor(highSpeed - lowSpeed)}}{\\ln (${texNumber(high2)} / ${texNumber(low)})}\\,\\mathrm{m\\,s^{-1}} = ${texQuantity(value19, "m/s")}`, value: value19, unit: "m/s" }];
+    const { low, high: high2, lowSpeed, highSpeed } = twoHeightsOf(inputs2), value23 = frictionVelocity(twoHeightsOf(inputs2), constants);
+    return [{ text: "Friction velocity", formula: "u_* = \\frac{k (u_2 - u_1)}{\\ln (z_2 / z_1)}", filled: `u_* = \\frac{${texNumber(constant(constants, "vonKarman"))} \\times ${texFactor(highSpeed - lowSpeed)}}{\\ln (${texNumber(high2)} / ${texNumber(low)})}\\,\\mathrm{m\\,s^{-1}} = ${texQuantity(value23, "m/s")}`, value: value23, unit: "m/s" }];
   },
   slips: [
     signSlip("The sign is turned round: one of the differences is taken upside down."),
@@ -3571,25 +3664,25 @@ var lagCorrectedTemperatureDefinition = {
   constants: [],
   ask: "The air temperature T = T_i + τ dT_i/dt from the indication of a first-order sensor.",
   trace(inputs2) {
-    const { indicated, rate: rate4, timeConstant } = given(inputs2), value19 = lagCorrected(given(inputs2));
+    const { indicated, rate: rate7, timeConstant } = given(inputs2), value23 = lagCorrected(given(inputs2));
     return [
-      { text: "Correction", formula: "\\tau \\frac{dT_i}{dt}", filled: `${texNumber(timeConstant)}\\,\\mathrm{s} \\times ${texFactor(rate4)}\\,\\mathrm{K\\,s^{-1}} = ${texQuantity(timeConstant * rate4, "K")}`, value: timeConstant * rate4, unit: "K" },
-      { text: "Air temperature", formula: "T = T_i + \\tau \\frac{dT_i}{dt}", filled: `T = ${texQuantity(indicated - zeroCelsius, "Cel")} + ${texFactor(timeConstant * rate4)}\\,\\mathrm{K} = ${texQuantity(value19 - zeroCelsius, "Cel")}`, value: value19, unit: "K" }
+      { text: "Correction", formula: "\\tau \\frac{dT_i}{dt}", filled: `${texNumber(timeConstant)}\\,\\mathrm{s} \\times ${texFactor(rate7)}\\,\\mathrm{K\\,s^{-1}} = ${texQuantity(timeConstant * rate7, "K")}`, value: timeConstant * rate7, unit: "K" },
+      { text: "Air temperature", formula: "T = T_i + \\tau \\frac{dT_i}{dt}", filled: `T = ${texQuantity(indicated - zeroCelsius, "Cel")} + ${texFactor(timeConstant * rate7)}\\,\\mathrm{K} = ${texQuantity(value23 - zeroCelsius, "Cel")}`, value: value23, unit: "K" }
     ];
   },
   slips: [
     slip("sign-of-correction", "correction with its sign turned", "The correction has its sign turned: a sensor that falls is still too warm.", (inputs2) => {
-      const { indicated, rate: rate4, timeConstant } = given(inputs2);
-      return indicated - timeConstant * rate4;
+      const { indicated, rate: rate7, timeConstant } = given(inputs2);
+      return indicated - timeConstant * rate7;
     }),
     slip("rate-alone", "rate without the time constant", "The rate has to be multiplied by the time constant.", (inputs2) => given(inputs2).indicated + given(inputs2).rate),
     slip("divided", "rate divided by the time constant", "The rate is divided by the time constant: multiply.", (inputs2) => {
-      const { indicated, rate: rate4, timeConstant } = given(inputs2);
-      return timeConstant > 0 ? indicated + rate4 / timeConstant : null;
+      const { indicated, rate: rate7, timeConstant } = given(inputs2);
+      return timeConstant > 0 ? indicated + rate7 / timeConstant : null;
     }),
     slip("per-minute", "rate per minute", "The rate went in per minute: per second is needed.", (inputs2) => {
-      const { indicated, rate: rate4, timeConstant } = given(inputs2);
-      return indicated + timeConstant * rate4 * 60;
+      const { indicated, rate: rate7, timeConstant } = given(inputs2);
+      return indicated + timeConstant * rate7 * 60;
     })
   ],
   example: { inputs: { indicatedTemperature: 285.55, indicatedRate: -0.03, timeConstant: 12 }, gives: 285.19, within: 1e-9 }
@@ -3621,16 +3714,16 @@ var lagCorrectedTemperatureInFlightDefinition = {
   constants: [],
   ask: "The air temperature T = T_i − τ w Γ_i from the indication of a first-order sensor in flight, with the vertical speed w positive on ascent and the indicated lapse rate Γ_i positive where the indication falls with height.",
   trace(inputs2) {
-    const { indicated, rate: rate4, timeConstant } = given2(inputs2), value19 = corrected2(inputs2);
+    const { indicated, rate: rate7, timeConstant } = given2(inputs2), value23 = corrected2(inputs2);
     return [
-      { text: "How fast the indication changes", formula: "\\frac{dT_i}{dt} = -w\\,\\Gamma_i", filled: `\\frac{dT_i}{dt} = ${texQuantity(rate4, "K/s")}`, value: rate4, unit: "K/s" },
-      { text: "Air temperature", formula: "T = T_i + \\tau \\frac{dT_i}{dt}", filled: `T = ${texQuantity(indicated - zeroCelsius, "Cel")} + ${texNumber(timeConstant)} \\times ${texFactor(rate4)}\\,\\mathrm{K} = ${texQuantity(value19 - zeroCelsius, "Cel")}`, value: value19, unit: "K" }
+      { text: "How fast the indication changes", formula: "\\frac{dT_i}{dt} = -w\\,\\Gamma_i", filled: `\\frac{dT_i}{dt} = ${texQuantity(rate7, "K/s")}`, value: rate7, unit: "K/s" },
+      { text: "Air temperature", formula: "T = T_i + \\tau \\frac{dT_i}{dt}", filled: `T = ${texQuantity(indicated - zeroCelsius, "Cel")} + ${texNumber(timeConstant)} \\times ${texFactor(rate7)}\\,\\mathrm{K} = ${texQuantity(value23 - zeroCelsius, "Cel")}`, value: value23, unit: "K" }
     ];
   },
   slips: [
     fineSlip("sign-of-correction", "correction with its sign turned", "The correction has its sign turned: on ascent through air that cools with height the sensor is too warm.", (inputs2) => {
-      const { indicated, rate: rate4, timeConstant } = given2(inputs2);
-      return indicated - timeConstant * rate4;
+      const { indicated, rate: rate7, timeConstant } = given2(inputs2);
+      return indicated - timeConstant * rate7;
     }),
     fineSlip("speed-left-out", "vertical speed left out", "The vertical speed is left out.", (inputs2) => given2(inputs2).indicated - given2(inputs2).timeConstant * numberOf(inputs2, "indicatedLapseRate")),
     fineSlip("time-constant-left-out", "time constant left out", "The time constant is left out.", (inputs2) => given2(inputs2).indicated + given2(inputs2).rate),
@@ -3662,14 +3755,14 @@ var logarithmicWindSpeedDefinition = {
   constants: ["vonKarman"],
   ask: "The wind speed u = (u_*/k) ln[(z − d)/z₀] of the neutral logarithmic profile; d is 0 where no displacement height is given.",
   trace(inputs2, constants) {
-    const height2 = heightOf(inputs2), value19 = speed(inputs2, constants), k = constant(constants, "vonKarman");
+    const height2 = heightOf2(inputs2), value23 = speed(inputs2, constants), k = constant(constants, "vonKarman");
     return [
       { text: "Height above the displacement height", formula: "z - d", filled: `z - d = ${texQuantity(height2, "m")}`, value: height2, unit: "m" },
-      { text: "Wind speed", formula: "u = \\frac{u_*}{k} \\ln \\frac{z - d}{z_0}", filled: `u = \\frac{${texNumber(numberOf(inputs2, "frictionVelocity"))}}{${texNumber(k)}} \\ln \\frac{${texNumber(height2)}}{${texNumber(numberOf(inputs2, "roughnessLength"))}}\\,\\mathrm{m\\,s^{-1}} = ${texQuantity(value19, "m/s")}`, value: value19, unit: "m/s" }
+      { text: "Wind speed", formula: "u = \\frac{u_*}{k} \\ln \\frac{z - d}{z_0}", filled: `u = \\frac{${texNumber(numberOf(inputs2, "frictionVelocity"))}}{${texNumber(k)}} \\ln \\frac{${texNumber(height2)}}{${texNumber(numberOf(inputs2, "roughnessLength"))}}\\,\\mathrm{m\\,s^{-1}} = ${texQuantity(value23, "m/s")}`, value: value23, unit: "m/s" }
     ];
   },
   slips: [
-    slip("base-ten", "log₁₀ for ln", "This takes the logarithm to base 10: the natural one is needed.", (inputs2, constants) => numberOf(inputs2, "frictionVelocity") / constant(constants, "vonKarman") * log10(heightOf(inputs2) / numberOf(inputs2, "roughnessLength"))),
+    slip("base-ten", "log₁₀ for ln", "This takes the logarithm to base 10: the natural one is needed.", (inputs2, constants) => numberOf(inputs2, "frictionVelocity") / constant(constants, "vonKarman") * log10(heightOf2(inputs2) / numberOf(inputs2, "roughnessLength"))),
     slip("constant-left-out", "k left out", "The von Kármán constant is left out.", (_i, constants, right) => right * constant(constants, "vonKarman")),
     slip("constant-multiplied", "multiplied by k", "This multiplies by the von Kármán constant in place of dividing.", (_i, constants, right) => right * constant(constants, "vonKarman") * constant(constants, "vonKarman")),
     slip("ratio-inverted", "z₀/z for z/z₀", "The ratio is turned over: the sign of the result tells.", (_i, _c, right) => -right),
@@ -3678,12 +3771,12 @@ var logarithmicWindSpeedDefinition = {
   ],
   example: { inputs: { frictionVelocity: 0.35, measurementHeight: 10, roughnessLength: 0.03 }, gives: 5.083, within: 1e-4 }
 };
-function heightOf(inputs2) {
+function heightOf2(inputs2) {
   const height2 = numberOf(inputs2, "measurementHeight") - displacementOf(inputs2);
   if (!(height2 > numberOf(inputs2, "roughnessLength"))) throw new OutOfRangeError("measurementHeight", numberOf(inputs2, "measurementHeight"), "heights above the roughness length and the displacement height");
   return height2;
 }
-var speed = (inputs2, constants) => logWind(numberOf(inputs2, "frictionVelocity"), heightOf(inputs2), numberOf(inputs2, "roughnessLength"), constants);
+var speed = (inputs2, constants) => logWind(numberOf(inputs2, "frictionVelocity"), heightOf2(inputs2), numberOf(inputs2, "roughnessLength"), constants);
 
 // shared/thermo/quantities/meanWindDirection.ts
 var meanWindDirectionDefinition = {
@@ -3747,19 +3840,19 @@ var roughnessLengthDefinition = {
     validity: "neutral air over even ground",
     knownError: "very sensitive to the two speeds",
     evaluate(inputs2) {
-      const value19 = roughnessLength(twoHeightsOf(inputs2));
-      return value19 === null ? { is: "not_defined", why: "The wind does not grow with height: no roughness length follows." } : { is: "value", value: value19 };
+      const value23 = roughnessLength(twoHeightsOf(inputs2));
+      return value23 === null ? { is: "not_defined", why: "The wind does not grow with height: no roughness length follows." } : { is: "value", value: value23 };
     }
   }],
   constants: [],
   ask: 'The roughness length z₀ from the wind at two heights by the neutral logarithmic profile; heights above the displacement height, which is 0 where none is given; "not defined" where the wind does not grow with height.',
   trace(inputs2) {
-    const { low, high: high2, lowSpeed, highSpeed } = twoHeightsOf(inputs2), value19 = roughnessLength(twoHeightsOf(inputs2));
-    if (value19 === null) return [{ text: "The wind does not grow with height", formula: "u_2 \\le u_1", filled: `${texNumber(highSpeed)} \\le ${texNumber(lowSpeed)}` }];
+    const { low, high: high2, lowSpeed, highSpeed } = twoHeightsOf(inputs2), value23 = roughnessLength(twoHeightsOf(inputs2));
+    if (value23 === null) return [{ text: "The wind does not grow with height", formula: "u_2 \\le u_1", filled: `${texNumber(highSpeed)} \\le ${texNumber(lowSpeed)}` }];
     const logarithm = (highSpeed * log(low) - lowSpeed * log(high2)) / (highSpeed - lowSpeed);
     return [
       { text: "Height at which the profile comes to 0, as a logarithm", formula: "\\ln z_0 = \\frac{u_2 \\ln z_1 - u_1 \\ln z_2}{u_2 - u_1}", filled: `\\ln z_0 = \\frac{${texNumber(highSpeed)} \\ln ${texNumber(low)} - ${texNumber(lowSpeed)} \\ln ${texNumber(high2)}}{${texNumber(highSpeed - lowSpeed)}} = ${texNumber(logarithm)}` },
-      { text: "Roughness length", formula: "z_0 = e^{\\ln z_0}", filled: `z_0 = ${texQuantity(value19, "m")}`, value: value19, unit: "m" }
+      { text: "Roughness length", formula: "z_0 = e^{\\ln z_0}", filled: `z_0 = ${texQuantity(value23, "m")}`, value: value23, unit: "m" }
     ];
   },
   slips: [
@@ -3799,8 +3892,8 @@ var scalarMeanWindSpeedDefinition = {
   constants: [],
   ask: "The scalar mean of the wind speeds of your rows, whatever their directions; calm rows count with 0.",
   trace(inputs2) {
-    const speeds = seriesOf(inputs2, "windSpeed"), value19 = mean(speeds);
-    return [{ text: "Mean of the speeds", formula: "\\bar s = \\frac{\\sum s}{n}", filled: `\\bar s = \\frac{${texNumber(value19 * speeds.length)}}{${speeds.length}}\\,\\mathrm{m\\,s^{-1}} = ${texQuantity(value19, "m/s")}`, value: value19, unit: "m/s" }];
+    const speeds = seriesOf(inputs2, "windSpeed"), value23 = mean(speeds);
+    return [{ text: "Mean of the speeds", formula: "\\bar s = \\frac{\\sum s}{n}", filled: `\\bar s = \\frac{${texNumber(value23 * speeds.length)}}{${speeds.length}}\\,\\mathrm{m\\,s^{-1}} = ${texQuantity(value23, "m/s")}`, value: value23, unit: "m/s" }];
   },
   slips: [
     fineSlip("vector-mean", "vector mean in place of the scalar one", "This is the size of the mean vector: the ask takes the mean of the speeds.", (inputs2) => "windDirection" in inputs2 ? vectorMean(inputs2).speed : null),
@@ -3841,10 +3934,10 @@ var sensorLagErrorDefinition = {
   constants: [],
   ask: "The error T_i − T of a first-order sensor that moves steadily through the layer, once its start is forgotten: indicated less true, vertical speed positive on ascent.",
   trace(inputs2) {
-    const { timeConstant, verticalSpeed, lapseRate } = given3(inputs2), value19 = error(inputs2);
+    const { timeConstant, verticalSpeed, lapseRate } = given3(inputs2), value23 = error(inputs2);
     return [
       { text: "How fast the air’s temperature falls for the sensor", formula: "-\\frac{dT}{dt} = w\\,\\Gamma", filled: `w\\,\\Gamma = ${texFactor(verticalSpeed)} \\times ${texFactor(lapseRate)}\\,\\mathrm{K\\,s^{-1}} = ${texQuantity(verticalSpeed * lapseRate, "K/s")}` },
-      { text: "Error", formula: "T_i - T = \\tau\\,w\\,\\Gamma", filled: `T_i - T = ${texNumber(timeConstant)}\\,\\mathrm{s} \\times ${texFactor(verticalSpeed * lapseRate)}\\,\\mathrm{K\\,s^{-1}} = ${texQuantity(value19, "K")}`, value: value19, unit: "K" }
+      { text: "Error", formula: "T_i - T = \\tau\\,w\\,\\Gamma", filled: `T_i - T = ${texNumber(timeConstant)}\\,\\mathrm{s} \\times ${texFactor(verticalSpeed * lapseRate)}\\,\\mathrm{K\\,s^{-1}} = ${texQuantity(value23, "K")}`, value: value23, unit: "K" }
     ];
   },
   slips: [
@@ -3880,8 +3973,8 @@ var sensorLagHeightShiftDefinition = {
   constants: [],
   ask: "The height Δz by which the sensor’s lag shifts a feature of the profile, positive upwards; vertical speed positive on ascent.",
   trace(inputs2) {
-    const value19 = shift(inputs2);
-    return [{ text: "Delay times speed", formula: "\\Delta z = \\tau\\,w", filled: `\\Delta z = ${texNumber(numberOf(inputs2, "timeConstant"))}\\,\\mathrm{s} \\times ${texFactor(numberOf(inputs2, "verticalSpeed"))}\\,\\mathrm{m\\,s^{-1}} = ${texQuantity(value19, "m")}`, value: value19, unit: "m" }];
+    const value23 = shift(inputs2);
+    return [{ text: "Delay times speed", formula: "\\Delta z = \\tau\\,w", filled: `\\Delta z = ${texNumber(numberOf(inputs2, "timeConstant"))}\\,\\mathrm{s} \\times ${texFactor(numberOf(inputs2, "verticalSpeed"))}\\,\\mathrm{m\\,s^{-1}} = ${texQuantity(value23, "m")}`, value: value23, unit: "m" }];
   },
   slips: [
     signSlip("The sensor shows a feature late: higher up on ascent, lower down on descent."),
@@ -3918,10 +4011,10 @@ var sensorStepResponseDefinition = {
   constants: [],
   ask: "The temperature T_i that a first-order sensor shows at the given time after it was brought into air of another temperature.",
   trace(inputs2) {
-    const { start: start5, air, elapsed, timeConstant } = given4(inputs2), rest = exp(-elapsed / timeConstant), value19 = stepResponse(given4(inputs2));
+    const { start: start5, air, elapsed, timeConstant } = given4(inputs2), rest = exp(-elapsed / timeConstant), value23 = stepResponse(given4(inputs2));
     return [
       { text: "Part of the step that is left", formula: "e^{-t/\\tau}", filled: `e^{-${texNumber(elapsed)}/${texNumber(timeConstant)}} = ${texNumber(rest)}`, value: rest, unit: "1" },
-      { text: "Indication", formula: "T_i = T_a + (T_0 - T_a) e^{-t/\\tau}", filled: `T_i = ${texNumber(air, 6)} + ${texFactor(start5 - air)} \\times ${texNumber(rest)}\\,\\mathrm{K} = ${texQuantity(value19, "K", 6)} = ${texQuantity(value19 - zeroCelsius, "Cel")}`, value: value19, unit: "K" }
+      { text: "Indication", formula: "T_i = T_a + (T_0 - T_a) e^{-t/\\tau}", filled: `T_i = ${texNumber(air, 6)} + ${texFactor(start5 - air)} \\times ${texNumber(rest)}\\,\\mathrm{K} = ${texQuantity(value23, "K", 6)} = ${texQuantity(value23 - zeroCelsius, "Cel")}`, value: value23, unit: "K" }
     ];
   },
   slips: [
@@ -3972,17 +4065,17 @@ var sensorTimeConstantDefinition = {
     validity: "a sensor with one time constant",
     knownError: "grows where the indication has nearly arrived",
     evaluate(inputs2) {
-      const value19 = timeConstantOfStep(given5(inputs2));
-      return value19 === null ? { is: "not_defined", why: "The indication has not come closer to the air, or has passed it." } : { is: "value", value: value19 };
+      const value23 = timeConstantOfStep(given5(inputs2));
+      return value23 === null ? { is: "not_defined", why: "The indication has not come closer to the air, or has passed it." } : { is: "value", value: value23 };
     }
   }],
   constants: [],
   ask: 'The time constant τ of the first-order sensor from what it shows at the given time after the step; "not defined" where it has not come closer to the air.',
   trace(inputs2) {
-    const { start: start5, air, elapsed, indicated } = given5(inputs2), value19 = timeConstantOfStep(given5(inputs2));
+    const { start: start5, air, elapsed, indicated } = given5(inputs2), value23 = timeConstantOfStep(given5(inputs2));
     const first3 = { text: "Step, and what is left of it", formula: "T_0 - T_a;\\quad T_i - T_a", filled: `${texQuantity(start5 - air, "K")};\\quad ${texQuantity(indicated - air, "K")}` };
-    if (value19 === null) return [first3];
-    return [first3, { text: "Time constant", formula: "\\tau = \\frac{t}{\\ln \\frac{T_0 - T_a}{T_i - T_a}}", filled: `\\tau = \\frac{${texNumber(elapsed)}\\,\\mathrm{s}}{\\ln (${texFactor(start5 - air)} / ${texFactor(indicated - air)})} = ${texQuantity(value19, "s")}`, value: value19, unit: "s" }];
+    if (value23 === null) return [first3];
+    return [first3, { text: "Time constant", formula: "\\tau = \\frac{t}{\\ln \\frac{T_0 - T_a}{T_i - T_a}}", filled: `\\tau = \\frac{${texNumber(elapsed)}\\,\\mathrm{s}}{\\ln (${texFactor(start5 - air)} / ${texFactor(indicated - air)})} = ${texQuantity(value23, "s")}`, value: value23, unit: "s" }];
   },
   slips: [
     slip("base-ten", "log₁₀ for ln", "This takes the logarithm to base 10: the natural one is needed.", (_i, _c, right) => right * 2.302585092994046),
@@ -4012,17 +4105,17 @@ var vectorMeanWindDirectionDefinition = {
     validity: "winds that do not cancel",
     knownError: "none: the rows alone decide",
     evaluate(inputs2) {
-      const value19 = direction(inputs2);
-      return value19 === null ? { is: "not_defined", why: "The winds cancel: the mean vector has no direction." } : { is: "value", value: value19 };
+      const value23 = direction(inputs2);
+      return value23 === null ? { is: "not_defined", why: "The winds cancel: the mean vector has no direction." } : { is: "value", value: value23 };
     }
   }],
   constants: [],
   ask: 'The direction from which the mean wind vector of your rows comes, clockwise from north, which is 360°; "not defined" where the winds cancel.',
   trace(inputs2) {
-    const { u, v } = vectorMean(inputs2), value19 = direction(inputs2);
+    const { u, v } = vectorMean(inputs2), value23 = direction(inputs2);
     const first3 = { text: "Mean components", formula: "\\bar u = -\\overline{s \\sin d},\\quad \\bar v = -\\overline{s \\cos d}", filled: `\\bar u = ${texNumber(u)},\\quad \\bar v = ${texNumber(v)}\\,\\mathrm{m\\,s^{-1}}` };
-    if (value19 === null) return [first3];
-    return [first3, { text: "Where it comes from", formula: "d = \\mathrm{atan2}(-\\bar u, -\\bar v)", filled: `d = \\mathrm{atan2}(${texFactor(-u)}, ${texFactor(-v)}) = ${texNumber(value19 / perDegree)}^{\\circ}`, value: value19, unit: "rad" }];
+    if (value23 === null) return [first3];
+    return [first3, { text: "Where it comes from", formula: "d = \\mathrm{atan2}(-\\bar u, -\\bar v)", filled: `d = \\mathrm{atan2}(${texFactor(-u)}, ${texFactor(-v)}) = ${texNumber(value23 / perDegree)}^{\\circ}`, value: value23, unit: "rad" }];
   },
   slips: [
     fineSlip("plain-mean", "plain mean of the angles", "This is the plain mean of the angles: directions are averaged by their vectors.", (inputs2) => mean(seriesOf(inputs2, "windDirection"))),
@@ -4105,6 +4198,7 @@ var instruments = {
 var mixingRatioFrom = (vaporPressure, pressure4, epsilon) => epsilon * vaporPressure / (pressure4 - vaporPressure);
 var vaporPressureFrom = (mixingRatio, pressure4, epsilon) => mixingRatio * pressure4 / (epsilon + mixingRatio);
 var specificHumidityFrom = (mixingRatio) => mixingRatio / (1 + mixingRatio);
+var mixingRatioOfSpecificHumidity = (specificHumidity) => specificHumidity / (1 - specificHumidity);
 var virtualTemperatureFrom = (temperature6, mixingRatio, epsilon) => temperature6 * (1 + mixingRatio / epsilon) / (1 + mixingRatio);
 
 // shared/numerics/rootFinding.ts
@@ -4156,7 +4250,7 @@ function findRoot(f, low, high2, tolerance = 1e-12) {
 
 // shared/thermo/latentHeat.ts
 var zeroCelsius2 = 273.15;
-var shown2 = (value19) => texQuantity(value19 / 1e3, "kJ/kg", 6);
+var shown2 = (value23) => texQuantity(value23 / 1e3, "kJ/kg", 6);
 var linearLatentHeat = (temperature6) => 2501e3 - 2370 * (temperature6 - zeroCelsius2);
 function kirchhoffLatentHeat(temperature6, constants) {
   return constant(constants, "latentHeat") - (constant(constants, "cw") - constant(constants, "cpv")) * (temperature6 - zeroCelsius2);
@@ -4184,7 +4278,7 @@ var vaporizationForms = [
     constants: [],
     of: () => linearLatentHeat,
     formula: "L_v = 2501 - 2.37\\,t",
-    filled: (temperature6, _constants, value19) => `L_v = 2501 - 2.37 \\cdot ${texFactor(temperature6 - zeroCelsius2)} = ${shown2(value19)}`
+    filled: (temperature6, _constants, value23) => `L_v = 2501 - 2.37 \\cdot ${texFactor(temperature6 - zeroCelsius2)} = ${shown2(value23)}`
   },
   {
     key: "constant",
@@ -4194,11 +4288,11 @@ var vaporizationForms = [
     knownError: "2 % at 20 °C, 4 % at 40 °C",
     constants: ["latentHeat"],
     of: (constants) => {
-      const value19 = constant(constants, "latentHeat");
-      return () => value19;
+      const value23 = constant(constants, "latentHeat");
+      return () => value23;
     },
     formula: "L_v = \\text{const.}",
-    filled: (_temperature, _constants, value19) => `L_v = ${shown2(value19)}`
+    filled: (_temperature, _constants, value23) => `L_v = ${shown2(value23)}`
   },
   {
     key: "kirchhoff",
@@ -4210,7 +4304,7 @@ var vaporizationForms = [
     constants: ["latentHeat", "cw", "cpv"],
     of: (constants) => (temperature6) => kirchhoffLatentHeat(temperature6, constants),
     formula: "L_v = L_0 - (c_w - c_{pv})\\,t",
-    filled: (temperature6, constants, value19) => `L_v = ${texNumber(constant(constants, "latentHeat") / 1e3, 6)} - (${texNumber(constant(constants, "cw") / 1e3)} - ${texNumber(constant(constants, "cpv") / 1e3)}) \\cdot ${texFactor(temperature6 - zeroCelsius2)} = ${shown2(value19)}`
+    filled: (temperature6, constants, value23) => `L_v = ${texNumber(constant(constants, "latentHeat") / 1e3, 6)} - (${texNumber(constant(constants, "cw") / 1e3)} - ${texNumber(constant(constants, "cpv") / 1e3)}) \\cdot ${texFactor(temperature6 - zeroCelsius2)} = ${shown2(value23)}`
   },
   {
     key: "cubic",
@@ -4222,7 +4316,7 @@ var vaporizationForms = [
     constants: [],
     of: () => cubicLatentHeat,
     formula: "L_v = 2500.8 - 2.36\\,t + 0.0016\\,t^2 - 0.00006\\,t^3",
-    filled: (temperature6, _constants, value19) => `L_v = 2500.8 - 2.36 \\cdot ${texFactor(temperature6 - zeroCelsius2)} + \\dots = ${shown2(value19)}`
+    filled: (temperature6, _constants, value23) => `L_v = 2500.8 - 2.36 \\cdot ${texFactor(temperature6 - zeroCelsius2)} + \\dots = ${shown2(value23)}`
   }
 ];
 var sublimationForms = [
@@ -4235,35 +4329,35 @@ var sublimationForms = [
     holds: [233.15, 273.16],
     constants: ["latentHeatIce"],
     of: (constants) => {
-      const value19 = constant(constants, "latentHeatIce");
-      return () => value19;
+      const value23 = constant(constants, "latentHeatIce");
+      return () => value23;
     },
     formula: "L_s = \\text{const.}",
-    filled: (_temperature, _constants, value19) => `L_s = ${shown2(value19)}`
+    filled: (_temperature, _constants, value23) => `L_s = ${shown2(value23)}`
   },
   {
     key: "murphy-koop",
     label: "Murphy & Koop (2005)",
-    source: { text: "Murphy & Koop (2005), Q. J. R. Meteorol. Soc. 131, 1539–1565, Eq. 5", status: "from memory" },
+    source: { text: "Murphy & Koop (2005), Q. J. R. Meteorol. Soc. 131, 1539–1565, Eq. 5; coefficients read in transcriptions", status: "verified" },
     validity: "30 K to 0.01 °C",
     knownError: "0.1 %",
     holds: [30, 273.16],
     constants: [],
     of: () => murphyKoopSublimation,
     formula: "L_s = \\frac{46782.5 + 35.8925\\,T - 0.07414\\,T^2 + 541.5 \\exp[-(T/123.75)^2]}{0.018015}",
-    filled: (temperature6, _constants, value19) => `L_s(${texQuantity(temperature6, "K", 6)}) = ${shown2(value19)}`
+    filled: (temperature6, _constants, value23) => `L_s(${texQuantity(temperature6, "K", 6)}) = ${shown2(value23)}`
   },
   {
     key: "quadratic",
     label: "quadratic in the temperature",
-    source: { text: "Rogers & Yau (1989), A Short Course in Cloud Physics, Table 2.1, as a fit", status: "from memory" },
+    source: { text: "Rogers & Yau (1989), A Short Course in Cloud Physics, Table 2.1, as a fit; coefficients read in transcriptions", status: "verified" },
     validity: "−40 to 0 °C",
     knownError: "0.1 %",
     holds: [233.15, 273.16],
     constants: [],
     of: () => quadraticSublimation,
     formula: "L_s = 2834.1 - 0.29\\,t - 0.004\\,t^2",
-    filled: (temperature6, _constants, value19) => `L_s = 2834.1 - 0.29 \\cdot ${texFactor(temperature6 - zeroCelsius2)} - 0.004 \\cdot ${texFactor(temperature6 - zeroCelsius2)}^2 = ${shown2(value19)}`
+    filled: (temperature6, _constants, value23) => `L_s = 2834.1 - 0.29 \\cdot ${texFactor(temperature6 - zeroCelsius2)} - 0.004 \\cdot ${texFactor(temperature6 - zeroCelsius2)}^2 = ${shown2(value23)}`
   }
 ];
 
@@ -4290,8 +4384,8 @@ function latentHeatDefinition({ range, forms: forms2, slips, ...named2 }) {
     trace(inputs2, constants, variant) {
       const form = forms2.find((one2) => one2.key === variant) ?? forms2[0];
       if (!form) throw new Error(`${named2.key} has no form`);
-      const value19 = form.of(constants)(T8(inputs2));
-      return [{ text: form.label, formula: form.formula, filled: form.filled(T8(inputs2), constants, value19), value: value19, unit: "J/kg" }];
+      const value23 = form.of(constants)(T8(inputs2));
+      return [{ text: form.label, formula: form.formula, filled: form.filled(T8(inputs2), constants, value23), value: value23, unit: "J/kg" }];
     },
     slips: [
       ...slips,
@@ -4417,10 +4511,10 @@ function wagnerPrussOverWater(temperature6) {
   return 22064e3 * exp(647.096 / temperature6 * sum);
 }
 function industrialOverWater(temperature6) {
-  const theta4 = temperature6 - 0.23855557567849 / (temperature6 - 650.17534844798);
-  const A = theta4 * theta4 + 1167.0521452767 * theta4 - 724213.16703206;
-  const B = -17.073846940092 * theta4 * theta4 + 12020.82470247 * theta4 - 32325550322333e-7;
-  const C = 14.91510861353 * theta4 * theta4 - 4823.2657361591 * theta4 + 405113.40542057;
+  const theta5 = temperature6 - 0.23855557567849 / (temperature6 - 650.17534844798);
+  const A = theta5 * theta5 + 1167.0521452767 * theta5 - 724213.16703206;
+  const B = -17.073846940092 * theta5 * theta5 + 12020.82470247 * theta5 - 32325550322333e-7;
+  const C = 14.91510861353 * theta5 * theta5 - 4823.2657361591 * theta5 + 405113.40542057;
   const root = 2 * C / (-B + pow(B * B - 4 * A * C, 0.5));
   return 1e6 * root * root * root * root;
 }
@@ -4433,9 +4527,9 @@ function murphyKoopOverIce(temperature6) {
   return exp(9.550426 - 5723.265 / temperature6 + 3.53068 * log(temperature6) - 728332e-8 * temperature6);
 }
 function sublimationPressure(temperature6) {
-  const theta4 = temperature6 / 273.16;
-  const sum = -21.2144006 * pow(theta4, 0.00333333333) + 27.3203819 * pow(theta4, 1.20666667) - 6.1059813 * pow(theta4, 1.70333333);
-  return 611.657 * exp(sum / theta4);
+  const theta5 = temperature6 / 273.16;
+  const sum = -21.2144006 * pow(theta5, 0.00333333333) + 27.3203819 * pow(theta5, 1.20666667) - 6.1059813 * pow(theta5, 1.70333333);
+  return 611.657 * exp(sum / theta5);
 }
 function goffGratchOverIce(temperature6) {
   const ratio2 = 273.16 / (temperature6 + 0.01);
@@ -4444,7 +4538,7 @@ function goffGratchOverIce(temperature6) {
 var water = "e_s";
 var ice = "e_i";
 var murphyKoop = { text: "Murphy & Koop (2005), Q. J. R. Meteorol. Soc. 131, 1539–1565, Eq. 10", status: "verified" };
-var goffGratch = { text: "Goff & Gratch (1946), Trans. ASHVE 52, 95–121; Smithsonian Meteorological Tables (List 1951), Table 94", status: "from memory" };
+var goffGratch = { text: "Goff & Gratch (1946), Trans. ASHVE 52, 95–121; Smithsonian Meteorological Tables (List 1951), Table 94; coefficients read in transcriptions", status: "verified" };
 var overWaterForms = [
   {
     key: "bolton",
@@ -4504,7 +4598,7 @@ var overWaterForms = [
   {
     key: "buck",
     label: "Buck (1981)",
-    source: { text: "Buck (1981), J. Appl. Meteor. 20, 1527–1532, Table 2, e_w1", status: "from memory" },
+    source: { text: "Buck (1981), J. Appl. Meteor. 20, 1527–1532, Table 2, e_w1; coefficients read in transcriptions", status: "verified" },
     validity: "−20 to 50 °C",
     knownError: "0.14 %",
     holds: [253.15, 323.15],
@@ -4513,7 +4607,7 @@ var overWaterForms = [
   {
     key: "tetens",
     label: "Tetens (1930)",
-    source: { text: "Tetens (1930), Z. Geophys. 6, 297–309, with the coefficients 17.27 and 237.3", status: "from memory" },
+    source: { text: "Tetens (1930), Z. Geophys. 6, 297–309, with the coefficients 17.27 and 237.3 of FAO Irrigation and Drainage Paper 56, Eq. 11", status: "verified" },
     validity: "0 to 40 °C",
     knownError: "0.13 % within; −0.7 % at −20 °C",
     holds: [273.15, 313.15],
@@ -4526,7 +4620,7 @@ var overIceForms = [
     label: "Murphy & Koop (2005)",
     source: { ...murphyKoop, text: "Murphy & Koop (2005), Q. J. R. Meteorol. Soc. 131, 1539–1565, Eq. 7" },
     validity: "110 K to 0.01 °C",
-    knownError: "0.05 %",
+    knownError: "0.07 % above −80 °C",
     holds: [110, 273.16],
     ...long(ice, "\\ln e_i = 9.550426 - \\frac{5723.265}{T} + 3.53068 \\ln T - 0.00728332\\,T", murphyKoopOverIce)
   },
@@ -4542,7 +4636,7 @@ var overIceForms = [
   {
     key: "wmo",
     label: "Magnus form of WMO-No. 8",
-    source: { text: "WMO-No. 8, Guide to Instruments and Methods of Observation, Annex 4.B", status: "from memory" },
+    source: { text: "WMO-No. 8, Guide to Instruments and Methods of Observation, Annex 4.B; coefficients read in transcriptions", status: "verified" },
     validity: "−65 to 0 °C",
     knownError: "0.25 %",
     holds: [208.15, 273.16],
@@ -4551,7 +4645,7 @@ var overIceForms = [
   {
     key: "goff-gratch",
     label: "Goff & Gratch (1946)",
-    source: { ...goffGratch, text: "Goff & Gratch (1946), Trans. ASHVE 52, 95–121; Smithsonian Meteorological Tables (List 1951), Table 96" },
+    source: { ...goffGratch, text: "Goff & Gratch (1946), Trans. ASHVE 52, 95–121; Smithsonian Meteorological Tables (List 1951), Table 96; coefficients read in transcriptions" },
     validity: "−100 to 0 °C",
     knownError: "0.35 %",
     holds: [173.15, 273.16],
@@ -4570,12 +4664,12 @@ var saturationVaporPressureDefinition = saturationDefinition({
   ask: "The saturation vapor pressure over a plane surface of liquid water, also below 0 °C, where the water is supercooled.",
   slips: [
     fineSlip("ice-for-water", "over ice for over water", "This is the saturation vapor pressure over ice; asked is that over liquid water, also below 0 °C.", (inputs2) => {
-      const T10 = Number(inputs2.temperature);
-      return T10 < zeroCelsius ? overIceForms[0]?.pressure(T10) ?? null : null;
+      const T11 = Number(inputs2.temperature);
+      return T11 < zeroCelsius ? overIceForms[0]?.pressure(T11) ?? null : null;
     }),
     slip("kelvin-for-celsius", "kelvin put in for Celsius", "This is what a formula in °C gives when the temperature goes in in kelvin.", (inputs2) => {
-      const T10 = Number(inputs2.temperature);
-      return 611.2 * exp(17.67 * T10 / (T10 + 243.5));
+      const T11 = Number(inputs2.temperature);
+      return 611.2 * exp(17.67 * T11 / (T11 + 243.5));
     }),
     slip("base-ten-for-e", "power of ten for exp", "This comes from coefficients that belong to exp, taken as a power of ten.", (inputs2) => {
       const t = celsius(Number(inputs2.temperature));
@@ -4605,8 +4699,8 @@ var saturationVaporPressureOverIceDefinition = saturationDefinition({
   slips: [
     fineSlip("water-for-ice", "over water for over ice", "This is the saturation vapor pressure over supercooled water; asked is that over ice.", (inputs2) => overWaterForms[0]?.pressure(Number(inputs2.temperature)) ?? null),
     slip("kelvin-for-celsius", "kelvin put in for Celsius", "This is what a formula in °C gives when the temperature goes in in kelvin.", (inputs2) => {
-      const T10 = Number(inputs2.temperature);
-      return 611.2 * exp(22.46 * T10 / (T10 + 272.62));
+      const T11 = Number(inputs2.temperature);
+      return 611.2 * exp(22.46 * T11 / (T11 + 272.62));
     }),
     slip("base-ten-for-e", "power of ten for exp", "This comes from coefficients that belong to exp, taken as a power of ten.", (inputs2) => {
       const t = celsius2(Number(inputs2.temperature));
@@ -4654,6 +4748,7 @@ function pressureFunction(definition, forms2, constants, formulae) {
 var saturationPressureFunction = (constants, formulae) => pressureFunction(saturationVaporPressureDefinition, overWaterForms, constants, formulae);
 var iceSaturationPressureFunction = (constants, formulae) => pressureFunction(saturationVaporPressureOverIceDefinition, overIceForms, constants, formulae);
 var latentHeatFunction = (constants, formulae) => byTemperature(latentHeatOfVaporizationDefinition, formulae, (key) => formOf(vaporizationForms, key).of(constants));
+var sublimationHeatFunction = (constants, formulae) => byTemperature(latentHeatOfSublimationDefinition, formulae, (key) => formOf(sublimationForms, key).of(constants));
 function notesOf(definition, temperatures, formulae) {
   const notes = /* @__PURE__ */ new Set();
   for (const temperature6 of temperatures) {
@@ -4694,9 +4789,9 @@ function rompsLcl(temperature6, relativeHumidity, pressure4, specificHumidity) {
   const target = -(log(relativeHumidity) / a + log(-c2) + c2);
   let y = -c2;
   for (let n = 0; n < 50; n++) {
-    const change = (y - log(y) - target) / (1 - 1 / y);
-    y -= change;
-    if (Math.abs(change) <= 1e-15 * y) break;
+    const change2 = (y - log(y) - target) / (1 - 1 / y);
+    y -= change2;
+    if (Math.abs(change2) <= 1e-15 * y) break;
   }
   const lcl = c2 / -y * temperature6;
   return { temperature: lcl, pressure: pressure4 * pow(lcl / temperature6, cpm / Rm), heightAboveStart: cpm / g * (temperature6 - lcl) };
@@ -4704,9 +4799,9 @@ function rompsLcl(temperature6, relativeHumidity, pressure4, specificHumidity) {
 function solvedLclTemperature(temperature6, dewpoint, pressure4, air) {
   if (dewpoint >= temperature6) return temperature6;
   const w2 = mixingRatioFrom(air.es(dewpoint), pressure4, air.epsilon);
-  const excess = (T10) => {
-    const p10 = pressure4 * pow(T10 / temperature6, 1 / air.kappa);
-    const e = air.es(T10);
+  const excess = (T11) => {
+    const p10 = pressure4 * pow(T11 / temperature6, 1 / air.kappa);
+    const e = air.es(T11);
     return e < p10 ? mixingRatioFrom(e, p10, air.epsilon) - w2 : Infinity;
   };
   return findRoot(excess, Math.max(dewpoint - 60, 150), temperature6);
@@ -4753,12 +4848,12 @@ function moistQuantity({ inside = [], notedAt, remarks, working, slips, variants
   };
   const definition = {
     ...rest,
-    variants: variants.map(({ value: value19, ...about }) => ({
+    variants: variants.map(({ value: value23, ...about }) => ({
       ...about,
       evaluate: (inputs2, constants, formulae) => {
         const hand = handOf(inputs2, constants, formulae, about.key);
         checkNoneBoils(inputs2, hand.air);
-        const outcome3 = outcomeOf({ ...about, value: value19 }, hand);
+        const outcome3 = outcomeOf({ ...about, value: value23 }, hand);
         if (outcome3.is !== "value" || !remarks) return outcome3;
         const said = remarks(hand, outcome3.value).filter((one2) => one2 !== null);
         return said.length === 0 ? outcome3 : { ...outcome3, notes: said };
@@ -4851,29 +4946,29 @@ function pseudoadiabaticTemperature(temperature6, from2, to2, air, step = longes
   const start5 = log(from2), whole = log(to2) - start5;
   const count = Math.ceil(Math.abs(whole) / step);
   const h = whole / count;
-  let T10 = temperature6;
+  let T11 = temperature6;
   let p10 = from2;
   for (let n = 1; n <= count; n++) {
     const middle = exp(start5 + (n - 0.5) * h);
     const next = n === count ? to2 : exp(start5 + n * h);
-    const k1 = pseudoadiabaticSlope(T10, p10, air);
-    const k2 = pseudoadiabaticSlope(T10 + 0.5 * h * k1, middle, air);
-    const k3 = pseudoadiabaticSlope(T10 + 0.5 * h * k2, middle, air);
-    const k4 = pseudoadiabaticSlope(T10 + h * k3, next, air);
-    T10 += h / 6 * (k1 + 2 * k2 + 2 * k3 + k4);
+    const k1 = pseudoadiabaticSlope(T11, p10, air);
+    const k2 = pseudoadiabaticSlope(T11 + 0.5 * h * k1, middle, air);
+    const k3 = pseudoadiabaticSlope(T11 + 0.5 * h * k2, middle, air);
+    const k4 = pseudoadiabaticSlope(T11 + h * k3, next, air);
+    T11 += h / 6 * (k1 + 2 * k2 + 2 * k3 + k4);
     p10 = next;
   }
-  return T10;
+  return T11;
 }
 
 // shared/thermo/reversiblePath.ts
 function reversibleTemperature(temperature6, from2, to2, totalWater, air) {
-  const entropy = (T10, p10) => {
-    const e = air.es(T10);
-    return e < p10 ? (air.cp + totalWater * air.cw) * log(T10) - air.R * log(p10 - e) + air.L(T10) * mixingRatioFrom(e, p10, air.epsilon) / T10 : Infinity;
+  const entropy = (T11, p10) => {
+    const e = air.es(T11);
+    return e < p10 ? (air.cp + totalWater * air.cw) * log(T11) - air.R * log(p10 - e) + air.L(T11) * mixingRatioFrom(e, p10, air.epsilon) / T11 : Infinity;
   };
   const kept = entropy(temperature6, from2);
-  return findRoot((T10) => entropy(T10, to2) - kept, 130, 400);
+  return findRoot((T11) => entropy(T11, to2) - kept, 130, 400);
 }
 
 // shared/thermo/quantities/adiabaticLiquidWater.ts
@@ -4912,23 +5007,23 @@ var adiabaticLiquidWaterDefinition = moistQuantity({
   constants: ["R", "Rv", "cp", "kappa", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L", lclTemperatureKey],
   notedAt: { es: (given8) => [given8("dewpoint")] },
-  remarks: (hand, value19) => [foggy(hand.given("temperature"), hand.given("dewpoint")), value19 === 0 ? "The end lies below the condensation level: nothing has condensed." : null],
+  remarks: (hand, value23) => [foggy(hand.given("temperature"), hand.given("dewpoint")), value23 === 0 ? "The end lies below the condensation level: nothing has condensed." : null],
   ask: "The liquid water that has condensed per kilogram of dry air in a parcel lifted adiabatically, without mixing and without fallout, over liquid water.",
-  working: (hand, value19) => {
-    const { given: given8, air } = hand, lcl = lclOf(hand), T10 = endTemperature(hand), ws2 = mixingRatioFrom(air.es(T10), given8("pressureEnd"), air.epsilon);
-    if (value19 === 0) return [{ text: "The end lies below the condensation level: nothing has condensed", formula: "w_l = 0", filled: `p_L = ${inHectopascal(lcl.pressure)},\\ w_l = 0` }];
+  working: (hand, value23) => {
+    const { given: given8, air } = hand, lcl = lclOf(hand), T11 = endTemperature(hand), ws2 = mixingRatioFrom(air.es(T11), given8("pressureEnd"), air.epsilon);
+    if (value23 === 0) return [{ text: "The end lies below the condensation level: nothing has condensed", formula: "w_l = 0", filled: `p_L = ${inHectopascal(lcl.pressure)},\\ w_l = 0` }];
     return [
       { text: "Mixing ratio at the start", formula: "w = w_s(T_d)", filled: `w = ${inGrams(waterOf(hand))}`, value: waterOf(hand), unit: "1" },
       { text: "Lifting condensation level", formula: "T_L,\\ p_L", filled: `T_L = ${inCelsius(lcl.temperature)},\\ p_L = ${inHectopascal(lcl.pressure)}`, value: lcl.temperature, unit: "K" },
-      { text: "Temperature at the end, along the saturated adiabat", formula: "T_2", filled: `T_2 = ${inCelsius(T10)}`, value: T10, unit: "K" },
-      { text: "What no longer stays vapor", formula: "w_l = w - w_s(T_2, p_2)", filled: `w_l = ${inGrams(waterOf(hand))} - ${inGrams(ws2)} = ${inGrams(value19)}` }
+      { text: "Temperature at the end, along the saturated adiabat", formula: "T_2", filled: `T_2 = ${inCelsius(T11)}`, value: T11, unit: "K" },
+      { text: "What no longer stays vapor", formula: "w_l = w - w_s(T_2, p_2)", filled: `w_l = ${inGrams(waterOf(hand))} - ${inGrams(ws2)} = ${inGrams(value23)}` }
     ];
   },
   slips: [
     moistSlip("vapor", "vapor that is left", "This is the vapor that is left at the end: asked is what has condensed.", (hand) => hand.right === 0 ? null : waterOf(hand) - hand.right),
     fineMoistSlip("dry", "dry adiabat above the level", "This takes the temperature of the dry adiabat above the condensation level: it is too cold, and too much condenses.", (hand) => {
-      const T10 = hand.given("temperature") * pow(hand.given("pressureEnd") / hand.given("pressureStart"), hand.air.kappa);
-      return hand.right === 0 ? null : waterOf(hand) - mixingRatioFrom(hand.air.es(T10), hand.given("pressureEnd"), hand.air.epsilon);
+      const T11 = hand.given("temperature") * pow(hand.given("pressureEnd") / hand.given("pressureStart"), hand.air.kappa);
+      return hand.right === 0 ? null : waterOf(hand) - mixingRatioFrom(hand.air.es(T11), hand.given("pressureEnd"), hand.air.epsilon);
     }),
     moistSlip("all", "all of its vapor", "This is the mixing ratio at the start: not all of it has condensed.", (hand) => waterOf(hand)),
     kilogramSlip
@@ -4947,16 +5042,16 @@ function convectiveLevel(pressures2, temperatures, surfaceDewpoint, air) {
   const surface = pressures2[0] ?? 0, e = air.es(surfaceDewpoint);
   if (!(e < surface)) throw new OutOfRangeError("dewpoint", surfaceDewpoint, `dewpoints whose vapor pressure is below ${surface} Pa`);
   const w2 = mixingRatioFrom(e, surface, air.epsilon);
-  const excess = (T10, p10) => {
-    const es = air.es(T10);
+  const excess = (T11, p10) => {
+    const es = air.es(T11);
     return es < p10 ? mixingRatioFrom(es, p10, air.epsilon) - w2 : Infinity;
   };
   if (excess(temperatures[0] ?? 0, surface) <= 0) return { pressure: surface, temperature: temperatures[0] ?? 0, mixingRatio: w2, surfacePressure: surface };
   for (let at = 1; at < pressures2.length; at++) {
-    const p10 = pressures2[at] ?? 0, T10 = temperatures[at] ?? 0;
-    if (excess(T10, p10) > 0) continue;
-    const low = log(pressures2[at - 1] ?? p10), high2 = log(p10), below = temperatures[at - 1] ?? T10;
-    const between3 = (x) => below + (T10 - below) * (x - low) / (high2 - low);
+    const p10 = pressures2[at] ?? 0, T11 = temperatures[at] ?? 0;
+    if (excess(T11, p10) > 0) continue;
+    const low = log(pressures2[at - 1] ?? p10), high2 = log(p10), below = temperatures[at - 1] ?? T11;
+    const between3 = (x) => below + (T11 - below) * (x - low) / (high2 - low);
     const root = findRoot((x) => excess(between3(x), exp(x)), low, high2);
     return { pressure: exp(root), temperature: between3(root), mixingRatio: w2, surfacePressure: surface };
   }
@@ -4967,11 +5062,11 @@ function find(given8, constants, formulae) {
   const air = moistAir(constants, formulae);
   return { level: convectiveLevel(seriesOf(given8, "pressure"), seriesOf(given8, "temperature"), seriesOf(given8, "dewpoint")[0] ?? 0, air), air };
 }
-function convectiveDefinition({ value: value19, last, slips, ...named2 }) {
+function convectiveDefinition({ value: value23, last, slips, ...named2 }) {
   const missing = "The data end before the sounding is as cold as saturation with the mixing ratio of the lowest row.";
   const outcome3 = (given8, constants, formulae) => {
     const { level, air } = find(given8, constants, formulae);
-    return level ? { is: "value", value: value19(level, air), more: { pressure: level.pressure, temperature: level.temperature } } : { is: "not_reached", why: missing };
+    return level ? { is: "value", value: value23(level, air), more: { pressure: level.pressure, temperature: level.temperature } } : { is: "not_reached", why: missing };
   };
   return {
     ...named2,
@@ -4983,7 +5078,7 @@ function convectiveDefinition({ value: value19, last, slips, ...named2 }) {
     trace(given8, constants, _variant, formulae) {
       const { level, air } = find(given8, constants, formulae);
       if (!level) return [{ text: missing, formula: "w_s(T(p), p) > w", filled: "\\text{not reached}" }];
-      const result2 = value19(level, air);
+      const result2 = value23(level, air);
       return [
         { text: "Mixing ratio of the lowest row", formula: "w = w_s(T_{d0}, p_0)", filled: `w = ${inGrams(level.mixingRatio)}`, value: level.mixingRatio, unit: "1" },
         { text: "Where the sounding is as cold as saturation with it; T linear in ln p between rows", formula: "w_s(T(p), p) = w", filled: `p = ${inHectopascal(level.pressure)},\\ T = ${inCelsius(level.temperature)}`, value: level.pressure, unit: "Pa" },
@@ -4993,7 +5088,7 @@ function convectiveDefinition({ value: value19, last, slips, ...named2 }) {
     slips: slips(find)
   };
 }
-var downStep = (level, air, value19) => ({ text: "Down the dry adiabat to the ground", formula: "T_c = T\\left(\\frac{p_0}{p}\\right)^{\\kappa}", filled: `T_c = ${texNumber(level.temperature, 6)}\\left(\\frac{${texNumber(level.surfacePressure / 100, 6)}}{${texNumber(level.pressure / 100, 6)}}\\right)^{${texNumber(air.kappa)}} = ${inCelsius(value19)}` });
+var downStep = (level, air, value23) => ({ text: "Down the dry adiabat to the ground", formula: "T_c = T\\left(\\frac{p_0}{p}\\right)^{\\kappa}", filled: `T_c = ${texNumber(level.temperature, 6)}\\left(\\frac{${texNumber(level.surfacePressure / 100, 6)}}{${texNumber(level.pressure / 100, 6)}}\\right)^{${texNumber(air.kappa)}} = ${inCelsius(value23)}` });
 
 // shared/thermo/quantities/convectiveCondensationLevelPressure.ts
 var convectiveCondensationLevelPressureDefinition = convectiveDefinition({
@@ -5071,7 +5166,7 @@ function daviesJonesWetBulbPotential(equivalentPotential) {
 
 // shared/thermo/quantities/equivalentPotentialTemperature.ts
 var by = ({ given: given8, air }, variant) => equivalentPotentialTemperature(given8("temperature"), given8("dewpoint"), given8("pressure"), air, variant);
-var wOf = ({ given: given8, air }, T10 = given8("dewpoint")) => mixingRatioFrom(air.es(T10), given8("pressure"), air.epsilon);
+var wOf = ({ given: given8, air }, T11 = given8("dewpoint")) => mixingRatioFrom(air.es(T11), given8("pressure"), air.epsilon);
 var bolton = (equation) => ({ text: `Bolton (1980), Mon. Wea. Rev. 108, 1046–1053, Eq. ${equation}`, status: "verified" });
 var equivalentPotentialTemperatureDefinition = moistQuantity({
   key: "equivalent-potential-temperature",
@@ -5091,28 +5186,28 @@ var equivalentPotentialTemperatureDefinition = moistQuantity({
   notedAt: { es: (given8) => [given8("dewpoint")] },
   remarks: ({ given: given8 }) => [foggy(given8("temperature"), given8("dewpoint"))],
   ask: "The equivalent potential temperature θe by Bolton’s formula, with the temperature at the condensation level, referred to 1000 hPa; not θ exp(Lw/cpT).",
-  working: (hand, value19) => {
+  working: (hand, value23) => {
     const { given: given8, air, variant } = hand;
-    const T10 = given8("temperature"), Td = Math.min(given8("dewpoint"), T10), e = air.es(given8("dewpoint")), TL = Td < T10 ? boltonLclTemperature(T10, Td) : T10;
+    const T11 = given8("temperature"), Td = Math.min(given8("dewpoint"), T11), e = air.es(given8("dewpoint")), TL = Td < T11 ? boltonLclTemperature(T11, Td) : T11;
     const formula = variant === "bolton-43" ? "\\theta_e = T\\left(\\frac{p_0}{p}\\right)^{0.2854\\,(1 - 0.28\\,w)}\\exp\\left[\\left(\\frac{3376}{T_L} - 2.54\\right) w\\,(1 + 0.81\\,w)\\right]" : "\\theta_e = T\\left(\\frac{p_0}{p - e}\\right)^{\\kappa}\\left(\\frac{T}{T_L}\\right)^{0.28\\,w}\\exp\\left[\\left(\\frac{3036}{T_L} - 1.78\\right) w\\,(1 + 0.448\\,w)\\right]";
     return [
       { ...mixingRatioStep("w", "e", e, given8("pressure"), air), text: "Mixing ratio, with e = es(Td)" },
       { text: "Temperature at the condensation level", formula: "T_L = \\frac{1}{\\frac{1}{T_d - 56} + \\frac{\\ln(T/T_d)}{800}} + 56", filled: `T_L = ${inKelvin(TL)}`, value: TL, unit: "K" },
-      { text: "Bolton’s formula, with w in kg per kg", formula, filled: `\\theta_e = ${inKelvin(value19)}` }
+      { text: "Bolton’s formula, with w in kg per kg", formula, filled: `\\theta_e = ${inKelvin(value23)}` }
     ];
   },
   slips: [
     fineMoistSlip("shortcut", "θ exp(Lw/cpT)", "This is the shortcut θ exp(Lw/cpT), with the temperature of the parcel: asked is Bolton’s formula with that of the condensation level.", ({ given: given8, air }) => equivalentShortcut(given8("temperature"), given8("dewpoint"), given8("pressure"), air)),
     fineMoistSlip("at-parcel", "temperature of the parcel for that at the level", "This takes the temperature of the parcel in place of that at its condensation level.", (hand) => {
-      const T10 = hand.given("temperature"), w2 = wOf(hand);
-      return hand.given("dewpoint") >= T10 ? null : T10 * pow(1e5 / hand.given("pressure"), 0.2854 * (1 - 0.28 * w2)) * exp((3376 / T10 - 2.54) * w2 * (1 + 0.81 * w2));
+      const T11 = hand.given("temperature"), w2 = wOf(hand);
+      return hand.given("dewpoint") >= T11 ? null : T11 * pow(1e5 / hand.given("pressure"), 0.2854 * (1 - 0.28 * w2)) * exp((3376 / T11 - 2.54) * w2 * (1 + 0.81 * w2));
     }),
     fineMoistSlip("saturated", "w at T for w at Td", "This takes the saturation mixing ratio at the temperature: that gives the saturation equivalent potential temperature.", ({ given: given8, again }) => given8("dewpoint") === given8("temperature") ? null : again({ dewpoint: given8("temperature") })),
     fineMoistSlip("theta", "potential temperature", "This is the potential temperature: the latent heat of the vapor is not in it, or all but vanishes by w in kg per kg in a formula that takes g per kg.", ({ given: given8, air }) => given8("temperature") * pow(1e5 / given8("pressure"), air.kappa)),
     moistSlip("standard-pressure", "1013.25 hPa for 1000 hPa", "This refers to 1013.25 hPa: θe refers to 1000 hPa.", ({ air, right }) => right * pow(1.01325, air.kappa)),
     moistSlip("celsius-exponential", "Celsius put in for kelvin in the exponential", "This comes from the shortcut with the temperature in °C in the exponential.", (hand) => {
-      const t = hand.given("temperature") - zeroCelsius, value19 = hand.given("temperature") * pow(1e5 / hand.given("pressure"), hand.air.kappa) * exp(Math.min(50, hand.air.L(hand.given("temperature")) * wOf(hand) / (hand.air.cp * t)));
-      return t > 3 && value19 < 1e6 ? value19 : null;
+      const t = hand.given("temperature") - zeroCelsius, value23 = hand.given("temperature") * pow(1e5 / hand.given("pressure"), hand.air.kappa) * exp(Math.min(50, hand.air.L(hand.given("temperature")) * wOf(hand) / (hand.air.cp * t)));
+      return t > 3 && value23 < 1e6 ? value23 : null;
     }),
     celsiusAsKelvinSlip
   ],
@@ -5134,12 +5229,12 @@ var equivalentPotentialTemperatureShortcutDefinition = moistQuantity({
   notedAt: { es: (given8) => [given8("dewpoint")], L: (given8) => [given8("temperature")] },
   remarks: ({ given: given8 }) => [foggy(given8("temperature"), given8("dewpoint"))],
   ask: "The shortcut θ exp(Lw/cpT) for the equivalent potential temperature, with the mixing ratio and the temperature of the parcel itself.",
-  working: ({ given: given8, air }, value19) => {
-    const T10 = given8("temperature"), theta4 = T10 * pow(1e5 / given8("pressure"), air.kappa), w2 = mixingRatioFrom(air.es(given8("dewpoint")), given8("pressure"), air.epsilon), L = air.L(T10);
+  working: ({ given: given8, air }, value23) => {
+    const T11 = given8("temperature"), theta5 = T11 * pow(1e5 / given8("pressure"), air.kappa), w2 = mixingRatioFrom(air.es(given8("dewpoint")), given8("pressure"), air.epsilon), L = air.L(T11);
     return [
       { ...mixingRatioStep("w", "e", air.es(given8("dewpoint")), given8("pressure"), air), text: "Mixing ratio, with e = es(Td)" },
-      { text: "Potential temperature", formula: "\\theta = T\\,(p_0/p)^{\\kappa}", filled: `\\theta = ${inKelvin(theta4)}`, value: theta4, unit: "K" },
-      { text: "With the latent heat of all its vapor", formula: "\\theta \\exp\\frac{L\\,w}{c_p\\,T}", filled: `${texNumber(theta4, 6)} \\exp\\frac{${texNumber(L, 6)} \\cdot ${texNumber(w2)}}{${texNumber(air.cp, 6)} \\cdot ${texNumber(T10, 6)}} = ${inKelvin(value19)}` }
+      { text: "Potential temperature", formula: "\\theta = T\\,(p_0/p)^{\\kappa}", filled: `\\theta = ${inKelvin(theta5)}`, value: theta5, unit: "K" },
+      { text: "With the latent heat of all its vapor", formula: "\\theta \\exp\\frac{L\\,w}{c_p\\,T}", filled: `${texNumber(theta5, 6)} \\exp\\frac{${texNumber(L, 6)} \\cdot ${texNumber(w2)}}{${texNumber(air.cp, 6)} \\cdot ${texNumber(T11, 6)}} = ${inKelvin(value23)}` }
     ];
   },
   slips: [
@@ -5166,8 +5261,8 @@ var blend = (hand, a, b) => shareOf(hand) * a + (1 - shareOf(hand)) * b;
 var mixedTemperature = (hand) => blend(hand, hand.given("temperatureFirst"), hand.given("temperatureSecond"));
 function mixedVaporPressure(hand) {
   if (hand.variant === "mean-vapor-pressure") return blend(hand, vaporOf(hand, first2), vaporOf(hand, second2));
-  const q = blend(hand, humidityOf(hand, first2), humidityOf(hand, second2)), { epsilon } = hand.air;
-  return q * hand.given("pressure") / (epsilon + (1 - epsilon) * q);
+  const q2 = blend(hand, humidityOf(hand, first2), humidityOf(hand, second2)), { epsilon } = hand.air;
+  return q2 * hand.given("pressure") / (epsilon + (1 - epsilon) * q2);
 }
 var mass = (which, words2) => ({ name: `mass${which}`, label: `mass of the ${words2} air`, symbol: words2 === "first" ? "m₁" : "m₂", unit: "kg", shownUnit: "kg", kind: "ratio", shape: "number", range: [1e-3, 1e9] });
 var temperature3 = (which, words2) => ({ ...temperatureInput2, name: `temperature${which}`, label: `temperature of the ${words2} air`, symbol: words2 === "first" ? "T₁" : "T₂" });
@@ -5175,21 +5270,21 @@ var humidity = (which, words2) => ({ ...relativeHumidityInput, name: `relativeHu
 function isobaricMixingDefinition({ part, slips, ...named2 }) {
   const isMoist = part !== "temperature";
   const relative = (hand) => mixedVaporPressure(hand) / hand.air.es(mixedTemperature(hand));
-  const value19 = (hand) => part === "temperature" ? mixedTemperature(hand) : part === "vapor-pressure" ? mixedVaporPressure(hand) : relative(hand);
+  const value23 = (hand) => part === "temperature" ? mixedTemperature(hand) : part === "vapor-pressure" ? mixedVaporPressure(hand) : relative(hand);
   return moistQuantity({
     ...named2,
     inputs: [mass(first2, "first"), temperature3(first2, "first"), mass(second2, "second"), temperature3(second2, "second"), ...isMoist ? [humidity(first2, "first"), humidity(second2, "second"), pressureInput2] : []],
     variants: isMoist ? [
-      { key: "vapor-kept", label: "mean of the specific humidities by mass", source: glossary("mixing cloud", "common practice"), validity: "mixing at one pressure without condensation", knownError: "0.2 % by the heat capacity of the vapor", value: value19 },
-      { key: "mean-vapor-pressure", label: "mean of the vapor pressures by mass", source: { text: "common practice: the straight line between two states in a diagram of e on T", status: "common practice" }, validity: "mixing at one pressure without condensation", knownError: "1 %", value: value19 }
-    ] : [{ key: "by-mass", label: "mean of the temperatures by mass", source: glossary("mixing cloud", "common practice"), validity: "mixing at one pressure without condensation", knownError: "0.1 K by the heat capacity of the vapor", value: value19 }],
+      { key: "vapor-kept", label: "mean of the specific humidities by mass", source: glossary("mixing cloud", "common practice"), validity: "mixing at one pressure without condensation", knownError: "0.2 % by the heat capacity of the vapor", value: value23 },
+      { key: "mean-vapor-pressure", label: "mean of the vapor pressures by mass", source: { text: "common practice: the straight line between two states in a diagram of e on T", status: "common practice" }, validity: "mixing at one pressure without condensation", knownError: "1 %", value: value23 }
+    ] : [{ key: "by-mass", label: "mean of the temperatures by mass", source: glossary("mixing cloud", "common practice"), validity: "mixing at one pressure without condensation", knownError: "0.1 K by the heat capacity of the vapor", value: value23 }],
     constants: isMoist ? part === "vapor-pressure" ? ["R", "Rv", "enhancementFactor"] : ["R", "Rv"] : [],
     inside: isMoist ? ["es"] : [],
     notedAt: isMoist ? { es: (given8) => [given8("temperatureFirst"), given8("temperatureSecond")] } : {},
     remarks: (hand) => isMoist ? [supersaturated(relative(hand))] : [],
     working: (hand, result2) => {
-      const T10 = mixedTemperature(hand), m1 = massOf(hand, first2), m2 = massOf(hand, second2);
-      const temperatureStep = { text: "Temperature of the mixture, by mass", formula: "T = \\frac{m_1 T_1 + m_2 T_2}{m_1 + m_2}", filled: `T = \\frac{${texNumber(m1)} \\cdot ${texNumber(hand.given("temperatureFirst"), 6)} + ${texNumber(m2)} \\cdot ${texNumber(hand.given("temperatureSecond"), 6)}}{${texNumber(m1)} + ${texNumber(m2)}} = ${texQuantity(T10, "K", 6)} = ${inCelsius(T10)}`, value: T10, unit: "K" };
+      const T11 = mixedTemperature(hand), m1 = massOf(hand, first2), m2 = massOf(hand, second2);
+      const temperatureStep = { text: "Temperature of the mixture, by mass", formula: "T = \\frac{m_1 T_1 + m_2 T_2}{m_1 + m_2}", filled: `T = \\frac{${texNumber(m1)} \\cdot ${texNumber(hand.given("temperatureFirst"), 6)} + ${texNumber(m2)} \\cdot ${texNumber(hand.given("temperatureSecond"), 6)}}{${texNumber(m1)} + ${texNumber(m2)}} = ${texQuantity(T11, "K", 6)} = ${inCelsius(T11)}`, value: T11, unit: "K" };
       if (!isMoist) return [temperatureStep];
       const e = mixedVaporPressure(hand);
       const vaporStep = {
@@ -5200,7 +5295,7 @@ function isobaricMixingDefinition({ part, slips, ...named2 }) {
         unit: "Pa"
       };
       if (part === "vapor-pressure") return [vaporStep];
-      return [temperatureStep, vaporStep, { text: "Over saturation at the temperature of the mixture; above 100 % it is supersaturated", formula: "\\mathit{RH} = \\frac{e}{e_s(T)}", filled: `\\mathit{RH} = \\frac{${texNumber(e / 100)}}{${texNumber(hand.air.es(T10) / 100)}} = ${texQuantity(result2 * 100, "%")}` }];
+      return [temperatureStep, vaporStep, { text: "Over saturation at the temperature of the mixture; above 100 % it is supersaturated", formula: "\\mathit{RH} = \\frac{e}{e_s(T)}", filled: `\\mathit{RH} = \\frac{${texNumber(e / 100)}}{${texNumber(hand.air.es(T11) / 100)}} = ${texQuantity(result2 * 100, "%")}` }];
     },
     slips
   });
@@ -5275,10 +5370,10 @@ var solution = {
   solved: { text: "Where the mixing ratio is that of saturation along the dry adiabat, found by a bracket", formula: "w_s\\left(T_L,\\ p\\,(T_L/T)^{1/\\kappa}\\right) = w" }
 };
 function lclDefinition({ part, more = [], slips, ...named2 }) {
-  const value19 = (hand) => lclOf2(hand)[part];
-  const bolton2 = { key: "bolton", label: "Bolton (1980), Eq. 15", source: { text: "Bolton (1980), Mon. Wea. Rev. 108, 1046–1053, Eq. 15", status: "verified" }, validity: "temperatures of −35 to 35 °C", knownError: "0.1 K, 0.8 hPa; the height by the dry rate 1 % low", holds: { temperature: [238.15, 308.15] }, value: value19 };
-  const romps2 = { key: "romps", label: "Romps (2017), Eq. 22", source: { text: "Romps (2017), J. Atmos. Sci. 74, 3891–3900, Eq. 22, with its constants", status: "verified" }, validity: "unsaturated air", knownError: "5 m", value: value19 };
-  const solved2 = { key: "solved", label: "w = wₛ along the dry adiabat", source: { text: 'AMS Glossary of Meteorology, "lifting condensation level", solved by a bracket', status: "common practice" }, validity: "unsaturated air", knownError: "0.1 K by the formula of eₛ; the height by the dry rate 1 % low", value: value19 };
+  const value23 = (hand) => lclOf2(hand)[part];
+  const bolton2 = { key: "bolton", label: "Bolton (1980), Eq. 15", source: { text: "Bolton (1980), Mon. Wea. Rev. 108, 1046–1053, Eq. 15", status: "verified" }, validity: "temperatures of −35 to 35 °C", knownError: "0.1 K, 0.8 hPa; the height by the dry rate 1 % low", holds: { temperature: [238.15, 308.15] }, value: value23 };
+  const romps2 = { key: "romps", label: "Romps (2017), Eq. 22", source: { text: "Romps (2017), J. Atmos. Sci. 74, 3891–3900, Eq. 22, with its constants", status: "verified" }, validity: "unsaturated air", knownError: "5 m", value: value23 };
+  const solved2 = { key: "solved", label: "w = wₛ along the dry adiabat", source: { text: 'AMS Glossary of Meteorology, "lifting condensation level", solved by a bracket', status: "common practice" }, validity: "unsaturated air", knownError: "0.1 K by the formula of eₛ; the height by the dry rate 1 % low", value: value23 };
   return moistQuantity({
     ...named2,
     inputs: [pressureInput2, temperatureInput2, dewpointInput],
@@ -5287,15 +5382,15 @@ function lclDefinition({ part, more = [], slips, ...named2 }) {
     constants: part === "heightAboveStart" ? ["R", "Rv", "cp", "g", "kappa"] : ["R", "Rv", "cp", "kappa"],
     inside: ["es"],
     remarks: ({ given: given8 }) => [foggy(given8("temperature"), given8("dewpoint"))],
-    working: (hand, value20) => {
+    working: (hand, value24) => {
       const { given: given8, air, variant } = hand;
-      if (variant === "espy") return [{ text: "The 125 m per kelvin rule", formula: "z_L = 125\\,(T - T_d)", filled: `z_L = 125 \\cdot ${texNumber(given8("temperature") - given8("dewpoint"))} = ${texQuantity(value20, "m")}` }];
+      if (variant === "espy") return [{ text: "The 125 m per kelvin rule", formula: "z_L = 125\\,(T - T_d)", filled: `z_L = 125 \\cdot ${texNumber(given8("temperature") - given8("dewpoint"))} = ${texQuantity(value24, "m")}` }];
       const lcl = lclOf2(hand), how = solution[variant] ?? solution.bolton;
       const first3 = { text: how?.text ?? "", formula: how?.formula ?? "", filled: `T_L = ${texQuantity(lcl.temperature, "K", 6)} = ${inCelsius(lcl.temperature)}`, value: lcl.temperature, unit: "K" };
       const exponent2 = variant === "romps" ? "c_{pm}/R_m" : "1/\\kappa";
       if (part === "temperature") return [first3];
-      if (part === "pressure") return [first3, { text: "Along the dry adiabat, with the temperatures in kelvin", formula: `p_L = p\\left(\\frac{T_L}{T}\\right)^{${exponent2}}`, filled: `p_L = ${texNumber(given8("pressure") / 100, 6)}\\left(\\frac{${texNumber(lcl.temperature, 6)}}{${texNumber(given8("temperature"), 6)}}\\right)^{${exponent2}} = ${inHectopascal(value20)}` }];
-      return [first3, { text: "At the dry adiabatic lapse rate, above the parcel’s start", formula: variant === "romps" ? "z_L = \\frac{c_{pm}}{g}\\,(T - T_L)" : "z_L = \\frac{c_p}{g}\\,(T - T_L)", filled: `z_L = ${variant === "romps" ? "\\frac{c_{pm}}{g}" : `\\frac{${texNumber(air.cp, 6)}}{${texNumber(air.g, 6)}}`} \\cdot ${texNumber(given8("temperature") - lcl.temperature)} = ${texQuantity(value20, "m")}` }];
+      if (part === "pressure") return [first3, { text: "Along the dry adiabat, with the temperatures in kelvin", formula: `p_L = p\\left(\\frac{T_L}{T}\\right)^{${exponent2}}`, filled: `p_L = ${texNumber(given8("pressure") / 100, 6)}\\left(\\frac{${texNumber(lcl.temperature, 6)}}{${texNumber(given8("temperature"), 6)}}\\right)^{${exponent2}} = ${inHectopascal(value24)}` }];
+      return [first3, { text: "At the dry adiabatic lapse rate, above the parcel’s start", formula: variant === "romps" ? "z_L = \\frac{c_{pm}}{g}\\,(T - T_L)" : "z_L = \\frac{c_p}{g}\\,(T - T_L)", filled: `z_L = ${variant === "romps" ? "\\frac{c_{pm}}{g}" : `\\frac{${texNumber(air.cp, 6)}}{${texNumber(air.g, 6)}}`} \\cdot ${texNumber(given8("temperature") - lcl.temperature)} = ${texQuantity(value24, "m")}` }];
     },
     slips
   });
@@ -5336,8 +5431,8 @@ var liftingCondensationLevelPressureDefinition = lclDefinition({
     fineMoistSlip("from-1000", "1000 hPa for the start", "This starts from 1000 hPa: the parcel starts at the pressure given.", ({ given: given8, right }) => given8("pressure") === 1e5 ? null : right * 1e5 / given8("pressure")),
     fineMoistSlip("dewpoint", "dewpoint for the temperature at the level", "This comes from the dewpoint at the start in place of the temperature at the level.", ({ given: given8, air }) => given8("dewpoint") >= given8("temperature") ? null : given8("pressure") * pow(given8("dewpoint") / given8("temperature"), 1 / air.kappa)),
     moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This comes from temperatures in °C: Poisson’s relation takes kelvin.", (hand) => {
-      const T10 = hand.given("temperature") - zeroCelsius, TL = lclOf2(hand).temperature - zeroCelsius;
-      return T10 > 0 && TL > 0 && TL < T10 ? hand.given("pressure") * pow(TL / T10, 1 / hand.air.kappa) : null;
+      const T11 = hand.given("temperature") - zeroCelsius, TL = lclOf2(hand).temperature - zeroCelsius;
+      return T11 > 0 && TL > 0 && TL < T11 ? hand.given("pressure") * pow(TL / T11, 1 / hand.air.kappa) : null;
     }),
     moistSlip("inverted-exponent", "exponent turned round", "This comes from the exponent κ in place of 1/κ.", (hand) => hand.given("dewpoint") >= hand.given("temperature") ? null : hand.given("pressure") * pow(lclOf2(hand).temperature / hand.given("temperature"), hand.air.kappa)),
     moistSlip("inverted-ratio", "ratio turned round", "This lies below the start: the ratio of the temperatures is turned round.", ({ given: given8, right }) => given8("dewpoint") >= given8("temperature") ? null : given8("pressure") * given8("pressure") / right),
@@ -5383,13 +5478,13 @@ var moistStaticEnergyDefinition = moistQuantity({
   inside: ["L"],
   notedAt: { L: (given8) => [given8("temperature")] },
   ask: "The moist static energy cp T + g z + L q per kilogram, with T in kelvin, z above the datum and the specific humidity.",
-  working: ({ given: given8, air }, value19) => {
-    const T10 = given8("temperature"), z3 = given8("heightAboveDatum"), q = given8("specificHumidity"), L = air.L(T10);
+  working: ({ given: given8, air }, value23) => {
+    const T11 = given8("temperature"), z4 = given8("heightAboveDatum"), q2 = given8("specificHumidity"), L = air.L(T11);
     return [
-      { text: "Enthalpy, with T in kelvin", formula: "c_p\\,T", filled: `${texNumber(air.cp / 1e3, 6)} \\cdot ${texNumber(T10, 6)} = ${texQuantity(air.cp * T10 / 1e3, "kJ/kg", 6)}`, value: air.cp * T10, unit: "J/kg" },
-      { text: "Geopotential", formula: "g\\,z", filled: `${texNumber(air.g, 6)} \\cdot ${texFactor(z3)} = ${texQuantity(air.g * z3 / 1e3, "kJ/kg", 6)}`, value: air.g * z3, unit: "J/kg" },
-      { text: "Latent heat, with q in kg per kg", formula: "L\\,q", filled: `${texNumber(L / 1e3, 6)} \\cdot ${texNumber(q)} = ${texQuantity(L * q / 1e3, "kJ/kg", 6)}`, value: L * q, unit: "J/kg" },
-      { text: "Together", formula: "h = c_p\\,T + g\\,z + L\\,q", filled: `h = ${texQuantity(value19 / 1e3, "kJ/kg", 6)}` }
+      { text: "Enthalpy, with T in kelvin", formula: "c_p\\,T", filled: `${texNumber(air.cp / 1e3, 6)} \\cdot ${texNumber(T11, 6)} = ${texQuantity(air.cp * T11 / 1e3, "kJ/kg", 6)}`, value: air.cp * T11, unit: "J/kg" },
+      { text: "Geopotential", formula: "g\\,z", filled: `${texNumber(air.g, 6)} \\cdot ${texFactor(z4)} = ${texQuantity(air.g * z4 / 1e3, "kJ/kg", 6)}`, value: air.g * z4, unit: "J/kg" },
+      { text: "Latent heat, with q in kg per kg", formula: "L\\,q", filled: `${texNumber(L / 1e3, 6)} \\cdot ${texNumber(q2)} = ${texQuantity(L * q2 / 1e3, "kJ/kg", 6)}`, value: L * q2, unit: "J/kg" },
+      { text: "Together", formula: "h = c_p\\,T + g\\,z + L\\,q", filled: `h = ${texQuantity(value23 / 1e3, "kJ/kg", 6)}` }
     ];
   },
   slips: [
@@ -5452,11 +5547,11 @@ var pseudoadiabaticWetBulbTemperatureDefinition = moistQuantity({
   notedAt: { es: (given8) => [given8("dewpoint")] },
   remarks: ({ given: given8 }) => [foggy(given8("temperature"), given8("dewpoint"))],
   ask: "The pseudoadiabatic wet-bulb temperature: lifted dry-adiabatically to condensation, then lowered along the pseudoadiabat to the pressure of the start.",
-  working: (hand, value19) => {
+  working: (hand, value23) => {
     const lcl = lclOf3(hand);
     return [
       { text: "Up the dry adiabat to the lifting condensation level", formula: "T \\to T_L,\\ p \\to p_L", filled: `T_L = ${inCelsius(lcl.temperature)},\\ p_L = ${inHectopascal(lcl.pressure)}`, value: lcl.temperature, unit: "K" },
-      { text: "Down the pseudoadiabat to the pressure of the start", formula: "T_L \\to T_{sw}", filled: `T_{sw} = ${inCelsius(value19)}` }
+      { text: "Down the pseudoadiabat to the pressure of the start", formula: "T_L \\to T_{sw}", filled: `T_{sw} = ${inCelsius(value23)}` }
     ];
   },
   slips: [
@@ -5494,11 +5589,11 @@ var reversibleAscentTemperatureDefinition = moistQuantity({
   notedAt: { es: (given8) => [given8("temperature")], L: (given8) => [given8("temperature")] },
   remarks: ({ given: given8 }) => [given8("pressureEnd") > given8("pressureStart") ? "The end lies below the start, where the air has no liquid water to evaporate: it would warm dry-adiabatically." : null],
   ask: "The temperature of saturated air after it is lifted reversibly, over liquid water; condensed water stays in the parcel and is cooled with it.",
-  working: ({ given: given8, air }, value19) => {
+  working: ({ given: given8, air }, value23) => {
     const water2 = mixingRatioFrom(air.es(given8("temperature")), given8("pressureStart"), air.epsilon);
     return [
       { text: "All the water of the parcel: saturation at the start", formula: "w_t = w_s(T_1, p_1)", filled: `w_t = ${inGrams(water2)}`, value: water2, unit: "1" },
-      { text: "The temperature at the end that keeps the moist entropy, found by a bracket", formula: "(c_p + w_t c_w) \\ln T - R \\ln(p - e_s) + \\frac{L w_s}{T} = \\text{const.}", filled: `T_2 = ${inCelsius(value19)}` }
+      { text: "The temperature at the end that keeps the moist entropy, found by a bracket", formula: "(c_p + w_t c_w) \\ln T - R \\ln(p - e_s) + \\frac{L w_s}{T} = \\text{const.}", filled: `T_2 = ${inCelsius(value23)}` }
     ];
   },
   slips: [
@@ -5534,12 +5629,12 @@ var reversibleSaturatedLapseRateDefinition = moistQuantity({
   inside: ["es", "L"],
   notedAt: { es: (given8) => [given8("temperature")], L: (given8) => [given8("temperature")] },
   ask: "The reversible saturated adiabatic lapse rate −dT/dz at the temperature and the pressure, over liquid water; condensed water stays in the parcel.",
-  working: ({ given: given8, air }, value19) => {
+  working: ({ given: given8, air }, value23) => {
     const e = air.es(given8("temperature"));
     return [
       { ...mixingRatioStep("w_s", "e_s", e, given8("pressure"), air), text: "Saturation mixing ratio" },
       { text: "All the water of the parcel", formula: "w_t = w_s + w_l", filled: `w_t = ${inGrams(mixingRatioFrom(e, given8("pressure"), air.epsilon) + given8("liquidWater"))}`, value: mixingRatioFrom(e, given8("pressure"), air.epsilon) + given8("liquidWater"), unit: "1" },
-      { text: "The water that stays is cooled too", formula: "\\Gamma_{rm} = g\\,\\frac{(1 + w_t)\\left(1 + \\frac{L w_s}{R T}\\right)}{c_p + w_s c_{pv} + w_l c_w + \\frac{L^2 w_s (\\varepsilon + w_s)}{R T^2}}", filled: `\\Gamma_{rm} = ${texQuantity(value19 * 1e3, "K/km")}` }
+      { text: "The water that stays is cooled too", formula: "\\Gamma_{rm} = g\\,\\frac{(1 + w_t)\\left(1 + \\frac{L w_s}{R T}\\right)}{c_p + w_s c_{pv} + w_l c_w + \\frac{L^2 w_s (\\varepsilon + w_s)}{R T^2}}", filled: `\\Gamma_{rm} = ${texQuantity(value23 * 1e3, "K/km")}` }
     ];
   },
   slips: [
@@ -5570,13 +5665,13 @@ var saturatedAdiabaticLapseRateDefinition = moistQuantity({
   inside: ["es", "L"],
   notedAt: { es: (given8) => [given8("temperature")], L: (given8) => [given8("temperature")] },
   ask: "The saturated (pseudo)adiabatic lapse rate Γm = −dT/dz at the temperature and the pressure, over liquid water; condensed water leaves at once.",
-  working: ({ given: given8, air, variant }, value19) => {
-    const T10 = given8("temperature"), e = air.es(T10), w2 = mixingRatioFrom(e, given8("pressure"), air.epsilon), L = air.L(T10);
-    const a = L * w2 / (air.R * T10), b = L * L * w2 * air.epsilon / (air.R * T10 * T10);
+  working: ({ given: given8, air, variant }, value23) => {
+    const T11 = given8("temperature"), e = air.es(T11), w2 = mixingRatioFrom(e, given8("pressure"), air.epsilon), L = air.L(T11);
+    const a = L * w2 / (air.R * T11), b = L * L * w2 * air.epsilon / (air.R * T11 * T11);
     return [
       { ...mixingRatioStep("w_s", "e_s", e, given8("pressure"), air), text: "Saturation mixing ratio" },
       { text: "Latent heat", formula: "L", filled: `L = ${texQuantity(L / 1e3, "kJ/kg", 6)}`, value: L, unit: "J/kg" },
-      variant === "full" ? { text: "With the heat capacity of the vapor", formula: "\\Gamma_m = g\\,\\frac{(1 + w_s)\\left(1 + \\frac{L w_s}{R T}\\right)}{c_p + w_s c_{pv} + \\frac{L^2 w_s (\\varepsilon + w_s)}{R T^2}}", filled: `\\Gamma_m = ${texQuantity(value19 * 1e3, "K/km")}` } : { text: "The latent heat pays for part of the cooling", formula: "\\Gamma_m = g\\,\\frac{1 + \\frac{L w_s}{R T}}{c_p + \\frac{L^2 w_s \\varepsilon}{R T^2}}", filled: `\\Gamma_m = ${texNumber(air.g)} \\cdot \\frac{1 + ${texNumber(a)}}{${texNumber(air.cp, 6)} + ${texNumber(b)}} = ${texQuantity(value19 * 1e3, "K/km")}` }
+      variant === "full" ? { text: "With the heat capacity of the vapor", formula: "\\Gamma_m = g\\,\\frac{(1 + w_s)\\left(1 + \\frac{L w_s}{R T}\\right)}{c_p + w_s c_{pv} + \\frac{L^2 w_s (\\varepsilon + w_s)}{R T^2}}", filled: `\\Gamma_m = ${texQuantity(value23 * 1e3, "K/km")}` } : { text: "The latent heat pays for part of the cooling", formula: "\\Gamma_m = g\\,\\frac{1 + \\frac{L w_s}{R T}}{c_p + \\frac{L^2 w_s \\varepsilon}{R T^2}}", filled: `\\Gamma_m = ${texNumber(air.g)} \\cdot \\frac{1 + ${texNumber(a)}}{${texNumber(air.cp, 6)} + ${texNumber(b)}} = ${texQuantity(value23 * 1e3, "K/km")}` }
     ];
   },
   slips: [
@@ -5587,16 +5682,16 @@ var saturatedAdiabaticLapseRateDefinition = moistQuantity({
     fineMoistSlip("six", "6 K km⁻¹ as a constant", "This is a round number for the middle latitudes: Γm depends on temperature and pressure.", () => 6e-3),
     fineMoistSlip("six-and-a-half", "6.5 K km⁻¹", "This is the mean lapse rate of the standard atmosphere, which is no saturated rate.", () => 65e-4),
     moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This comes from R T and R T² with the temperature in °C: they take kelvin.", ({ given: given8, air }) => {
-      const T10 = given8("temperature"), t = T10 - zeroCelsius, w2 = mixingRatioFrom(air.es(T10), given8("pressure"), air.epsilon), L = air.L(T10);
+      const T11 = given8("temperature"), t = T11 - zeroCelsius, w2 = mixingRatioFrom(air.es(T11), given8("pressure"), air.epsilon), L = air.L(T11);
       return Math.abs(t) < 0.5 ? null : air.g * (1 + L * w2 / (air.R * t)) / (air.cp + L * L * w2 * air.epsilon / (air.R * t * t));
     }),
     fineMoistSlip("numerator", "without 1 + Lw/RT", "This comes without the term L w/(R T) in the numerator.", ({ given: given8, air }) => {
-      const T10 = given8("temperature"), w2 = mixingRatioFrom(air.es(T10), given8("pressure"), air.epsilon), L = air.L(T10);
-      return air.g / (air.cp + L * L * w2 * air.epsilon / (air.R * T10 * T10));
+      const T11 = given8("temperature"), w2 = mixingRatioFrom(air.es(T11), given8("pressure"), air.epsilon), L = air.L(T11);
+      return air.g / (air.cp + L * L * w2 * air.epsilon / (air.R * T11 * T11));
     }),
     fineMoistSlip("epsilon-left-out", "without ε", "This comes without ε in the denominator, which is R/Rv there.", ({ given: given8, air }) => {
-      const T10 = given8("temperature"), w2 = mixingRatioFrom(air.es(T10), given8("pressure"), air.epsilon), L = air.L(T10);
-      return air.g * (1 + L * w2 / (air.R * T10)) / (air.cp + L * L * w2 / (air.R * T10 * T10));
+      const T11 = given8("temperature"), w2 = mixingRatioFrom(air.es(T11), given8("pressure"), air.epsilon), L = air.L(T11);
+      return air.g * (1 + L * w2 / (air.R * T11)) / (air.cp + L * L * w2 / (air.R * T11 * T11));
     })
   ],
   example: { inputs: { pressure: 1e5, temperature: 293.15 }, gives: 431136e-8, within: 1e-7 }
@@ -5626,11 +5721,11 @@ function saturatedPathDefinition({ direction: direction2, ...named2 }) {
     constants: ["R", "Rv", "cp", "cpv", "latentHeat", "cw", "enhancementFactor"],
     inside: ["es", "L"],
     notedAt: { es: (given8) => [given8("temperature")], L: (given8) => [given8("temperature")] },
-    working: (hand, value19) => {
-      const slope = (T10, p10) => pseudoadiabaticSlope(T10, p10, hand.air);
+    working: (hand, value23) => {
+      const slope = (T11, p10) => pseudoadiabaticSlope(T11, p10, hand.air);
       return [
         { text: "At the start", formula: "\\frac{dT}{d\\ln p} = \\frac{R T + L w_s}{c_p + \\frac{L^2 w_s \\varepsilon}{R T^2}}", filled: `\\frac{dT}{d\\ln p} = ${texQuantity(slope(start4(hand), from(hand)), "K")}`, value: slope(start4(hand), from(hand)), unit: "K" },
-        { text: `In equal steps of ln p, fourth-order Runge–Kutta, with T, L and ws anew at each; at the end it is ${texNumber(slope(value19, to(hand)), 4)} K`, formula: "T_2 = T_1 + \\int_{p_1}^{p_2} \\frac{dT}{d\\ln p}\\,d\\ln p", filled: `T_2 = ${inCelsius(start4(hand))} ${value19 < start4(hand) ? "-" : "+"} ${texQuantity(Math.abs(value19 - start4(hand)), "K")} = ${inCelsius(value19)}` }
+        { text: `In equal steps of ln p, fourth-order Runge–Kutta, with T, L and ws anew at each; at the end it is ${texNumber(slope(value23, to(hand)), 4)} K`, formula: "T_2 = T_1 + \\int_{p_1}^{p_2} \\frac{dT}{d\\ln p}\\,d\\ln p", filled: `T_2 = ${inCelsius(start4(hand))} ${value23 < start4(hand) ? "-" : "+"} ${texQuantity(Math.abs(value23 - start4(hand)), "K")} = ${inCelsius(value23)}` }
       ];
     },
     slips: [
@@ -5680,9 +5775,9 @@ var saturationEquivalentPotentialTemperatureDefinition = moistQuantity({
   inside: ["es"],
   notedAt: { es: (given8) => [given8("temperature")] },
   ask: "The saturation equivalent potential temperature by Bolton’s formula: θe of the air if it were saturated over liquid water at its temperature.",
-  working: ({ given: given8, air, variant }, value19) => [
+  working: ({ given: given8, air, variant }, value23) => [
     { ...mixingRatioStep("w_s", "e_s", air.es(given8("temperature")), given8("pressure"), air), text: "Saturation mixing ratio" },
-    { text: "Bolton’s formula with w in kg per kg; the condensation level is here, TL = T", formula: variant === "bolton-43" ? "\\theta_{es} = T\\left(\\frac{p_0}{p}\\right)^{0.2854\\,(1 - 0.28\\,w_s)}\\exp\\left[\\left(\\frac{3376}{T} - 2.54\\right) w_s\\,(1 + 0.81\\,w_s)\\right]" : "\\theta_{es} = T\\left(\\frac{p_0}{p - e_s}\\right)^{\\kappa}\\exp\\left[\\left(\\frac{3036}{T} - 1.78\\right) w_s\\,(1 + 0.448\\,w_s)\\right]", filled: `\\theta_{es} = ${inKelvin(value19)}` }
+    { text: "Bolton’s formula with w in kg per kg; the condensation level is here, TL = T", formula: variant === "bolton-43" ? "\\theta_{es} = T\\left(\\frac{p_0}{p}\\right)^{0.2854\\,(1 - 0.28\\,w_s)}\\exp\\left[\\left(\\frac{3376}{T} - 2.54\\right) w_s\\,(1 + 0.81\\,w_s)\\right]" : "\\theta_{es} = T\\left(\\frac{p_0}{p - e_s}\\right)^{\\kappa}\\exp\\left[\\left(\\frac{3036}{T} - 1.78\\right) w_s\\,(1 + 0.448\\,w_s)\\right]", filled: `\\theta_{es} = ${inKelvin(value23)}` }
   ],
   slips: [
     fineMoistSlip("theta", "potential temperature", "This is the potential temperature: the latent heat of saturation is not in it.", ({ given: given8, air }) => given8("temperature") * pow(1e5 / given8("pressure"), air.kappa)),
@@ -5712,12 +5807,12 @@ var virtualPotentialTemperatureDefinition = moistQuantity({
   inside: ["es"],
   notedAt: { es: (given8) => [given8("dewpoint")] },
   ask: "The virtual potential temperature θv of the air, with the exact virtual factor, referred to 1000 hPa.",
-  working: (hand, value19) => {
-    const { given: given8, air } = hand, Tv4 = virtual(hand);
+  working: (hand, value23) => {
+    const { given: given8, air } = hand, Tv6 = virtual(hand);
     return [
       { ...mixingRatioStep("w", "e", air.es(given8("dewpoint")), given8("pressure"), air), text: "Mixing ratio, with e = es(Td)" },
-      { text: "Virtual temperature", formula: hand.variant === "linear" ? "T_v = T\\,(1 + 0.61\\,w)" : "T_v = T\\,\\frac{1 + w/\\varepsilon}{1 + w}", filled: `T_v = ${inKelvin(Tv4)}`, value: Tv4, unit: "K" },
-      { text: "Referred to 1000 hPa", formula: "\\theta_v = T_v\\left(\\frac{p_0}{p}\\right)^{\\kappa}", filled: `\\theta_v = ${texNumber(Tv4, 6)}\\left(\\frac{1000}{${texNumber(given8("pressure") / 100, 6)}}\\right)^{${texNumber(air.kappa)}} = ${inKelvin(value19)}` }
+      { text: "Virtual temperature", formula: hand.variant === "linear" ? "T_v = T\\,(1 + 0.61\\,w)" : "T_v = T\\,\\frac{1 + w/\\varepsilon}{1 + w}", filled: `T_v = ${inKelvin(Tv6)}`, value: Tv6, unit: "K" },
+      { text: "Referred to 1000 hPa", formula: "\\theta_v = T_v\\left(\\frac{p_0}{p}\\right)^{\\kappa}", filled: `\\theta_v = ${texNumber(Tv6, 6)}\\left(\\frac{1000}{${texNumber(given8("pressure") / 100, 6)}}\\right)^{${texNumber(air.kappa)}} = ${inKelvin(value23)}` }
     ];
   },
   slips: [
@@ -5744,22 +5839,22 @@ var wetBulbPotentialTemperatureDefinition = moistQuantity({
   inputs: [pressureInput2, temperatureInput2, dewpointInput],
   variants: [
     { key: "pseudoadiabat", label: "down the pseudoadiabat to 1000 hPa", source: { text: 'AMS Glossary of Meteorology, "wet-bulb potential temperature"', status: "verified" }, validity: "over liquid water", knownError: "0.2 K by the latent heat", value: (hand) => pseudoadiabaticWetBulb(1e5, lclOf4(hand), hand.air) },
-    { key: "davies-jones", label: "Davies-Jones’ fit to θe", source: { text: "Davies-Jones (2008), Mon. Wea. Rev. 136, 2764–2785, Eq. 3.8", status: "from memory" }, validity: "θe 257–377 K", knownError: "0.02 K of its pseudoadiabats", value: (hand) => daviesJonesWetBulbPotential(thetaE(hand)) }
+    { key: "davies-jones", label: "Davies-Jones’ fit to θe", source: { text: "Davies-Jones (2008), Mon. Wea. Rev. 136, 2764–2785, Eq. 3.8; coefficients read in transcriptions", status: "verified" }, validity: "θe 257–377 K", knownError: "0.02 K of its pseudoadiabats", value: (hand) => daviesJonesWetBulbPotential(thetaE(hand)) }
   ],
   constants: ["R", "Rv", "cp", "kappa", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L", lclTemperatureKey],
   notedAt: { es: (given8) => [given8("dewpoint")] },
   remarks: ({ given: given8 }) => [foggy(given8("temperature"), given8("dewpoint"))],
   ask: "The wet-bulb potential temperature: the temperature that the parcel’s pseudoadiabat has at 1000 hPa.",
-  working: (hand, value19) => {
+  working: (hand, value23) => {
     if (hand.variant === "davies-jones") return [
       { text: "Equivalent potential temperature by Bolton’s equation 39", formula: "\\theta_e", filled: `\\theta_e = ${inKelvin(thetaE(hand))}`, value: thetaE(hand), unit: "K" },
-      { text: "Davies-Jones’ fit, with X = θe/273.15 K", formula: "\\theta_w = \\theta_e - \\exp\\frac{7.101574 - 20.68208 X + 16.11182 X^2 + 2.574631 X^3 - 5.205688 X^4}{1 - 3.552497 X + 3.781782 X^2 - 0.6899655 X^3 - 0.5929340 X^4}", filled: `\\theta_w = ${inKelvin(value19)} = ${inCelsius(value19)}` }
+      { text: "Davies-Jones’ fit, with X = θe/273.15 K", formula: "\\theta_w = \\theta_e - \\exp\\frac{7.101574 - 20.68208 X + 16.11182 X^2 + 2.574631 X^3 - 5.205688 X^4}{1 - 3.552497 X + 3.781782 X^2 - 0.6899655 X^3 - 0.5929340 X^4}", filled: `\\theta_w = ${inKelvin(value23)} = ${inCelsius(value23)}` }
     ];
     const lcl = lclOf4(hand);
     return [
       { text: "Up the dry adiabat to the lifting condensation level", formula: "T \\to T_L,\\ p \\to p_L", filled: `T_L = ${inCelsius(lcl.temperature)},\\ p_L = ${inHectopascal(lcl.pressure)}`, value: lcl.temperature, unit: "K" },
-      { text: "Along the pseudoadiabat to 1000 hPa", formula: "T_L \\to \\theta_w", filled: `\\theta_w = ${inCelsius(value19)} = ${inKelvin(value19)}` }
+      { text: "Along the pseudoadiabat to 1000 hPa", formula: "T_L \\to \\theta_w", filled: `\\theta_w = ${inCelsius(value23)} = ${inKelvin(value23)}` }
     ];
   },
   slips: [
@@ -5813,7 +5908,7 @@ var absoluteHumidityDefinition = moistQuantity({
   variants: [{ key: "ideal-gas", label: "e/(Rv T)", source: glossary("absolute humidity"), validity: "vapor at less than 100 hPa", knownError: "0.2 %", value: ({ given: given8, air }) => given8("vaporPressure") / (air.Rv * given8("temperature")) }],
   constants: ["Rv"],
   ask: "The absolute humidity of the air, mass of vapor per volume of air.",
-  working: ({ given: given8, air }, value19) => [{ text: "Equation of state of the vapor, with e in pascal and T in kelvin", formula: "\\rho_v = \\frac{e}{R_v\\,T}", filled: `\\rho_v = \\frac{${texNumber(given8("vaporPressure"))}}{${texNumber(air.Rv)} \\cdot ${texNumber(given8("temperature"))}} = ${texQuantity(value19 * 1e3, "g/m3")}` }],
+  working: ({ given: given8, air }, value23) => [{ text: "Equation of state of the vapor, with e in pascal and T in kelvin", formula: "\\rho_v = \\frac{e}{R_v\\,T}", filled: `\\rho_v = \\frac{${texNumber(given8("vaporPressure"))}}{${texNumber(air.Rv)} \\cdot ${texNumber(given8("temperature"))}} = ${texQuantity(value23 * 1e3, "g/m3")}` }],
   slips: [
     moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This is what comes out with the temperature in °C: the equation of state takes kelvin.", ({ given: given8, right }) => given8("temperature") === zeroCelsius ? null : right * given8("temperature") / (given8("temperature") - zeroCelsius)),
     moistSlip("dry-gas-constant", "gas constant of dry air", "This comes from the gas constant of dry air: the vapor has its own.", ({ air, right }) => right * air.Rv / air.R),
@@ -5835,11 +5930,11 @@ var densityOfMoistAirDefinition = moistQuantity({
   variants: [{ key: "ideal-gases", label: "dry air and vapor as ideal gases", source: glossary("equation of state", "common practice"), validity: "180–340 K, below 1200 hPa", knownError: "0.1 %", value: ({ given: given8, air }) => (given8("pressure") - given8("vaporPressure")) / (air.R * given8("temperature")) + given8("vaporPressure") / (air.Rv * given8("temperature")) }],
   constants: ["R", "Rv"],
   ask: "The density of the moist air, mass of dry air and vapor per volume.",
-  working: ({ given: given8, air }, value19) => {
-    const p10 = given8("pressure"), e = given8("vaporPressure"), T10 = given8("temperature");
+  working: ({ given: given8, air }, value23) => {
+    const p10 = given8("pressure"), e = given8("vaporPressure"), T11 = given8("temperature");
     return [
-      { text: "Density of the dry air, with its partial pressure", formula: "\\rho_d = \\frac{p - e}{R\\,T}", filled: `\\rho_d = \\frac{${texNumber(p10 - e, 7)}}{${texNumber(air.R)} \\cdot ${texNumber(T10)}} = ${texQuantity((p10 - e) / (air.R * T10), "kg/m3")}`, value: (p10 - e) / (air.R * T10), unit: "kg/m3" },
-      { text: "Together with the vapor", formula: "\\rho = \\rho_d + \\frac{e}{R_v\\,T}", filled: `\\rho = ${texNumber((p10 - e) / (air.R * T10))} + \\frac{${texNumber(e)}}{${texNumber(air.Rv)} \\cdot ${texNumber(T10)}} = ${texQuantity(value19, "kg/m3")}` }
+      { text: "Density of the dry air, with its partial pressure", formula: "\\rho_d = \\frac{p - e}{R\\,T}", filled: `\\rho_d = \\frac{${texNumber(p10 - e, 7)}}{${texNumber(air.R)} \\cdot ${texNumber(T11)}} = ${texQuantity((p10 - e) / (air.R * T11), "kg/m3")}`, value: (p10 - e) / (air.R * T11), unit: "kg/m3" },
+      { text: "Together with the vapor", formula: "\\rho = \\rho_d + \\frac{e}{R_v\\,T}", filled: `\\rho = ${texNumber((p10 - e) / (air.R * T11))} + \\frac{${texNumber(e)}}{${texNumber(air.Rv)} \\cdot ${texNumber(T11)}} = ${texQuantity(value23, "kg/m3")}` }
     ];
   },
   slips: [
@@ -5859,14 +5954,14 @@ function dewpointFunction(constants, formulae) {
   const solved2 = overWaterForms.find((form) => form.key === (formulae.variants[overWaterKey] ?? overWaterForms[0]?.key))?.temperature;
   if (solved2 && formulae.beyond === "compute") return (e) => solved2(e / enhancementOf(constants));
   const es = saturationPressureFunction(constants, formulae);
-  return (e) => findRoot((T10) => es(T10) / e - 1, coldest, hottest);
+  return (e) => findRoot((T11) => es(T11) / e - 1, coldest, hottest);
 }
 function frostPoint(vaporPressure, constants, formulae) {
   const ei = iceSaturationPressureFunction(constants, formulae);
   const triple = 273.16;
   if (vaporPressure > ei(triple)) return { is: "not_defined", why: "The vapor pressure is above that of the triple point of water: at saturation there is no ice." };
   const solved2 = overIceForms.find((form) => form.key === (formulae.variants[overIceKey] ?? overIceForms[0]?.key))?.temperature;
-  return { is: "value", value: solved2 && formulae.beyond === "compute" ? solved2(vaporPressure / enhancementOf(constants)) : findRoot((T10) => ei(T10) / vaporPressure - 1, 120, triple) };
+  return { is: "value", value: solved2 && formulae.beyond === "compute" ? solved2(vaporPressure / enhancementOf(constants)) : findRoot((T11) => ei(T11) / vaporPressure - 1, 120, triple) };
 }
 
 // shared/thermo/quantities/dewpoint.ts
@@ -5882,7 +5977,7 @@ var dewpointDefinition = moistQuantity({
   constants: ["enhancementFactor"],
   inside: ["es"],
   ask: "The dewpoint over liquid water, also below 0 °C: the temperature at which the air’s vapor pressure is that of saturation.",
-  working: ({ given: given8 }, value19) => [{ text: "The temperature at which the vapor pressure is that of saturation", formula: "e_s(T_d) = e", filled: `e_s(${inCelsius(value19)}) = ${inHectopascal(given8("vaporPressure"))}` }],
+  working: ({ given: given8 }, value23) => [{ text: "The temperature at which the vapor pressure is that of saturation", formula: "e_s(T_d) = e", filled: `e_s(${inCelsius(value23)}) = ${inHectopascal(given8("vaporPressure"))}` }],
   slips: [
     fineMoistSlip("frost-point", "frost point for dewpoint", "This is the frost point, over ice; the dewpoint refers to liquid water, also below 0 °C.", ({ given: given8, constants, formulae, right }) => {
       if (right > 273.15) return null;
@@ -5912,11 +6007,11 @@ var dewpointFromMixingRatioDefinition = moistQuantity({
   constants: ["R", "Rv", "enhancementFactor"],
   inside: ["es"],
   ask: "The dewpoint over liquid water, also below 0 °C, of air with the mixing ratio at the pressure.",
-  working: ({ given: given8, air }, value19) => {
+  working: ({ given: given8, air }, value23) => {
     const e = vaporPressureFrom(given8("mixingRatio"), given8("pressure"), air.epsilon);
     return [
       { text: "Vapor pressure, with w in kg per kg", formula: "e = \\frac{w\\,p}{\\varepsilon + w}", filled: `e = \\frac{${texNumber(given8("mixingRatio"))} \\cdot ${texNumber(given8("pressure") / 100, 6)}}{${texNumber(air.epsilon)} + ${texNumber(given8("mixingRatio"))}} = ${inHectopascal(e)}`, value: e, unit: "Pa" },
-      { text: "The temperature at which this is saturation", formula: "e_s(T_d) = e", filled: `e_s(${inCelsius(value19)}) = ${inHectopascal(e)}` }
+      { text: "The temperature at which this is saturation", formula: "e_s(T_d) = e", filled: `e_s(${inCelsius(value23)}) = ${inHectopascal(e)}` }
     ];
   },
   slips: [
@@ -5947,12 +6042,12 @@ var dewpointFromRelativeHumidityDefinition = moistQuantity({
   notedAt: { es: (given8) => [given8("temperature")] },
   remarks: ({ given: given8 }) => [supersaturated(given8("relativeHumidity"))],
   ask: "The dewpoint over liquid water, also below 0 °C, from the temperature and the relative humidity e/es.",
-  working: ({ given: given8, air }, value19) => {
+  working: ({ given: given8, air }, value23) => {
     const es = air.es(given8("temperature")), e = given8("relativeHumidity") * es;
     return [
       saturationStep("e_s", "T", given8("temperature"), es),
       { text: "Vapor pressure", formula: "e = \\mathit{RH}\\,e_s", filled: `e = ${texNumber(given8("relativeHumidity"))} \\cdot ${texNumber(es / 100)} = ${inHectopascal(e)}`, value: e, unit: "Pa" },
-      { text: "The temperature at which this is saturation", formula: "e_s(T_d) = e", filled: `e_s(${inCelsius(value19)}) = ${inHectopascal(e)}` }
+      { text: "The temperature at which this is saturation", formula: "e_s(T_d) = e", filled: `e_s(${inCelsius(value23)}) = ${inHectopascal(e)}` }
     ];
   },
   slips: [
@@ -5991,7 +6086,7 @@ var frostPointDefinition = moistQuantity({
   constants: ["enhancementFactor"],
   inside: ["ei"],
   ask: "The frost point: the temperature at which the air’s vapor pressure is that of saturation over ice; not defined where that lies above 0 °C.",
-  working: ({ given: given8 }, value19) => [{ text: "The temperature at which the vapor pressure is that of saturation over ice", formula: "e_i(T_f) = e", filled: `e_i(${inCelsius(value19)}) = ${inHectopascal(given8("vaporPressure"))}` }],
+  working: ({ given: given8 }, value23) => [{ text: "The temperature at which the vapor pressure is that of saturation over ice", formula: "e_i(T_f) = e", filled: `e_i(${inCelsius(value23)}) = ${inHectopascal(given8("vaporPressure"))}` }],
   slips: [
     fineMoistSlip("dewpoint", "dewpoint for frost point", "This is the dewpoint, over liquid water; the frost point refers to ice and lies higher.", ({ given: given8, constants, formulae }) => dewpointFunction(constants, formulae)(given8("vaporPressure"))),
     kelvinAsCelsiusSlip
@@ -6013,12 +6108,12 @@ var frostPointFromRelativeHumidityDefinition = moistQuantity({
   inside: ["es", "ei"],
   notedAt: { es: (given8) => [given8("temperature")] },
   ask: "The frost point, at which the vapor pressure is that of saturation over ice, from the temperature and the relative humidity over liquid water; not defined where that lies above 0 °C.",
-  working: ({ given: given8, air }, value19) => {
+  working: ({ given: given8, air }, value23) => {
     const es = air.es(given8("temperature")), e = given8("relativeHumidity") * es;
     return [
       saturationStep("e_s", "T", given8("temperature"), es),
       { text: "Vapor pressure", formula: "e = \\mathit{RH}\\,e_s", filled: `e = ${texNumber(given8("relativeHumidity"))} \\cdot ${texNumber(es / 100)} = ${inHectopascal(e)}`, value: e, unit: "Pa" },
-      { text: "The temperature at which this is saturation over ice", formula: "e_i(T_f) = e", filled: `e_i(${inCelsius(value19)}) = ${inHectopascal(e)}` }
+      { text: "The temperature at which this is saturation over ice", formula: "e_i(T_f) = e", filled: `e_i(${inCelsius(value23)}) = ${inHectopascal(e)}` }
     ];
   },
   slips: [
@@ -6054,9 +6149,9 @@ function mixingRatioDefinition({ vaporPressure, step, temperatureName, inside, s
     constants: ["R", "Rv", ...inside.length > 0 ? ["enhancementFactor"] : []],
     inside,
     notedAt: at === null ? {} : inside.includes("ei") ? { ei: (given8) => [given8(at)] } : { es: (given8) => [given8(at)] },
-    working: (hand, value19) => {
+    working: (hand, value23) => {
       const e = vaporPressure(hand), p10 = hand.given("pressure"), { epsilon } = hand.air;
-      const last = hand.variant === "approximate" ? { text: "Mixing ratio, with e neglected against p", formula: `${named2.symbol} = \\varepsilon\\,\\frac{e}{p}`, filled: `${named2.symbol} = ${texNumber(epsilon)} \\cdot \\frac{${texNumber(e / 100)}}{${texNumber(p10 / 100, 6)}} = ${inGrams(value19)}` } : mixingRatioStep(named2.symbol, "e", e, p10, hand.air);
+      const last = hand.variant === "approximate" ? { text: "Mixing ratio, with e neglected against p", formula: `${named2.symbol} = \\varepsilon\\,\\frac{e}{p}`, filled: `${named2.symbol} = ${texNumber(epsilon)} \\cdot \\frac{${texNumber(e / 100)}}{${texNumber(p10 / 100, 6)}} = ${inGrams(value23)}` } : mixingRatioStep(named2.symbol, "e", e, p10, hand.air);
       return step ? [step(hand, e), last] : [last];
     },
     slips: [
@@ -6123,18 +6218,18 @@ var mixingRatioFromWetBulbDefinition = moistQuantity({
   kind: "ratio",
   inputs: [pressureInput2, temperatureInput2, wetBulbInput],
   variants: [
-    { key: "isobaric", label: "with the heat capacity of the vapor", source: { text: "ASHRAE Handbook – Fundamentals (2017), SI, ch. 1, Eq. 33", status: "from memory" }, validity: "liquid water on the bulb", knownError: "0.5 %", value: (hand) => checked(hand, mixingRatioFromWetBulb(hand.given("temperature"), hand.given("wetBulb"), hand.given("pressure"), hand.air)) },
+    { key: "isobaric", label: "with the heat capacity of the vapor", source: { text: "ASHRAE Handbook – Fundamentals (2017), SI, ch. 1, Eq. 33; read in the documentation of PsychroLib", status: "verified" }, validity: "liquid water on the bulb", knownError: "0.5 %", value: (hand) => checked(hand, mixingRatioFromWetBulb(hand.given("temperature"), hand.given("wetBulb"), hand.given("pressure"), hand.air)) },
     { key: "dry-heat", label: "with the heat capacity of dry air", source: { text: 'AMS Glossary of Meteorology, "wet-bulb temperature" (isobaric)', status: "common practice" }, validity: "liquid water on the bulb", knownError: "0.5 %", value: (hand) => checked(hand, mixingRatioFromWetBulb(hand.given("temperature"), hand.given("wetBulb"), hand.given("pressure"), hand.air, false)) }
   ],
   constants: ["R", "Rv", "cp", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L"],
   notedAt: { es: (given8) => [given8("wetBulb")], L: (given8) => [given8("wetBulb")] },
   ask: "The mixing ratio w of the air from its (thermodynamic, isobaric) wet-bulb temperature over liquid water.",
-  working: (hand, value19) => {
+  working: (hand, value23) => {
     const { given: given8, air } = hand, L = air.L(given8("wetBulb"));
     return [
       { ...mixingRatioStep("w_s", "e_s", air.es(given8("wetBulb")), given8("pressure"), air), text: "Saturation mixing ratio at the wet bulb" },
-      { text: "The air’s heat pays for the water that evaporates", formula: hand.variant === "dry-heat" ? "w = w_s - \\frac{c_p\\,(T - T_w)}{L}" : "w = \\frac{L\\,w_s - c_p\\,(T - T_w)}{L + c_{pv}\\,(T - T_w)}", filled: hand.variant === "dry-heat" ? `w = ${texNumber(ws(hand))} - \\frac{${texNumber(air.cp)} \\cdot ${texNumber(depression(hand))}}{${texNumber(L, 6)}} = ${inGrams(value19)}` : `w = \\frac{${texNumber(L, 6)} \\cdot ${texNumber(ws(hand))} - ${texNumber(air.cp)} \\cdot ${texNumber(depression(hand))}}{${texNumber(L, 6)} + ${texNumber(air.cpv)} \\cdot ${texNumber(depression(hand))}} = ${inGrams(value19)}` }
+      { text: "The air’s heat pays for the water that evaporates", formula: hand.variant === "dry-heat" ? "w = w_s - \\frac{c_p\\,(T - T_w)}{L}" : "w = \\frac{L\\,w_s - c_p\\,(T - T_w)}{L + c_{pv}\\,(T - T_w)}", filled: hand.variant === "dry-heat" ? `w = ${texNumber(ws(hand))} - \\frac{${texNumber(air.cp)} \\cdot ${texNumber(depression(hand))}}{${texNumber(L, 6)}} = ${inGrams(value23)}` : `w = \\frac{${texNumber(L, 6)} \\cdot ${texNumber(ws(hand))} - ${texNumber(air.cp)} \\cdot ${texNumber(depression(hand))}}{${texNumber(L, 6)} + ${texNumber(air.cpv)} \\cdot ${texNumber(depression(hand))}} = ${inGrams(value23)}` }
     ];
   },
   slips: [
@@ -6159,14 +6254,14 @@ var relativeHumidityDefinition = moistQuantity({
   constants: [],
   inside: ["es"],
   notedAt: { es: (given8) => [given8("temperature"), given8("dewpoint")] },
-  remarks: (_hand, value19) => [supersaturated(value19)],
+  remarks: (_hand, value23) => [supersaturated(value23)],
   ask: "The relative humidity over liquid water, also below 0 °C, as the ratio of vapor pressures e/es.",
-  working: ({ given: given8, air }, value19) => {
+  working: ({ given: given8, air }, value23) => {
     const e = air.es(given8("dewpoint")), es = air.es(given8("temperature"));
     return [
       saturationStep("e", "T_d", given8("dewpoint"), e, "Vapor pressure: that of saturation at the dewpoint"),
       saturationStep("e_s", "T", given8("temperature"), es),
-      { text: "Their ratio", formula: "\\mathit{RH} = \\frac{e}{e_s}", filled: `\\mathit{RH} = \\frac{${texNumber(e / 100)}}{${texNumber(es / 100)}} = ${texQuantity(value19 * 100, "%")}` }
+      { text: "Their ratio", formula: "\\mathit{RH} = \\frac{e}{e_s}", filled: `\\mathit{RH} = \\frac{${texNumber(e / 100)}}{${texNumber(es / 100)}} = ${texQuantity(value23 * 100, "%")}` }
     ];
   },
   slips: [
@@ -6203,14 +6298,14 @@ var relativeHumidityByMixingRatioDefinition = moistQuantity({
   constants: ["R", "Rv", "enhancementFactor"],
   inside: ["es"],
   notedAt: { es: (given8) => [given8("temperature"), given8("dewpoint")] },
-  remarks: (_hand, value19) => [value19 > 1 + 1e-12 ? "Supersaturated: the mixing ratio is above that of saturation over liquid water." : null],
+  remarks: (_hand, value23) => [value23 > 1 + 1e-12 ? "Supersaturated: the mixing ratio is above that of saturation over liquid water." : null],
   ask: "The relative humidity over liquid water as the ratio of mixing ratios w/ws, not of vapor pressures.",
-  working: ({ given: given8, air }, value19) => {
+  working: ({ given: given8, air }, value23) => {
     const e = air.es(given8("dewpoint")), es = air.es(given8("temperature")), p10 = given8("pressure");
     return [
       { ...mixingRatioStep("w", "e", e, p10, air), text: "Mixing ratio, with e = es(Td)" },
       { ...mixingRatioStep("w_s", "e_s", es, p10, air), text: "Saturation mixing ratio at the temperature" },
-      { text: "Their ratio", formula: "\\mathit{RH} = \\frac{w}{w_s}", filled: `\\frac{${texNumber(1e3 * mixingRatioFrom(e, p10, air.epsilon))}}{${texNumber(1e3 * mixingRatioFrom(es, p10, air.epsilon))}} = ${texQuantity(value19 * 100, "%")}` }
+      { text: "Their ratio", formula: "\\mathit{RH} = \\frac{w}{w_s}", filled: `\\frac{${texNumber(1e3 * mixingRatioFrom(e, p10, air.epsilon))}}{${texNumber(1e3 * mixingRatioFrom(es, p10, air.epsilon))}} = ${texQuantity(value23 * 100, "%")}` }
     ];
   },
   slips: [
@@ -6255,7 +6350,7 @@ function psychrometerDefinition({ bulb, gives, ...named2 }) {
     notedAt: bulb === "ice" ? { ei: (given8) => [given8("wetBulb")] } : { es: (given8) => [given8("wetBulb")] },
     remarks: ({ given: given8 }) => [given8("wetBulb") > given8("temperature") ? "The wet bulb reads above the dry one: one of the two is wrong, or the air is supersaturated." : null],
     ask: isHumidity ? `The relative humidity over liquid water, e/es, by the readings of ${wordsOf[bulb]}.` : `The vapor pressure e of the air by the readings of ${wordsOf[bulb]}.`,
-    working: (hand, value19) => {
+    working: (hand, value23) => {
       const atBulb = bulbPressure(hand, bulb), A = coefficientOf(hand, bulb), e = withCoefficientPlain(hand, A, atBulb);
       const symbol = bulb === "ice" ? "e_i" : "e_s";
       const given8 = optionally(hand, "psychrometerCoefficient") !== null;
@@ -6264,7 +6359,7 @@ function psychrometerDefinition({ bulb, gives, ...named2 }) {
         { text: given8 ? "Coefficient, as given" : "Coefficient of the ventilation", formula: `A${given8 ? "" : ` = ${(coefficientsOf[bulb].find((one2) => one2.key === hand.variant) ?? coefficientsOf[bulb][0])?.tex ?? ""}`}`, filled: `A = ${texQuantity(A, "1/K")}`, value: A, unit: "1/K" },
         { text: "Psychrometer equation", formula: "e = e_w - A\\,p\\,(T - T_w)", filled: `e = ${texNumber(atBulb / 100)} - ${texNumber(A)} \\cdot ${texNumber(hand.given("pressure") / 100, 6)} \\cdot ${texNumber(depressionOf(hand))} = ${inHectopascal(e)}`, value: e, unit: "Pa" }
       ];
-      if (isHumidity) steps2.push({ text: "Over the saturation vapor pressure over liquid water at the dry bulb", formula: "\\mathit{RH} = \\frac{e}{e_s(T)}", filled: `\\mathit{RH} = \\frac{${texNumber(e / 100)}}{${texNumber(hand.air.es(hand.given("temperature")) / 100)}} = ${texQuantity(value19 * 100, "%")}` });
+      if (isHumidity) steps2.push({ text: "Over the saturation vapor pressure over liquid water at the dry bulb", formula: "\\mathit{RH} = \\frac{e}{e_s(T)}", filled: `\\mathit{RH} = \\frac{${texNumber(e / 100)}}{${texNumber(hand.air.es(hand.given("temperature")) / 100)}} = ${texQuantity(value23 * 100, "%")}` });
       return steps2;
     },
     slips: slipsOf2(bulb, isHumidity, withCoefficient)
@@ -6326,14 +6421,14 @@ var relativeHumidityOverIceDefinition = moistQuantity({
   constants: [],
   inside: ["es", "ei"],
   notedAt: { es: (given8) => [given8("dewpoint")], ei: (given8) => [given8("temperature")] },
-  remarks: (_hand, value19) => [value19 > 1 + 1e-12 ? "Supersaturated over ice, as cold air without ice often is." : null],
+  remarks: (_hand, value23) => [value23 > 1 + 1e-12 ? "Supersaturated over ice, as cold air without ice often is." : null],
   ask: "The relative humidity over ice, e over the saturation vapor pressure over ice; the dewpoint refers to liquid water.",
-  working: ({ given: given8, air, constants, formulae }, value19) => {
+  working: ({ given: given8, air, constants, formulae }, value23) => {
     const e = air.es(given8("dewpoint")), ei = iceSaturationPressureFunction(constants, formulae)(given8("temperature"));
     return [
       saturationStep("e", "T_d", given8("dewpoint"), e, "Vapor pressure: that of saturation over water at the dewpoint"),
       { text: "Saturation vapor pressure over ice", formula: "e_i(T)", filled: `e_i = ${inHectopascal(ei)}`, value: ei, unit: "Pa" },
-      { text: "Their ratio", formula: "\\mathit{RH}_i = \\frac{e}{e_i}", filled: `\\frac{${texNumber(e / 100)}}{${texNumber(ei / 100)}} = ${texQuantity(value19 * 100, "%")}` }
+      { text: "Their ratio", formula: "\\mathit{RH}_i = \\frac{e}{e_i}", filled: `\\frac{${texNumber(e / 100)}}{${texNumber(ei / 100)}} = ${texQuantity(value23 * 100, "%")}` }
     ];
   },
   slips: [
@@ -6398,12 +6493,12 @@ var specificEnthalpyOfMoistAirDefinition = moistQuantity({
   kind: "difference",
   nearZero: 1e3,
   inputs: [temperatureInput2, mixingRatioInput],
-  variants: [{ key: "constant-heats", label: "cp t + w (L₀ + cpv t)", source: { text: "ASHRAE Handbook – Fundamentals (2017), SI, ch. 1, Eq. 30", status: "from memory" }, validity: "−50 to 50 °C", knownError: "0.1 kJ kg⁻¹", value: ({ given: given8, air, constants }) => air.cp * (given8("temperature") - zeroCelsius) + given8("mixingRatio") * (constant(constants, "latentHeat") + air.cpv * (given8("temperature") - zeroCelsius)) }],
+  variants: [{ key: "constant-heats", label: "cp t + w (L₀ + cpv t)", source: { text: "ASHRAE Handbook – Fundamentals (2017), SI, ch. 1, Eq. 30; read in the documentation of PsychroLib", status: "verified" }, validity: "−50 to 50 °C", knownError: "0.1 kJ kg⁻¹", value: ({ given: given8, air, constants }) => air.cp * (given8("temperature") - zeroCelsius) + given8("mixingRatio") * (constant(constants, "latentHeat") + air.cpv * (given8("temperature") - zeroCelsius)) }],
   constants: ["cp", "cpv", "latentHeat"],
   ask: "The specific enthalpy of the moist air per kilogram of dry air, counted from 0 °C with the water liquid.",
-  working: ({ given: given8, air, constants }, value19) => {
+  working: ({ given: given8, air, constants }, value23) => {
     const t = given8("temperature") - zeroCelsius, w2 = given8("mixingRatio"), L0 = constant(constants, "latentHeat");
-    return [{ text: "Dry air and vapor, with t in °C and L at 0 °C", formula: "h = c_p\\,t + w\\,(L_0 + c_{pv}\\,t)", filled: `h = ${texNumber(air.cp / 1e3)} \\cdot ${texFactor(t)} + ${texNumber(w2)}\\,(${texNumber(L0 / 1e3)} + ${texNumber(air.cpv / 1e3)} \\cdot ${texFactor(t)}) = ${texQuantity(value19 / 1e3, "kJ/kg")}` }];
+    return [{ text: "Dry air and vapor, with t in °C and L at 0 °C", formula: "h = c_p\\,t + w\\,(L_0 + c_{pv}\\,t)", filled: `h = ${texNumber(air.cp / 1e3)} \\cdot ${texFactor(t)} + ${texNumber(w2)}\\,(${texNumber(L0 / 1e3)} + ${texNumber(air.cpv / 1e3)} \\cdot ${texFactor(t)}) = ${texQuantity(value23 / 1e3, "kJ/kg")}` }];
   },
   slips: [
     moistSlip("kelvin-for-celsius", "kelvin put in for Celsius", "This counts from 0 K: the enthalpy is counted from 0 °C.", ({ given: given8, again }) => given8("temperature") < 320 ? again({ temperature: given8("temperature") + zeroCelsius }) : null),
@@ -6425,9 +6520,9 @@ function moistHeatDefinition({ tex, dryTex, vaporTex, dry, vapor: vapor2, ...nam
     kind: "ratio",
     inputs: [mixingRatioInput],
     variants: [{ key: "by-mass", label: "dry air and vapor by mass", source: glossary("specific heat", "common practice"), validity: "near the temperatures of the lower atmosphere", knownError: "0.2 %", value: ({ given: given8, constants }) => whole(constants, given8("mixingRatio")) }],
-    working: ({ given: given8, constants }, value19) => {
+    working: ({ given: given8, constants }, value23) => {
       const w2 = given8("mixingRatio");
-      return [{ text: "Dry air and vapor by their masses, with w in kg per kg", formula: `${tex} = \\frac{${dryTex} + w\\,${vaporTex}}{1 + w}`, filled: `${tex} = \\frac{${texNumber(dry(constants), 6)} + ${texNumber(w2)} \\cdot ${texNumber(vapor2(constants))}}{1 + ${texNumber(w2)}} = ${texQuantity(value19, "J/(kg.K)", 6)}` }];
+      return [{ text: "Dry air and vapor by their masses, with w in kg per kg", formula: `${tex} = \\frac{${dryTex} + w\\,${vaporTex}}{1 + w}`, filled: `${tex} = \\frac{${texNumber(dry(constants), 6)} + ${texNumber(w2)} \\cdot ${texNumber(vapor2(constants))}}{1 + ${texNumber(w2)}} = ${texQuantity(value23, "J/(kg.K)", 6)}` }];
     },
     slips: [
       smallMoistSlip("dry", "as if dry", "This is that of dry air: the vapor, which takes twice as much, is not in it.", ({ constants }) => dry(constants)),
@@ -6480,7 +6575,7 @@ var specificHumidityDefinition = moistQuantity({
   variants: [{ key: "exact", label: "w/(1 + w)", source: glossary("specific humidity"), validity: "any", knownError: "none: by definition", value: ({ given: given8 }) => specificHumidityFrom(given8("mixingRatio")) }],
   constants: [],
   ask: "The specific humidity q of the air, mass of vapor per mass of moist air.",
-  working: ({ given: given8 }, value19) => [{ text: "Per kilogram of moist air, with w in kg per kg", formula: "q = \\frac{w}{1 + w}", filled: `q = \\frac{${texNumber(given8("mixingRatio"))}}{1 + ${texNumber(given8("mixingRatio"))}} = ${inGrams(value19)}` }],
+  working: ({ given: given8 }, value23) => [{ text: "Per kilogram of moist air, with w in kg per kg", formula: "q = \\frac{w}{1 + w}", filled: `q = \\frac{${texNumber(given8("mixingRatio"))}}{1 + ${texNumber(given8("mixingRatio"))}} = ${inGrams(value23)}` }],
   slips: [
     fineMoistSlip("mixing-ratio", "the mixing ratio itself", "This is the mixing ratio, per kilogram of dry air: the specific humidity is per kilogram of moist air.", ({ given: given8 }) => given8("mixingRatio")),
     fineMoistSlip("turned-round", "conversion turned round", "This is w/(1 − w), the conversion the other way round.", ({ given: given8 }) => given8("mixingRatio") / (1 - given8("mixingRatio"))),
@@ -6511,11 +6606,11 @@ var specificHumidityFromDewpointDefinition = moistQuantity({
   inside: ["es"],
   notedAt: { es: (given8) => [given8("dewpoint")] },
   ask: "The specific humidity q of the air, mass of vapor per mass of moist air, from its dewpoint over liquid water.",
-  working: ({ given: given8, air }, value19) => {
+  working: ({ given: given8, air }, value23) => {
     const e = air.es(given8("dewpoint"));
     return [
       saturationStep("e", "T_d", given8("dewpoint"), e, "Vapor pressure: that of saturation at the dewpoint"),
-      { text: "Per kilogram of moist air", formula: "q = \\frac{\\varepsilon\\,e}{p - (1 - \\varepsilon)\\,e}", filled: `q = \\frac{${texNumber(air.epsilon)} \\cdot ${texNumber(e / 100)}}{${texNumber(given8("pressure") / 100, 6)} - ${texNumber(1 - air.epsilon)} \\cdot ${texNumber(e / 100)}} = ${inGrams(value19)}` }
+      { text: "Per kilogram of moist air", formula: "q = \\frac{\\varepsilon\\,e}{p - (1 - \\varepsilon)\\,e}", filled: `q = \\frac{${texNumber(air.epsilon)} \\cdot ${texNumber(e / 100)}}{${texNumber(given8("pressure") / 100, 6)} - ${texNumber(1 - air.epsilon)} \\cdot ${texNumber(e / 100)}} = ${inGrams(value23)}` }
     ];
   },
   slips: [
@@ -6545,7 +6640,7 @@ var vaporPressureDefinition = moistQuantity({
   inside: ["es"],
   notedAt: { es: (given8) => [given8("dewpoint")] },
   ask: "The vapor pressure e of the air from its dewpoint over liquid water.",
-  working: ({ given: given8 }, value19) => [saturationStep("e", "T_d", given8("dewpoint"), value19, "By the definition of the dewpoint")],
+  working: ({ given: given8 }, value23) => [saturationStep("e", "T_d", given8("dewpoint"), value23, "By the definition of the dewpoint")],
   slips: [
     atTemperatureSlip("the vapor pressure"),
     fineMoistSlip("ice-for-water", "over ice for over water", "This is the vapor pressure over ice at the dewpoint; a dewpoint refers to liquid water, also below 0 °C.", (hand) => overIce(hand, hand.given("dewpoint"))),
@@ -6580,7 +6675,7 @@ var vaporPressureFromMixingRatioDefinition = moistQuantity({
   ],
   constants: ["R", "Rv"],
   ask: "The vapor pressure e of air with the mixing ratio at the pressure.",
-  working: ({ given: given8, air, variant }, value19) => [variant === "approximate" ? { text: "With w neglected against ε", formula: "e = \\frac{w\\,p}{\\varepsilon}", filled: `e = \\frac{${texNumber(given8("mixingRatio"))} \\cdot ${texNumber(given8("pressure") / 100, 6)}}{${texNumber(air.epsilon)}} = ${inHectopascal(value19)}` } : { text: "The mixing ratio solved for e, with w in kg per kg", formula: "e = \\frac{w\\,p}{\\varepsilon + w}", filled: `e = \\frac{${texNumber(given8("mixingRatio"))} \\cdot ${texNumber(given8("pressure") / 100, 6)}}{${texNumber(air.epsilon)} + ${texNumber(given8("mixingRatio"))}} = ${inHectopascal(value19)}` }],
+  working: ({ given: given8, air, variant }, value23) => [variant === "approximate" ? { text: "With w neglected against ε", formula: "e = \\frac{w\\,p}{\\varepsilon}", filled: `e = \\frac{${texNumber(given8("mixingRatio"))} \\cdot ${texNumber(given8("pressure") / 100, 6)}}{${texNumber(air.epsilon)}} = ${inHectopascal(value23)}` } : { text: "The mixing ratio solved for e, with w in kg per kg", formula: "e = \\frac{w\\,p}{\\varepsilon + w}", filled: `e = \\frac{${texNumber(given8("mixingRatio"))} \\cdot ${texNumber(given8("pressure") / 100, 6)}}{${texNumber(air.epsilon)} + ${texNumber(given8("mixingRatio"))}} = ${inHectopascal(value23)}` }],
   slips: [
     fineMoistSlip("without-w", "w neglected against ε", "This is w p/ε: in the denominator stands ε + w.", ({ given: given8, air, variant }) => variant === "approximate" ? null : given8("mixingRatio") * given8("pressure") / air.epsilon),
     moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with w in g per kg: the formula takes kg per kg.", ({ given: given8, again }) => again({ mixingRatio: 1e3 * given8("mixingRatio") })),
@@ -6616,9 +6711,9 @@ var vaporPressureFromRelativeHumidityDefinition = moistQuantity({
   notedAt: { es: (given8) => [given8("temperature")] },
   remarks: ({ given: given8 }) => [supersaturated(given8("relativeHumidity"))],
   ask: "The vapor pressure e of the air from its relative humidity over liquid water, RH = e/es.",
-  working: ({ given: given8, air }, value19) => [
+  working: ({ given: given8, air }, value23) => [
     saturationStep("e_s", "T", given8("temperature"), air.es(given8("temperature"))),
-    { text: "Of which the air holds its share", formula: "e = \\mathit{RH}\\,e_s", filled: `e = ${texNumber(given8("relativeHumidity"))} \\cdot ${texNumber(air.es(given8("temperature")) / 100)} = ${inHectopascal(value19)}` }
+    { text: "Of which the air holds its share", formula: "e = \\mathit{RH}\\,e_s", filled: `e = ${texNumber(given8("relativeHumidity"))} \\cdot ${texNumber(air.es(given8("temperature")) / 100)} = ${inHectopascal(value23)}` }
   ],
   slips: [
     moistSlip("factor-100", "a factor of 100: percent not divided, or Pa given as hPa", "Your value is a hundred times too large: a percentage was not divided by 100, or pascal was given as hectopascal.", ({ right }) => right * 100),
@@ -6657,7 +6752,7 @@ var virtualTemperatureDefinition = moistQuantity({
   ],
   constants: ["R", "Rv"],
   ask: "The virtual temperature of the air, exactly: T (1 + w/ε)/(1 + w).",
-  working: ({ given: given8, variant, air }, value19) => [variant === "linear" ? { text: "With T in kelvin and w in kg per kg", formula: "T_v = T\\,(1 + 0.61\\,w)", filled: `T_v = ${texNumber(given8("temperature"), 6)}\\,(1 + 0.61 \\cdot ${texNumber(given8("mixingRatio"))}) = ${inKelvin(value19)} = ${inCelsius(value19)}` } : { text: "With T in kelvin and w in kg per kg", formula: "T_v = T\\,\\frac{1 + w/\\varepsilon}{1 + w}", filled: `T_v = ${texNumber(given8("temperature"), 6)} \\cdot \\frac{1 + ${texNumber(given8("mixingRatio"))}/${texNumber(air.epsilon)}}{1 + ${texNumber(given8("mixingRatio"))}} = ${inKelvin(value19)} = ${inCelsius(value19)}` }],
+  working: ({ given: given8, variant, air }, value23) => [variant === "linear" ? { text: "With T in kelvin and w in kg per kg", formula: "T_v = T\\,(1 + 0.61\\,w)", filled: `T_v = ${texNumber(given8("temperature"), 6)}\\,(1 + 0.61 \\cdot ${texNumber(given8("mixingRatio"))}) = ${inKelvin(value23)} = ${inCelsius(value23)}` } : { text: "With T in kelvin and w in kg per kg", formula: "T_v = T\\,\\frac{1 + w/\\varepsilon}{1 + w}", filled: `T_v = ${texNumber(given8("temperature"), 6)} \\cdot \\frac{1 + ${texNumber(given8("mixingRatio"))}/${texNumber(air.epsilon)}}{1 + ${texNumber(given8("mixingRatio"))}} = ${inKelvin(value23)} = ${inCelsius(value23)}` }],
   slips: [
     moistSlip("celsius-for-kelvin", "Celsius put in for kelvin", "This is what comes out with the temperature in °C: the factor belongs to kelvin.", ({ given: given8, again }) => given8("temperature") === zeroCelsius ? null : zeroCelsius + again({ temperature: given8("temperature") - zeroCelsius })),
     moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with w in g per kg: the formula takes kg per kg.", ({ given: given8 }) => given8("temperature") * (1 + 0.61 * 1e3 * given8("mixingRatio"))),
@@ -6687,9 +6782,9 @@ var wetBulbTemperatureDefinition = moistQuantity({
   notedAt: { es: (given8) => [given8("dewpoint")] },
   remarks: ({ given: given8 }) => [foggy(given8("temperature"), given8("dewpoint"))],
   ask: "The isobaric wet-bulb temperature over liquid water, at which the air is saturated by water that evaporates into it at constant pressure, not by lifting.",
-  working: ({ given: given8, air }, value19) => [
+  working: ({ given: given8, air }, value23) => [
     { ...mixingRatioStep("w", "e", air.es(given8("dewpoint")), given8("pressure"), air), text: "Mixing ratio of the air, with e = es(Td)" },
-    { text: "The temperature at which the air’s heat has paid for saturation, found by a bracket", formula: "(c_p + w\\,c_{pv})\\,(T - T_w) = L\\,[w_s(T_w) - w]", filled: `T_w = ${inCelsius(value19)}` }
+    { text: "The temperature at which the air’s heat has paid for saturation, found by a bracket", formula: "(c_p + w\\,c_{pv})\\,(T - T_w) = L\\,[w_s(T_w) - w]", filled: `T_w = ${inCelsius(value23)}` }
   ],
   slips: [
     fineMoistSlip("pseudoadiabatic", "by lifting and lowering", "This is the pseudoadiabatic wet bulb, by lifting to condensation and lowering: asked is the isobaric one.", ({ given: given8, air, constants, formulae }) => given8("dewpoint") >= given8("temperature") ? null : pseudoadiabaticWetBulb(given8("pressure"), lclFunction(constants, formulae)(given8("temperature"), given8("dewpoint"), given8("pressure")), air)),
@@ -6715,16 +6810,16 @@ var wetBulbTemperatureFromRelativeHumidityDefinition = moistQuantity({
   variants: [
     { key: "isobaric", label: "isobaric, with the heat capacity of the vapor", source: glossary("wet-bulb temperature"), validity: "liquid water on the bulb", knownError: "0.05 K by the formulae inside", value: (hand) => solved(hand, true) },
     { key: "dry-heat", label: "isobaric, with the heat capacity of dry air", source: glossary("wet-bulb temperature", "common practice"), validity: "liquid water on the bulb", knownError: "0.1 K", value: (hand) => solved(hand, false) },
-    { key: "stull", label: "Stull’s fit at 1013.25 hPa", source: { text: "Stull (2011), J. Appl. Meteor. Climatol. 50, 2267–2269, Eq. 1", status: "from memory" }, validity: "about 1013.25 hPa, RH 5–99 %, −20 to 50 °C", knownError: "−0.65 to +0.9 K", holds: { pressure: [98e3, 104e3], temperature: [253.15, 323.15], relativeHumidity: [0.05, 0.99] }, value: ({ given: given8 }) => stullWetBulb(given8("temperature"), given8("relativeHumidity")) }
+    { key: "stull", label: "Stull’s fit at 1013.25 hPa", source: { text: "Stull (2011), J. Appl. Meteor. Climatol. 50, 2267–2269, Eq. 1; coefficients read in transcriptions", status: "verified" }, validity: "about 1013.25 hPa, RH 5–99 %, −20 to 50 °C", knownError: "−1.0 to +0.65 K by its paper, which leaves out air both cold and dry; −1.2 to +1.3 K above 0 °C as measured, farthest where it is dry", holds: { pressure: [98e3, 104e3], temperature: [253.15, 323.15], relativeHumidity: [0.05, 0.99] }, value: ({ given: given8 }) => stullWetBulb(given8("temperature"), given8("relativeHumidity")) }
   ],
   constants: ["R", "Rv", "cp", "cpv", "latentHeat", "cw", "enhancementFactor"],
   inside: ["es", "L"],
   notedAt: { es: (given8) => [given8("temperature")] },
   remarks: ({ given: given8 }) => [supersaturated(given8("relativeHumidity"))],
   ask: "The isobaric wet-bulb temperature over liquid water, from the temperature, the relative humidity e/es and the pressure.",
-  working: (hand, value19) => hand.variant === "stull" ? [{ text: "Stull’s fit, with t in °C and RH in percent", formula: "T_w = t \\arctan[0.151977\\,(\\mathit{RH} + 8.313659)^{1/2}] + \\arctan(t + \\mathit{RH}) - \\arctan(\\mathit{RH} - 1.676331) + 0.00391838\\,\\mathit{RH}^{3/2}\\arctan(0.023101\\,\\mathit{RH}) - 4.686035", filled: `T_w = ${inCelsius(value19)}` }] : [
+  working: (hand, value23) => hand.variant === "stull" ? [{ text: "Stull’s fit, with t in °C and RH in percent", formula: "T_w = t \\arctan[0.151977\\,(\\mathit{RH} + 8.313659)^{1/2}] + \\arctan(t + \\mathit{RH}) - \\arctan(\\mathit{RH} - 1.676331) + 0.00391838\\,\\mathit{RH}^{3/2}\\arctan(0.023101\\,\\mathit{RH}) - 4.686035", filled: `T_w = ${inCelsius(value23)}` }] : [
     { ...mixingRatioStep("w", "e", vapor(hand), hand.given("pressure"), hand.air), text: "Mixing ratio of the air, with e = RH es(T)" },
-    { text: "The temperature at which the air’s heat has paid for saturation, found by a bracket", formula: "(c_p + w\\,c_{pv})\\,(T - T_w) = L\\,[w_s(T_w) - w]", filled: `T_w = ${inCelsius(value19)}` }
+    { text: "The temperature at which the air’s heat has paid for saturation, found by a bracket", formula: "(c_p + w\\,c_{pv})\\,(T - T_w) = L\\,[w_s(T_w) - w]", filled: `T_w = ${inCelsius(value23)}` }
   ],
   slips: [
     fineMoistSlip("stull", "Stull’s fit", "This is a fit that holds at 1013.25 hPa only: asked is the wet bulb at this pressure.", ({ given: given8, variant }) => variant === "stull" || given8("relativeHumidity") > 1 ? null : stullWetBulb(given8("temperature"), given8("relativeHumidity"))),
@@ -6732,6 +6827,82 @@ var wetBulbTemperatureFromRelativeHumidityDefinition = moistQuantity({
     kelvinAsCelsiusSlip
   ],
   example: { inputs: { pressure: 101325, temperature: 293.15, relativeHumidity: 0.5 }, gives: 286.9318, within: 1e-4 }
+});
+
+// shared/thermo/quantities/latentHeatOfFusion.ts
+var latentHeatOfFusionDefinition = {
+  key: "latent-heat-of-fusion",
+  name: "latent heat of fusion",
+  symbol: "L_f",
+  unit: "J/kg",
+  shownUnit: "kJ/kg",
+  kind: "ratio",
+  inputs: [{ name: "temperature", label: "temperature", symbol: "T", unit: "K", shownUnit: "Cel", kind: "temperature", shape: "number", range: [200, 273.16] }],
+  variants: [
+    {
+      key: "difference",
+      label: "L_s − L_v at the temperature",
+      source: { text: 'AMS Glossary of Meteorology, "latent heat"', status: "common practice" },
+      validity: "−40 to 0 °C",
+      knownError: "3 kJ kg⁻¹ at −10 °C with a constant L_s",
+      holds: { temperature: [233.15, 273.16] },
+      evaluate: (inputs2, constants, formulae) => ({ is: "value", value: difference(inputs2, constants, formulae) })
+    },
+    {
+      key: "constant",
+      label: "a constant, as taught: the value at 0 °C",
+      source: { text: 'common practice: the value at 0 °C, 0.3337 MJ kg⁻¹ (AMS Glossary of Meteorology, "latent heat")', status: "common practice" },
+      validity: "near 0 °C",
+      knownError: "7 % at −10 °C",
+      evaluate: (_inputs, constants) => ({ is: "value", value: atZero(constants) })
+    }
+  ],
+  constants: ["latentHeat", "latentHeatIce", "cw", "cpv"],
+  uses: [vaporizationKey, sublimationKey],
+  notes: (inputs2, _constants, formulae) => latentHeatNotes([T10(inputs2)], formulae),
+  ask: "The latent heat of fusion of ice at the temperature, per kilogram.",
+  trace(inputs2, constants, variant, formulae) {
+    const isConstant = variant === "constant";
+    const value23 = isConstant ? atZero(constants) : difference(inputs2, constants, formulae);
+    const [ice2, water2] = isConstant ? [constant(constants, "latentHeatIce"), constant(constants, "latentHeat")] : [sublimationHeatFunction(constants, formulae)(T10(inputs2)), latentHeatFunction(constants, formulae)(T10(inputs2))];
+    return [
+      { text: isConstant ? "From ice to vapor and from water to vapor, at 0 °C" : "From ice to vapor and from water to vapor", formula: "L_s,\\ L_v", filled: `L_s = ${texQuantity(ice2 / 1e3, "kJ/kg", 6)},\\quad L_v = ${texQuantity(water2 / 1e3, "kJ/kg", 6)}` },
+      { text: "From ice to water", formula: "L_f = L_s - L_v", filled: `L_f = ${texQuantity(value23 / 1e3, "kJ/kg")}`, value: value23, unit: "J/kg" }
+    ];
+  },
+  slips: [
+    slip("sign", "sign turned round", "The sign is turned round: from ice to vapor takes more heat than from water to vapor.", (_i, _c, right) => -right),
+    slip("vaporization", "latent heat of vaporization", "This is the latent heat of vaporization, from liquid water to vapor.", (inputs2, constants, _right, formulae) => latentHeatFunction(constants, formulae)(T10(inputs2))),
+    slip("sublimation", "latent heat of sublimation", "This is the latent heat of sublimation, from ice to vapor.", (inputs2, constants, _right, formulae) => sublimationHeatFunction(constants, formulae)(T10(inputs2))),
+    joulesSlip,
+    slip("megajoules-for-kilojoules", "MJ given as kJ", "Your number is in megajoules; the unit beside it says kilojoules.", (_i, _c, right) => right / 1e3)
+  ],
+  example: { inputs: { temperature: 273.15 }, gives: 333e3, within: 1 }
+};
+var T10 = (inputs2) => numberOf(inputs2, "temperature");
+var difference = (inputs2, constants, formulae) => sublimationHeatFunction(constants, formulae)(T10(inputs2)) - latentHeatFunction(constants, formulae)(T10(inputs2));
+var atZero = (constants) => constant(constants, "latentHeatIce") - constant(constants, "latentHeat");
+
+// shared/thermo/quantities/mixingRatioFromSpecificHumidity.ts
+var mixingRatioFromSpecificHumidityDefinition = moistQuantity({
+  key: "mixing-ratio-from-specific-humidity",
+  name: "mixing ratio from the specific humidity",
+  symbol: "w",
+  unit: "1",
+  shownUnit: "g/kg",
+  kind: "ratio",
+  inputs: [{ ...mixingRatioInput, name: "specificHumidity", label: "specific humidity", symbol: "q" }],
+  variants: [{ key: "exact", label: "q/(1 − q)", source: glossary("specific humidity"), validity: "any", knownError: "none: by definition", value: ({ given: given8 }) => mixingRatioOfSpecificHumidity(given8("specificHumidity")) }],
+  constants: [],
+  ask: "The mixing ratio w of the air, mass of vapor per mass of dry air, from its specific humidity.",
+  working: ({ given: given8 }, value23) => [{ text: "Per kilogram of dry air, with q in kg per kg", formula: "w = \\frac{q}{1 - q}", filled: `w = \\frac{${texNumber(given8("specificHumidity"))}}{1 - ${texNumber(given8("specificHumidity"))}} = ${inGrams(value23)}` }],
+  slips: [
+    fineMoistSlip("specific-humidity", "the specific humidity itself", "This is the specific humidity, per kilogram of moist air: the mixing ratio is per kilogram of dry air.", ({ given: given8 }) => given8("specificHumidity")),
+    fineMoistSlip("turned-round", "conversion turned round", "This is q/(1 + q), the conversion the other way round.", ({ given: given8 }) => given8("specificHumidity") / (1 + given8("specificHumidity"))),
+    moistSlip("grams", "g kg⁻¹ put in for kg kg⁻¹", "This is what comes out with q in g per kg: the formula takes kg per kg.", ({ given: given8, again }) => again({ specificHumidity: 1e3 * given8("specificHumidity") })),
+    kilogramSlip
+  ],
+  example: { inputs: { specificHumidity: 0.0147783 }, gives: 0.015, within: 1e-7 }
 });
 
 // shared/thermo/groups/moisture.ts
@@ -6743,11 +6914,13 @@ var moisture = {
     saturationVaporPressureOverIceDefinition,
     latentHeatOfVaporizationDefinition,
     latentHeatOfSublimationDefinition,
+    latentHeatOfFusionDefinition,
     vaporPressureDefinition,
     vaporPressureFromRelativeHumidityDefinition,
     vaporPressureFromMixingRatioDefinition,
     mixingRatioDefinition2,
     mixingRatioFromVaporPressureDefinition,
+    mixingRatioFromSpecificHumidityDefinition,
     saturationMixingRatioDefinition,
     saturationMixingRatioOverIceDefinition,
     specificHumidityDefinition,
@@ -6783,12 +6956,12 @@ var p0 = 1e5;
 function dewpointAt(vaporPressure, air) {
   if (!(vaporPressure > 0)) throw new OutOfRangeError("vaporPressure", vaporPressure, "positive pressures");
   const ratio2 = log(vaporPressure / 611.2);
-  let T10 = 273.15 + 243.5 * ratio2 / (17.67 - ratio2);
+  let T11 = 273.15 + 243.5 * ratio2 / (17.67 - ratio2);
   for (let n = 0; n < 60; n++) {
-    const change = air.Rv * T10 * T10 / air.L(T10) * log(vaporPressure / air.es(T10));
-    T10 += change;
-    if (!(T10 > 100 && T10 < 400)) break;
-    if (Math.abs(change) < 1e-11) return T10;
+    const change2 = air.Rv * T11 * T11 / air.L(T11) * log(vaporPressure / air.es(T11));
+    T11 += change2;
+    if (!(T11 > 100 && T11 < 400)) break;
+    if (Math.abs(change2) < 1e-11) return T11;
   }
   throw new OutOfRangeError("vaporPressure", vaporPressure, "vapor pressures that have a dewpoint");
 }
@@ -6796,26 +6969,26 @@ function levelParcel(sounding, at) {
   return { pressure: sounding.pressure[at] ?? 0, temperature: sounding.temperature[at] ?? 0, dewpoint: sounding.dewpoint[at] ?? 0, mixingRatio: sounding.mixingRatio[at] ?? 0 };
 }
 var surfaceParcel = (sounding) => levelParcel(sounding, 0);
-function statedParcel(theta4, mixingRatio, pressure4, air) {
-  return { pressure: pressure4, temperature: theta4 * pow(pressure4 / p0, air.kappa), dewpoint: dewpointAt(vaporPressureFrom(mixingRatio, pressure4, air.epsilon), air), mixingRatio };
+function statedParcel(theta5, mixingRatio, pressure4, air) {
+  return { pressure: pressure4, temperature: theta5 * pow(pressure4 / p0, air.kappa), dewpoint: dewpointAt(vaporPressureFrom(mixingRatio, pressure4, air.epsilon), air), mixingRatio };
 }
 function mixedLayerMean(sounding, depth, air) {
   const { count, pressure: pressure4, logPressure, temperature: temperature6, mixingRatio } = sounding;
   const bottom3 = pressure4[0] ?? 0, top4 = bottom3 - depth;
   if (!(top4 > 0 && (pressure4[count - 1] ?? 0) <= top4)) return null;
-  let theta4 = (temperature6[0] ?? 0) * pow(p0 / bottom3, air.kappa), w2 = mixingRatio[0] ?? 0, p10 = bottom3;
+  let theta5 = (temperature6[0] ?? 0) * pow(p0 / bottom3, air.kappa), w2 = mixingRatio[0] ?? 0, p10 = bottom3;
   let thetaSum = 0, wSum = 0;
   for (let at = 1; at < count && p10 > top4; at++) {
     let nextP = pressure4[at] ?? 0, nextTheta = (temperature6[at] ?? 0) * pow(p0 / nextP, air.kappa), nextW = mixingRatio[at] ?? 0;
     if (nextP < top4) {
       const part = (log(top4) - (logPressure[at - 1] ?? 0)) / ((logPressure[at] ?? 0) - (logPressure[at - 1] ?? 0));
-      nextTheta = theta4 + part * (nextTheta - theta4);
+      nextTheta = theta5 + part * (nextTheta - theta5);
       nextW = w2 + part * (nextW - w2);
       nextP = top4;
     }
-    thetaSum += 0.5 * (theta4 + nextTheta) * (p10 - nextP);
+    thetaSum += 0.5 * (theta5 + nextTheta) * (p10 - nextP);
     wSum += 0.5 * (w2 + nextW) * (p10 - nextP);
-    theta4 = nextTheta;
+    theta5 = nextTheta;
     w2 = nextW;
     p10 = nextP;
   }
@@ -6830,9 +7003,9 @@ function mostUnstableParcel(sounding, air, variant) {
   const top4 = (sounding.pressure[0] ?? 0) - unstableDepth;
   let best = 0, most2 = -Infinity;
   for (let at = 0; at < sounding.count && (sounding.pressure[at] ?? 0) >= top4; at++) {
-    const theta4 = equivalentPotentialTemperature(sounding.temperature[at] ?? 0, sounding.dewpoint[at] ?? 0, sounding.pressure[at] ?? 0, air, variant);
-    if (theta4 > most2) {
-      most2 = theta4;
+    const theta5 = equivalentPotentialTemperature(sounding.temperature[at] ?? 0, sounding.dewpoint[at] ?? 0, sounding.pressure[at] ?? 0, air, variant);
+    if (theta5 > most2) {
+      most2 = theta5;
       best = at;
     }
   }
@@ -6898,18 +7071,18 @@ function between(logPressure, column, at, where) {
   return to2 === from2 ? below : below + (where - from2) / (to2 - from2) * ((column[at + 1] ?? below) - below);
 }
 var state = new Float64Array(3);
-function startSaturated(T10, p10, air) {
-  const e = air.es(T10);
-  state[0] = T10;
+function startSaturated(T11, p10, air) {
+  const e = air.es(T11);
+  state[0] = T11;
   state[1] = e;
-  state[2] = slopeAt(T10, p10, e, air);
+  state[2] = slopeAt(T11, p10, e, air);
 }
 function saturatedStep(from2, to2, h, air) {
   const middle = Math.sqrt(from2 * to2);
-  const T10 = state[0] ?? 0;
-  let slope = state[2] ?? 0, sum = slope, here = T10, e = 0;
+  const T11 = state[0] ?? 0;
+  let slope = state[2] ?? 0, sum = slope, here = T11, e = 0;
   for (let stage = 1; stage <= 4; stage++) {
-    here = T10 + (stage === 4 ? h / 6 * sum : (stage === 3 ? h : 0.5 * h) * slope);
+    here = T11 + (stage === 4 ? h / 6 * sum : (stage === 3 ? h : 0.5 * h) * slope);
     e = air.es(here);
     slope = slopeAt(here, stage < 3 ? middle : to2, e, air);
     sum += stage < 3 ? 2 * slope : slope;
@@ -6930,8 +7103,8 @@ function liftThroughNodes(parcel, lcl, lclNode, isVirtual, air) {
   for (let n = lclNode + 1; n < nodeCount; n++) {
     const p10 = nodePressure[n] ?? 0;
     saturatedStep(nodePressure[n - 1] ?? 0, p10, (nodeLog[n] ?? 0) - (nodeLog[n - 1] ?? 0), air);
-    const T10 = state[0] ?? 0, e = state[1] ?? 0, w2 = epsilon * e / (p10 - e);
-    nodeExcess[n] = (isVirtual ? T10 * (1 + w2 / epsilon) / (1 + w2) : T10) - (nodeExcess[n] ?? 0);
+    const T11 = state[0] ?? 0, e = state[1] ?? 0, w2 = epsilon * e / (p10 - e);
+    nodeExcess[n] = (isVirtual ? T11 * (1 + w2 / epsilon) / (1 + w2) : T11) - (nodeExcess[n] ?? 0);
   }
 }
 function lift(sounding, parcel, lcl, isVirtual, air) {
@@ -6977,8 +7150,8 @@ function lift(sounding, parcel, lcl, isVirtual, air) {
 }
 function parcelTemperatureAt(parcel, lcl, pressure4, isVirtual, air) {
   if (pressure4 >= lcl.pressure) {
-    const T11 = parcel.temperature * exp(air.kappa * (log(pressure4) - log(parcel.pressure)));
-    return isVirtual ? T11 * (1 + parcel.mixingRatio / air.epsilon) / (1 + parcel.mixingRatio) : T11;
+    const T12 = parcel.temperature * exp(air.kappa * (log(pressure4) - log(parcel.pressure)));
+    return isVirtual ? T12 * (1 + parcel.mixingRatio / air.epsilon) / (1 + parcel.mixingRatio) : T12;
   }
   const start5 = log(lcl.pressure), whole = log(pressure4) - start5, parts = Math.ceil(-whole / longestStep);
   startSaturated(lcl.temperature, lcl.pressure, air);
@@ -6988,10 +7161,10 @@ function parcelTemperatureAt(parcel, lcl, pressure4, isVirtual, air) {
     saturatedStep(p10, next, whole / parts, air);
     p10 = next;
   }
-  const T10 = state[0] ?? 0, e = state[1] ?? 0;
-  if (!isVirtual) return T10;
+  const T11 = state[0] ?? 0, e = state[1] ?? 0;
+  if (!isVirtual) return T11;
   const w2 = air.epsilon * e / (pressure4 - e);
-  return T10 * (1 + w2 / air.epsilon) / (1 + w2);
+  return T11 * (1 + w2 / air.epsilon) / (1 + w2);
 }
 
 // shared/thermo/sounding.ts
@@ -7016,7 +7189,7 @@ function makeSounding(pressures2, temperatures, dewpoints, air, ground = Infinit
   const { pressure: pressure4, logPressure, temperature: temperature6, dewpoint, mixingRatio, virtualTemperature } = sounding;
   let before = 0;
   for (let at = 0; at < count; at++) {
-    const p10 = pressures2[first3 + at] ?? 0, T10 = temperatures[first3 + at] ?? 0, Td = dewpoints[first3 + at] ?? 0;
+    const p10 = pressures2[first3 + at] ?? 0, T11 = temperatures[first3 + at] ?? 0, Td = dewpoints[first3 + at] ?? 0;
     if (at > 0 && before > widestGap * p10) throw new SeriesError("pressure", `a gap from ${before / 100} to ${p10 / 100} hPa; an ascent needs rows that are at most a factor of ${widestGap} apart`);
     before = p10;
     const e = air.es(Td);
@@ -7024,10 +7197,10 @@ function makeSounding(pressures2, temperatures, dewpoints, air, ground = Infinit
     const w2 = mixingRatioFrom(e, p10, air.epsilon);
     pressure4[at] = p10;
     logPressure[at] = log(p10);
-    temperature6[at] = T10;
+    temperature6[at] = T11;
     dewpoint[at] = Td;
     mixingRatio[at] = w2;
-    virtualTemperature[at] = virtualTemperatureFrom(T10, w2, air.epsilon);
+    virtualTemperature[at] = virtualTemperatureFrom(T11, w2, air.epsilon);
   }
   return sounding;
 }
@@ -7187,7 +7360,7 @@ function parcelDefinition(origin, result2, isVirtual, example) {
   }
 }
 var levelStep = (text, symbol, pressure4) => ({ text, formula: symbol, filled: `${symbol} = ${texQuantity(pressure4 / 100, "hPa")}`, value: pressure4, unit: "Pa" });
-var energyStep = (text, formula, symbol, value19) => ({ text, formula, filled: `${symbol} = ${texNumber(value19)}\\,\\mathrm{J\\,kg^{-1}}`, value: value19, unit: "J/kg" });
+var energyStep = (text, formula, symbol, value23) => ({ text, formula, filled: `${symbol} = ${texNumber(value23)}\\,\\mathrm{J\\,kg^{-1}}`, value: value23, unit: "J/kg" });
 
 // shared/thermo/stabilityIndices.ts
 function threeLevels(inputs2, constants, formulae) {
@@ -7235,7 +7408,7 @@ function indexDefinition({ source: source2, isAscent, of, steps: steps2, slips, 
     trace(inputs2, constants, _variant, formulae) {
       const levels = threeLevels(inputs2, constants, formulae);
       if (!levels) return [{ text: "A level is missing", formula: "850,\\,700,\\,500\\,\\mathrm{hPa}", filled: "850,\\,700,\\,500\\,\\mathrm{hPa}" }];
-      const { t850, d850, t700, d700, t500 } = levels, c2 = (T10) => texQuantity(T10 - zeroCelsius, "Cel", 4);
+      const { t850, d850, t700, d700, t500 } = levels, c2 = (T11) => texQuantity(T11 - zeroCelsius, "Cel", 4);
       return [
         { text: "The levels", formula: "T_{850},\\,T_{d,850},\\,T_{700},\\,T_{d,700},\\,T_{500}", filled: `${c2(t850)},\\ ${c2(d850)},\\ ${c2(t700)},\\ ${c2(d700)},\\ ${c2(t500)}` },
         ...steps2(levels, of(levels, inputs2, constants, formulae), inputs2, constants, formulae)
@@ -7257,7 +7430,7 @@ var kIndexDefinition = indexDefinition({
   isAscent: false,
   ask: "The K index, T at 850 less T at 500 hPa, plus the dewpoint at 850, less the dewpoint depression at 700 hPa, in °C.",
   of: kIndex,
-  steps: (_levels, value19) => [{ text: "K index", formula: "K = T_{850} - T_{500} + T_{d,850} - (T_{700} - T_{d,700})", filled: `K = ${texQuantity(value19 - zeroCelsius, "Cel", 4)}`, value: value19, unit: "K" }],
+  steps: (_levels, value23) => [{ text: "K index", formula: "K = T_{850} - T_{500} + T_{d,850} - (T_{700} - T_{d,700})", filled: `K = ${texQuantity(value23 - zeroCelsius, "Cel", 4)}`, value: value23, unit: "K" }],
   slips: [
     slip("depression-added", "dewpoint depression added", "The dewpoint depression at 700 hPa is added: it has to be taken off.", ofLevels(({ t850, d850, t700, d700, t500 }) => t850 - t500 + d850 + (t700 - d700))),
     slip("depression-left-out", "dewpoint depression left out", "The dewpoint depression at 700 hPa is left out.", ofLevels(({ t850, d850, t500 }) => t850 - t500 + d850)),
@@ -7277,18 +7450,18 @@ var heightInputs = [
 ];
 function meanByHeight(inputs2, constants, formulae) {
   const { sounding, air } = parcelContext(inputs2, constants, formulae);
-  const z3 = seriesOf(inputs2, "height"), depth = numberOf(inputs2, "depth");
-  if (z3.length !== sounding.count) throw new SeriesError("height", "a height is needed for each row");
-  const top4 = (z3[0] ?? 0) + depth;
+  const z4 = seriesOf(inputs2, "height"), depth = numberOf(inputs2, "depth");
+  if (z4.length !== sounding.count) throw new SeriesError("height", "a height is needed for each row");
+  const top4 = (z4[0] ?? 0) + depth;
   const thetaAt = (row) => (sounding.temperature[row] ?? 0) * pow(1e5 / (sounding.pressure[row] ?? 1), air.kappa);
-  let theta4 = 0, mixingRatio = 0;
-  for (let row = 1; row < z3.length; row++) {
-    const low = z3[row - 1] ?? 0, high2 = z3[row] ?? 0, end = Math.min(high2, top4), share = (end - low) / (high2 - low);
+  let theta5 = 0, mixingRatio = 0;
+  for (let row = 1; row < z4.length; row++) {
+    const low = z4[row - 1] ?? 0, high2 = z4[row] ?? 0, end = Math.min(high2, top4), share = (end - low) / (high2 - low);
     const from2 = thetaAt(row - 1), to2 = from2 + share * (thetaAt(row) - from2);
     const dry = sounding.mixingRatio[row - 1] ?? 0, wet = dry + share * ((sounding.mixingRatio[row] ?? 0) - dry);
-    theta4 += 0.5 * (from2 + to2) * (end - low);
+    theta5 += 0.5 * (from2 + to2) * (end - low);
     mixingRatio += 0.5 * (dry + wet) * (end - low);
-    if (high2 >= top4) return { theta: theta4 / depth, mixingRatio: mixingRatio / depth };
+    if (high2 >= top4) return { theta: theta5 / depth, mixingRatio: mixingRatio / depth };
   }
   return null;
 }
@@ -7331,8 +7504,8 @@ function layerMeanDefinition(mean2, by3, example) {
     trace(inputs2, constants, _variant, formulae) {
       const found = of(inputs2, constants, formulae);
       if (!found) return [{ text: "The data end below the layer’s top", formula: symbol, filled: symbol }];
-      const value19 = found[mean2];
-      return [{ text: "Mean over the layer", formula: `${symbol} = \\frac{\\int ${isTheta ? "\\theta" : "w"}\\,d${isByPressure ? "p" : "z"}}{\\int d${isByPressure ? "p" : "z"}}`, filled: `${symbol} = ${isTheta ? texQuantity(value19, "K", 6) : texQuantity(value19 * 1e3, "g/kg")}`, value: value19, unit: isTheta ? "K" : "kg/kg" }];
+      const value23 = found[mean2];
+      return [{ text: "Mean over the layer", formula: `${symbol} = \\frac{\\int ${isTheta ? "\\theta" : "w"}\\,d${isByPressure ? "p" : "z"}}{\\int d${isByPressure ? "p" : "z"}}`, filled: `${symbol} = ${isTheta ? texQuantity(value23, "K", 6) : texQuantity(value23 * 1e3, "g/kg")}`, value: value23, unit: isTheta ? "K" : "kg/kg" }];
     },
     slips: [fineSlip("surface-value", "value at the ground for the mean", "This is the value of the lowest row: the ask takes the mean of the layer.", (inputs2, constants, _right, formulae) => surface(inputs2, constants, formulae))],
     example: {
@@ -7397,7 +7570,7 @@ var lclPressureResult = {
     const parcel = context.parcel(origin);
     return parcel ? { is: "value", value: context.lcl(parcel).pressure } : endOfData(null) ?? { is: "not_reached", why: "" };
   },
-  trace: (_context, _origin, _isVirtual, value19) => [levelStep("Pressure of the condensation level", "p_{LCL}", value19)],
+  trace: (_context, _origin, _isVirtual, value23) => [levelStep("Pressure of the condensation level", "p_{LCL}", value23)],
   slips: (origin) => origin === "surface" ? [] : [fineSlip("surface-parcel", "surface parcel in place of the one asked", "This is the level of the surface parcel: the ask takes another one.", (inputs2, constants, _right, formulae) => {
     const context = parcelContext(inputs2, constants, formulae), parcel = context.parcel("surface");
     return parcel && context.lcl(parcel).pressure;
@@ -7417,7 +7590,7 @@ var lclTemperatureResult = {
     const parcel = context.parcel(origin);
     return parcel ? { is: "value", value: context.lcl(parcel).temperature } : endOfData(null) ?? { is: "not_reached", why: "" };
   },
-  trace: (_context, _origin, _isVirtual, value19) => [{ text: "Temperature at the condensation level", formula: "T_{LCL}", filled: `T_{LCL} = ${texQuantity(value19, "K", 6)}`, value: value19, unit: "K" }],
+  trace: (_context, _origin, _isVirtual, value23) => [{ text: "Temperature at the condensation level", formula: "T_{LCL}", filled: `T_{LCL} = ${texQuantity(value23, "K", 6)}`, value: value23, unit: "K" }],
   slips: (origin) => origin === "surface" ? [] : [fineSlip("surface-parcel", "surface parcel in place of the one asked", "This is the level of the surface parcel: the ask takes another one.", (inputs2, constants, _right, formulae) => {
     const context = parcelContext(inputs2, constants, formulae), parcel = context.parcel("surface");
     return parcel && context.lcl(parcel).temperature;
@@ -7439,7 +7612,7 @@ var lfcResult = {
   ask: 'The pressure of the level of free convection, the lowest one at or above the condensation level where the parcel becomes warmer than its surroundings; "none" where it never does, "not reached" where the data end below 300 hPa before it does.',
   variants: [pseudoadiabatic("level of free convection")],
   outcome: lfcOf,
-  trace: (_context, _origin, _isVirtual, value19) => [levelStep("The lowest level at or above it where the parcel becomes warmer", "p_{LFC}", value19)],
+  trace: (_context, _origin, _isVirtual, value23) => [levelStep("The lowest level at or above it where the parcel becomes warmer", "p_{LFC}", value23)],
   slips: (origin, isVirtual) => [
     levelSlip("lcl-for-lfc", "condensation level for it", "This is the lifting condensation level: the parcel is not free there yet.", origin, isVirtual, "lcl"),
     levelSlip("el-for-lfc", "equilibrium level for it", "This is the equilibrium level, where the parcel becomes colder again.", origin, isVirtual, "el"),
@@ -7464,7 +7637,7 @@ var elResult = {
   ask: 'The pressure of the equilibrium level, the highest one where the parcel becomes colder than its surroundings; "none" without a level of free convection, "not reached" where the data end while the parcel is warmer.',
   variants: [pseudoadiabatic("equilibrium level")],
   outcome: elOf,
-  trace: (_context, _origin, _isVirtual, value19) => [levelStep("The highest level where the parcel becomes colder", "p_{EL}", value19)],
+  trace: (_context, _origin, _isVirtual, value23) => [levelStep("The highest level where the parcel becomes colder", "p_{EL}", value23)],
   slips: (origin, isVirtual) => [
     levelSlip("lfc-for-el", "level of free convection for it", "This is the level of free convection: the equilibrium level is where the parcel becomes colder again.", origin, isVirtual, "lfc"),
     // as small as the spread of accepted formulae
@@ -7494,11 +7667,11 @@ var capeResult = {
     { ...pseudoadiabatic("convective available potential energy"), key: "to-data-top", label: "to the equilibrium level or the top of the data, whichever is lower" }
   ],
   outcome: capeOf,
-  trace(context, origin, isVirtual, value19) {
+  trace(context, origin, isVirtual, value23) {
     const ascent = context.ascent(origin, isVirtual);
     const steps2 = ascent && ascent.lfc !== null ? [levelStep("Level of free convection", "p_{LFC}", ascent.lfc)] : [];
     if (ascent && ascent.el !== null) steps2.push(levelStep("Equilibrium level", "p_{EL}", ascent.el));
-    return [...steps2, energyStep("Sum of the positive areas between them", "\\mathrm{CAPE} = R \\int \\max(0,\\,T_p - T_e)\\,d\\ln p", "\\mathrm{CAPE}", value19)];
+    return [...steps2, energyStep("Sum of the positive areas between them", "\\mathrm{CAPE} = R \\int \\max(0,\\,T_p - T_e)\\,d\\ln p", "\\mathrm{CAPE}", value23)];
   },
   slips: (origin, isVirtual) => [
     slip("sign", "sign turned round", "CAPE is positive: it is energy that the parcel gains.", (_i, _c, right) => right === 0 ? null : -right),
@@ -7530,11 +7703,11 @@ var cinResult = {
   ask: 'CIN = R ∫ (T_p − T_e) d ln p, the sum of the negative areas from the start to the level of free convection, with its sign (CIN ≤ 0); negative area above does not count; "not defined" without a level of free convection.',
   variants: [pseudoadiabatic("convective inhibition")],
   outcome: cinOf,
-  trace(context, origin, isVirtual, value19) {
+  trace(context, origin, isVirtual, value23) {
     const ascent = context.ascent(origin, isVirtual);
     return [
       ...ascent && ascent.lfc !== null ? [levelStep("Level of free convection", "p_{LFC}", ascent.lfc)] : [],
-      energyStep("Sum of the negative areas below it", "\\mathrm{CIN} = R \\int \\min(0,\\,T_p - T_e)\\,d\\ln p", "\\mathrm{CIN}", value19)
+      energyStep("Sum of the negative areas below it", "\\mathrm{CIN} = R \\int \\min(0,\\,T_p - T_e)\\,d\\ln p", "\\mathrm{CIN}", value23)
     ];
   },
   slips: (origin, isVirtual) => [
@@ -7569,13 +7742,13 @@ var liftedIndexResult = {
   ask: 'The lifted index, the temperature of the surroundings less that of the parcel at 500 hPa: negative where the parcel is warmer; "not reached" where the data end below 500 hPa.',
   variants: [{ ...pseudoadiabatic("lifted index") }],
   outcome: liftedIndexOf,
-  trace(context, origin, isVirtual, value19) {
+  trace(context, origin, isVirtual, value23) {
     const found = at500(context, origin, isVirtual);
     if ("is" in found) return [];
     const parcelSymbol = isVirtual ? "T_{v,p}" : "T_p";
     return [
       { text: "Parcel at 500 hPa", formula: parcelSymbol, filled: `${parcelSymbol} = ${texQuantity(found.parcel, "K", 6)}`, value: found.parcel, unit: "K" },
-      { text: "Surroundings less parcel", formula: `LI = ${isVirtual ? "T_{v,e}" : "T_e"} - ${parcelSymbol}`, filled: `LI = ${texQuantity(found.environment, "K", 6)} - ${texQuantity(found.parcel, "K", 6)} = ${texFactor(value19)}\\,\\mathrm{K}`, value: value19, unit: "K" }
+      { text: "Surroundings less parcel", formula: `LI = ${isVirtual ? "T_{v,e}" : "T_e"} - ${parcelSymbol}`, filled: `LI = ${texQuantity(found.environment, "K", 6)} - ${texQuantity(found.parcel, "K", 6)} = ${texFactor(value23)}\\,\\mathrm{K}`, value: value23, unit: "K" }
     ];
   },
   slips: (origin, isVirtual) => [
@@ -7675,11 +7848,11 @@ var showalterIndexDefinition = indexDefinition({
   isAscent: true,
   ask: "The Showalter index, T of the surroundings at 500 hPa less that of a parcel lifted from 850 hPa, dry to its condensation level and along the pseudoadiabat above, no virtual correction; negative where the parcel is warmer.",
   of: (levels, inputs2, constants, formulae) => showalter(levels, inputs2, constants, formulae).index,
-  steps(levels, value19, inputs2, constants, formulae) {
+  steps(levels, value23, inputs2, constants, formulae) {
     const { parcel } = showalter(levels, inputs2, constants, formulae);
     return [
       { text: "Parcel of 850 hPa at 500 hPa", formula: "T_p", filled: `T_p = ${texQuantity(parcel, "K", 6)}`, value: parcel, unit: "K" },
-      { text: "Surroundings less parcel", formula: "SI = T_{500} - T_p", filled: `SI = ${texQuantity(levels.t500, "K", 6)} - ${texQuantity(parcel, "K", 6)} = ${texFactor(value19)}\\,\\mathrm{K}`, value: value19, unit: "K" }
+      { text: "Surroundings less parcel", formula: "SI = T_{500} - T_p", filled: `SI = ${texQuantity(levels.t500, "K", 6)} - ${texQuantity(parcel, "K", 6)} = ${texFactor(value23)}\\,\\mathrm{K}`, value: value23, unit: "K" }
     ];
   },
   slips: [
@@ -7774,7 +7947,7 @@ var totalTotalsIndexDefinition = indexDefinition({
   isAscent: false,
   ask: "The total totals index, T and dewpoint at 850 hPa less twice T at 500 hPa.",
   of: totalTotals,
-  steps: (_levels, value19) => [{ text: "Total totals", formula: "TT = T_{850} + T_{d,850} - 2\\,T_{500}", filled: `TT = ${texQuantity(value19, "K", 4)}`, value: value19, unit: "K" }],
+  steps: (_levels, value23) => [{ text: "Total totals", formula: "TT = T_{850} + T_{d,850} - 2\\,T_{500}", filled: `TT = ${texQuantity(value23, "K", 4)}`, value: value23, unit: "K" }],
   slips: [
     slip("vertical-totals", "vertical totals alone", "These are the vertical totals, T at 850 less T at 500 hPa: the cross totals have to be added.", ofLevels(({ t850, t500 }) => t850 - t500)),
     slip("cross-totals", "cross totals alone", "These are the cross totals, dewpoint at 850 less T at 500 hPa: the vertical totals have to be added.", ofLevels(({ d850, t500 }) => d850 - t500)),
@@ -7823,10 +7996,10 @@ function soundingWaterDefinition(humidity2, example) {
     uses: ["saturation-vapor-pressure"],
     ask: `The precipitable water of the layer that your rows span, PW = (1/ρg) ∫ ${humidity2} dp with the ${inWords[humidity2]}, trapezoids in p between rows, as the depth of liquid water (1 mm is 1 kg m⁻²).`,
     trace(inputs2, constants, _variant, formulae) {
-      const { sounding } = parcelContext(inputs2, constants, formulae), value19 = precipitableWater(inputs2, constants, formulae, humidity2);
+      const { sounding } = parcelContext(inputs2, constants, formulae), value23 = precipitableWater(inputs2, constants, formulae, humidity2);
       return [
         { text: "Humidity at the bottom", formula: "w = \\frac{\\varepsilon e}{p - e}", filled: `w = ${texQuantity((sounding.mixingRatio[0] ?? 0) * 1e3, "g/kg")},\\quad \\varepsilon = ${texNumber(epsilonOf(constants))}` },
-        { text: "Sum over the layers", formula: `PW = \\frac{1}{\\rho g} \\sum \\bar ${humidity2}\\,\\Delta p`, filled: `PW = ${texQuantity(value19 * 1e3, "mm")}`, value: value19, unit: "m" }
+        { text: "Sum over the layers", formula: `PW = \\frac{1}{\\rho g} \\sum \\bar ${humidity2}\\,\\Delta p`, filled: `PW = ${texQuantity(value23 * 1e3, "mm")}`, value: value23, unit: "m" }
       ];
     },
     slips: [
@@ -7864,10 +8037,10 @@ function layerWaterDefinition(humidity2, example) {
     constants: ["g"],
     ask: `The precipitable water of the layer alone, PW = ${humidity2} (p₁ − p₂)/(ρ g) with the ${inWords[humidity2]} of its mean mixing ratio, as the depth of liquid water (1 mm is 1 kg m⁻²).`,
     trace(inputs2, constants) {
-      const w2 = numberOf(inputs2, "mixingRatio"), value19 = of(inputs2, constants), taken = humidity2 === "q" ? w2 / (1 + w2) : w2;
+      const w2 = numberOf(inputs2, "mixingRatio"), value23 = of(inputs2, constants), taken = humidity2 === "q" ? w2 / (1 + w2) : w2;
       return [
         { text: "Humidity", formula: humidity2 === "q" ? "q = \\frac{w}{1 + w}" : "w", filled: `${humidity2} = ${texQuantity(taken * 1e3, "g/kg")}` },
-        { text: "Water in the layer", formula: `PW = \\frac{${humidity2} (p_1 - p_2)}{\\rho g}`, filled: `PW = \\frac{${texNumber(taken)} \\times ${texNumber(numberOf(inputs2, "pressureBottom") - numberOf(inputs2, "pressureTop"))}}{1000 \\times ${texNumber(constant(constants, "g"), 6)}}\\,\\mathrm{m} = ${texQuantity(value19 * 1e3, "mm")}`, value: value19, unit: "m" }
+        { text: "Water in the layer", formula: `PW = \\frac{${humidity2} (p_1 - p_2)}{\\rho g}`, filled: `PW = \\frac{${texNumber(taken)} \\times ${texNumber(numberOf(inputs2, "pressureBottom") - numberOf(inputs2, "pressureTop"))}}{1000 \\times ${texNumber(constant(constants, "g"), 6)}}\\,\\mathrm{m} = ${texQuantity(value23 * 1e3, "mm")}`, value: value23, unit: "m" }
       ];
     },
     slips: [
@@ -7968,14 +8141,16 @@ var thetaLayerInputs = [
   theta3("potentialTemperatureTop", "potential temperature at the top (virtual, where the air is moist)", "θ₂"),
   { name: "depth", label: "depth of the layer", symbol: "Δz", unit: "m", shownUnit: "m", kind: "difference", shape: "number", range: [0.1, 5e4], trivialWithin: 0 }
 ];
+var virtualTemperatureInput = (label) => ({ name: "virtualTemperature", label, symbol: "T_v", unit: "K", shownUnit: "Cel", kind: "temperature", shape: "number", range: [150, 400] });
+var virtualRateInput = { name: "virtualLapseRate", label: "lapse rate of the virtual temperature", symbol: "Γ_v", unit: "K/m", shownUnit: "K/km", kind: "difference", shape: "number", range: [-1, 1] };
 function bruntVaisalaSquared(bottom3, top4, depth, constants) {
   return constant(constants, "g") / ((bottom3 + top4) / 2) * (top4 - bottom3) / depth;
 }
 function bruntVaisalaSquaredFromLapseRate(temperature6, lapseRate, constants) {
   return constant(constants, "g") / temperature6 * (dryRateOf(constants) - lapseRate);
 }
-function potentialTemperatureGradient(temperature6, theta4, lapseRate, constants) {
-  return theta4 / temperature6 * (dryRateOf(constants) - lapseRate);
+function potentialTemperatureGradient(temperature6, theta5, lapseRate, constants) {
+  return theta5 / temperature6 * (dryRateOf(constants) - lapseRate);
 }
 
 // shared/thermo/quantities/bruntVaisalaFrequency.ts
@@ -7995,17 +8170,17 @@ var bruntVaisalaFrequencyDefinition = {
     validity: "a layer whose θ does not fall with height",
     knownError: "(Δθ/θ)²/24 against the logarithmic form",
     evaluate(inputs2, constants) {
-      const value19 = squared(inputs2, constants);
-      return value19 < 0 ? { is: "not_defined", why: "N² is negative: θ falls with height, and the layer does not oscillate." } : { is: "value", value: Math.sqrt(value19) };
+      const value23 = squared(inputs2, constants);
+      return value23 < 0 ? { is: "not_defined", why: "N² is negative: θ falls with height, and the layer does not oscillate." } : { is: "value", value: Math.sqrt(value23) };
     }
   }],
   constants: ["g"],
   ask: 'The Brunt–Väisälä frequency N = √[(g/θ̄) Δθ/Δz] of the layer, with the mean θ̄ of bottom and top; "not defined" where N² is negative.',
   trace(inputs2, constants) {
-    const value19 = squared(inputs2, constants);
-    const first3 = { text: "Frequency squared", formula: "N^2 = \\frac{g}{\\bar\\theta} \\frac{\\theta_2 - \\theta_1}{\\Delta z}", filled: `N^2 = ${texQuantity(value19, "s-2")}`, value: value19, unit: "s-2" };
-    if (value19 < 0) return [first3];
-    return [first3, { text: "Its root", formula: "N = \\sqrt{N^2}", filled: `N = \\sqrt{${texNumber(value19)}}\\,\\mathrm{s^{-1}} = ${texQuantity(Math.sqrt(value19), "s-1")}`, value: Math.sqrt(value19), unit: "s-1" }];
+    const value23 = squared(inputs2, constants);
+    const first3 = { text: "Frequency squared", formula: "N^2 = \\frac{g}{\\bar\\theta} \\frac{\\theta_2 - \\theta_1}{\\Delta z}", filled: `N^2 = ${texQuantity(value23, "s-2")}`, value: value23, unit: "s-2" };
+    if (value23 < 0) return [first3];
+    return [first3, { text: "Its root", formula: "N = \\sqrt{N^2}", filled: `N = \\sqrt{${texNumber(value23)}}\\,\\mathrm{s^{-1}} = ${texQuantity(Math.sqrt(value23), "s-1")}`, value: Math.sqrt(value23), unit: "s-1" }];
   },
   slips: [
     slip("root-left-out", "N² in place of N", "This is N squared: take its root.", (_i, _c, right) => right * right),
@@ -8045,10 +8220,10 @@ var bruntVaisalaFrequencySquaredDefinition = {
   classLimits: () => [{ label: "neutral", value: 0 }],
   ask: "The Brunt–Väisälä frequency squared N² = (g/θ̄) Δθ/Δz of the layer, with the mean θ̄ of bottom and top, negative where θ falls with height.",
   trace(inputs2, constants) {
-    const { bottom: bottom3, top: top4, depth } = layer(inputs2), value19 = squared2(inputs2, constants);
+    const { bottom: bottom3, top: top4, depth } = layer(inputs2), value23 = squared2(inputs2, constants);
     return [
       { text: "Mean potential temperature", formula: "\\bar\\theta = \\frac{\\theta_1 + \\theta_2}{2}", filled: `\\bar\\theta = ${texQuantity((bottom3 + top4) / 2, "K", 6)}`, value: (bottom3 + top4) / 2, unit: "K" },
-      { text: "Frequency squared", formula: "N^2 = \\frac{g}{\\bar\\theta} \\frac{\\theta_2 - \\theta_1}{\\Delta z}", filled: `N^2 = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber((bottom3 + top4) / 2, 6)}} \\times \\frac{${texFactor(top4 - bottom3)}}{${texNumber(depth, 6)}}\\,\\mathrm{s^{-2}} = ${texQuantity(value19, "s-2")}`, value: value19, unit: "s-2" }
+      { text: "Frequency squared", formula: "N^2 = \\frac{g}{\\bar\\theta} \\frac{\\theta_2 - \\theta_1}{\\Delta z}", filled: `N^2 = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber((bottom3 + top4) / 2, 6)}} \\times \\frac{${texFactor(top4 - bottom3)}}{${texNumber(depth, 6)}}\\,\\mathrm{s^{-2}} = ${texQuantity(value23, "s-2")}`, value: value23, unit: "s-2" }
     ];
   },
   slips: [
@@ -8089,15 +8264,15 @@ function endsOf(inputs2) {
   const heights2 = heightsOf(inputs2);
   const temperatures = temperaturesOf(inputs2);
   let low = Infinity, high2 = -Infinity;
-  for (const z3 of heights2) {
-    if (z3 < low) low = z3;
-    if (z3 > high2) high2 = z3;
+  for (const z4 of heights2) {
+    if (z4 < low) low = z4;
+    if (z4 > high2) high2 = z4;
   }
   if (!(high2 > low)) throw new SeriesError("height", "all rows have the same height; a lapse rate needs a layer");
-  const meanAt = (z3) => {
+  const meanAt = (z4) => {
     let sum = 0, count = 0;
     heights2.forEach((height2, at) => {
-      if (height2 !== z3) return;
+      if (height2 !== z4) return;
       sum += temperatures[at] ?? 0;
       count++;
     });
@@ -8110,11 +8285,11 @@ function endPointRate(ends) {
   return kelvinPerMeter((ends.lowTemperature - ends.highTemperature) / (ends.highHeight - ends.lowHeight));
 }
 function dryClassLimits(_inputs, constants) {
-  const rate4 = dryRateOf(constants);
+  const rate7 = dryRateOf(constants);
   const tolerance = constant(constants, "neutralTolerance");
   return [
-    { label: "Γd less the tolerance of a neutral layer", value: rate4 - tolerance },
-    { label: "Γd with the tolerance of a neutral layer", value: rate4 + tolerance }
+    { label: "Γd less the tolerance of a neutral layer", value: rate7 - tolerance },
+    { label: "Γd with the tolerance of a neutral layer", value: rate7 + tolerance }
   ];
 }
 
@@ -8140,21 +8315,21 @@ var bruntVaisalaFrequencySquaredFromLapseRateDefinition = {
     evaluate: (inputs2, constants) => ({ is: "value", value: squared3(inputs2, constants) })
   }],
   constants: ["g", "cp"],
-  classLimits: (inputs2, constants) => dryClassLimits(inputs2, constants).map(({ label, value: value19 }) => ({ label, value: constant(constants, "g") / numberOf(inputs2, "temperature") * (dryRateOf(constants) - value19) })),
+  classLimits: (inputs2, constants) => dryClassLimits(inputs2, constants).map(({ label, value: value23 }) => ({ label, value: constant(constants, "g") / numberOf(inputs2, "temperature") * (dryRateOf(constants) - value23) })),
   ask: "The Brunt–Väisälä frequency squared N² = (g/T)(Γd − Γ) of the dry layer with Γd = g/cp, negative where the layer is superadiabatic.",
   trace(inputs2, constants) {
-    const value19 = squared3(inputs2, constants), dry = dryRateOf(constants), rate4 = numberOf(inputs2, "lapseRate");
+    const value23 = squared3(inputs2, constants), dry = dryRateOf(constants), rate7 = numberOf(inputs2, "lapseRate");
     return [
       { text: "Dry adiabatic lapse rate", formula: "\\Gamma_d = \\frac{g}{c_p}", filled: `\\Gamma_d = ${texQuantity(dry * 1e3, "K/km")}`, value: dry, unit: "K/m" },
-      { text: "Frequency squared", formula: "N^2 = \\frac{g}{T} (\\Gamma_d - \\Gamma)", filled: `N^2 = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(numberOf(inputs2, "temperature"), 6)}} \\times (${texNumber(dry)} - ${texFactor(rate4)})\\,\\mathrm{s^{-2}} = ${texQuantity(value19, "s-2")}`, value: value19, unit: "s-2" }
+      { text: "Frequency squared", formula: "N^2 = \\frac{g}{T} (\\Gamma_d - \\Gamma)", filled: `N^2 = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(numberOf(inputs2, "temperature"), 6)}} \\times (${texNumber(dry)} - ${texFactor(rate7)})\\,\\mathrm{s^{-2}} = ${texQuantity(value23, "s-2")}`, value: value23, unit: "s-2" }
     ];
   },
   slips: [
     signSlip("N² is positive where the layer is stable, Γ < Γd."),
     slip("gradient-sign", "Γd + Γ for Γd − Γ", "The lapse rate went in with its sign turned: Γ is positive where temperature falls with height.", (inputs2, constants) => constant(constants, "g") / numberOf(inputs2, "temperature") * (dryRateOf(constants) + numberOf(inputs2, "lapseRate"))),
     slip("celsius-for-kelvin", "°C in place of K", "The temperature went in in degrees Celsius: it has to be in kelvin.", (inputs2, _c, right) => {
-      const T10 = numberOf(inputs2, "temperature");
-      return T10 === zeroCelsius ? null : right * T10 / (T10 - zeroCelsius);
+      const T11 = numberOf(inputs2, "temperature");
+      return T11 === zeroCelsius ? null : right * T11 / (T11 - zeroCelsius);
     }),
     slip("per-kilometer", "K km⁻¹ in place of K m⁻¹", "The lapse rates went in in K per kilometer: per meter is needed.", (_i, _c, right) => right * 1e3),
     slip("dry-rate-left-out", "Γd left out", "The dry adiabatic lapse rate is left out: a layer is neutral at Γd, not at 0.", (inputs2, constants) => -constant(constants, "g") / numberOf(inputs2, "temperature") * numberOf(inputs2, "lapseRate")),
@@ -8165,7 +8340,7 @@ var bruntVaisalaFrequencySquaredFromLapseRateDefinition = {
 var squared3 = (inputs2, constants) => bruntVaisalaSquaredFromLapseRate(kelvin(numberOf(inputs2, "temperature")), kelvinPerMeter(numberOf(inputs2, "lapseRate")), constants);
 
 // shared/thermo/quantities/bulkRichardsonNumber.ts
-var difference = (name, label, symbol) => ({ name, label, symbol, unit: "m/s", shownUnit: "m/s", kind: "difference", shape: "number", range: [-200, 200] });
+var difference2 = (name, label, symbol) => ({ name, label, symbol, unit: "m/s", shownUnit: "m/s", kind: "difference", shape: "number", range: [-200, 200] });
 var bulkRichardsonNumberDefinition = {
   key: "bulk-richardson-number",
   name: "bulk Richardson number",
@@ -8176,8 +8351,8 @@ var bulkRichardsonNumberDefinition = {
   nearZero: 0.01,
   inputs: [
     ...virtualThetaLayer,
-    difference("eastwardDifference", "difference of the eastward wind, top less bottom", "Δu"),
-    difference("northwardDifference", "difference of the northward wind, top less bottom", "Δv")
+    difference2("eastwardDifference", "difference of the eastward wind, top less bottom", "Δu"),
+    difference2("northwardDifference", "difference of the northward wind, top less bottom", "Δv")
   ],
   variants: [{
     key: "mean-theta",
@@ -8186,18 +8361,18 @@ var bulkRichardsonNumberDefinition = {
     validity: "any layer with shear",
     knownError: "none: the four readings alone decide",
     evaluate(inputs2, constants) {
-      const value19 = bulkRichardson(layer2(inputs2), constants);
-      return value19 === null ? { is: "not_defined", why: "The wind is the same at bottom and top: there is no shear." } : { is: "value", value: value19 };
+      const value23 = bulkRichardson(layer2(inputs2), constants);
+      return value23 === null ? { is: "not_defined", why: "The wind is the same at bottom and top: there is no shear." } : { is: "value", value: value23 };
     }
   }],
   constants: ["g"],
   classLimits: () => [{ label: "critical, 0.25", value: 0.25 }],
   ask: 'The bulk Richardson number Ri = (g/θ̄v) Δθv Δz / (Δu² + Δv²) of the layer, with the mean θ̄v of bottom and top and the vector difference of the wind; "not defined" without shear.',
   trace(inputs2, constants) {
-    const { bottom: bottom3, top: top4, depth, du, dv } = layer2(inputs2), value19 = bulkRichardson(layer2(inputs2), constants);
+    const { bottom: bottom3, top: top4, depth, du, dv } = layer2(inputs2), value23 = bulkRichardson(layer2(inputs2), constants);
     const shear2 = { text: "Vector difference of the wind, squared", formula: "|\\Delta V|^2 = \\Delta u^2 + \\Delta v^2", filled: `|\\Delta V|^2 = ${texFactor(du)}^2 + ${texFactor(dv)}^2 = ${texNumber(du * du + dv * dv)}\\,\\mathrm{m^2\\,s^{-2}}` };
-    if (value19 === null) return [shear2];
-    return [shear2, { text: "Bulk Richardson number", formula: "Ri_B = \\frac{g}{\\bar\\theta_v} \\frac{\\Delta\\theta_v\\,\\Delta z}{|\\Delta V|^2}", filled: `Ri_B = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber((bottom3 + top4) / 2, 6)}} \\times \\frac{${texFactor(top4 - bottom3)} \\times ${texNumber(depth, 6)}}{${texNumber(du * du + dv * dv)}} = ${texNumber(value19)}`, value: value19, unit: "1" }];
+    if (value23 === null) return [shear2];
+    return [shear2, { text: "Bulk Richardson number", formula: "Ri_B = \\frac{g}{\\bar\\theta_v} \\frac{\\Delta\\theta_v\\,\\Delta z}{|\\Delta V|^2}", filled: `Ri_B = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber((bottom3 + top4) / 2, 6)}} \\times \\frac{${texFactor(top4 - bottom3)} \\times ${texNumber(depth, 6)}}{${texNumber(du * du + dv * dv)}} = ${texNumber(value23)}`, value: value23, unit: "1" }];
   },
   slips: [
     signSlip("The number is positive where θv rises with height."),
@@ -8251,19 +8426,19 @@ var bulkRichardsonNumberFromWindsDefinition = {
     validity: "any layer with shear",
     knownError: "none: the readings alone decide",
     evaluate(inputs2, constants) {
-      const value19 = number(inputs2, constants);
-      return value19 === null ? { is: "not_defined", why: "The wind vector is the same at bottom and top: there is no shear." } : { is: "value", value: value19 };
+      const value23 = number(inputs2, constants);
+      return value23 === null ? { is: "not_defined", why: "The wind vector is the same at bottom and top: there is no shear." } : { is: "value", value: value23 };
     }
   }],
   constants: ["g"],
   classLimits: () => [{ label: "critical, 0.25", value: 0.25 }],
   ask: 'The bulk Richardson number Ri = (g/θ̄v) Δθv Δz / |ΔV|² of the layer, with the mean θ̄v of bottom and top and the difference of the wind vectors; "not defined" where they are alike.',
   trace(inputs2, constants) {
-    const { du, dv } = windDifference(inputs2), value19 = number(inputs2, constants);
+    const { du, dv } = windDifference(inputs2), value23 = number(inputs2, constants);
     const { bottom: bottom3, top: top4, depth } = layer3(inputs2);
     const shear2 = { text: "Difference of the wind vectors, u = −s sin d, v = −s cos d", formula: "|\\Delta V|^2 = (u_2 - u_1)^2 + (v_2 - v_1)^2", filled: `|\\Delta V|^2 = ${texFactor(du)}^2 + ${texFactor(dv)}^2 = ${texNumber(du * du + dv * dv)}\\,\\mathrm{m^2\\,s^{-2}}` };
-    if (value19 === null) return [shear2];
-    return [shear2, { text: "Bulk Richardson number", formula: "Ri_B = \\frac{g}{\\bar\\theta_v} \\frac{\\Delta\\theta_v\\,\\Delta z}{|\\Delta V|^2}", filled: `Ri_B = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber((bottom3 + top4) / 2, 6)}} \\times \\frac{${texFactor(top4 - bottom3)} \\times ${texNumber(depth, 6)}}{${texNumber(du * du + dv * dv)}} = ${texNumber(value19)}`, value: value19, unit: "1" }];
+    if (value23 === null) return [shear2];
+    return [shear2, { text: "Bulk Richardson number", formula: "Ri_B = \\frac{g}{\\bar\\theta_v} \\frac{\\Delta\\theta_v\\,\\Delta z}{|\\Delta V|^2}", filled: `Ri_B = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber((bottom3 + top4) / 2, 6)}} \\times \\frac{${texFactor(top4 - bottom3)} \\times ${texNumber(depth, 6)}}{${texNumber(du * du + dv * dv)}} = ${texNumber(value23)}`, value: value23, unit: "1" }];
   },
   slips: [
     signSlip("The number is positive where θv rises with height."),
@@ -8304,12 +8479,12 @@ var fittedTemperatureAtZeroHeightDefinition = oneFormula({
   },
   value: intercept,
   ask: "The temperature at height 0 of the straight line by ordinary least squares of temperature on height over all your rows; height 0 is that of the heights as given.",
-  working(inputs2, _constants, value19) {
+  working(inputs2, _constants, value23) {
     const line = lineOf(inputs2);
     return [
       { text: `Means of the ${line.count} rows`, formula: "\\bar z,\\ \\bar T", filled: `\\bar z = ${texQuantity(line.meanX, "m", 6)},\\quad \\bar T = ${texQuantity(line.meanY - zeroCelsius, "Cel")}` },
       { text: "Slope", formula: "\\frac{dT}{dz} = \\frac{\\sum (z - \\bar z)(T - \\bar T)}{\\sum (z - \\bar z)^2}", filled: `\\frac{dT}{dz} = \\frac{${texNumber(line.sumXY)}}{${texNumber(line.sumXX)}}\\,\\mathrm{K\\,m^{-1}} = ${texQuantity(line.slope * 1e3, "K/km")}` },
-      { text: "At height 0", formula: "T_0 = \\bar T - \\frac{dT}{dz}\\,\\bar z", filled: `T_0 = ${texQuantity(value19 - zeroCelsius, "Cel", 5)}`, value: value19, unit: "K" }
+      { text: "At height 0", formula: "T_0 = \\bar T - \\frac{dT}{dz}\\,\\bar z", filled: `T_0 = ${texQuantity(value23 - zeroCelsius, "Cel", 5)}`, value: value23, unit: "K" }
     ];
   },
   slips: [
@@ -8342,19 +8517,19 @@ var inversionInputs = [
   { name: "minimumDepth", label: "depth from which a layer counts", symbol: "d_min", unit: "m", shownUnit: "m", kind: "difference", shape: "number", range: [0, 5e3] }
 ];
 function lowestInversion(inputs2) {
-  const z3 = seriesOf(inputs2, "height"), T10 = seriesOf(inputs2, "temperature"), least2 = numberOf(inputs2, "minimumDepth");
+  const z4 = seriesOf(inputs2, "height"), T11 = seriesOf(inputs2, "temperature"), least2 = numberOf(inputs2, "minimumDepth");
   let base = -1, top4 = -1;
   const found = () => {
     if (base < 0) return null;
-    const low = z3[base] ?? 0, high2 = z3[top4] ?? 0;
-    return high2 - low >= least2 ? { base: low, top: high2, baseTemperature: T10[base] ?? 0, topTemperature: T10[top4] ?? 0 } : null;
+    const low = z4[base] ?? 0, high2 = z4[top4] ?? 0;
+    return high2 - low >= least2 ? { base: low, top: high2, baseTemperature: T11[base] ?? 0, topTemperature: T11[top4] ?? 0 } : null;
   };
-  for (let at = 1; at < z3.length; at++) {
-    const change = (T10[at] ?? 0) - (T10[at - 1] ?? 0);
-    if (change > 0) {
+  for (let at = 1; at < z4.length; at++) {
+    const change2 = (T11[at] ?? 0) - (T11[at - 1] ?? 0);
+    if (change2 > 0) {
       if (base < 0) base = at - 1;
       top4 = at;
-    } else if (change < 0) {
+    } else if (change2 < 0) {
       const inversion = found();
       if (inversion) return inversion;
       base = -1;
@@ -8387,10 +8562,10 @@ var freezingLevelDefinition = {
   trace(inputs2, constants) {
     const found = crossing(inputs2, constants);
     if (!found) return [{ text: "Temperature does not fall through 0 °C in the data", formula: "T(z) = 0\\,{}^{\\circ}C", filled: "T(z) \\ne 0\\,{}^{\\circ}C" }];
-    const z3 = seriesOf(inputs2, "height"), T10 = seriesOf(inputs2, "temperature"), zero2 = constant(constants, "zeroCelsius");
-    const low = z3[found.below] ?? 0, high2 = z3[found.below + 1] ?? 0;
+    const z4 = seriesOf(inputs2, "height"), T11 = seriesOf(inputs2, "temperature"), zero2 = constant(constants, "zeroCelsius");
+    const low = z4[found.below] ?? 0, high2 = z4[found.below + 1] ?? 0;
     return [
-      { text: "Rows on both sides", formula: "z_1,\\,T_1;\\quad z_2,\\,T_2", filled: `z_1 = ${texQuantity(low, "m", 6)},\\ T_1 = ${texQuantity((T10[found.below] ?? 0) - zero2, "Cel")};\\quad z_2 = ${texQuantity(high2, "m", 6)},\\ T_2 = ${texQuantity((T10[found.below + 1] ?? 0) - zero2, "Cel")}` },
+      { text: "Rows on both sides", formula: "z_1,\\,T_1;\\quad z_2,\\,T_2", filled: `z_1 = ${texQuantity(low, "m", 6)},\\ T_1 = ${texQuantity((T11[found.below] ?? 0) - zero2, "Cel")};\\quad z_2 = ${texQuantity(high2, "m", 6)},\\ T_2 = ${texQuantity((T11[found.below + 1] ?? 0) - zero2, "Cel")}` },
       { text: "Linear between them", formula: "z_0 = z_1 + (z_2 - z_1) \\frac{T_1}{T_1 - T_2}", filled: `z_0 = ${texQuantity(found.height, "m", 6)}`, value: found.height, unit: "m" }
     ];
   },
@@ -8401,10 +8576,10 @@ var freezingLevelDefinition = {
   example: { inputs: { height: [100, 600, 1100], temperature: [278.15, 275.15, 272.15] }, gives: 933.333, within: 1e-3 }
 };
 function crossing(inputs2, constants) {
-  const z3 = seriesOf(inputs2, "height"), T10 = seriesOf(inputs2, "temperature"), zero2 = constant(constants, "zeroCelsius");
-  for (let at = 0; at + 1 < z3.length; at++) {
-    const warm = (T10[at] ?? 0) - zero2, cold = (T10[at + 1] ?? 0) - zero2;
-    if (warm > 0 && cold <= 0) return { below: at, height: (z3[at] ?? 0) + warm / (warm - cold) * ((z3[at + 1] ?? 0) - (z3[at] ?? 0)) };
+  const z4 = seriesOf(inputs2, "height"), T11 = seriesOf(inputs2, "temperature"), zero2 = constant(constants, "zeroCelsius");
+  for (let at = 0; at + 1 < z4.length; at++) {
+    const warm = (T11[at] ?? 0) - zero2, cold = (T11[at + 1] ?? 0) - zero2;
+    if (warm > 0 && cold <= 0) return { below: at, height: (z4[at] ?? 0) + warm / (warm - cold) * ((z4[at + 1] ?? 0) - (z4[at] ?? 0)) };
   }
   return null;
 }
@@ -8412,7 +8587,7 @@ function outcome(inputs2, constants) {
   const found = crossing(inputs2, constants);
   if (found) return { is: "value", value: found.height };
   const zero2 = constant(constants, "zeroCelsius");
-  return seriesOf(inputs2, "temperature").every((T10) => T10 <= zero2) ? { is: "none", why: "Every row is at or below 0 °C." } : { is: "not_reached", why: "The data end before temperature falls through 0 °C." };
+  return seriesOf(inputs2, "temperature").every((T11) => T11 <= zero2) ? { is: "none", why: "Every row is at or below 0 °C." } : { is: "not_reached", why: "The data end before temperature falls through 0 °C." };
 }
 function rowAt(inputs2, constants, above) {
   const found = crossing(inputs2, constants);
@@ -8442,18 +8617,18 @@ var gradientRichardsonNumberDefinition = {
     validity: "any height with shear",
     knownError: "none beyond that of the gradients",
     evaluate(inputs2, constants) {
-      const value19 = number2(inputs2, constants);
-      return value19 === null ? { is: "not_defined", why: "The wind does not change with height: there is no shear." } : { is: "value", value: value19 };
+      const value23 = number2(inputs2, constants);
+      return value23 === null ? { is: "not_defined", why: "The wind does not change with height: there is no shear." } : { is: "value", value: value23 };
     }
   }],
   constants: ["g"],
   classLimits: () => [{ label: "critical, 0.25", value: 0.25 }],
   ask: 'The gradient Richardson number Ri = (g/θv)(dθv/dz) / [(du/dz)² + (dv/dz)²]; "not defined" without shear.',
   trace(inputs2, constants) {
-    const { theta: theta4, gradient: gradient2, du, dv } = given6(inputs2), value19 = number2(inputs2, constants);
+    const { theta: theta5, gradient: gradient2, du, dv } = given6(inputs2), value23 = number2(inputs2, constants);
     const first3 = { text: "Shear squared", formula: "S^2 = \\left(\\frac{du}{dz}\\right)^2 + \\left(\\frac{dv}{dz}\\right)^2", filled: `S^2 = ${texFactor(du)}^2 + ${texFactor(dv)}^2 = ${texNumber(du * du + dv * dv)}\\,\\mathrm{s^{-2}}` };
-    if (value19 === null) return [first3];
-    return [first3, { text: "Richardson number", formula: "Ri = \\frac{g}{\\theta_v} \\frac{d\\theta_v/dz}{S^2}", filled: `Ri = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(theta4, 6)}} \\times \\frac{${texFactor(gradient2)}}{${texNumber(du * du + dv * dv)}} = ${texNumber(value19)}`, value: value19, unit: "1" }];
+    if (value23 === null) return [first3];
+    return [first3, { text: "Richardson number", formula: "Ri = \\frac{g}{\\theta_v} \\frac{d\\theta_v/dz}{S^2}", filled: `Ri = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(theta5, 6)}} \\times \\frac{${texFactor(gradient2)}}{${texNumber(du * du + dv * dv)}} = ${texNumber(value23)}`, value: value23, unit: "1" }];
   },
   slips: [
     signSlip("The number is positive where θv rises with height."),
@@ -8463,8 +8638,8 @@ var gradientRichardsonNumberDefinition = {
     }),
     slip("per-kilometer", "K km⁻¹ in place of K m⁻¹", "The gradient went in in K per kilometer: per meter is needed.", (_i, _c, right) => right * 1e3),
     slip("celsius-for-kelvin", "°C in place of K", "θv went in in degrees Celsius: it has to be in kelvin.", (inputs2, _c, right) => {
-      const { theta: theta4 } = given6(inputs2);
-      return theta4 === zeroCelsius ? null : right * theta4 / (theta4 - zeroCelsius);
+      const { theta: theta5 } = given6(inputs2);
+      return theta5 === zeroCelsius ? null : right * theta5 / (theta5 - zeroCelsius);
     }),
     slip("inverted", "shear over stratification", "This is the reciprocal: stratification stands above shear.", (_i, _c, right) => right === 0 ? null : 1 / right),
     slip("gravity-left-out", "g left out", "The acceleration of gravity is left out.", (_i, constants, right) => right / constant(constants, "g"))
@@ -8505,10 +8680,10 @@ function inversionDefinition({ key, name, symbol, unit, nearZero, asked, formula
     trace(inputs2) {
       const inversion = lowestInversion(inputs2);
       if (!inversion) return [{ text: "No layer of this depth has temperature rising with height", formula: "\\Delta T \\le 0", filled: "\\Delta T \\le 0" }];
-      const value19 = of(inversion);
+      const value23 = of(inversion);
       return [
         { text: "Base and top", formula: "z_1,\\,T_1;\\quad z_2,\\,T_2", filled: `z_1 = ${texQuantity(inversion.base, "m", 6)},\\ T_1 = ${texQuantity(inversion.baseTemperature - zeroCelsius, "Cel")};\\quad z_2 = ${texQuantity(inversion.top, "m", 6)},\\ T_2 = ${texQuantity(inversion.topTemperature - zeroCelsius, "Cel")}` },
-        { text: asked, formula, filled: `${formula} = ${texQuantity(value19, unit, 6)}`, value: value19, unit }
+        { text: asked, formula, filled: `${formula} = ${texQuantity(value23, unit, 6)}`, value: value23, unit }
       ];
     },
     slips,
@@ -8594,12 +8769,12 @@ var lapseRateEndPointsDefinition = {
   ask: "The lapse rate Γ = −ΔT/Δz between the lowest and the highest of your rows, positive where temperature falls with height; divide by the heights of these rows.",
   trace(inputs2) {
     const ends = endsOf(inputs2);
-    const change = ends.highTemperature - ends.lowTemperature;
+    const change2 = ends.highTemperature - ends.lowTemperature;
     const depth = ends.highHeight - ends.lowHeight;
-    const value19 = endPointRate(ends);
+    const value23 = endPointRate(ends);
     return [
       { text: "Lowest and highest row", formula: "z_1,\\,T_1;\\quad z_2,\\,T_2", filled: `z_1 = ${texQuantity(ends.lowHeight, "m", 6)},\\ T_1 = ${texQuantity(ends.lowTemperature - zeroCelsius, "Cel")};\\quad z_2 = ${texQuantity(ends.highHeight, "m", 6)},\\ T_2 = ${texQuantity(ends.highTemperature - zeroCelsius, "Cel")}` },
-      { text: "Lapse rate", formula: "\\Gamma = -\\frac{T_2 - T_1}{z_2 - z_1}", filled: `\\Gamma = -\\frac{${texFactor(change)}\\,\\mathrm{K}}{${texNumber(depth / 1e3, 6)}\\,\\mathrm{km}} = ${texQuantity(value19 * 1e3, "K/km")}`, value: value19, unit: "K/m" }
+      { text: "Lapse rate", formula: "\\Gamma = -\\frac{T_2 - T_1}{z_2 - z_1}", filled: `\\Gamma = -\\frac{${texFactor(change2)}\\,\\mathrm{K}}{${texNumber(depth / 1e3, 6)}\\,\\mathrm{km}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
     ];
   },
   slips: [
@@ -8613,21 +8788,21 @@ var lapseRateEndPointsDefinition = {
   example: { inputs: { height: [20, 220], temperature: [291.15, 289.35] }, gives: 9e-3, within: 1e-12 }
 };
 function firstAndLast(inputs2) {
-  const z3 = heightsOf(inputs2), T10 = temperaturesOf(inputs2);
-  const last = z3.length - 1;
-  const depth = (z3[last] ?? 0) - (z3[0] ?? 0);
-  return depth === 0 ? null : -((T10[last] ?? 0) - (T10[0] ?? 0)) / depth;
+  const z4 = heightsOf(inputs2), T11 = temperaturesOf(inputs2);
+  const last = z4.length - 1;
+  const depth = (z4[last] ?? 0) - (z4[0] ?? 0);
+  return depth === 0 ? null : -((T11[last] ?? 0) - (T11[0] ?? 0)) / depth;
 }
 function meanOfParts(inputs2) {
-  const z3 = heightsOf(inputs2), T10 = temperaturesOf(inputs2);
-  if (z3.length < 3) return null;
+  const z4 = heightsOf(inputs2), T11 = temperaturesOf(inputs2);
+  if (z4.length < 3) return null;
   let sum = 0;
-  for (let at = 1; at < z3.length; at++) {
-    const depth = (z3[at] ?? 0) - (z3[at - 1] ?? 0);
+  for (let at = 1; at < z4.length; at++) {
+    const depth = (z4[at] ?? 0) - (z4[at - 1] ?? 0);
     if (depth === 0) return null;
-    sum -= ((T10[at] ?? 0) - (T10[at - 1] ?? 0)) / depth;
+    sum -= ((T11[at] ?? 0) - (T11[at - 1] ?? 0)) / depth;
   }
-  return sum / (z3.length - 1);
+  return sum / (z4.length - 1);
 }
 
 // shared/thermo/quantities/lapseRateEndPointsStandardError.ts
@@ -8654,12 +8829,12 @@ var lapseRateEndPointsStandardErrorDefinition = {
   constants: [],
   ask: "The standard error of the lapse rate between the lowest and the highest of your rows, where each temperature has the given standard deviation, independent from row to row, and heights have none.",
   trace(inputs2) {
-    const ends = endsOf(inputs2), s2 = numberOf(inputs2, "readingDeviation"), value19 = errorOf(inputs2);
+    const ends = endsOf(inputs2), s2 = numberOf(inputs2, "readingDeviation"), value23 = errorOf(inputs2);
     const depth = ends.highHeight - ends.lowHeight;
     const share = Math.sqrt(1 / ends.lowCount + 1 / ends.highCount);
     return [
       { text: "Error of the difference of temperature", formula: "s_{\\Delta T} = s_T \\sqrt{\\frac{1}{n_1} + \\frac{1}{n_2}}", filled: `s_{\\Delta T} = ${texNumber(s2)} \\sqrt{\\frac{1}{${ends.lowCount}} + \\frac{1}{${ends.highCount}}}\\,\\mathrm{K} = ${texQuantity(s2 * share, "K")}`, value: s2 * share, unit: "K" },
-      { text: "Error of the lapse rate", formula: "s_\\Gamma = \\frac{s_{\\Delta T}}{z_2 - z_1}", filled: `s_\\Gamma = \\frac{${texQuantity(s2 * share, "K")}}{${texQuantity(depth / 1e3, "km", 6)}} = ${texQuantity(value19 * 1e3, "K/km")}`, value: value19, unit: "K/m" }
+      { text: "Error of the lapse rate", formula: "s_\\Gamma = \\frac{s_{\\Delta T}}{z_2 - z_1}", filled: `s_\\Gamma = \\frac{${texQuantity(s2 * share, "K")}}{${texQuantity(depth / 1e3, "km", 6)}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
     ];
   },
   slips: [
@@ -8688,15 +8863,32 @@ var noScatter = 1e-9;
 function lagOneCorrelation(inputs2) {
   const line = lineOf(inputs2);
   if (!((line.residualDeviation ?? 0) > noScatter)) return null;
-  const z3 = heightsOf(inputs2), T10 = temperaturesOf(inputs2);
+  const z4 = heightsOf(inputs2), T11 = temperaturesOf(inputs2);
   let squares = 0, products = 0, before = 0;
-  for (let at = 0; at < z3.length; at++) {
-    const residual = (T10[at] ?? 0) - line.meanY - line.slope * ((z3[at] ?? 0) - line.meanX);
+  for (let at = 0; at < z4.length; at++) {
+    const residual = (T11[at] ?? 0) - line.meanY - line.slope * ((z4[at] ?? 0) - line.meanX);
     squares += residual * residual;
     if (at > 0) products += residual * before;
     before = residual;
   }
   return products / squares;
+}
+function lagOneCorrelationAbout(inputs2, rate7) {
+  const z4 = heightsOf(inputs2), T11 = temperaturesOf(inputs2), bottom3 = z4[0] ?? 0, first3 = T11[0] ?? 0;
+  const rest = T11.map((one2, at) => one2 - first3 + rate7 * ((z4[at] ?? 0) - bottom3));
+  const mean2 = rest.reduce((sum, one2) => sum + one2, 0) / rest.length;
+  let squares = 0, products = 0, before = 0;
+  rest.forEach((one2, at) => {
+    const residual = one2 - mean2;
+    squares += residual * residual;
+    if (at > 0) products += residual * before;
+    before = residual;
+  });
+  return Math.sqrt(squares / rest.length) > noScatter ? products / squares : null;
+}
+function effectiveRows(count, correlation) {
+  if (correlation <= 0) return count;
+  return Math.max(1, count * (1 - correlation) / (1 + correlation));
 }
 function inflation(correlation) {
   if (!(correlation < 1)) return null;
@@ -8731,11 +8923,11 @@ var lapseRateInflatedStandardErrorDefinition = {
   ask: "The standard error of the least-squares lapse rate of your rows (n − 2 degrees of freedom), times √[(1 + r₁)/(1 − r₁)] with the lag-1 correlation r₁ of the residuals in the order of your rows; the factor is 1 where r₁ is negative.",
   trace(inputs2) {
     const error2 = lineOf(inputs2).slopeError ?? 0, correlation = lagOneCorrelation(inputs2) ?? 0, factor = inflation(correlation) ?? 1;
-    const value19 = error2 * factor;
+    const value23 = error2 * factor;
     return [
       { text: "Standard error for independent rows", formula: "s_\\Gamma", filled: `s_\\Gamma = ${texQuantity(error2 * 1e3, "K/km")}`, value: error2, unit: "K/m" },
       { text: "Lag-1 correlation of the residuals", formula: "r_1 = \\frac{\\sum e_i e_{i+1}}{\\sum e_i^2}", filled: `r_1 = ${texNumber(correlation)}`, value: correlation, unit: "1" },
-      { text: "Inflated", formula: "s'_\\Gamma = s_\\Gamma \\sqrt{\\frac{1 + r_1}{1 - r_1}}", filled: `s'_\\Gamma = ${texNumber(error2 * 1e3)} \\times ${texNumber(factor)}\\,\\mathrm{K\\,km^{-1}} = ${texQuantity(value19 * 1e3, "K/km")}`, value: value19, unit: "K/m" }
+      { text: "Inflated", formula: "s'_\\Gamma = s_\\Gamma \\sqrt{\\frac{1 + r_1}{1 - r_1}}", filled: `s'_\\Gamma = ${texNumber(error2 * 1e3)} \\times ${texNumber(factor)}\\,\\mathrm{K\\,km^{-1}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
     ];
   },
   slips: [
@@ -8772,23 +8964,23 @@ var lapseRateLagOneCorrelationDefinition = {
     validity: "rows at even steps of time or height",
     knownError: "biased low by about 4/n for short series",
     evaluate(inputs2) {
-      const value19 = lagOneCorrelation(inputs2);
-      return value19 === null ? { is: "not_defined", why: "The rows lie on their line: there are no residuals to correlate." } : { is: "value", value: value19 };
+      const value23 = lagOneCorrelation(inputs2);
+      return value23 === null ? { is: "not_defined", why: "The rows lie on their line: there are no residuals to correlate." } : { is: "value", value: value23 };
     }
   }],
   constants: [],
   ask: 'The lag-1 correlation r₁ = Σ eᵢeᵢ₊₁ / Σ eᵢ² of the residuals e of temperature about its least-squares line on height, in the order of your rows. "Not defined" where the rows lie on the line.',
   trace(inputs2) {
-    const line = lineOf(inputs2), value19 = lagOneCorrelation(inputs2);
+    const line = lineOf(inputs2), value23 = lagOneCorrelation(inputs2);
     const scatter = { text: "Residuals about the line", formula: "e_i = T_i - \\hat T_i", filled: `s = ${texQuantity(line.residualDeviation ?? 0, "K")},\\quad n = ${line.count}` };
-    return value19 === null ? [scatter] : [scatter, { text: "Correlation of neighbors", formula: "r_1 = \\frac{\\sum e_i e_{i+1}}{\\sum e_i^2}", filled: `r_1 = ${texNumber(value19)}`, value: value19, unit: "1" }];
+    return value23 === null ? [scatter] : [scatter, { text: "Correlation of neighbors", formula: "r_1 = \\frac{\\sum e_i e_{i+1}}{\\sum e_i^2}", filled: `r_1 = ${texNumber(value23)}`, value: value23, unit: "1" }];
   },
   slips: [
     signSlip("The sign is turned round: neighbors that lie on one side of the line correlate positively."),
     fineSlip("of-temperature", "correlation of T in place of the residuals", "This is the lag-1 correlation of the temperatures: take the line off first.", (inputs2) => {
-      const T10 = temperaturesOf(inputs2), { meanY, sumYY } = lineOf(inputs2);
+      const T11 = temperaturesOf(inputs2), { meanY, sumYY } = lineOf(inputs2);
       let products = 0;
-      for (let at = 1; at < T10.length; at++) products += ((T10[at] ?? 0) - meanY) * ((T10[at - 1] ?? 0) - meanY);
+      for (let at = 1; at < T11.length; at++) products += ((T11[at] ?? 0) - meanY) * ((T11[at - 1] ?? 0) - meanY);
       return sumYY > 0 ? products / sumYY : null;
     }),
     fineSlip("mean-of-products", "sums divided by their counts", "This divides the sum of n − 1 products by n − 1 and the sum of n squares by n: the ask divides the sums.", (inputs2, _c, right) => right * heightsOf(inputs2).length / (heightsOf(inputs2).length - 1))
@@ -8822,11 +9014,11 @@ var lapseRateLeastSquaresDefinition = {
   ask: "The lapse rate Γ = −dT/dz by ordinary least squares of temperature on height over all your rows, positive where temperature falls with height.",
   trace(inputs2) {
     const line = lineOf(inputs2);
-    const value19 = -line.slope;
+    const value23 = -line.slope;
     return [
       { text: `Means of the ${line.count} rows`, formula: "\\bar z,\\ \\bar T", filled: `\\bar z = ${texQuantity(line.meanX, "m", 6)},\\quad \\bar T = ${texQuantity(line.meanY - zeroCelsius, "Cel")}` },
       { text: "Sums about the means", formula: "\\sum (z - \\bar z)^2,\\ \\sum (z - \\bar z)(T - \\bar T)", filled: `\\sum (z - \\bar z)^2 = ${texNumber(line.sumXX)}\\,\\mathrm{m^2},\\quad \\sum (z - \\bar z)(T - \\bar T) = ${texNumber(line.sumXY)}\\,\\mathrm{K\\,m}` },
-      { text: "Lapse rate", formula: "\\Gamma = -\\frac{\\sum (z - \\bar z)(T - \\bar T)}{\\sum (z - \\bar z)^2}", filled: `\\Gamma = -\\frac{${texNumber(line.sumXY)}}{${texNumber(line.sumXX)}}\\,\\mathrm{K\\,m^{-1}} = ${texQuantity(value19 * 1e3, "K/km")}`, value: value19, unit: "K/m" }
+      { text: "Lapse rate", formula: "\\Gamma = -\\frac{\\sum (z - \\bar z)(T - \\bar T)}{\\sum (z - \\bar z)^2}", filled: `\\Gamma = -\\frac{${texNumber(line.sumXY)}}{${texNumber(line.sumXX)}}\\,\\mathrm{K\\,m^{-1}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
     ];
   },
   slips: [
@@ -8869,11 +9061,11 @@ var lapseRateStandardErrorDefinition = {
   ask: "The standard error of the lapse rate by ordinary least squares of temperature on height over all your rows, with n − 2 degrees of freedom.",
   trace(inputs2) {
     const line = lineOf(inputs2);
-    const value19 = standardError(inputs2);
+    const value23 = standardError(inputs2);
     const deviation = line.residualDeviation ?? 0;
     return [
       { text: "Scatter of the rows about the line", formula: "s = \\sqrt{\\frac{\\sum (T - \\hat T)^2}{n - 2}}", filled: `s = \\sqrt{\\frac{${texNumber(deviation * deviation * (line.count - 2))}}{${line.count} - 2}} = ${texQuantity(deviation, "K")}`, value: deviation, unit: "K" },
-      { text: "Standard error of the slope", formula: "s_\\Gamma = \\frac{s}{\\sqrt{\\sum (z - \\bar z)^2}}", filled: `s_\\Gamma = \\frac{${texNumber(deviation)}}{\\sqrt{${texNumber(line.sumXX)}}}\\,\\mathrm{K\\,m^{-1}} = ${texQuantity(value19 * 1e3, "K/km")}`, value: value19, unit: "K/m" }
+      { text: "Standard error of the slope", formula: "s_\\Gamma = \\frac{s}{\\sqrt{\\sum (z - \\bar z)^2}}", filled: `s_\\Gamma = \\frac{${texNumber(deviation)}}{\\sqrt{${texNumber(line.sumXX)}}}\\,\\mathrm{K\\,m^{-1}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
     ];
   },
   slips: [
@@ -8922,16 +9114,16 @@ function atRank(values, count, rank) {
 // shared/thermo/theilSen.ts
 var mostRows = 3e3;
 function slopesOf(inputs2) {
-  const z3 = heightsOf(inputs2), T10 = temperaturesOf(inputs2);
-  const rows = z3.length;
+  const z4 = heightsOf(inputs2), T11 = temperaturesOf(inputs2);
+  const rows = z4.length;
   if (rows > mostRows) throw new SeriesError("height", `${rows} rows; at most ${mostRows} can be paired`);
   const values = new Float64Array(rows * (rows - 1) / 2);
   let count = 0;
   for (let i = 0; i < rows; i++) {
-    const zi = z3[i] ?? 0, Ti = T10[i] ?? 0;
+    const zi = z4[i] ?? 0, Ti = T11[i] ?? 0;
     for (let j = i + 1; j < rows; j++) {
-      const depth = (z3[j] ?? 0) - zi;
-      if (depth !== 0) values[count++] = (Ti - (T10[j] ?? 0)) / depth;
+      const depth = (z4[j] ?? 0) - zi;
+      if (depth !== 0) values[count++] = (Ti - (T11[j] ?? 0)) / depth;
     }
   }
   if (count === 0) throw new SeriesError("height", "all rows have the same height; a lapse rate needs a layer");
@@ -8973,19 +9165,19 @@ var lapseRateTheilSenDefinition = {
     validity: "any layer with two heights, 3 to 3000 rows",
     knownError: "none: the rows alone decide",
     evaluate(inputs2) {
-      const { rate: rate4, pairs, tiedPairs } = theilSenRate(inputs2);
+      const { rate: rate7, pairs, tiedPairs } = theilSenRate(inputs2);
       const notes = tiedPairs > 0 ? [`${tiedPairs} pairs of rows at one height are left out.`] : void 0;
-      return { is: "value", value: rate4, notes, more: { pairs } };
+      return { is: "value", value: rate7, notes, more: { pairs } };
     }
   }],
   constants: [],
   classLimits: dryClassLimits,
   ask: "The lapse rate Γ by the Theil–Sen estimator: the median of −ΔT/Δz over all pairs of your rows, pairs at one height left out, positive where temperature falls with height.",
   trace(inputs2) {
-    const { rate: rate4, pairs } = theilSenRate(inputs2);
+    const { rate: rate7, pairs } = theilSenRate(inputs2);
     return [
       { text: "Slopes between all pairs of rows at different heights", formula: "\\Gamma_{ij} = -\\frac{T_j - T_i}{z_j - z_i},\\quad i < j", filled: `N = ${pairs}` },
-      { text: "Their median", formula: "\\Gamma = \\mathrm{median}\\,\\Gamma_{ij}", filled: `\\Gamma = ${texQuantity(rate4 * 1e3, "K/km")}\\quad (N = ${texNumber(pairs, 7)})`, value: rate4, unit: "K/m" }
+      { text: "Their median", formula: "\\Gamma = \\mathrm{median}\\,\\Gamma_{ij}", filled: `\\Gamma = ${texQuantity(rate7 * 1e3, "K/km")}\\quad (N = ${texNumber(pairs, 7)})`, value: rate7, unit: "K/m" }
     ];
   },
   slips: [
@@ -9026,11 +9218,11 @@ var lapseRateTheilSenStandardErrorDefinition = {
   trace(inputs2) {
     const interval = theilSenInterval(inputs2);
     if (!interval) return [{ text: "The ranks lie beyond the slopes", formula: "\\frac{N - C}{2} < 1", filled: "\\frac{N - C}{2} < 1" }];
-    const value19 = errorOf2(interval);
+    const value23 = errorOf2(interval);
     return [
       { text: "Half-width in ranks", formula: "C = 1.96 \\sqrt{\\frac{n (n - 1)(2 n + 5)}{18}}", filled: `C = ${texNumber(interval.halfRanks)},\\quad N = ${interval.pairs}` },
       { text: "Bounds at 95 %", formula: "\\Gamma_L,\\ \\Gamma_U", filled: `\\Gamma_L = ${texQuantity(interval.low * 1e3, "K/km")},\\quad \\Gamma_U = ${texQuantity(interval.high * 1e3, "K/km")}` },
-      { text: "Standard error", formula: "s_\\Gamma = \\frac{\\Gamma_U - \\Gamma_L}{2 \\cdot 1.96}", filled: `s_\\Gamma = ${texQuantity(value19 * 1e3, "K/km")}`, value: value19, unit: "K/m" }
+      { text: "Standard error", formula: "s_\\Gamma = \\frac{\\Gamma_U - \\Gamma_L}{2 \\cdot 1.96}", filled: `s_\\Gamma = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
     ];
   },
   slips: [
@@ -9051,38 +9243,38 @@ var mixedLayerInputs = [
 ];
 var heights = (inputs2) => seriesOf(inputs2, "height");
 var thetas = (inputs2) => seriesOf(inputs2, "potentialTemperature");
-function firstAbove(z3, values, limit) {
-  for (let at = 1; at < z3.length; at++) {
+function firstAbove(z4, values, limit) {
+  for (let at = 1; at < z4.length; at++) {
     const above = values[at] ?? 0;
     if (!(above > limit)) continue;
-    const below = values[at - 1] ?? 0, low = z3[at - 1] ?? 0;
-    return above === Infinity ? z3[at] ?? 0 : low + Math.max(0, limit - below) / (above - below) * ((z3[at] ?? 0) - low);
+    const below = values[at - 1] ?? 0, low = z4[at - 1] ?? 0;
+    return above === Infinity ? z4[at] ?? 0 : low + Math.max(0, limit - below) / (above - below) * ((z4[at] ?? 0) - low);
   }
   return null;
 }
 var parcelMixedLayerDepth = (inputs2, excess = numberOf(inputs2, "excess")) => firstAbove(heights(inputs2), thetas(inputs2), (thetas(inputs2)[0] ?? 0) + excess);
 function bulkRichardsonProfile(inputs2, constants) {
-  const z3 = heights(inputs2), theta4 = thetas(inputs2), speed2 = seriesOf(inputs2, "windSpeed");
-  const ground = theta4[0] ?? 0, start5 = z3[0] ?? 0;
-  return z3.map((height2, at) => {
-    const buoyancy = constant(constants, "g") / ground * ((theta4[at] ?? 0) - ground) * (height2 - start5), square = (speed2[at] ?? 0) * (speed2[at] ?? 0);
+  const z4 = heights(inputs2), theta5 = thetas(inputs2), speed2 = seriesOf(inputs2, "windSpeed");
+  const ground = theta5[0] ?? 0, start5 = z4[0] ?? 0;
+  return z4.map((height2, at) => {
+    const buoyancy = constant(constants, "g") / ground * ((theta5[at] ?? 0) - ground) * (height2 - start5), square = (speed2[at] ?? 0) * (speed2[at] ?? 0);
     return buoyancy === 0 ? 0 : square > 0 ? buoyancy / square : buoyancy > 0 ? Infinity : -1e12;
   });
 }
 var richardsonMixedLayerDepth = (inputs2, constants) => firstAbove(heights(inputs2), bulkRichardsonProfile(inputs2, constants), numberOf(inputs2, "criticalRichardsonNumber"));
 function steepestStep(inputs2) {
-  const z3 = heights(inputs2), theta4 = thetas(inputs2);
+  const z4 = heights(inputs2), theta5 = thetas(inputs2);
   let best = { height: 0, gradient: -Infinity };
-  for (let at = 1; at < z3.length; at++) {
-    const low = z3[at - 1] ?? 0, high2 = z3[at] ?? 0;
-    const gradient2 = ((theta4[at] ?? 0) - (theta4[at - 1] ?? 0)) / (high2 - low);
+  for (let at = 1; at < z4.length; at++) {
+    const low = z4[at - 1] ?? 0, high2 = z4[at] ?? 0;
+    const gradient2 = ((theta5[at] ?? 0) - (theta5[at - 1] ?? 0)) / (high2 - low);
     if (gradient2 > best.gradient) best = { height: (low + high2) / 2, gradient: gradient2 };
   }
   return best;
 }
 var groundTheta = (inputs2) => thetas(inputs2)[0] ?? 0;
 function firstRowAbove(inputs2, values, limit) {
-  const at = values.findIndex((value19, row) => row > 0 && value19 > limit);
+  const at = values.findIndex((value23, row) => row > 0 && value23 > limit);
   return at < 0 ? null : heights(inputs2)[at] ?? null;
 }
 
@@ -9107,17 +9299,17 @@ var mixedLayerDepthBulkRichardsonDefinition = {
     validity: "convective and stable layers, heights above ground",
     knownError: "the critical number is taught as 0.2 to 0.5",
     evaluate(inputs2, constants) {
-      const value19 = richardsonMixedLayerDepth(inputs2, constants);
-      return value19 === null ? { is: "not_reached", why: "The bulk Richardson number stays below the critical one up to the top of the data." } : { is: "value", value: value19 };
+      const value23 = richardsonMixedLayerDepth(inputs2, constants);
+      return value23 === null ? { is: "not_reached", why: "The bulk Richardson number stays below the critical one up to the top of the data." } : { is: "value", value: value23 };
     }
   }],
   constants: ["g"],
   ask: 'The mixed-layer depth above ground by the bulk Richardson number Ri(z) = (g/θ_s)(θ(z) − θ_s)(z − z_s)/V(z)² from the lowest row, wind at the ground taken as calm: the lowest height at which Ri exceeds the critical number, linear between rows; "not reached" where the data end below it.',
   trace(inputs2, constants) {
-    const value19 = richardsonMixedLayerDepth(inputs2, constants), profile = bulkRichardsonProfile(inputs2, constants);
+    const value23 = richardsonMixedLayerDepth(inputs2, constants), profile = bulkRichardsonProfile(inputs2, constants);
     const first3 = { text: "Bulk Richardson number of each row", formula: "Ri(z) = \\frac{g}{\\theta_s} \\frac{(\\theta - \\theta_s)(z - z_s)}{V^2}", filled: `Ri_c = ${texNumber(numberOf(inputs2, "criticalRichardsonNumber"))},\\quad Ri \\text{ of } ${profile.length} \\text{ rows}` };
-    if (value19 === null) return [first3];
-    return [first3, { text: "The lowest height at which it exceeds the critical one, linear between rows", formula: "Ri(h) = Ri_c", filled: `h = ${texQuantity(value19, "m")}`, value: value19, unit: "m" }];
+    if (value23 === null) return [first3];
+    return [first3, { text: "The lowest height at which it exceeds the critical one, linear between rows", formula: "Ri(h) = Ri_c", filled: `h = ${texQuantity(value23, "m")}`, value: value23, unit: "m" }];
   },
   slips: [
     fineSlip("row-above", "row above in place of interpolation", "This is the first row above: the ask interpolates between rows.", (inputs2, constants) => firstRowAbove(inputs2, bulkRichardsonProfile(inputs2, constants), numberOf(inputs2, "criticalRichardsonNumber"))),
@@ -9159,9 +9351,9 @@ var mixedLayerDepthGradientDefinition = {
   slips: [
     fineSlip("parcel-method", "parcel method in place of it", "This is the depth by the parcel method without excess.", (inputs2) => parcelMixedLayerDepth(inputs2, 0)),
     fineSlip("highest-theta", "height of the highest θ", "This is where θ is highest: the ask looks for where it rises fastest.", (inputs2) => {
-      const theta4 = inputs2.potentialTemperature, z3 = inputs2.height;
-      if (!Array.isArray(theta4) || !Array.isArray(z3)) return null;
-      return z3[theta4.indexOf(Math.max(...theta4))] ?? null;
+      const theta5 = inputs2.potentialTemperature, z4 = inputs2.height;
+      if (!Array.isArray(theta5) || !Array.isArray(z4)) return null;
+      return z4[theta5.indexOf(Math.max(...theta5))] ?? null;
     })
   ],
   example: { inputs: { height: [2, 100, 500, 800, 1e3], potentialTemperature: [300, 299.8, 299.8, 300.2, 303], leastGradient: 5e-3 }, gives: 900, within: 1e-9 }
@@ -9184,17 +9376,17 @@ var mixedLayerDepthParcelDefinition = {
     validity: "a convective day, heights above ground",
     knownError: "the spacing of the rows and the reading of the lowest one",
     evaluate(inputs2) {
-      const value19 = parcelMixedLayerDepth(inputs2);
-      return value19 === null ? { is: "not_reached", why: "θ stays below that of the lowest row and the excess up to the top of the data." } : { is: "value", value: value19 };
+      const value23 = parcelMixedLayerDepth(inputs2);
+      return value23 === null ? { is: "not_reached", why: "θ stays below that of the lowest row and the excess up to the top of the data." } : { is: "value", value: value23 };
     }
   }],
   constants: [],
   ask: 'The mixed-layer depth above ground by the parcel method: the lowest height at which θ exceeds θ of the lowest row plus the excess, linear between rows; "not reached" where the data end below it.',
   trace(inputs2) {
-    const limit = groundTheta(inputs2) + numberOf(inputs2, "excess"), value19 = parcelMixedLayerDepth(inputs2);
+    const limit = groundTheta(inputs2) + numberOf(inputs2, "excess"), value23 = parcelMixedLayerDepth(inputs2);
     const first3 = { text: "θ of the parcel", formula: "\\theta_p = \\theta_s + \\delta\\theta", filled: `\\theta_p = ${texNumber(groundTheta(inputs2), 6)} + ${texNumber(numberOf(inputs2, "excess"))}\\,\\mathrm{K} = ${texQuantity(limit, "K", 6)}`, value: limit, unit: "K" };
-    if (value19 === null) return [first3];
-    return [first3, { text: "The lowest height with this θ, linear between rows", formula: "\\theta(h) = \\theta_p", filled: `h = ${texQuantity(value19, "m")}`, value: value19, unit: "m" }];
+    if (value23 === null) return [first3];
+    return [first3, { text: "The lowest height with this θ, linear between rows", formula: "\\theta(h) = \\theta_p", filled: `h = ${texQuantity(value23, "m")}`, value: value23, unit: "m" }];
   },
   slips: [
     fineSlip("excess-left-out", "excess left out", "The excess is left out.", (inputs2) => parcelMixedLayerDepth(inputs2, 0)),
@@ -9229,10 +9421,10 @@ var potentialTemperatureGradientDefinition = {
   classLimits: () => [{ label: "neutral", value: 0 }],
   ask: "The gradient of potential temperature dθ/dz = (θ/T)(Γd − Γ), positive where θ rises with height.",
   trace(inputs2, constants) {
-    const value19 = gradient(inputs2, constants), dry = dryRateOf(constants);
+    const value23 = gradient(inputs2, constants), dry = dryRateOf(constants);
     return [
       { text: "Dry adiabatic lapse rate", formula: "\\Gamma_d = \\frac{g}{c_p}", filled: `\\Gamma_d = ${texQuantity(dry * 1e3, "K/km")}`, value: dry, unit: "K/m" },
-      { text: "Gradient", formula: "\\frac{d\\theta}{dz} = \\frac{\\theta}{T} (\\Gamma_d - \\Gamma)", filled: `\\frac{d\\theta}{dz} = \\frac{${texNumber(numberOf(inputs2, "potentialTemperature"), 6)}}{${texNumber(numberOf(inputs2, "temperature"), 6)}} \\times (${texNumber(dry * 1e3)} - ${texFactor(numberOf(inputs2, "lapseRate") * 1e3)})\\,\\mathrm{K\\,km^{-1}} = ${texQuantity(value19 * 1e3, "K/km")}`, value: value19, unit: "K/m" }
+      { text: "Gradient", formula: "\\frac{d\\theta}{dz} = \\frac{\\theta}{T} (\\Gamma_d - \\Gamma)", filled: `\\frac{d\\theta}{dz} = \\frac{${texNumber(numberOf(inputs2, "potentialTemperature"), 6)}}{${texNumber(numberOf(inputs2, "temperature"), 6)}} \\times (${texNumber(dry * 1e3)} - ${texFactor(numberOf(inputs2, "lapseRate") * 1e3)})\\,\\mathrm{K\\,km^{-1}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
     ];
   },
   slips: [
@@ -9321,18 +9513,18 @@ var vectorWindDifferenceDefinition = {
   constants: [],
   ask: "The size |ΔV| of the difference of the two wind vectors.",
   trace(inputs2) {
-    const { du, dv } = windDifference(inputs2), value19 = size(inputs2);
+    const { du, dv } = windDifference(inputs2), value23 = size(inputs2);
     return [
       { text: "Differences of the components, u = −s sin d, v = −s cos d", formula: "\\Delta u,\\ \\Delta v", filled: `\\Delta u = ${texQuantity(du, "m/s")},\\quad \\Delta v = ${texQuantity(dv, "m/s")}` },
-      { text: "Size of the difference", formula: "|\\Delta V| = \\sqrt{\\Delta u^2 + \\Delta v^2}", filled: `|\\Delta V| = \\sqrt{${texFactor(du)}^2 + ${texFactor(dv)}^2}\\,\\mathrm{m\\,s^{-1}} = ${texQuantity(value19, "m/s")}`, value: value19, unit: "m/s" }
+      { text: "Size of the difference", formula: "|\\Delta V| = \\sqrt{\\Delta u^2 + \\Delta v^2}", filled: `|\\Delta V| = \\sqrt{${texFactor(du)}^2 + ${texFactor(dv)}^2}\\,\\mathrm{m\\,s^{-1}} = ${texQuantity(value23, "m/s")}`, value: value23, unit: "m/s" }
     ];
   },
   slips: [
     slip("speeds-subtracted", "difference of speeds for that of vectors", "This is the difference of the speeds: a turning wind differs too.", (inputs2) => Math.abs(numberOf(inputs2, "windSpeedTop") - numberOf(inputs2, "windSpeedBottom"))),
     slip("vectors-added", "sum in place of the difference", "This adds the vectors in place of subtracting them.", (inputs2) => {
       const s1 = numberOf(inputs2, "windSpeedBottom"), s2 = numberOf(inputs2, "windSpeedTop");
-      const difference2 = size(inputs2);
-      return Math.sqrt(Math.max(0, 2 * (s1 * s1 + s2 * s2) - difference2 * difference2));
+      const difference3 = size(inputs2);
+      return Math.sqrt(Math.max(0, 2 * (s1 * s1 + s2 * s2) - difference3 * difference3));
     }),
     slip("root-left-out", "root left out", "This is the square of the difference: take its root.", (_i, _c, right) => right * right),
     slip("components-added", "sizes of components added", "This adds the sizes of both components: add their squares and take the root.", (inputs2) => {
@@ -9394,7 +9586,7 @@ var layerStabilityDefinition = {
   uses: ["saturation-vapor-pressure", "latent-heat-of-vaporization"],
   classLimits(inputs2, constants, formulae) {
     const saturated = layerSaturatedRate(inputs2, constants, formulae), dry = dryRateOf(constants), tolerance = constant(constants, "neutralTolerance");
-    const about = (label, value19) => [{ label: `${label} less the tolerance of a neutral layer`, value: value19 - tolerance }, { label: `${label} with the tolerance of a neutral layer`, value: value19 + tolerance }];
+    const about = (label, value23) => [{ label: `${label} less the tolerance of a neutral layer`, value: value23 - tolerance }, { label: `${label} with the tolerance of a neutral layer`, value: value23 + tolerance }];
     return [...about("Γm", saturated), ...isSaturated(inputs2) ? [] : about("Γd", dry)];
   },
   classes: [
@@ -9453,10 +9645,10 @@ var equivalentPotentialTemperatureGradientDefinition = {
   classLimits: () => [{ label: "potentially neutral", value: 0 }],
   ask: "The gradient of the equivalent potential temperature ∂θe/∂z = (θe₂ − θe₁)/Δz of the layer, with its sign: negative where the layer is potentially (convectively) unstable.",
   trace(inputs2, constants, _variant, formulae) {
-    const ends = equivalentAtEnds(inputs2, constants, formulae), value19 = equivalentGradient(ends);
+    const ends = equivalentAtEnds(inputs2, constants, formulae), value23 = equivalentGradient(ends);
     return [
       { text: "θe at both ends", formula: "\\theta_{e1},\\ \\theta_{e2}", filled: `\\theta_{e1} = ${texQuantity(ends.bottom, "K", 6)},\\quad \\theta_{e2} = ${texQuantity(ends.top, "K", 6)}` },
-      { text: "Gradient", formula: "\\frac{\\partial\\theta_e}{\\partial z} = \\frac{\\theta_{e2} - \\theta_{e1}}{\\Delta z}", filled: `\\frac{\\partial\\theta_e}{\\partial z} = \\frac{${texFactor(ends.top - ends.bottom)}\\,\\mathrm{K}}{${texNumber(ends.depth / 1e3)}\\,\\mathrm{km}} = ${texQuantity(value19 * 1e3, "K/km")}`, value: value19, unit: "K/m" }
+      { text: "Gradient", formula: "\\frac{\\partial\\theta_e}{\\partial z} = \\frac{\\theta_{e2} - \\theta_{e1}}{\\Delta z}", filled: `\\frac{\\partial\\theta_e}{\\partial z} = \\frac{${texFactor(ends.top - ends.bottom)}\\,\\mathrm{K}}{${texNumber(ends.depth / 1e3)}\\,\\mathrm{km}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
     ];
   },
   slips: [
@@ -9502,15 +9694,586 @@ var potentialStabilityDefinition = {
   ],
   ask: "The potential (convective) stability of the layer by the sign of ∂θe/∂z: potentially unstable below 0, potentially neutral within 0.1 K/km of 0, potentially stable above.",
   trace(inputs2, constants, _variant, formulae) {
-    const ends = equivalentAtEnds(inputs2, constants, formulae), value19 = equivalentGradient(ends);
+    const ends = equivalentAtEnds(inputs2, constants, formulae), value23 = equivalentGradient(ends);
     return [
       { text: "θe at both ends", formula: "\\theta_{e1},\\ \\theta_{e2}", filled: `\\theta_{e1} = ${texQuantity(ends.bottom, "K", 6)},\\quad \\theta_{e2} = ${texQuantity(ends.top, "K", 6)}` },
-      { text: `The layer is ${classOf2(inputs2, constants, formulae).replace("-", " ")}`, formula: "\\frac{\\partial\\theta_e}{\\partial z} \\lessgtr 0", filled: `\\frac{\\partial\\theta_e}{\\partial z} = ${texQuantity(value19 * 1e3, "K/km")}`, value: value19, unit: "K/m" }
+      { text: `The layer is ${classOf2(inputs2, constants, formulae).replace("-", " ")}`, formula: "\\frac{\\partial\\theta_e}{\\partial z} \\lessgtr 0", filled: `\\frac{\\partial\\theta_e}{\\partial z} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
     ];
   },
   slips: [],
   example: { inputs: { pressureBottom: 95e3, temperatureBottom: 298.15, dewpointBottom: 293.15, pressureTop: 85e3, temperatureTop: 291.15, dewpointTop: 281.15, depth: 970 }, gives: "potentially-unstable", within: 0 }
 };
+
+// shared/thermo/lagOneDefinition.ts
+function lagOneDefinition({ line, source: source2, rate: rate7, ...named2 }) {
+  const correlation = (inputs2) => lagOneCorrelationAbout(inputs2, rate7(inputs2));
+  return {
+    ...named2,
+    symbol: "r₁",
+    unit: "1",
+    shownUnit: "1",
+    kind: "difference",
+    nearZero: 0.1,
+    inputs: layerInputs2(4),
+    variants: [{
+      key: "residuals",
+      label: `residuals about ${line}, less their mean, in the order of the rows`,
+      source: source2,
+      validity: "rows at even steps of time or height",
+      knownError: "biased low by about 4/n for short series",
+      evaluate(inputs2) {
+        const value23 = correlation(inputs2);
+        return value23 === null ? { is: "not_defined", why: "The rows lie on the line: there are no residuals to correlate." } : { is: "value", value: value23 };
+      }
+    }],
+    constants: [],
+    ask: `The lag-1 correlation r₁ = Σ (eᵢ − ē)(eᵢ₊₁ − ē) / Σ (eᵢ − ē)² of the residuals e of temperature about ${line}, less their mean, in the order of your rows. "Not defined" where the rows lie on the line.`,
+    trace(inputs2) {
+      const value23 = correlation(inputs2);
+      const residuals = { text: "Residuals about the line; where the line stands falls out with their mean", formula: "e_i = T_i + \\Gamma z_i", filled: `\\Gamma = ${texQuantity(rate7(inputs2) * 1e3, "K/km")},\\quad n = ${heightsOf(inputs2).length}` };
+      return value23 === null ? [residuals] : [residuals, { text: "Correlation of neighbors", formula: "r_1 = \\frac{\\sum (e_i - \\bar e)(e_{i+1} - \\bar e)}{\\sum (e_i - \\bar e)^2}", filled: `r_1 = ${texNumber(value23)}`, value: value23, unit: "1" }];
+    },
+    slips: [
+      signSlip("The sign is turned round: neighbors that lie on one side of the line correlate positively."),
+      fineSlip("least-squares", "residuals about the line of least squares", `These are the residuals about the line of least squares: the ask takes ${line}.`, (inputs2) => lagOneCorrelationAbout(inputs2, -lineOf(inputs2).slope)),
+      fineSlip("of-temperature", "correlation of T in place of the residuals", "This is the lag-1 correlation of the temperatures: take the line off first.", (inputs2) => lagOneCorrelationAbout({ height: heightsOf(inputs2), temperature: temperaturesOf(inputs2) }, 0)),
+      fineSlip("mean-of-products", "sums divided by their counts", "This divides the sum of n − 1 products by n − 1 and the sum of n squares by n: the ask divides the sums.", (inputs2, _c, right) => right * heightsOf(inputs2).length / (heightsOf(inputs2).length - 1))
+    ]
+  };
+}
+
+// shared/thermo/quantities/lapseRateEndPointsLagOneCorrelation.ts
+var lapseRateEndPointsLagOneCorrelationDefinition = lagOneDefinition({
+  key: "lapse-rate-end-points-lag-one-correlation",
+  name: "lag-1 correlation of the residuals of a lapse rate by end points",
+  line: "the straight line between the lowest and the highest row",
+  source: { text: "Wilks (2011), Statistical Methods in the Atmospheric Sciences, 3rd ed., Eq. 3.32", status: "from memory" },
+  rate: (inputs2) => endPointRate(endsOf(inputs2)),
+  example: { inputs: { height: [0, 10, 20, 30, 40, 50, 60, 70], temperature: [290, 290.1, 290.2, 289.9, 289.4, 289.1, 289.1, 289.3] }, gives: 0.602541, within: 1e-6 }
+});
+
+// shared/thermo/quantities/lapseRateEndPointsInflatedStandardError.ts
+var lapseRateEndPointsInflatedStandardErrorDefinition = {
+  key: "lapse-rate-end-points-inflated-standard-error",
+  name: "standard error of the lapse rate by end points, inflated for correlated residuals",
+  symbol: "s′(Γ)",
+  unit: "K/m",
+  shownUnit: "K/km",
+  kind: "ratio",
+  nearZero: 1e-5,
+  inputs: [
+    ...layerInputs2(4),
+    { name: "readingDeviation", label: "standard deviation of one temperature reading", symbol: "s_T", unit: "K", shownUnit: "K", kind: "difference", shape: "number", range: [0, 10] }
+  ],
+  variants: [{
+    key: "effective-rows",
+    label: "effective number of rows at each end",
+    source: { text: "JCGM 100:2008, Eq. 10; Wilks (2011), Statistical Methods in the Atmospheric Sciences, 3rd ed., section 5.2.4", status: "from memory" },
+    validity: "residuals that follow a first-order autoregression; heights without error",
+    knownError: "r₁ of short series is biased low, and so is this",
+    evaluate(inputs2) {
+      const correlation = correlationOf(inputs2);
+      if (correlation === null) return { is: "value", value: errorOf3(inputs2, 0), notes: ["The rows lie on the line; nothing is inflated."] };
+      const { lowCount, highCount } = endsOf(inputs2);
+      const notes = lowCount === 1 && highCount === 1 ? ["Each end is a single reading: correlation takes nothing from it."] : void 0;
+      return { is: "value", value: errorOf3(inputs2, correlation), notes, more: { correlation } };
+    }
+  }],
+  constants: [],
+  ask: "The standard error of the lapse rate between the lowest and the highest of your rows, where each temperature has the given standard deviation and heights have none; the n rows at an end’s height count as n (1 − r₁)/(1 + r₁), one at least, with the lag-1 correlation r₁ of the residuals about the line between the ends, less their mean, in the order of your rows; as n where r₁ is negative.",
+  trace(inputs2) {
+    const { lowCount, highCount } = endsOf(inputs2), s2 = numberOf(inputs2, "readingDeviation"), correlation = correlationOf(inputs2) ?? 0, value23 = errorOf3(inputs2, correlation);
+    const low = effectiveRows(lowCount, correlation), high2 = effectiveRows(highCount, correlation), depth = depthOf2(inputs2);
+    return [
+      { text: "Lag-1 correlation of the residuals", formula: "r_1 = \\frac{\\sum (e_i - \\bar e)(e_{i+1} - \\bar e)}{\\sum (e_i - \\bar e)^2}", filled: `r_1 = ${texNumber(correlation)}`, value: correlation, unit: "1" },
+      { text: "Effective rows at the ends", formula: "n' = n \\frac{1 - r_1}{1 + r_1}", filled: `n'_1 = ${texNumber(low)},\\quad n'_2 = ${texNumber(high2)}` },
+      { text: "Error of the lapse rate", formula: "s'_\\Gamma = \\frac{s_T}{z_2 - z_1} \\sqrt{\\frac{1}{n'_1} + \\frac{1}{n'_2}}", filled: `s'_\\Gamma = \\frac{${texQuantity(s2, "K")}}{${texQuantity(depth / 1e3, "km", 6)}} \\sqrt{\\frac{1}{${texNumber(low)}} + \\frac{1}{${texNumber(high2)}}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
+    ];
+  },
+  slips: [
+    perMeterSlip,
+    per100MetersSlip,
+    fineSlip("not-inflated", "not inflated", "This is the standard error for independent rows: neighbors here have something in common.", (inputs2, _c, right) => {
+      const plain = errorOf3(inputs2, 0);
+      return plain === right ? null : plain;
+    }),
+    fineSlip("factor-of-all-rows", "factor of a fit put on the ends", "This multiplies by √[(1 + r₁)/(1 − r₁)], as for a fit through all rows: only the means at the ends lose by correlation.", (inputs2) => {
+      const correlation = correlationOf(inputs2) ?? 0;
+      return correlation <= 0 || correlation >= 1 ? null : errorOf3(inputs2, 0) * Math.sqrt((1 + correlation) / (1 - correlation));
+    }),
+    slip("errors-added", "errors added in place of their squares", "This adds the errors of both readings: independent errors add by their squares.", (inputs2) => 2 * numberOf(inputs2, "readingDeviation") / depthOf2(inputs2))
+  ],
+  example: {
+    inputs: { height: [10, 10, 10, 10, 60, 110, 160, 210, 210, 210, 210], temperature: [290, 290.1, 290.2, 290.1, 289.9, 289.3, 288.6, 288.2, 288.1, 288, 288.1], readingDeviation: 0.1 },
+    gives: 43673e-8,
+    within: 1e-8
+  }
+};
+var correlationOf = (inputs2) => lagOneCorrelationAbout(inputs2, endPointRate(endsOf(inputs2)));
+function depthOf2(inputs2) {
+  const { lowHeight, highHeight } = endsOf(inputs2);
+  return highHeight - lowHeight;
+}
+function errorOf3(inputs2, correlation) {
+  const { lowCount, highCount } = endsOf(inputs2);
+  return numberOf(inputs2, "readingDeviation") * Math.sqrt(1 / effectiveRows(lowCount, correlation) + 1 / effectiveRows(highCount, correlation)) / depthOf2(inputs2);
+}
+
+// shared/thermo/quantities/lapseRateTheilSenLagOneCorrelation.ts
+var lapseRateTheilSenLagOneCorrelationDefinition = lagOneDefinition({
+  key: "lapse-rate-theil-sen-lag-one-correlation",
+  name: "lag-1 correlation of the residuals of a lapse rate by the Theil–Sen estimator",
+  line: "the line with the Theil–Sen lapse rate",
+  source: { text: "Wilks (2011), Statistical Methods in the Atmospheric Sciences, 3rd ed., Eq. 3.32; Sen (1968), J. Amer. Statist. Assoc. 63, 1379–1389", status: "from memory" },
+  rate: (inputs2) => theilSenRate(inputs2).rate,
+  example: { inputs: { height: [0, 10, 20, 30, 40, 50, 60, 70], temperature: [290, 290.1, 290.2, 289.9, 289.4, 289.1, 289.1, 289.3] }, gives: 0.323305, within: 1e-6 }
+});
+
+// shared/thermo/quantities/lapseRateTheilSenInflatedStandardError.ts
+var lapseRateTheilSenInflatedStandardErrorDefinition = {
+  key: "lapse-rate-theil-sen-inflated-standard-error",
+  name: "standard error of the lapse rate by the Theil–Sen estimator, inflated for correlated residuals",
+  symbol: "s′(Γ)",
+  unit: "K/m",
+  shownUnit: "K/km",
+  kind: "ratio",
+  nearZero: 1e-5,
+  inputs: layerInputs2(4),
+  variants: [{
+    key: "first-order",
+    label: "effective number of rows of a first-order autoregression",
+    source: { text: "Sen (1968), J. Amer. Statist. Assoc. 63, section 5; Wilks (2011), Statistical Methods in the Atmospheric Sciences, 3rd ed., section 5.2.4", status: "from memory" },
+    validity: "six or more rows at even steps whose residuals follow a first-order autoregression",
+    knownError: "r₁ of short series is biased low, and so is this",
+    evaluate(inputs2) {
+      const error2 = plainError(inputs2);
+      if (error2 === null) return { is: "not_defined", why: "The rows are too few for an interval by ranks at 95 %." };
+      const correlation = correlationOf2(inputs2);
+      if (correlation === null) return { is: "value", value: error2, notes: ["The rows lie on their line; nothing is inflated."] };
+      const factor = inflation(correlation);
+      if (factor === null) return { is: "not_defined", why: "The residuals correlate fully: no error follows." };
+      return { is: "value", value: error2 * factor, more: { correlation, factor } };
+    }
+  }],
+  constants: [],
+  ask: "The standard error of the Theil–Sen lapse rate of your rows (the width of its 95 % interval by ranks over 2 · 1.96), times √[(1 + r₁)/(1 − r₁)] with the lag-1 correlation r₁ of the residuals about the line with the Theil–Sen rate, less their mean, in the order of your rows; the factor is 1 where r₁ is negative.",
+  trace(inputs2) {
+    const error2 = plainError(inputs2);
+    if (error2 === null) return [{ text: "The ranks lie beyond the slopes", formula: "\\frac{N - C}{2} < 1", filled: "\\frac{N - C}{2} < 1" }];
+    const correlation = correlationOf2(inputs2) ?? 0, factor = inflation(correlation) ?? 1, value23 = error2 * factor;
+    return [
+      { text: "Standard error for independent rows, from the ranks", formula: "s_\\Gamma = \\frac{\\Gamma_U - \\Gamma_L}{2 \\cdot 1.96}", filled: `s_\\Gamma = ${texQuantity(error2 * 1e3, "K/km")}`, value: error2, unit: "K/m" },
+      { text: "Lag-1 correlation of the residuals", formula: "r_1 = \\frac{\\sum (e_i - \\bar e)(e_{i+1} - \\bar e)}{\\sum (e_i - \\bar e)^2}", filled: `r_1 = ${texNumber(correlation)}`, value: correlation, unit: "1" },
+      { text: "Inflated", formula: "s'_\\Gamma = s_\\Gamma \\sqrt{\\frac{1 + r_1}{1 - r_1}}", filled: `s'_\\Gamma = ${texNumber(error2 * 1e3)} \\times ${texNumber(factor)}\\,\\mathrm{K\\,km^{-1}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
+    ];
+  },
+  slips: [
+    perMeterSlip,
+    per100MetersSlip,
+    fineSlip("not-inflated", "not inflated", "This is the standard error for independent rows: neighbors here have much in common.", (inputs2) => plainError(inputs2)),
+    fineSlip("root-left-out", "root left out", "This multiplies by (1 + r₁)/(1 − r₁) without its root.", (inputs2, _c, right) => right * (factorOf2(inputs2) ?? 1)),
+    fineSlip("inverted-factor", "factor turned over", "This divides by the factor: correlated rows tell less, and the error grows.", (inputs2) => {
+      const error2 = plainError(inputs2), factor = factorOf2(inputs2);
+      return error2 === null || factor === null ? null : error2 / factor;
+    })
+  ],
+  example: { inputs: { height: [0, 10, 20, 30, 40, 50, 60, 70], temperature: [290, 290.1, 290.2, 289.9, 289.4, 289.1, 289.1, 289.3] }, gives: 0.0105381, within: 1e-7 }
+};
+function plainError(inputs2) {
+  const interval = theilSenInterval(inputs2);
+  return interval && (interval.high - interval.low) / (2 * normalPoint);
+}
+var correlationOf2 = (inputs2) => lagOneCorrelationAbout(inputs2, theilSenRate(inputs2).rate);
+function factorOf2(inputs2) {
+  const correlation = correlationOf2(inputs2);
+  return correlation === null ? null : inflation(correlation);
+}
+
+// shared/thermo/bins.ts
+var binInputs = [
+  ...layerInputs2(3),
+  { name: "binDepth", label: "depth of a bin", symbol: "d", unit: "m", shownUnit: "m", kind: "difference", shape: "number", range: [0.5, 5e3] },
+  { name: "binStart", label: "a height at which a bin begins", symbol: "z₀", unit: "m", shownUnit: "m", kind: "difference", shape: "number", range: [-500, 1e5] }
+];
+var boundSlack = 1e-9;
+function binnedRows(inputs2) {
+  const z4 = heightsOf(inputs2), T11 = temperaturesOf(inputs2), depth = numberOf(inputs2, "binDepth"), start5 = numberOf(inputs2, "binStart");
+  const rowsOf = /* @__PURE__ */ new Map();
+  z4.forEach((height2, at) => {
+    const bin = Math.floor((height2 - start5) / depth + boundSlack);
+    const rows = rowsOf.get(bin);
+    if (rows) rows.push(at);
+    else rowsOf.set(bin, [at]);
+  });
+  const bins = [...rowsOf].sort(([a], [b]) => a - b);
+  if (bins.length < 2) throw new SeriesError("height", "all rows lie in one bin; a lapse rate needs two");
+  const meanOf = (column, rows) => rows.reduce((sum, at) => sum + (column[at] ?? 0), 0) / rows.length;
+  const center = (bin) => start5 + (bin + 0.5) * depth;
+  const filled = new Set(rowsOf.keys()), [lowest = 0] = bins[0] ?? [], [highest = 0] = bins[bins.length - 1] ?? [];
+  const emptyBetween = [];
+  if (highest - lowest < 1e4) {
+    for (let bin = lowest + 1; bin < highest; bin++) if (!filled.has(bin)) emptyBetween.push(center(bin));
+  }
+  return {
+    height: bins.map(([, rows]) => meanOf(z4, rows)),
+    temperature: bins.map(([, rows]) => meanOf(T11, rows)),
+    counts: bins.map(([, rows]) => rows.length),
+    centers: bins.map(([bin]) => center(bin)),
+    emptyBetween
+  };
+}
+
+// shared/thermo/quantities/lapseRateBinnedLeastSquares.ts
+var lapseRateBinnedLeastSquaresDefinition = {
+  key: "lapse-rate-binned-least-squares",
+  name: "lapse rate of a layer by least squares over bins of height",
+  symbol: "Γ",
+  unit: "K/m",
+  shownUnit: "K/km",
+  kind: "difference",
+  nearZero: 1e-3,
+  inputs: binInputs,
+  variants: [{
+    key: "bin-means",
+    label: "ordinary least squares over the means of the bins",
+    source: { text: "ordinary least squares; NIST StRD linear regression for the arithmetic", status: "common practice" },
+    validity: "any layer with two bins that have rows",
+    knownError: "none: the rows and the bins alone decide",
+    evaluate(inputs2) {
+      const { counts, emptyBetween } = binnedRows(inputs2), line = fit(inputs2);
+      const notes = emptyBetween.length > 0 ? [`${emptyBetween.length} ${emptyBetween.length === 1 ? "bin has" : "bins have"} no row and ${emptyBetween.length === 1 ? "is" : "are"} left out.`] : void 0;
+      return { is: "value", value: -line.slope, notes, more: { bins: counts.length, rows: counts.reduce((sum, one2) => sum + one2, 0), standardError: line.slopeError ?? 0 } };
+    }
+  }],
+  constants: [],
+  classLimits: dryClassLimits,
+  ask: "The lapse rate Γ = −dT/dz by ordinary least squares over bins of height, positive where temperature falls with height: each bin holds the rows from its lower bound up to, and without, its upper bound, and stands with the mean height and the mean temperature of its rows; bins count alike, and those without rows are left out.",
+  trace(inputs2) {
+    const { counts, height: height2, temperature: temperature6 } = binnedRows(inputs2), line = fit(inputs2), value23 = -line.slope, last = counts.length - 1;
+    return [
+      { text: `Means of the ${counts.length} bins, which hold ${counts.join(", ")} rows`, formula: "z_b = \\frac{1}{n_b} \\sum z,\\quad T_b = \\frac{1}{n_b} \\sum T", filled: `z_1 = ${texQuantity(height2[0] ?? 0, "m", 6)},\\ T_1 = ${texQuantity((temperature6[0] ?? 0) - zeroCelsius, "Cel")};\\quad z_{${last + 1}} = ${texQuantity(height2[last] ?? 0, "m", 6)},\\ T_{${last + 1}} = ${texQuantity((temperature6[last] ?? 0) - zeroCelsius, "Cel")}` },
+      { text: "Sums about the means of the bins", formula: "\\sum (z_b - \\bar z)^2,\\ \\sum (z_b - \\bar z)(T_b - \\bar T)", filled: `\\sum (z_b - \\bar z)^2 = ${texNumber(line.sumXX)}\\,\\mathrm{m^2},\\quad \\sum (z_b - \\bar z)(T_b - \\bar T) = ${texNumber(line.sumXY)}\\,\\mathrm{K\\,m}` },
+      { text: "Lapse rate", formula: "\\Gamma = -\\frac{\\sum (z_b - \\bar z)(T_b - \\bar T)}{\\sum (z_b - \\bar z)^2}", filled: `\\Gamma = -\\frac{${texNumber(line.sumXY)}}{${texNumber(line.sumXX)}}\\,\\mathrm{K\\,m^{-1}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
+    ];
+  },
+  slips: [
+    signSlip("A lapse rate is positive where temperature falls with height: it is the slope of T on z with its sign turned."),
+    perMeterSlip,
+    per100MetersSlip,
+    fineSlip("as-served", "rows fitted as served", "This is the fit through all rows as they are: the ask takes the means of the bins, each counted once.", (inputs2) => -lineOf(inputs2).slope),
+    fineSlip("bin-centers", "centers of the bins in place of mean heights", "This puts each bin at its center: it stands at the mean height of its rows.", (inputs2) => {
+      const { centers, temperature: temperature6 } = binnedRows(inputs2), line = straightLine(centers, temperature6);
+      return line && -line.slope;
+    }),
+    slip("empty-as-zero", "empty bins taken for 0 °C", "This takes bins without rows for rows of 0 °C: they are left out.", (inputs2) => {
+      const { height: height2, temperature: temperature6, emptyBetween } = binnedRows(inputs2);
+      if (emptyBetween.length === 0) return null;
+      const line = straightLine([...height2, ...emptyBetween], [...temperature6, ...emptyBetween.map(() => zeroCelsius)]);
+      return line && -line.slope;
+    }),
+    fineSlip("end-points", "end points in place of a fit", "This is the rate between the lowest and the highest row alone: the ask takes a fit through the bins.", (inputs2) => endPointRate(endsOf(inputs2)))
+  ],
+  example: {
+    inputs: { height: [100, 150, 150, 150, 200, 250, 300], temperature: [288.15, 287.75, 287.55, 287.55, 287.25, 286.85, 286.05], binDepth: 50, binStart: 75 },
+    gives: 993333e-8,
+    within: 1e-8
+  }
+};
+function fit(inputs2) {
+  const { height: height2, temperature: temperature6 } = binnedRows(inputs2), line = straightLine(height2, temperature6);
+  if (!line) throw new SeriesError("height", "the bins have no two heights; a lapse rate needs a layer");
+  return line;
+}
+
+// shared/thermo/virtualLayer.ts
+var virtualTemperatureKey = "virtual-temperature";
+function moistLayerInputs(least2) {
+  return [
+    ...layerInputs2(least2),
+    { name: "mixingRatio", label: "mixing ratios of the rows", symbol: "w", unit: "1", shownUnit: "g/kg", kind: "ratio", shape: "series", range: [0, 0.2], needs: { least: least2, order: "none" } }
+  ];
+}
+function virtualRows(inputs2, constants, formulae) {
+  const w2 = seriesOf(inputs2, "mixingRatio"), epsilon = epsilonOf(constants), isLinear = formulae.variants[virtualTemperatureKey] === "linear";
+  const temperature6 = temperaturesOf(inputs2).map((T11, at) => {
+    const ratio2 = w2[at] ?? 0;
+    return isLinear ? T11 * (1 + 0.61 * ratio2) : virtualTemperatureFrom(T11, ratio2, epsilon);
+  });
+  return { height: heightsOf(inputs2), temperature: temperature6 };
+}
+var plainRows = (inputs2) => ({ height: heightsOf(inputs2), temperature: temperaturesOf(inputs2) });
+function rowsVirtualInCelsius(inputs2, constants, formulae) {
+  const celsius3 = temperaturesOf(inputs2).map((T11) => T11 - zeroCelsius4);
+  const { temperature: temperature6 } = virtualRows({ ...inputs2, temperature: celsius3 }, constants, formulae);
+  return { height: heightsOf(inputs2), temperature: Array.isArray(temperature6) ? temperature6.map((T11) => T11 + zeroCelsius4) : [] };
+}
+var zeroCelsius4 = 273.15;
+
+// shared/thermo/virtualLapseRateDefinition.ts
+function virtualLapseRateDefinition({ least: least2, formula, rate: rate7, beside, steps: steps2, otherMethods, ...named2 }) {
+  return {
+    ...named2,
+    symbol: "Γ_v",
+    unit: "K/m",
+    shownUnit: "K/km",
+    kind: "difference",
+    nearZero: 1e-3,
+    inputs: moistLayerInputs(least2),
+    variants: [{
+      ...formula,
+      evaluate: (inputs2, constants, formulae) => {
+        const rows = virtualRows(inputs2, constants, formulae);
+        return { is: "value", value: rate7(rows), ...beside?.(rows) };
+      }
+    }],
+    constants: ["R", "Rv"],
+    uses: [virtualTemperatureKey],
+    classLimits: dryClassLimits,
+    trace(inputs2, constants, _variant, formulae) {
+      const rows = virtualRows(inputs2, constants, formulae);
+      return [virtualStep(rows, formulae.variants[virtualTemperatureKey] === "linear"), ...steps2(rows, rate7(rows))];
+    },
+    slips: [
+      signSlip("A lapse rate is positive where the virtual temperature falls with height; the layer may also have been taken upside down."),
+      perMeterSlip,
+      per100MetersSlip,
+      fineSlip("plain-temperature", "T in place of Tv", "This is the lapse rate of the temperature itself: the ask takes the virtual temperature, with the vapor of each row.", (inputs2) => rate7(plainRows(inputs2))),
+      fineSlip("celsius-for-kelvin", "Tv made of °C", "This comes from virtual temperatures that were made with T in °C: the factor belongs to kelvin.", (inputs2, constants, _right, formulae) => rate7(rowsVirtualInCelsius(inputs2, constants, formulae))),
+      ...otherMethods.map(({ key, label, sentence, rate: other2 }) => fineSlip(key, label, sentence, (inputs2, constants, _right, formulae) => other2(virtualRows(inputs2, constants, formulae))))
+    ]
+  };
+}
+function virtualStep(rows, isLinear) {
+  const T11 = Array.isArray(rows.temperature) ? rows.temperature : [];
+  const [first3 = 0, last = 0] = [T11[0], T11[T11.length - 1]];
+  return {
+    text: `Virtual temperatures of the ${T11.length} rows, with T in kelvin and w in kg per kg`,
+    formula: isLinear ? "T_v = T\\,(1 + 0.61\\,w)" : "T_v = T\\,\\frac{1 + w/\\varepsilon}{1 + w}",
+    filled: `T_{v,1} = ${texQuantity(first3, "K", 6)},\\quad T_{v,${T11.length}} = ${texQuantity(last, "K", 6)}`
+  };
+}
+
+// shared/thermo/quantities/virtualTemperatureLapseRateEndPoints.ts
+var virtualTemperatureLapseRateEndPointsDefinition = virtualLapseRateDefinition({
+  key: "virtual-temperature-lapse-rate-end-points",
+  name: "lapse rate of virtual temperature by end points",
+  least: 2,
+  formula: {
+    key: "end-points",
+    label: "lowest and highest row",
+    source: { text: 'AMS Glossary of Meteorology, "virtual temperature" and "lapse rate"', status: "common practice" },
+    validity: "any layer with two heights",
+    knownError: "1 + 0.61 w for the exact factor: 0.01 K km⁻¹ where w falls by 8 g kg⁻¹ in a kilometer"
+  },
+  rate: (rows) => endPointRate(endsOf(rows)),
+  beside(rows) {
+    const ends = endsOf(rows);
+    const notes = ends.lowCount > 1 || ends.highCount > 1 ? ["Several rows share an end’s height; their mean is used."] : void 0;
+    return { notes, more: { lowHeight: ends.lowHeight, highHeight: ends.highHeight } };
+  },
+  ask: "The lapse rate Γv = −ΔTv/Δz of the virtual temperature between the lowest and the highest of your rows, positive where it falls with height; make each row’s temperature virtual with its mixing ratio first.",
+  steps(rows, value23) {
+    const ends = endsOf(rows), change2 = ends.highTemperature - ends.lowTemperature, depth = ends.highHeight - ends.lowHeight;
+    return [
+      { text: "Lowest and highest row", formula: "z_1,\\,T_{v1};\\quad z_2,\\,T_{v2}", filled: `z_1 = ${texQuantity(ends.lowHeight, "m", 6)},\\ T_{v1} = ${texQuantity(ends.lowTemperature, "K", 6)};\\quad z_2 = ${texQuantity(ends.highHeight, "m", 6)},\\ T_{v2} = ${texQuantity(ends.highTemperature, "K", 6)}` },
+      { text: "Lapse rate", formula: "\\Gamma_v = -\\frac{T_{v2} - T_{v1}}{z_2 - z_1}", filled: `\\Gamma_v = -\\frac{${texFactor(change2)}\\,\\mathrm{K}}{${texNumber(depth / 1e3, 6)}\\,\\mathrm{km}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
+    ];
+  },
+  otherMethods: [
+    { key: "least-squares", label: "a fit in place of the end points", sentence: "This is the slope of a straight line through all rows: the ask takes the lowest and the highest row alone.", rate: (rows) => -lineOf(rows).slope },
+    { key: "theil-sen", label: "the median of the pairs in place of the end points", sentence: "This is the median of the slopes between all pairs: the ask takes the lowest and the highest row alone.", rate: (rows) => theilSenRate(rows).rate }
+  ],
+  example: { inputs: { height: [0, 500], temperature: [288.15, 284.15], mixingRatio: [0.012, 8e-3] }, gives: 941e-5, within: 5e-6 }
+});
+
+// shared/thermo/quantities/virtualTemperatureLapseRateLeastSquares.ts
+var virtualTemperatureLapseRateLeastSquaresDefinition = virtualLapseRateDefinition({
+  key: "virtual-temperature-lapse-rate-least-squares",
+  name: "lapse rate of virtual temperature by least squares",
+  least: 3,
+  formula: {
+    key: "ordinary",
+    label: "ordinary least squares of Tv on z",
+    source: { text: 'AMS Glossary of Meteorology, "virtual temperature"; ordinary least squares', status: "common practice" },
+    validity: "any layer with two heights",
+    knownError: "1 + 0.61 w for the exact factor: 0.01 K km⁻¹ where w falls by 8 g kg⁻¹ in a kilometer"
+  },
+  rate: (rows) => -lineOf(rows).slope,
+  beside(rows) {
+    const line = lineOf(rows);
+    return { more: { rSquared: line.rSquared ?? 0, standardError: line.slopeError ?? 0, count: line.count } };
+  },
+  ask: "The lapse rate Γv = −dTv/dz of the virtual temperature by ordinary least squares on height over all your rows, positive where it falls with height; make each row’s temperature virtual with its mixing ratio first.",
+  steps(rows, value23) {
+    const line = lineOf(rows);
+    return [
+      { text: `Means of the ${line.count} rows`, formula: "\\bar z,\\ \\bar T_v", filled: `\\bar z = ${texQuantity(line.meanX, "m", 6)},\\quad \\bar T_v = ${texQuantity(line.meanY, "K", 6)}` },
+      { text: "Sums about the means", formula: "\\sum (z - \\bar z)^2,\\ \\sum (z - \\bar z)(T_v - \\bar T_v)", filled: `\\sum (z - \\bar z)^2 = ${texNumber(line.sumXX)}\\,\\mathrm{m^2},\\quad \\sum (z - \\bar z)(T_v - \\bar T_v) = ${texNumber(line.sumXY)}\\,\\mathrm{K\\,m}` },
+      { text: "Lapse rate", formula: "\\Gamma_v = -\\frac{\\sum (z - \\bar z)(T_v - \\bar T_v)}{\\sum (z - \\bar z)^2}", filled: `\\Gamma_v = -\\frac{${texNumber(line.sumXY)}}{${texNumber(line.sumXX)}}\\,\\mathrm{K\\,m^{-1}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
+    ];
+  },
+  otherMethods: [
+    { key: "end-points", label: "end points in place of a fit", sentence: "This is the rate between the lowest and the highest row alone: the ask takes a fit through all rows.", rate: (rows) => endPointRate(endsOf(rows)) },
+    { key: "theil-sen", label: "the median of the pairs in place of a fit", sentence: "This is the median of the slopes between all pairs: the ask takes a fit by least squares.", rate: (rows) => theilSenRate(rows).rate }
+  ],
+  example: { inputs: { height: [100, 150, 200, 250, 300], temperature: [288.15, 287.75, 287.25, 286.85, 286.05], mixingRatio: [9e-3, 88e-4, 85e-4, 81e-4, 76e-4] }, gives: 0.0114532, within: 1e-7 }
+});
+
+// shared/thermo/quantities/virtualTemperatureLapseRateTheilSen.ts
+var virtualTemperatureLapseRateTheilSenDefinition = virtualLapseRateDefinition({
+  key: "virtual-temperature-lapse-rate-theil-sen",
+  name: "lapse rate of virtual temperature by the Theil–Sen estimator",
+  least: 3,
+  formula: {
+    key: "median-of-pairs",
+    label: "median of the slopes between all pairs of rows",
+    source: { text: 'Sen (1968), J. Amer. Statist. Assoc. 63, 1379–1389, section 4; AMS Glossary of Meteorology, "virtual temperature"', status: "from memory" },
+    validity: "any layer with two heights, 3 to 3000 rows",
+    knownError: "1 + 0.61 w for the exact factor: 0.01 K km⁻¹ where w falls by 8 g kg⁻¹ in a kilometer"
+  },
+  rate: (rows) => theilSenRate(rows).rate,
+  beside(rows) {
+    const { pairs, tiedPairs } = theilSenRate(rows);
+    return { notes: tiedPairs > 0 ? [`${tiedPairs} pairs of rows at one height are left out.`] : void 0, more: { pairs } };
+  },
+  ask: "The lapse rate Γv of the virtual temperature by the Theil–Sen estimator: the median of −ΔTv/Δz over all pairs of your rows, pairs at one height left out, positive where it falls with height; make each row’s temperature virtual with its mixing ratio first.",
+  steps(rows, value23) {
+    const { pairs } = theilSenRate(rows);
+    return [
+      { text: "Slopes between all pairs of rows at different heights", formula: "\\Gamma_{ij} = -\\frac{T_{v,j} - T_{v,i}}{z_j - z_i},\\quad i < j", filled: `N = ${pairs}` },
+      { text: "Their median", formula: "\\Gamma_v = \\mathrm{median}\\,\\Gamma_{ij}", filled: `\\Gamma_v = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
+    ];
+  },
+  otherMethods: [
+    { key: "least-squares", label: "least squares in place of the median", sentence: "This is the slope by least squares: the ask takes the median of the slopes between all pairs.", rate: (rows) => -lineOf(rows).slope },
+    { key: "end-points", label: "end points in place of the median", sentence: "This is the rate between the lowest and the highest row alone: the ask takes all pairs.", rate: (rows) => endPointRate(endsOf(rows)) }
+  ],
+  example: { inputs: { height: [100, 150, 200, 250, 300], temperature: [288.15, 287.75, 287.25, 286.85, 286.05], mixingRatio: [9e-3, 88e-4, 85e-4, 81e-4, 76e-4] }, gives: 0.01066564, within: 1e-8 }
+});
+
+// shared/thermo/quantities/staticStabilityByVirtualTemperature.ts
+var rate3 = (inputs2) => numberOf(inputs2, "virtualLapseRate");
+var staticStabilityByVirtualTemperatureDefinition = {
+  key: "static-stability-by-virtual-temperature",
+  name: "static stability of an unsaturated layer by virtual temperature",
+  symbol: "class",
+  unit: "1",
+  shownUnit: "1",
+  kind: "class",
+  inputs: [virtualRateInput],
+  variants: [{
+    key: "against-dry-rate",
+    label: "Γv against Γd",
+    source: { text: 'AMS Glossary of Meteorology, "static stability"', status: "common practice" },
+    validity: "an unsaturated layer",
+    knownError: "Γd is 9.75 to 9.80 K km⁻¹ by the constants taught; in Tv that of moist air is 0.04 K km⁻¹ smaller at 15 g kg⁻¹",
+    evaluate: (inputs2, constants) => ({ is: "class", key: staticStability(rate3(inputs2), constants), more: { dryRate: dryRateOf(constants) } })
+  }],
+  constants: staticStabilityDefinition.constants,
+  classLimits: dryClassLimits,
+  classes: staticStabilityDefinition.classes,
+  ask: "The static stability of the unsaturated layer by the lapse rate Γv of its virtual temperature against Γd: stable, dry-neutral (Γv within 0.1 K/km of Γd) or superadiabatic.",
+  trace(inputs2, constants) {
+    const limit = dryRateOf(constants), key = staticStability(rate3(inputs2), constants);
+    const sign = key === "stable" ? "<" : key === "superadiabatic" ? ">" : "\\approx";
+    return [
+      { text: "Dry adiabatic lapse rate", formula: "\\Gamma_d = \\frac{g}{c_p}", filled: `\\Gamma_d = ${texQuantity(limit * 1e3, "K/km")}`, value: limit, unit: "K/m" },
+      { text: `The layer is ${key}, with a tolerance of ${Number((constant(constants, "neutralTolerance") * 1e3).toPrecision(3))} K/km`, formula: "\\Gamma_v \\lessgtr \\Gamma_d", filled: `${texNumber(rate3(inputs2) * 1e3)} ${sign} ${texQuantity(limit * 1e3, "K/km")}`, value: rate3(inputs2), unit: "K/m" }
+    ];
+  },
+  slips: [],
+  example: { inputs: { virtualLapseRate: 941e-5 }, gives: "stable", within: 0 }
+};
+
+// shared/thermo/quantities/virtualPotentialTemperatureGradient.ts
+var rate4 = (inputs2) => numberOf(inputs2, "virtualLapseRate");
+var theta4 = (inputs2) => numberOf(inputs2, "virtualPotentialTemperature");
+var Tv4 = (inputs2) => numberOf(inputs2, "virtualTemperature");
+var value21 = (inputs2, constants) => potentialTemperatureGradient(kelvin(Tv4(inputs2)), kelvin(theta4(inputs2)), kelvinPerMeter(rate4(inputs2)), constants);
+var virtualPotentialTemperatureGradientDefinition = oneFormula({
+  key: "virtual-potential-temperature-gradient",
+  name: "gradient of virtual potential temperature from a lapse rate of virtual temperature",
+  symbol: "dθv/dz",
+  unit: "K/m",
+  shownUnit: "K/km",
+  kind: "difference",
+  nearZero: 1e-3,
+  inputs: [
+    virtualTemperatureInput("virtual temperature"),
+    { name: "virtualPotentialTemperature", label: "virtual potential temperature", symbol: "θv", unit: "K", shownUnit: "K", kind: "temperature", shape: "number", range: [150, 800] },
+    virtualRateInput
+  ],
+  constants: ["g", "cp"],
+  formula: {
+    key: "hydrostatic",
+    label: "(θv/Tv)(Γd − Γv)",
+    source: { text: "closed form: Poisson’s relation of Tv differentiated with the hydrostatic equation", status: "verified" },
+    validity: "unsaturated hydrostatic air",
+    knownError: "κ of dry air for that of moist air: 0.04 K km⁻¹ at 15 g kg⁻¹"
+  },
+  classLimits: () => [{ label: "neutral", value: 0 }],
+  ask: "The gradient of virtual potential temperature dθv/dz = (θv/Tv)(Γd − Γv) from the lapse rate Γv of the virtual temperature, positive where θv rises with height.",
+  value: value21,
+  working(inputs2, constants, result2) {
+    const dry = dryRateOf(constants);
+    return [
+      { text: "Dry adiabatic lapse rate", formula: "\\Gamma_d = \\frac{g}{c_p}", filled: `\\Gamma_d = ${texQuantity(dry * 1e3, "K/km")}`, value: dry, unit: "K/m" },
+      { text: "Gradient", formula: "\\frac{d\\theta_v}{dz} = \\frac{\\theta_v}{T_v} (\\Gamma_d - \\Gamma_v)", filled: `\\frac{d\\theta_v}{dz} = \\frac{${texNumber(theta4(inputs2), 6)}}{${texNumber(Tv4(inputs2), 6)}} \\times (${texNumber(dry * 1e3)} - ${texFactor(rate4(inputs2) * 1e3)})\\,\\mathrm{K\\,km^{-1}} = ${texQuantity(result2 * 1e3, "K/km")}`, value: result2, unit: "K/m" }
+    ];
+  },
+  slips: [
+    signSlip("θv rises with height where the layer is stable, Γv < Γd."),
+    perMeterSlip,
+    per100MetersSlip,
+    fineSlip("ratio-left-out", "θv/Tv left out", "The factor θv/Tv is left out.", (inputs2, constants) => dryRateOf(constants) - rate4(inputs2)),
+    fineSlip("ratio-inverted", "Tv/θv for θv/Tv", "The factor is θv/Tv, not Tv/θv.", (inputs2, constants) => Tv4(inputs2) / theta4(inputs2) * (dryRateOf(constants) - rate4(inputs2))),
+    slip("gradient-sign", "Γd + Γv for Γd − Γv", "The lapse rate went in with its sign turned: Γv is positive where the virtual temperature falls with height.", (inputs2, constants) => theta4(inputs2) / Tv4(inputs2) * (dryRateOf(constants) + rate4(inputs2))),
+    slip("dry-rate-left-out", "Γd left out", "The dry adiabatic lapse rate is left out: this is a gradient of temperature.", (inputs2) => -rate4(inputs2) * theta4(inputs2) / Tv4(inputs2))
+  ],
+  example: { inputs: { virtualTemperature: 290, virtualPotentialTemperature: 293, virtualLapseRate: 941e-5 }, gives: 36465e-8, within: 1e-8 }
+});
+
+// shared/thermo/quantities/bruntVaisalaFrequencySquaredFromVirtualLapseRate.ts
+var rate5 = (inputs2) => numberOf(inputs2, "virtualLapseRate");
+var Tv5 = (inputs2) => numberOf(inputs2, "virtualTemperature");
+var value22 = (inputs2, constants) => bruntVaisalaSquaredFromLapseRate(kelvin(Tv5(inputs2)), kelvinPerMeter(rate5(inputs2)), constants);
+var bruntVaisalaFrequencySquaredFromVirtualLapseRateDefinition = oneFormula({
+  key: "brunt-vaisala-frequency-squared-from-virtual-lapse-rate",
+  name: "Brunt–Väisälä frequency squared from a lapse rate of virtual temperature",
+  symbol: "N²",
+  unit: "s-2",
+  shownUnit: "s-2",
+  kind: "difference",
+  nearZero: 1e-5,
+  inputs: [virtualTemperatureInput("mean virtual temperature of the layer"), virtualRateInput],
+  constants: ["g", "cp"],
+  formula: {
+    key: "unsaturated",
+    label: "(g/Tv)(Γd − Γv)",
+    source: { text: 'AMS Glossary of Meteorology, "Brunt–Väisälä frequency"', status: "common practice" },
+    validity: "unsaturated air",
+    knownError: "κ of dry air for that of moist air: 1.2·10⁻⁶ s⁻² at 15 g kg⁻¹"
+  },
+  classLimits: (inputs2, constants) => dryClassLimits(inputs2, constants).map(({ label, value: limit }) => ({ label, value: constant(constants, "g") / Tv5(inputs2) * (dryRateOf(constants) - limit) })),
+  ask: "The Brunt–Väisälä frequency squared N² = (g/Tv)(Γd − Γv) of the unsaturated layer from the lapse rate Γv of its virtual temperature, with Γd = g/cp, negative where the layer is superadiabatic.",
+  value: value22,
+  working(inputs2, constants, result2) {
+    const dry = dryRateOf(constants);
+    return [
+      { text: "Dry adiabatic lapse rate", formula: "\\Gamma_d = \\frac{g}{c_p}", filled: `\\Gamma_d = ${texQuantity(dry * 1e3, "K/km")}`, value: dry, unit: "K/m" },
+      { text: "Frequency squared", formula: "N^2 = \\frac{g}{T_v} (\\Gamma_d - \\Gamma_v)", filled: `N^2 = \\frac{${texNumber(constant(constants, "g"), 6)}}{${texNumber(Tv5(inputs2), 6)}} \\times (${texNumber(dry)} - ${texFactor(rate5(inputs2))})\\,\\mathrm{s^{-2}} = ${texQuantity(result2, "s-2")}`, value: result2, unit: "s-2" }
+    ];
+  },
+  slips: [
+    signSlip("N² is positive where the layer is stable, Γv < Γd."),
+    slip("gradient-sign", "Γd + Γv for Γd − Γv", "The lapse rate went in with its sign turned: Γv is positive where the virtual temperature falls with height.", (inputs2, constants) => constant(constants, "g") / Tv5(inputs2) * (dryRateOf(constants) + rate5(inputs2))),
+    slip("celsius-for-kelvin", "°C in place of K", "The virtual temperature went in in degrees Celsius: it has to be in kelvin.", (inputs2, _c, right) => Tv5(inputs2) === zeroCelsius ? null : right * Tv5(inputs2) / (Tv5(inputs2) - zeroCelsius)),
+    slip("per-kilometer", "K km⁻¹ in place of K m⁻¹", "The lapse rates went in in K per kilometer: per meter is needed.", (_i, _c, right) => right * 1e3),
+    slip("dry-rate-left-out", "Γd left out", "The dry adiabatic lapse rate is left out: a layer is neutral at Γd, not at 0.", (inputs2, constants) => -constant(constants, "g") / Tv5(inputs2) * rate5(inputs2)),
+    slip("gravity-left-out", "g left out", "The acceleration of gravity is left out.", (_i, constants, right) => right / constant(constants, "g"))
+  ],
+  example: { inputs: { virtualTemperature: 288, virtualLapseRate: 941e-5 }, gives: 1229371e-11, within: 1e-11 }
+});
 
 // shared/thermo/groups/profiles.ts
 var profiles = {
@@ -9519,20 +10282,31 @@ var profiles = {
   quantities: [
     lapseRateEndPointsDefinition,
     lapseRateEndPointsStandardErrorDefinition,
+    lapseRateEndPointsLagOneCorrelationDefinition,
+    lapseRateEndPointsInflatedStandardErrorDefinition,
     lapseRateLeastSquaresDefinition,
     lapseRateStandardErrorDefinition,
     fittedTemperatureAtZeroHeightDefinition,
     lapseRateTheilSenDefinition,
     lapseRateTheilSenStandardErrorDefinition,
+    lapseRateTheilSenLagOneCorrelationDefinition,
+    lapseRateTheilSenInflatedStandardErrorDefinition,
     lapseRateLagOneCorrelationDefinition,
     lapseRateInflatedStandardErrorDefinition,
+    lapseRateBinnedLeastSquaresDefinition,
+    virtualTemperatureLapseRateEndPointsDefinition,
+    virtualTemperatureLapseRateLeastSquaresDefinition,
+    virtualTemperatureLapseRateTheilSenDefinition,
     staticStabilityDefinition,
+    staticStabilityByVirtualTemperatureDefinition,
     layerStabilityDefinition,
     potentialStabilityDefinition,
     equivalentPotentialTemperatureGradientDefinition,
     potentialTemperatureGradientDefinition,
+    virtualPotentialTemperatureGradientDefinition,
     bruntVaisalaFrequencySquaredDefinition,
     bruntVaisalaFrequencySquaredFromLapseRateDefinition,
+    bruntVaisalaFrequencySquaredFromVirtualLapseRateDefinition,
     bruntVaisalaFrequencyDefinition,
     gradientRichardsonNumberDefinition,
     bulkRichardsonNumberDefinition,
@@ -9570,7 +10344,7 @@ function observedQuantity({ key, measured, symbol, unit, shownUnit, kind, range,
     },
     value: (inputs2) => numberOf(inputs2, "station"),
     ask: `Your own reading of the ${measured}, on the instrument you were given, at the place and time stated.`,
-    working: (_inputs, _constants, value19) => [{ text: "The station read", formula: symbol, filled: `${symbol} = ${texQuantity(shown3(value19), shownUnit)}`, value: value19, unit }],
+    working: (_inputs, _constants, value23) => [{ text: "The station read", formula: symbol, filled: `${symbol} = ${texQuantity(shown3(value23), shownUnit)}`, value: value23, unit }],
     slips,
     example: { inputs: { station: example }, gives: example, within: 0 }
   });
@@ -9678,13 +10452,13 @@ var lapseRateOfTwoReadingsDefinition = oneFormula({
     validity: "two heights that differ",
     knownError: "what the two readings are good to"
   },
-  value: rate3,
+  value: rate6,
   ask: "The lapse rate Γ = −(T₂ − T₁)/(z₂ − z₁) between the two readings, positive where temperature falls with height.",
-  working(inputs2, _constants, value19) {
+  working(inputs2, _constants, value23) {
     const [z1, T12, z22, T23] = given7(inputs2);
     return [
       { text: "Differences", formula: "T_2 - T_1,\\quad z_2 - z_1", filled: `T_2 - T_1 = ${texQuantity(T23 - T12, "K")},\\quad z_2 - z_1 = ${texQuantity(z22 - z1, "m", 6)}` },
-      { text: "Lapse rate", formula: "\\Gamma = -\\frac{T_2 - T_1}{z_2 - z_1}", filled: `\\Gamma = -\\frac{${texNumber(T23 - T12)}}{${texNumber(z22 - z1)}}\\,\\mathrm{K\\,m^{-1}} = ${texQuantity(value19 * 1e3, "K/km")}`, value: value19, unit: "K/m" }
+      { text: "Lapse rate", formula: "\\Gamma = -\\frac{T_2 - T_1}{z_2 - z_1}", filled: `\\Gamma = -\\frac{${texNumber(T23 - T12)}}{${texNumber(z22 - z1)}}\\,\\mathrm{K\\,m^{-1}} = ${texQuantity(value23 * 1e3, "K/km")}`, value: value23, unit: "K/m" }
     ];
   },
   slips: [
@@ -9699,7 +10473,7 @@ var lapseRateOfTwoReadingsDefinition = oneFormula({
   example: { inputs: { lowerHeight: 20, lowerTemperature: 291.15, upperHeight: 220, upperTemperature: 289.35 }, gives: 9e-3, within: 1e-12 }
 });
 var given7 = (inputs2) => [numberOf(inputs2, "lowerHeight"), numberOf(inputs2, "lowerTemperature"), numberOf(inputs2, "upperHeight"), numberOf(inputs2, "upperTemperature")];
-function rate3(inputs2) {
+function rate6(inputs2) {
   const [z1, T12, z22, T23] = given7(inputs2);
   if (z1 === z22) throw new OutOfRangeError("upperHeight", z22, "a height other than the lower one");
   return -(T23 - T12) / (z22 - z1);
@@ -9727,10 +10501,10 @@ var profileTemperatureAtHeightDefinition = {
   trace(inputs2) {
     const found = bracketOf(inputs2), level = numberOf(inputs2, "level");
     if (!found) return [{ text: "The data do not reach the height", formula: "z_{\\min} \\le z \\le z_{\\max}", filled: `z = ${texQuantity(level, "m", 6)}` }];
-    const value19 = between2(found, level);
+    const value23 = between2(found, level);
     return [
       { text: "Nearest rows", formula: "z_1,\\,T_1;\\quad z_2,\\,T_2", filled: `z_1 = ${texQuantity(found.lowHeight, "m", 6)},\\ T_1 = ${texQuantity(found.lowTemperature - zeroCelsius, "Cel")};\\quad z_2 = ${texQuantity(found.highHeight, "m", 6)},\\ T_2 = ${texQuantity(found.highTemperature - zeroCelsius, "Cel")}` },
-      { text: "Linear between them", formula: "T = T_1 + (T_2 - T_1)\\frac{z - z_1}{z_2 - z_1}", filled: `T = ${texQuantity(value19 - zeroCelsius, "Cel", 5)}`, value: value19, unit: "K" }
+      { text: "Linear between them", formula: "T = T_1 + (T_2 - T_1)\\frac{z - z_1}{z_2 - z_1}", filled: `T = ${texQuantity(value23 - zeroCelsius, "Cel", 5)}`, value: value23, unit: "K" }
     ];
   },
   slips: [
@@ -9828,19 +10602,19 @@ function unitParts(code) {
 function formatUnit(code) {
   return unitParts(code).map(({ symbol, exponent: exponent2 }) => exponent2 === 1 ? symbol : `${symbol}${exponent2 < 0 ? "⁻" : ""}${[...String(Math.abs(exponent2))].map((digit) => raised2[Number(digit)] ?? "").join("")}`).join(" ");
 }
-function formatDecimal(value19, to2) {
-  const exponent2 = leadingExponent(value19);
+function formatDecimal(value23, to2) {
+  const exponent2 = leadingExponent(value23);
   const place = "place" in to2 ? to2.place : exponent2 - to2.digits + 1;
-  const isPlain = value19.numerator === 0n || exponent2 < 7 && exponent2 > -5;
-  if (isPlain) return toPlace(value19, place).replace("-", minusSign);
+  const isPlain = value23.numerator === 0n || exponent2 < 7 && exponent2 > -5;
+  if (isPlain) return toPlace(value23, place).replace("-", minusSign);
   const digits = Math.max(1, Math.min(12, exponent2 - place + 1));
   const scale = rational(tenTo(Math.abs(exponent2)));
-  const mantissa = exponent2 >= 0 ? rational(value19.numerator, value19.denominator * scale.numerator) : rational(value19.numerator * scale.numerator, value19.denominator);
+  const mantissa = exponent2 >= 0 ? rational(value23.numerator, value23.denominator * scale.numerator) : rational(value23.numerator * scale.numerator, value23.denominator);
   const power2 = [...String(Math.abs(exponent2))].map((digit) => raised2[Number(digit)] ?? "").join("");
   return `${toPlace(mantissa, 1 - digits).replace("-", minusSign)}×10${exponent2 < 0 ? "⁻" : ""}${power2}`;
 }
-function formatQuantity(value19, unit, digits = 3) {
-  const number3 = formatDecimal(fromDouble(value19), { digits });
+function formatQuantity(value23, unit, digits = 3) {
+  const number3 = formatDecimal(fromDouble(value23), { digits });
   const text = formatUnit(unit);
   return { number: number3, unit: unitParts(unit), text: text === "" ? number3 : `${number3} ${text}` };
 }
@@ -9993,8 +10767,8 @@ var CodeReader = class {
     return { dimension: combine(none, atom.dimension, exponent2), factor: power(atom.factor, exponent2) };
   }
 };
-function fromSi(value19, unit, isDifference) {
-  return over(isDifference ? value19 : minus(value19, unit.offset), unit.factor);
+function fromSi(value23, unit, isDifference) {
+  return over(isDifference ? value23 : minus(value23, unit.offset), unit.factor);
 }
 var isCommensurable = (a, b) => isSame(a.dimension, b.dimension);
 
@@ -10090,9 +10864,9 @@ function outwardDecimals(low, high2, unit, isDifference) {
   return { lowDecimal: toPlace(inUnitLow, place, "down"), highDecimal: toPlace(inUnitHigh, place, "up") };
 }
 function liesWithin(typed, lowDecimal, highDecimal) {
-  const value19 = fromDecimal(typed), low = fromDecimal(lowDecimal), high2 = fromDecimal(highDecimal);
-  if (!value19 || !low || !high2) return false;
-  return compare(low, value19) <= 0 && compare(value19, high2) <= 0;
+  const value23 = fromDecimal(typed), low = fromDecimal(lowDecimal), high2 = fromDecimal(highDecimal);
+  if (!value23 || !low || !high2) return false;
+  return compare(low, value23) <= 0 && compare(value23, high2) <= 0;
 }
 function exactInUnit(si, unit, isDifference) {
   return fromSi(fromDouble(si), unit, isDifference);
@@ -10165,9 +10939,9 @@ function grantedWidth(definition, granted, center) {
   return Math.max(absoluteSi, relative * Math.abs(center));
 }
 function carriedSpread(definition, question, inputs2, center, name, half) {
-  const value19 = inputs2[name];
-  if (typeof value19 !== "number" || !(half > 0)) return { below: 0, above: 0 };
-  const at = [value19 - half, value19 + half].map((moved) => {
+  const value23 = inputs2[name];
+  if (typeof value23 !== "number" || !(half > 0)) return { below: 0, above: 0 };
+  const at = [value23 - half, value23 + half].map((moved) => {
     try {
       const { outcome: outcome3 } = referenceOf(definition, question, { ...inputs2, [name]: moved });
       return outcome3.is === "value" ? outcome3.value : center;
@@ -10179,9 +10953,9 @@ function carriedSpread(definition, question, inputs2, center, name, half) {
 }
 
 // shared/marking/graph.ts
-function carriedFault(input2, value19) {
-  if (!(value19 >= input2.range[0] && value19 <= input2.range[1])) return `your earlier value of the ${input2.label} lies outside what is physical here`;
-  if (input2.trivialWithin !== void 0 && Math.abs(value19) <= input2.trivialWithin) return `your earlier value of the ${input2.label} would leave nothing to compute`;
+function carriedFault(input2, value23) {
+  if (!(value23 >= input2.range[0] && value23 <= input2.range[1])) return `your earlier value of the ${input2.label} lies outside what is physical here`;
+  if (input2.trivialWithin !== void 0 && Math.abs(value23) <= input2.trivialWithin) return `your earlier value of the ${input2.label} would leave nothing to compute`;
   return null;
 }
 function withCarried(definition, question) {
@@ -10214,10 +10988,10 @@ function withinStep(pointsMilli, maxMilli) {
   assertWhole(maxMilli);
   return Math.min(Math.max(pointsMilli, 0), Math.max(maxMilli, 0));
 }
-function earnedMilli(of, value19) {
-  if (value19.isAccepted) return withinStep(of.maxMilli - (value19.hasDigits ? 0 : of.digitsMilli ?? 0), of.maxMilli);
-  if (value19.isSlip) return withinStep(of.slipMilli ?? 0, of.maxMilli);
-  return withinStep(value19.isNear ? of.near?.milli ?? 0 : 0, of.maxMilli);
+function earnedMilli(of, value23) {
+  if (value23.isAccepted) return withinStep(of.maxMilli - (value23.hasDigits ? 0 : of.digitsMilli ?? 0), of.maxMilli);
+  if (value23.isSlip) return withinStep(of.slipMilli ?? 0, of.maxMilli);
+  return withinStep(value23.isNear ? of.near?.milli ?? 0 : 0, of.maxMilli);
 }
 function showMilli(milli, places) {
   assertWhole(milli);
@@ -10256,8 +11030,8 @@ function slipRanges(definition, question, inputs2, right) {
   for (const slip2 of definition.slips) {
     const values = [];
     for (const { way, value: rightByWay } of ways) {
-      const value19 = tried(() => slip2.apply(inputs2, way.constants, rightByWay, way.formulae));
-      if (value19 !== null && Number.isFinite(value19)) values.push(value19);
+      const value23 = tried(() => slip2.apply(inputs2, way.constants, rightByWay, way.formulae));
+      if (value23 !== null && Number.isFinite(value23)) values.push(value23);
     }
     const [own] = values;
     if (own === void 0 || Math.abs(own - right) <= 1e-12 * Math.abs(right)) continue;
@@ -10376,7 +11150,7 @@ function judgedValue(definition, question, answer, unit, center, carried, base) 
     isAccepted,
     notes,
     slip: slip2 && acceptedBy === null ? named(slip2, unit, question, definition) : null,
-    slipValues: ranges.map(({ slip: { key, label }, value: value19 }) => ({ key, label, value: value19 })),
+    slipValues: ranges.map(({ slip: { key, label }, value: value23 }) => ({ key, label, value: value23 })),
     pointsMilli: earnedMilli(question, { isAccepted, hasDigits: digits, isSlip: slip2 !== null, isNear: nearMiss })
   };
 }
