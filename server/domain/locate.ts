@@ -1,3 +1,4 @@
+import { keptQuery } from '../db/keptQuery'
 import type { Read } from '../db/writer'
 import type { Place } from './authorize'
 
@@ -79,19 +80,23 @@ const finders: Record<PlaceParam, Finder> = {
   },
 }
 
+const openPostings = keptQuery((db, given: { labId: string, now: number }) => db.selectFrom('posting').select('section_id').where('lab_id', '=', given.labId).where('state', 'in', ['posted', 'withdrawn']).where('opens_at', '<=', given.now))
+
 /** A lab that was withdrawn while it was open stays in sight: its students are told so instead of finding nothing. */
 async function openSections(read: Read, labId: string, now: number): Promise<string[]> {
-  const rows = await read.selectFrom('posting').select('section_id').where('lab_id', '=', labId).where('state', 'in', ['posted', 'withdrawn']).where('opens_at', '<=', now).execute()
+  const rows = await openPostings(read, { labId, now })
   return rows.map(row => row.section_id)
 }
 
+const holdersOfShare = keptQuery((db, given: { shareId: string }) => db.selectFrom('share')
+  .innerJoin('lab', 'lab.id', 'share.lab_id').innerJoin('course', 'course.id', 'lab.course_id').innerJoin('term', 'term.id', 'course.term_id')
+  .innerJoin('holder_member', 'holder_member.holder_id', 'share.holder_id').innerJoin('membership', 'membership.id', 'holder_member.membership_id')
+  .select(['course.id as courseId', 'term.state as termState', 'lab.id as labId', 'membership.id as ownerId', 'membership.section_id as sectionId'])
+  .where('share.id', '=', given.shareId))
+
 /** A share belongs to the sections where its holders are now: a student who moves keeps the share and changes the TA. */
 async function placeOfShare(read: Read, shareId: string, now: number): Promise<Place | null> {
-  const rows = await read.selectFrom('share')
-    .innerJoin('lab', 'lab.id', 'share.lab_id').innerJoin('course', 'course.id', 'lab.course_id').innerJoin('term', 'term.id', 'course.term_id')
-    .innerJoin('holder_member', 'holder_member.holder_id', 'share.holder_id').innerJoin('membership', 'membership.id', 'holder_member.membership_id')
-    .select(['course.id as courseId', 'term.state as termState', 'lab.id as labId', 'membership.id as ownerId', 'membership.section_id as sectionId'])
-    .where('share.id', '=', shareId).execute()
+  const rows = await holdersOfShare(read, { shareId })
   const first = rows[0]
   if (!first) return null
   return {

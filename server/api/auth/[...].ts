@@ -28,6 +28,7 @@ const CredentialsProvider = isProvider(inner) ? inner : CredentialsImport
 
 /** The request that a sign-in belongs to: next-auth hands its callbacks no event. */
 const asking = new AsyncLocalStorage<H3Event>()
+let asked = 0
 
 /** Sign-in by e-mail and passphrase. The token carries an opaque session token; who it is, is looked up on every request. */
 const nextAuth = NuxtAuthHandler({
@@ -102,7 +103,14 @@ export default defineEventHandler(async (event) => {
       if (action === 'callback') await refuseTooManyTries(event)
       if (action === 'signout') setResponseHeader(event, 'Clear-Site-Data', '"cache"')
     }
-    return await asking.run(event, () => nextAuth(event))
+    asked++
+    try {
+      return await asking.run(event, () => nextAuth(event))
+    }
+    finally {
+      // while anything follows its requests, every promise of the process pays for it
+      if (--asked === 0) asking.disable()
+    }
   }
   catch (error) {
     if (error instanceof DomainError) return answerProblem(event, { ...problemOf(error), ...failedUrl(error) })

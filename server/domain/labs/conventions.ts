@@ -26,9 +26,21 @@ export async function ensureConvention(trx: Trx, given: Convention, now: number)
   return { id }
 }
 
+/** Revisions of conventions never change, so the last few stay read. */
+const readConventions = new Map<string, Convention>()
+const mostRead = 40
+
 export async function getConvention(db: Read | Trx, revisionId: string): Promise<Convention> {
+  const known = readConventions.get(revisionId)
+  if (known) return known
   const row = await db.selectFrom('convention_revision').select('body_json').where('id', '=', revisionId).executeTakeFirstOrThrow()
-  return conventionBody.parse(JSON.parse(row.body_json))
+  const convention = conventionBody.parse(JSON.parse(row.body_json))
+  // A row of a unit of work that is still open may be undone; one that was read back is there for good.
+  if (!db.isTransaction) {
+    if (readConventions.size >= mostRead) readConventions.delete(readConventions.keys().next().value ?? '')
+    readConventions.set(revisionId, convention)
+  }
+  return convention
 }
 
 /** The convention of a lab: the one that its shares were drawn and checked with; before that, the course's. */

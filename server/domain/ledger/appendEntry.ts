@@ -1,6 +1,7 @@
 import { createHash, randomBytes } from 'node:crypto'
-import canonicalize from 'canonicalize'
+import { insertRows, keptQuery } from '../../db/keptQuery'
 import type { Trx } from '../../db/writer'
+import { canonicalJson } from './canonicalJson'
 
 export interface LedgerEntry { chain: string, seq: number, digest: Buffer }
 
@@ -14,7 +15,7 @@ export const departmentChain = 'department'
 
 /** SHA-256 over RFC 8785 canonical JSON. */
 export function digestOf(value: unknown): Buffer {
-  return createHash('sha256').update(canonicalize(value) ?? '').digest()
+  return createHash('sha256').update(canonicalJson(value)).digest()
 }
 
 /** What an entry's digest covers. `audit` computes the same. */
@@ -25,17 +26,23 @@ export function entryDigest(entry: { chain: string, seq: number, at: number, act
   })
 }
 
+const chainById = keptQuery((db, given: { id: string }) => db.selectFrom('ledger_chain').select(['seq', 'head']).where('id', '=', given.id))
+
+async function beginChain(trx: Trx, id: string): Promise<{ seq: number, head: Buffer }> {
+  await trx.insertInto('ledger_chain').values({ id, seq: 0, head: noHead }).execute()
+  return { seq: 0, head: noHead }
+}
+
 /** Writes the next link of a chain, in the same unit of work as what it records. */
 export async function appendEntry(trx: Trx, entry: { chain: string, at: number, actor: string, action: string, facts: LedgerFacts, privateDigest?: Buffer | null }): Promise<LedgerEntry> {
-  await trx.insertInto('ledger_chain').values({ id: entry.chain, seq: 0, head: noHead }).onConflict(conflict => conflict.column('id').doNothing()).execute()
-  const chain = await trx.selectFrom('ledger_chain').select(['seq', 'head']).where('id', '=', entry.chain).executeTakeFirstOrThrow()
+  const chain = (await chainById(trx, { id: entry.chain }))[0] ?? await beginChain(trx, entry.chain)
   const seq = chain.seq + 1
-  const factsJson = canonicalize(entry.facts) ?? '{}'
+  const factsJson = canonicalJson(entry.facts)
   const privateDigest = entry.privateDigest ?? null
   const digest = entryDigest({ ...entry, seq, factsJson, privateDigest, prev: chain.head })
-  await trx.insertInto('ledger_entry').values({
+  await insertRows(trx, 'ledger_entry', [{
     chain_id: entry.chain, seq, at: entry.at, actor: entry.actor, action: entry.action, facts_json: factsJson, private_digest: privateDigest, prev: chain.head, digest,
-  }).execute()
+  }])
   return { chain: entry.chain, seq, digest }
 }
 

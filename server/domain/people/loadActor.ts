@@ -1,3 +1,4 @@
+import { keptQuery } from '../../db/keptQuery'
 import type { Read } from '../../db/writer'
 import type { Actor } from './actor'
 import { heldSessions } from './heldSessions'
@@ -11,12 +12,14 @@ export async function loadActor(read: Read, tokenSha256: Buffer, now: number): P
   return session && loadRoles(read, session, tokenSha256, now)
 }
 
+const sessionByToken = keptQuery((db, given: { tokenSha256: Buffer }) => db.selectFrom('session').innerJoin('person', 'person.id', 'session.person_id')
+  .select(['person.id as personId', 'person.display_name as displayName', 'person.email_norm as email', 'person.state as state', 'person.credential_epoch as epoch',
+    'session.credential_epoch as sessionEpoch', 'session.ends_at as endsAt', 'session.ended_at as endedAt', 'session.seen_at as seenAt'])
+  .where('session.token_sha256', '=', given.tokenSha256))
+
 /** The session behind a token, unless it was ended, ran out, lay idle too long, or its person was closed or changed the passphrase since. */
 export async function findSession(read: Read, tokenSha256: Buffer, now: number): Promise<LiveSession | null> {
-  const session = await read.selectFrom('session').innerJoin('person', 'person.id', 'session.person_id')
-    .select(['person.id as personId', 'person.display_name as displayName', 'person.email_norm as email', 'person.state as state', 'person.credential_epoch as epoch',
-      'session.credential_epoch as sessionEpoch', 'session.ends_at as endsAt', 'session.ended_at as endedAt', 'session.seen_at as seenAt'])
-    .where('session.token_sha256', '=', tokenSha256).executeTakeFirst() ?? await findHeld(read, tokenSha256)
+  const session = (await sessionByToken(read, { tokenSha256 }))[0] ?? await findHeld(read, tokenSha256)
   if (!session || session.state !== 'active' || session.endedAt !== null || session.endsAt <= now || session.epoch !== session.sessionEpoch) return null
   if (session.seenAt + sessionLimits().idleMs <= now) return null
   return { personId: session.personId, displayName: session.displayName ?? '', email: session.email ?? '', seenAt: session.seenAt }
@@ -29,14 +32,17 @@ async function findHeld(read: Read, tokenSha256: Buffer) {
   return person && { ...person, sessionEpoch: held.credentialEpoch, endsAt: held.endsAt, endedAt: null, seenAt: held.seenAt }
 }
 
+interface Of { personId: string }
+
+/** A draft of a course is its staff's alone: for its students it is not there. */
+const membershipsOf = keptQuery((db, given: Of) => db.selectFrom('membership').innerJoin('course', 'course.id', 'membership.course_id').select(['membership.id', 'course_id', 'role', 'section_id'])
+  .where('person_id', '=', given.personId).where('membership.state', '=', 'active').where(eb => eb.or([eb('role', '<>', 'student'), eb('course.state', '<>', 'draft')])))
+const taSectionsOf = keptQuery((db, given: Of) => db.selectFrom('ta_section').innerJoin('membership', 'membership.id', 'ta_section.membership_id')
+  .select(['ta_section.membership_id as id', 'ta_section.section_id as sectionId']).where('membership.person_id', '=', given.personId))
+const departmentRolesOf = keptQuery((db, given: Of) => db.selectFrom('department_role').select(['id', 'role', 'scope_json', 'until_at']).where('person_id', '=', given.personId).where('state', '=', 'active'))
+
 export async function loadRoles(read: Read, session: LiveSession, tokenSha256: Buffer, now: number): Promise<Actor> {
-  const [memberships, taSections, departmentRoles] = await Promise.all([
-    // A draft of a course is its staff's alone: for its students it is not there.
-    read.selectFrom('membership').innerJoin('course', 'course.id', 'membership.course_id').select(['membership.id', 'course_id', 'role', 'section_id']).where('person_id', '=', session.personId).where('membership.state', '=', 'active')
-      .where(eb => eb.or([eb('role', '<>', 'student'), eb('course.state', '<>', 'draft')])).execute(),
-    read.selectFrom('ta_section').innerJoin('membership', 'membership.id', 'ta_section.membership_id').select(['ta_section.membership_id as id', 'ta_section.section_id as sectionId']).where('membership.person_id', '=', session.personId).execute(),
-    read.selectFrom('department_role').select(['id', 'role', 'scope_json', 'until_at']).where('person_id', '=', session.personId).where('state', '=', 'active').execute(),
-  ])
+  const [memberships, taSections, departmentRoles] = await Promise.all([membershipsOf(read, session), taSectionsOf(read, session), departmentRolesOf(read, session)])
   return {
     personId: session.personId,
     displayName: session.displayName,

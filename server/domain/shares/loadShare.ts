@@ -1,5 +1,6 @@
 import { refuse } from '#shared/errors'
 import { labBody, lateRule, type LabBody } from '#shared/schemas/lab'
+import { keptQuery } from '../../db/keptQuery'
 import type { Read } from '../../db/writer'
 import type { Observations } from '../../observations/chunks'
 import { getConvention } from '../labs/conventions'
@@ -11,6 +12,8 @@ import { csvOf, serveFlight, serveRows, type ServedFlight } from './servedData'
 /** Served rows never change: what was served last stays at hand, since a class works on a few flights at the same time. */
 const servedFlights = new Map<string, ServedFlight>()
 const served = new Map<string, { rows: ServedRows, csv: string }>()
+const bodies = new Map<string, LabBody>()
+const mostBodies = 24
 const mostFlights = 24
 const mostServed = 64
 
@@ -22,16 +25,19 @@ function keep<T>(known: Map<string, T>, most: number, key: string, make: () => T
   return found
 }
 
+const shareWithRevision = keptQuery((db, given: { shareId: string }) => db.selectFrom('share').innerJoin('lab', 'lab.id', 'share.lab_id').innerJoin('draw', 'draw.id', 'share.draw_id').innerJoin('lab_revision', 'lab_revision.id', 'draw.lab_revision_id')
+  .select(['share.id', 'share.lab_id as labId', 'share.holder_id as holderId', 'share.redraw', 'share.ordinal', 'share.draw_id as drawId', 'share.served_sha256 as servedSha256',
+    'lab.course_id as courseId', 'lab.state', 'lab.version', 'lab_revision.id as revisionId', 'lab_revision.no as revisionNo', 'lab_revision.body_json as body'])
+  .where('share.id', '=', given.shareId))
+
 /** Everything that a share's steps are asked and judged from, as it was drawn and served. */
 export async function loadShare(read: Read, observations: Observations, shareId: string): Promise<LoadedShare> {
-  const row = await read.selectFrom('share').innerJoin('lab', 'lab.id', 'share.lab_id').innerJoin('draw', 'draw.id', 'share.draw_id').innerJoin('lab_revision', 'lab_revision.id', 'draw.lab_revision_id')
-    .select(['share.id', 'share.lab_id as labId', 'share.holder_id as holderId', 'share.redraw', 'share.ordinal', 'share.draw_id as drawId', 'share.served_sha256 as servedSha256',
-      'lab.course_id as courseId', 'lab.state', 'lab.version', 'lab_revision.id as revisionId', 'lab_revision.no as revisionNo', 'lab_revision.body_json as body'])
-    .where('share.id', '=', shareId).executeTakeFirst()
+  const [row] = await shareWithRevision(read, { shareId })
   if (!row) return refuse('no_share')
   const draw = await getDraw(read, row.drawId)
   const item = itemOf(draw, row.ordinal)
-  const body = labBody.parse(JSON.parse(row.body))
+  // a draw froze the revision: it is the same whenever it is read
+  const body = keep(bodies, mostBodies, row.revisionId, () => labBody.parse(JSON.parse(row.body)))
   const { rows, csv } = keep(served, mostServed, `${row.drawId}:${item.no}`, () => serveDrawn(observations, row.revisionId, body, item))
   return {
     share: { id: row.id, labId: row.labId, holderId: row.holderId, redraw: row.redraw, ordinal: row.ordinal, item, servedSha256: row.servedSha256.toString('hex') },
@@ -51,11 +57,13 @@ export function serveDrawn(observations: Observations, revisionId: string, body:
   return { rows, csv: csvOf(item.head, rows) }
 }
 
+const postingOfHolder = keptQuery((db, given: { labId: string, holderId: string }) => db.selectFrom('holder_member').innerJoin('membership', 'membership.id', 'holder_member.membership_id')
+  .innerJoin('posting', join => join.onRef('posting.section_id', '=', 'membership.section_id').on('posting.lab_id', '=', given.labId))
+  .selectAll('posting').where('holder_member.holder_id', '=', given.holderId).orderBy('posting.due_at', 'desc').limit(1))
+
 /** The posting of the section in which the share's holder is now: who moves keeps the share and takes the new section's dates. */
 async function postingOf(read: Read, labId: string, holderId: string): Promise<LoadedPosting | null> {
-  const row = await read.selectFrom('holder_member').innerJoin('membership', 'membership.id', 'holder_member.membership_id')
-    .innerJoin('posting', join => join.onRef('posting.section_id', '=', 'membership.section_id').on('posting.lab_id', '=', labId))
-    .selectAll('posting').where('holder_member.holder_id', '=', holderId).orderBy('posting.due_at', 'desc').limit(1).executeTakeFirst()
+  const [row] = await postingOfHolder(read, { labId, holderId })
   return row
     ? {
         id: row.id, sectionId: row.section_id, state: row.state, zone: row.zone, opensAt: row.opens_at, dueAt: row.due_at, lateRule: lateRule.parse(JSON.parse(row.late_rule_json)),

@@ -2,10 +2,10 @@ import type { Convention } from '#shared/marking/types'
 import type { AskedNumber } from '#shared/schemas/askedSteps'
 import type { LabBody, SupplyItem } from '#shared/schemas/lab'
 import type { InputSource } from '#shared/schemas/steps'
-import type { InputDefinition, Inputs, InputValue } from '#shared/thermo/definition'
+import type { InputDefinition, Inputs, InputValue, NumberKind } from '#shared/thermo/definition'
 import { findQuantity } from '#shared/thermo/registry'
 import { edgeRow, tableRow } from '../labs/rowsOfLayer'
-import type { ServedRows } from './loadedShare'
+import type { ServedColumn, ServedRows } from './loadedShare'
 import { columnOf } from './servedData'
 import { siFromText } from './units'
 
@@ -53,7 +53,7 @@ function readShare(input: InputDefinition, source: Extract<InputSource, { from: 
   if (source.read === 'highBound') return siFromText(String(item.highM), 'm', input.kind)
   const column = columnOf(rows, source.column)
   if (!column) return null
-  const inSi = (row: number) => siFromText(column.texts[row] ?? '', column.unit, input.kind)
+  const inSi = (row: number) => siOf(column, input.kind)[row] ?? null
   if (source.read === 'lowest' || source.read === 'highest') {
     const row = edgeRow(rows, source.read)
     return row === null ? null : inSi(row)
@@ -65,6 +65,17 @@ function readShare(input: InputDefinition, source: Extract<InputSource, { from: 
   const series = rows.use.flatMap((isUsed, row) => isUsed ? inSi(row) ?? [] : [])
   if (series.length === 0) return null
   return source.read === 'layer' ? series : series.reduce((sum, value) => sum + value, 0) / series.length
+}
+
+/** A served column in SI, by the kind in which it is read: rows that were served never change, and a class computes on few of them. */
+const inSiOf = new WeakMap<ServedColumn, Map<NumberKind, readonly (number | null)[]>>()
+
+function siOf(column: ServedColumn, kind: NumberKind): readonly (number | null)[] {
+  const known = inSiOf.get(column) ?? new Map<NumberKind, readonly (number | null)[]>()
+  inSiOf.set(column, known)
+  const values = known.get(kind) ?? column.texts.map(text => siFromText(text, column.unit, kind))
+  known.set(kind, values)
+  return values
 }
 
 function whyMissing(input: InputDefinition, source: InputSource): string {

@@ -1,5 +1,6 @@
 import { refuse } from '#shared/errors'
 import { lateRule, type LateRule } from '#shared/schemas/lab'
+import { keptQuery } from '../../db/keptQuery'
 import type { Read } from '../../db/writer'
 import { getDraw } from '../shares/draws'
 
@@ -45,29 +46,32 @@ export interface Ground {
   acceptedIds: readonly string[]
 }
 
+const groundOfShare = keptQuery((db, given: { shareId: string, membershipId: string }) => db.selectFrom('share')
+  .innerJoin('holder_member', join => join.onRef('holder_member.holder_id', '=', 'share.holder_id').on('holder_member.membership_id', '=', given.membershipId))
+  .innerJoin('membership', 'membership.id', 'holder_member.membership_id')
+  .innerJoin('draw', 'draw.id', 'share.draw_id').innerJoin('lab', 'lab.id', 'share.lab_id').innerJoin('course', 'course.id', 'lab.course_id').innerJoin('term', 'term.id', 'course.term_id')
+  .leftJoin('posting', join => join.onRef('posting.lab_id', '=', 'lab.id').onRef('posting.section_id', '=', 'membership.section_id'))
+  .select(eb => [
+    'share.id as shareId', 'share.redraw', 'share.data_set_version_id as dataSetVersionId', 'share.holder_id as holderId', 'draw.lab_revision_id as labRevisionId',
+    'membership.id as membershipId', 'membership.state as membershipState', 'membership.section_id as sectionId',
+    'course.id as courseId', 'course.code as courseCode', 'draw.id as drawId', 'term.state as termState',
+    'lab.id as labId', 'lab.title as labTitle', 'lab.state as labState',
+    'posting.id as postingId', 'posting.state as postingState', 'posting.version as postingVersion', 'posting.opens_at as opensAt', 'posting.due_at as dueAt', 'posting.zone as zone',
+    'posting.late_rule_json as lateRuleJson', 'posting.attempts', 'posting.keep', 'posting.feedback', 'posting.released_at as releasedAt',
+    eb.selectFrom('share as other').select(inner => inner.fn.max('other.redraw').as('n')).whereRef('other.lab_id', '=', 'share.lab_id').whereRef('other.holder_id', '=', 'share.holder_id').as('newestRedraw'),
+    eb.selectFrom('lab_revision').select('lab_revision.id').whereRef('lab_revision.lab_id', '=', 'lab.id').where('lab_revision.frozen_at', 'is not', null).orderBy('lab_revision.no', 'desc').limit(1).as('newestRevisionId'),
+    eb.selectFrom('allowance').innerJoin('holder_member as holding', 'holding.membership_id', 'allowance.membership_id').select(inner => inner.fn.max('allowance.due_at').as('until'))
+      .whereRef('allowance.posting_id', '=', 'posting.id').whereRef('holding.holder_id', '=', 'share.holder_id').as('allowedUntil'),
+    eb.selectFrom('submission').select(inner => inner.fn.max('submission.attempt').as('made')).whereRef('submission.share_id', '=', 'share.id').as('attemptsMade'),
+  ])
+  .where('share.id', '=', given.shareId))
+const acceptedInLab = keptQuery((db, given: { labId: string }) => db.selectFrom('accepted').select('id').where('lab_id', '=', given.labId).where('revoked_at', 'is', null).orderBy('added_at').orderBy('id'))
+
 /** Reads the ground of one member's share; null where there is no such share of theirs. */
 export async function readGround(db: Read, shareId: string, membershipId: string): Promise<Ground | null> {
-  const row = await db.selectFrom('share')
-    .innerJoin('holder_member', join => join.onRef('holder_member.holder_id', '=', 'share.holder_id').on('holder_member.membership_id', '=', membershipId))
-    .innerJoin('membership', 'membership.id', 'holder_member.membership_id')
-    .innerJoin('draw', 'draw.id', 'share.draw_id').innerJoin('lab', 'lab.id', 'share.lab_id').innerJoin('course', 'course.id', 'lab.course_id').innerJoin('term', 'term.id', 'course.term_id')
-    .leftJoin('posting', join => join.onRef('posting.lab_id', '=', 'lab.id').onRef('posting.section_id', '=', 'membership.section_id'))
-    .select(eb => [
-      'share.id as shareId', 'share.redraw', 'share.data_set_version_id as dataSetVersionId', 'share.holder_id as holderId', 'draw.lab_revision_id as labRevisionId',
-      'membership.id as membershipId', 'membership.state as membershipState', 'membership.section_id as sectionId',
-      'course.id as courseId', 'course.code as courseCode', 'draw.id as drawId', 'term.state as termState',
-      'lab.id as labId', 'lab.title as labTitle', 'lab.state as labState',
-      'posting.id as postingId', 'posting.state as postingState', 'posting.version as postingVersion', 'posting.opens_at as opensAt', 'posting.due_at as dueAt', 'posting.zone as zone',
-      'posting.late_rule_json as lateRuleJson', 'posting.attempts', 'posting.keep', 'posting.feedback', 'posting.released_at as releasedAt',
-      eb.selectFrom('share as other').select(inner => inner.fn.max('other.redraw').as('n')).whereRef('other.lab_id', '=', 'share.lab_id').whereRef('other.holder_id', '=', 'share.holder_id').as('newestRedraw'),
-      eb.selectFrom('lab_revision').select('lab_revision.id').whereRef('lab_revision.lab_id', '=', 'lab.id').where('lab_revision.frozen_at', 'is not', null).orderBy('lab_revision.no', 'desc').limit(1).as('newestRevisionId'),
-      eb.selectFrom('allowance').innerJoin('holder_member as holding', 'holding.membership_id', 'allowance.membership_id').select(inner => inner.fn.max('allowance.due_at').as('until'))
-        .whereRef('allowance.posting_id', '=', 'posting.id').whereRef('holding.holder_id', '=', 'share.holder_id').as('allowedUntil'),
-      eb.selectFrom('submission').select(inner => inner.fn.max('submission.attempt').as('made')).whereRef('submission.share_id', '=', 'share.id').as('attemptsMade'),
-    ])
-    .where('share.id', '=', shareId).executeTakeFirst()
+  const [row] = await groundOfShare(db, { shareId, membershipId })
   if (!row) return null
-  const accepted = await db.selectFrom('accepted').select('id').where('lab_id', '=', row.labId).where('revoked_at', 'is', null).orderBy('added_at').orderBy('id').execute()
+  const accepted = await acceptedInLab(db, { labId: row.labId })
   // A posted lab keeps the convention that its shares were checked by, whatever its course teaches since.
   const { conventionRevisionId } = (await getDraw(db, row.drawId)).supply
   return { ...row, conventionRevisionId, newestRedraw: row.newestRedraw ?? row.redraw, attemptsMade: row.attemptsMade ?? 0, acceptedIds: accepted.map(each => each.id) }

@@ -1,4 +1,5 @@
 import type { SubmissionReply } from '#shared/schemas/work'
+import { insertRows, keptQuery } from '../../db/keptQuery'
 import type { Once } from '../../db/queries/requestKeys'
 import type { AnswerTable, MarkTable, SubmissionTable } from '../../db/schema/work'
 import type { Trx } from '../../db/writer'
@@ -31,11 +32,13 @@ export interface NewSubmission {
   receivedAt: number
 }
 
+const lastSubmission = keptQuery(db => db.selectFrom('submission').select('seq').orderBy('seq', 'desc').limit(1))
+
 /** Writes a submission, its answers, evaluations and marks, the ledger's entry that covers them, and the receipt's notice. */
 export async function insertSubmission(trx: Trx, { ground, loaded, judged, referenceDigest, input, lateness, receivedAt }: NewSubmission): Promise<SubmissionReply> {
   const id = newId(receivedAt)
   const attempt = ground.attemptsMade + 1
-  const last = await trx.selectFrom('submission').select('seq').orderBy('seq', 'desc').limit(1).executeTakeFirst()
+  const [last] = await lastSubmission(trx, {})
   const seq = (last?.seq ?? 0) + 1
   const submission: Omit<SubmissionTable, 'ledger_chain' | 'ledger_seq'> = {
     id, seq, share_id: ground.shareId, attempt, by_membership_id: input.membershipId, lab_revision_id: loaded.revision.id,
@@ -59,10 +62,10 @@ export async function insertSubmission(trx: Trx, { ground, loaded, judged, refer
     },
   })
   const link = { ledger_chain: entry.chain, ledger_seq: entry.seq }
-  await trx.insertInto('submission').values({ ...submission, ...link }).execute()
-  await trx.insertInto('answer').values(answers).execute()
-  await trx.insertInto('evaluation').values(evaluations).execute()
-  await trx.insertInto('mark').values(marks.map(mark => ({ ...mark, ...link }))).execute()
+  await insertRows(trx, 'submission', [{ ...submission, ...link }])
+  await insertRows(trx, 'answer', answers)
+  await insertRows(trx, 'evaluation', evaluations)
+  await insertRows(trx, 'mark', marks.map(mark => ({ ...mark, ...link })))
   const receipt = { no: submission.receipt_no, at: new Date(receivedAt).toISOString(), digest: entry.digest.toString('hex'), ledger: { chain: entry.chain, seq: entry.seq } }
   await queueNotice(trx, {
     eventKey: `receipt:${id}`, template: 'receipt', toMembershipId: input.membershipId, now: receivedAt,

@@ -34,13 +34,11 @@ const mostJudgings = 3
 export async function submitLab({ read, write }: Stores, judging: Judging, input: SubmitLab, receivedAt: number): Promise<SubmissionReply> {
   const request: Once = { ...input.request, personId: input.personId, now: receivedAt }
   try {
-    const earlier = await findAnswer<SubmissionReply>(read, request)
-    if (earlier) return earlier.answer
     for (let judgings = 0; judgings < mostJudgings; judgings++) {
       const ground = await readGround(read, input.shareId, input.membershipId)
       const posted = assertMaySubmit(postedGround(ground, receivedAt), receivedAt)
       const loaded = await judging.loadShare(input.shareId)
-      const accepted = await read.selectFrom('accepted').select(['step_key', 'body_json']).where('id', 'in', [...posted.acceptedIds, '']).orderBy('added_at').orderBy('id').execute()
+      const accepted = posted.acceptedIds.length === 0 ? [] : await read.selectFrom('accepted').select(['step_key', 'body_json']).where('id', 'in', [...posted.acceptedIds]).orderBy('added_at').orderBy('id').execute()
       const judged = judgeSubmission(judging.reference, loaded, input.answers, accepted)
       try {
         return await write(trx => once(trx, request, async () => {

@@ -39,8 +39,21 @@ export function wallTimeAt(at: number, zone: string): string {
   return Temporal.Instant.fromEpochMilliseconds(at).toZonedDateTimeISO(zone).toPlainDateTime().toString({ smallestUnit: 'minute', roundingMode: 'floor' })
 }
 
-/** The same wall time, a number of local dates later: a day of 23 or 25 hours counts as one. */
+const knownMoves = new Map<string, number>()
+const mostMoves = 500
+
+/** The same wall time, a number of local dates later: a day of 23 or 25 hours counts as one. A class asks for the same few days again and again, so they stay at hand. */
 export function movedByDays(at: number, days: number, zone: string): number {
+  const key = `${at} ${days} ${zone}`
+  const known = knownMoves.get(key)
+  if (known !== undefined) return known
+  const moved = moveByDays(at, days, zone)
+  if (knownMoves.size >= mostMoves) knownMoves.delete(knownMoves.keys().next().value ?? '')
+  knownMoves.set(key, moved)
+  return moved
+}
+
+function moveByDays(at: number, days: number, zone: string): number {
   assertZone(zone)
   return Temporal.Instant.fromEpochMilliseconds(at).toZonedDateTimeISO(zone).toPlainDateTime().add({ days }).toZonedDateTime(zone, { disambiguation: 'later' }).epochMilliseconds
 }
