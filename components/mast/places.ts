@@ -1,5 +1,5 @@
 /** Where a person may go, by role: the booms of the mast. */
-export type PlaceKey = 'work' | 'marks' | 'disputes' | 'labs' | 'data' | 'people' | 'terms' | 'courses' | 'ledger' | 'mail' | 'jobs' | 'visit'
+export type PlaceKey = 'work' | 'marks' | 'disputes' | 'labs' | 'data' | 'people' | 'terms' | 'courses' | 'ledger' | 'access' | 'mail' | 'jobs' | 'visit'
 
 /** `key` tells what a count belongs to; a place without one has none. */
 export interface MastPlace { key: PlaceKey | null, word: string, to: string }
@@ -7,7 +7,7 @@ export interface PlaceCounts { due: number, open: number, fresh: number }
 
 const words: Record<PlaceKey, string> = {
   work: 'Work', marks: 'Marks', disputes: 'Disputes', labs: 'Labs', data: 'Data', people: 'People',
-  terms: 'Terms', courses: 'Courses', ledger: 'Ledger', mail: 'Mail', jobs: 'Jobs', visit: 'What you may read',
+  terms: 'Terms', courses: 'Courses', ledger: 'Ledger', access: 'Looks', mail: 'Mail', jobs: 'Jobs', visit: 'What you may read',
 }
 
 const byCourseRole: Record<'lead' | 'instructor' | 'ta' | 'student', readonly PlaceKey[]> = {
@@ -18,7 +18,7 @@ const byCourseRole: Record<'lead' | 'instructor' | 'ta' | 'student', readonly Pl
 }
 
 const byDepartmentRole: Record<'admin' | 'technician' | 'visitor', readonly PlaceKey[]> = {
-  admin: ['terms', 'courses', 'people', 'ledger', 'mail', 'jobs'],
+  admin: ['terms', 'courses', 'people', 'ledger', 'access', 'mail', 'jobs'],
   technician: ['data', 'jobs'],
   visitor: ['visit'],
 }

@@ -107,6 +107,7 @@ export const policies = {
   'department:roster': { scope: 'department', roles: ['admin'] },
   'department:rollover': { scope: 'department', roles: ['admin'] },
   'department:ledger': { scope: 'department', roles: ['admin'] },
+  'department:access': { scope: 'department', roles: ['admin'] },
   'department:jobs': { scope: 'department', roles: ['admin', 'technician'] },
   'department:mail': { scope: 'department', roles: ['admin'] },
   'department:resendMail': { scope: 'department', roles: ['admin'] },

@@ -69,10 +69,18 @@ export const ledgerPage = z.object({
   chains: z.array(z.object({ id: z.string(), label: z.string(), seq: count })),
   head: z.object({ seq: count, digest: z.string() }).nullable(),
   actions: z.array(z.string()),
-  entries: z.array(z.object({ seq: count, at: z.string(), action: z.string(), by: z.string(), facts: z.string(), digest: z.string(), hasPrivateText: z.boolean() })),
+  entries: z.array(z.object({ seq: count, at: z.string(), action: z.string(), by: z.string(), about: z.array(z.string()), facts: z.string(), digest: z.string(), hasPrivateText: z.boolean() })),
   next: count.nullable(),
 })
 export type LedgerPage = z.output<typeof ledgerPage>
+
+/** Looks at people's records, the newest first. */
+export const accessPage = z.object({
+  people: z.array(z.object({ id: z.string(), name: z.string() })),
+  lines: z.array(z.object({ seq: count, at: z.string(), by: z.string(), about: z.string(), course: z.string(), route: z.string() })),
+  next: count.nullable(),
+})
+export type AccessPage = z.output<typeof accessPage>
 
 export const coursePeople = z.object({
   course: z.object({ code: z.string(), title: z.string(), alsoListedAs: z.array(z.string()), term: z.string(), zone: z.string() }),

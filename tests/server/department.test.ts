@@ -39,6 +39,18 @@ afterAll(async () => {
 const key = (name: string) => ({ 'idempotency-key': `key-of-${name.replaceAll(' ', '-')}` })
 const answered = async (response: Response) => ({ status: response.status, body: await response.json() as Record<string, unknown> })
 
+describe('what is not there', () => {
+  const absent = '0190a1b2-0000-7000-8000-000000000000'
+  it.each(['work', 'marks', 'disputes', 'labs', 'data', 'people', 'convention', `work/${absent}`, `work/${absent}/receipt/NO-00001`, `marks/${absent}`, `disputes/${absent}`, `labs/${absent}`, `data/${absent}`])('answers 404 on its sheet: /c/…/%s', async (page) => {
+    const answer = await student.ask(`/c/${absent}/${page}`)
+    expect([answer.status, answer.headers.get('content-type')]).toEqual([404, 'text/html;charset=utf-8'])
+    expect(await answer.text()).toMatch(/Not found|Nothing at this address/)
+  })
+  it('while what is there answers 200', async () => {
+    for (const page of ['work', 'marks', 'disputes']) expect([page, (await student.ask(`/c/${house.courseId}/${page}`)).status]).toEqual([page, 200])
+  })
+})
+
 describe('a roster over HTTP', () => {
   const text = 'Name;E-mail;Section\nNew One;new.one@example.edu;A\nFay Ode;fay.ode@example.edu;B\n'
   it('is shown first and then carried out once, however often it is sent', async () => {

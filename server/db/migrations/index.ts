@@ -5,6 +5,7 @@ import { termVersions } from './0003_term_versions'
 import { privateReasons } from './0004_private_reasons'
 import { filesOfPeople } from './0005_files_of_people'
 import { ownedReds } from './0006_owned_reds'
+import { accessLogRead } from './0007_access_log_read'
 
 /** Every migration, by name, in order. A test holds this list against the folder. */
 export const migrations: Record<string, Migration> = {
@@ -14,4 +15,5 @@ export const migrations: Record<string, Migration> = {
   '0004_private_reasons': privateReasons,
   '0005_files_of_people': filesOfPeople,
   '0006_owned_reds': ownedReds,
+  '0007_access_log_read': accessLogRead,
 }

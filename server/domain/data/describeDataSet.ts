@@ -27,7 +27,7 @@ export async function describeVersion(read: Read, observations: Observations, ve
   const sources = await read.selectFrom('data_set_version_source as used').innerJoin('source_file', 'source_file.sha256', 'used.source_sha256')
     .select(['used.source_sha256', 'source_file.size']).where('used.version_id', '=', versionId).orderBy('used.ordinal').execute()
   const set = await read.selectFrom('data_set').select('owner_course_id').where('id', '=', version.data_set_id).executeTakeFirstOrThrow()
-  const names = await sourceNames(read, { courseId: set.owner_course_id, digests: sources.map(source => source.source_sha256), before: version.made_at })
+  const names = await sourceNames(read, sources.map(source => source.source_sha256), { courseId: set.owner_course_id, actorId: version.by_actor_id, madeAt: version.made_at })
   const meta = JSON.parse(version.meta_json) as Partial<VersionMeta>
   const root = readRoot(observations, version.root_sha256)
   return {

@@ -3,11 +3,11 @@ import type { Read } from '../../db/writer'
 
 const iso = (at: number | null): string | null => at === null ? null : new Date(at).toISOString()
 
-/** The data sets that a course can use: its own, and those of the department. Newest first. */
-export async function listDataSets(read: Read, courseId: string): Promise<DataSetLine[]> {
+/** The data sets that a course can use: its own, and those of the department; without a course, the department's alone. Newest first. */
+export async function listDataSets(read: Read, courseId: string | null): Promise<DataSetLine[]> {
   const rows = await read.selectFrom('data_set')
     .innerJoin('data_set_version as version', 'version.data_set_id', 'data_set.id')
-    .where(where => where.or([where('data_set.owner_course_id', '=', courseId), where('data_set.owner_course_id', 'is', null)]))
+    .where(where => where.or([where('data_set.owner_course_id', 'is', null), ...(courseId === null ? [] : [where('data_set.owner_course_id', '=', courseId)])]))
     .where('version.no', '=', eb => eb.selectFrom('data_set_version as other').select(max => max.fn.max('other.no').as('no')).whereRef('other.data_set_id', '=', 'data_set.id'))
     .select(['data_set.id', 'data_set.title', 'data_set.kind', 'data_set.owner_course_id', 'version.id as versionId', 'version.no', 'version.rows_taken', 'version.rows_refused', 'version.first_at', 'version.last_at', 'version.made_at'])
     .orderBy('version.made_at', 'desc').orderBy('data_set.title').execute()

@@ -1,8 +1,9 @@
 import type { Read } from '../../db/writer'
+import { peopleInFacts } from './peopleInFacts'
 
 const entriesPerPage = 50
 
-/** A page of one chain, newest first, with who did it named as far as they still are. Private texts stay where they are kept. */
+/** A page of one chain, newest first, with who did it and whom it is about named as far as they still are. Private texts stay where they are kept. */
 export async function listLedger(read: Read, { chain, action, before }: { chain: string, action: string, before: number | null }) {
   let query = read.selectFrom('ledger_entry').selectAll().where('chain_id', '=', chain)
   if (action !== '') query = query.where('action', '=', action)
@@ -16,6 +17,7 @@ export async function listLedger(read: Read, { chain, action, before }: { chain:
   ])
   const entries = rows.slice(0, entriesPerPage)
   const names = await namesOf(read, [...new Set(entries.map(entry => entry.actor))])
+  const about = await peopleInFacts(read, entries.map(entry => entry.facts_json))
   const courseOf = (id: string) => courses.findIndex(course => `course:${course.id}` === id)
   return {
     chains: chains.map(({ id, seq }) => {
@@ -24,8 +26,8 @@ export async function listLedger(read: Read, { chain, action, before }: { chain:
     }).sort((a, b) => a.order - b.order),
     head: head ? { seq: head.seq, digest: head.head.toString('hex') } : null,
     actions: actions.map(row => row.action),
-    entries: entries.map(entry => ({
-      seq: entry.seq, at: new Date(entry.at).toISOString(), action: entry.action, by: names.get(entry.actor) ?? (entry.actor === 'system' ? 'The house itself' : entry.actor),
+    entries: entries.map((entry, at) => ({
+      seq: entry.seq, about: about[at] ?? [], at: new Date(entry.at).toISOString(), action: entry.action, by: names.get(entry.actor) ?? (entry.actor === 'system' ? 'The house itself' : entry.actor),
       facts: entry.facts_json, digest: entry.digest.toString('hex'), hasPrivateText: entry.private_digest !== null,
     })),
     next: rows.length > entriesPerPage ? entries[entries.length - 1]!.seq : null,

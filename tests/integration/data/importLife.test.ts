@@ -52,11 +52,16 @@ describe('the life of an import', () => {
     expect(own.course_id).not.toBeNull()
     // the department had the same file before and has it again since, under names that are nobody else's business
     for (const [id, at] of [['before', own.at + 1], ['since', own.at + 1e9]] as const) {
-      await room.write(trx => trx.insertInto('upload').values({ ...own, id, course_id: null, original_name: `${id}.csv`, at: Math.min(at, version.made_at) }).execute())
+      await room.write(trx => trx.insertInto('upload').values({ ...own, id, course_id: null, by_actor_id: room.asked.actorId, original_name: `${id}.csv`, at: Math.min(at, version.made_at) }).execute())
     }
     const source = await sourceBytes(room.read, room.files, { versionId: version.id, ordinal: 1 })
     expect([source.name, await text(source.stream)]).toEqual(['record.csv', `${head}${rowsOf(50)}`])
-    expect((await describeDataSet(room.read, room.observations, version.data_set_id)).versions[0]?.sources[0]?.name).toBe('record.csv')
+    const described = async (dataSetId: string) => (await describeDataSet(room.read, room.observations, dataSetId)).versions[0]?.sources[0]?.name
+    expect(await described(version.data_set_id)).toBe('record.csv')
+    // a data set of the department, made in this course: by its maker's name
+    await room.write(trx => trx.updateTable('data_set').set({ owner_course_id: null }).where('id', '=', version.data_set_id).execute())
+    await room.write(trx => trx.insertInto('upload').values({ ...own, id: 'others', by_actor_id: room.asked.actorId, original_name: 'others.csv', at: version.made_at }).execute())
+    expect(await described(version.data_set_id)).toBe('record.csv')
   })
 
   it('the same rows give the same root and chunks whatever was in memory when, also when they come in no order', () => {

@@ -16,6 +16,7 @@ import { loadShare, serveDrawn } from '../../../server/domain/shares/loadShare'
 import { questionFor } from '../../../server/domain/shares/questionFor'
 import { redraw } from '../../../server/domain/shares/redraw'
 import { sha256Hex } from '../../../server/domain/shares/servedData'
+import { createCourse } from '../../../server/domain/terms/courses'
 import { enrol } from '../../../server/domain/terms/enrol'
 import { moveSection } from '../../../server/domain/terms/memberships'
 import { newId } from '../../../server/domain/ids'
@@ -205,6 +206,18 @@ describe('a lab is written, checked and posted', () => {
     const kept = await stores.read.selectFrom('private_body').select(['digest', 'body']).execute()
     expect(kept.map(text => [text.digest.toString('hex'), text.body])).toEqual([[again.reason_digest, 'The layer was empty.']])
     expect(again.supply_no).not.toBe(one!.supply_no)
+  })
+})
+
+describe('a copy as a new draft', () => {
+  it('says which lab it comes from, and comes from no other course', async () => {
+    const posted = await make(body(layers()))
+    const copy = (courseId: string, ancestorId: string) => createLab(stores, { ...department.asked, courseId, body: { ...body(layers()), title: 'A copy' }, ancestorId }, now)
+    const made = await copy(department.courseId, posted.id)
+    expect(await stores.read.selectFrom('lab').select(['ancestor_id', 'state', 'version']).where('id', '=', made.id).executeTakeFirstOrThrow()).toEqual({ ancestor_id: posted.id, state: 'draft', version: 1 })
+    const elsewhere = await createCourse(stores, { ...department.asked, course: { termId: department.termId, code: 'ATM 302', title: 'Another', alsoListedAs: [], lateRule: { kind: 'none' }, conventionRevisionId: null, sections: ['A'], leadPersonId: department.people.lead } }, now)
+    await expect(copy(elsewhere.id, posted.id)).rejects.toMatchObject({ code: 'not_found' })
+    await expect(copy(department.courseId, 'no-such-lab')).rejects.toMatchObject({ code: 'not_found' })
   })
 })
 

@@ -3,6 +3,8 @@ import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { openDatabase, type OpenDatabase } from '../../../server/db/open'
+import type { AccessPage } from '#shared/schemas/departmentReplies'
+import { listAccess } from '../../../server/domain/records/listAccess'
 import { readVisit } from '../../../server/domain/records/readVisit'
 import { buildWorld, type World } from '../../fixtures/world'
 
@@ -53,5 +55,23 @@ describe('what a visitor reads', () => {
     expect(await entries()).toHaveLength(1)
     await readVisit(stores, role, now + 3_700_000)
     expect(await entries()).toHaveLength(2)
+  })
+
+  it('can be read by the admin: who looked at whose record, of whichever of the two, a page at a time, and stays as it stands', async () => {
+    await readVisit(stores, role, now)
+    const lines = await logged()
+    const all: AccessPage['lines'] = []
+    let page = await listAccess(stores.read, { personId: null, before: null })
+    for (all.push(...page.lines); page.next !== null; all.push(...page.lines)) page = await listAccess(stores.read, { personId: null, before: page.next })
+    expect(all.map(line => line.seq)).toEqual(lines.map(line => line.seq).toSorted((a, b) => b - a))
+    expect(new Set(all.map(line => line.by))).toEqual(new Set([world.people.visitor!.name]))
+    const owner = await stores.read.selectFrom('membership').innerJoin('person', 'person.id', 'membership.person_id').select(['person.id', 'person.display_name as name', 'membership.id as membershipId']).where('membership.id', '=', lines[0]!.subject_membership_id).executeTakeFirstOrThrow()
+    const theirs = await listAccess(stores.read, { personId: owner.id, before: null })
+    expect(theirs.lines.length).toBeGreaterThan(0)
+    expect(theirs.lines.every(line => line.about === owner.name && line.route === 'GET /api/department/visit')).toBe(true)
+    expect((await listAccess(stores.read, { personId: role.personId, before: null })).lines[0]?.seq).toBe(all[0]?.seq)
+    expect((await listAccess(stores.read, { personId: 'nobody', before: null })).lines).toEqual([])
+    expect(page.people.map(person => person.name)).toEqual(expect.arrayContaining([world.people.visitor!.name, owner.name]))
+    expect(() => stores.raw.prepare('delete from access_log').run()).toThrow(/append-only/)
   })
 })
