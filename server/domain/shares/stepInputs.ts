@@ -53,7 +53,7 @@ function readShare(input: InputDefinition, source: Extract<InputSource, { from: 
   if (source.read === 'highBound') return siFromText(String(item.highM), 'm', input.kind)
   const column = columnOf(rows, source.column)
   if (!column) return null
-  const inSi = (row: number) => siOf(column, input.kind)[row] ?? null
+  const inSi = (row: number) => siOf(column, input.kind, row)
   if (source.read === 'lowest' || source.read === 'highest') {
     const row = edgeRow(rows, source.read)
     return row === null ? null : inSi(row)
@@ -67,15 +67,17 @@ function readShare(input: InputDefinition, source: Extract<InputSource, { from: 
   return source.read === 'layer' ? series : series.reduce((sum, value) => sum + value, 0) / series.length
 }
 
-/** A served column in SI, by the kind in which it is read: rows that were served never change, and a class computes on few of them. */
-const inSiOf = new WeakMap<ServedColumn, Map<NumberKind, readonly (number | null)[]>>()
+/** Served cells in SI, by the kind in which they are read: rows that were served never change, and a class computes on few of them. */
+const inSiOf = new WeakMap<ServedColumn, Map<NumberKind, (number | null | undefined)[]>>()
 
-function siOf(column: ServedColumn, kind: NumberKind): readonly (number | null)[] {
-  const known = inSiOf.get(column) ?? new Map<NumberKind, readonly (number | null)[]>()
-  inSiOf.set(column, known)
-  const values = known.get(kind) ?? column.texts.map(text => siFromText(text, column.unit, kind))
-  known.set(kind, values)
-  return values
+function siOf(column: ServedColumn, kind: NumberKind, row: number): number | null {
+  const kinds = inSiOf.get(column) ?? new Map<NumberKind, (number | null | undefined)[]>()
+  const values = kinds.get(kind) ?? []
+  const value = values[row] ?? siFromText(column.texts[row] ?? '', column.unit, kind)
+  values[row] = value
+  kinds.set(kind, values)
+  inSiOf.set(column, kinds)
+  return value
 }
 
 function whyMissing(input: InputDefinition, source: InputSource): string {
