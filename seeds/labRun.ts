@@ -35,10 +35,10 @@ export class LabRun {
   }
 
   /** Takes the draft that came along from the last term, and gives it this term's flights. */
-  async rewrite(courseId: string, body: LabBody): Promise<void> {
+  async rewrite(courseId: string, body: LabBody, actorId: string, now: number): Promise<void> {
     const lab = await this.stores.read.selectFrom('lab').select(['id', 'version']).where('course_id', '=', courseId).where('title', '=', body.title).executeTakeFirstOrThrow()
     this.labId = lab.id
-    this.version = (await saveRevision(this.stores, { labId: lab.id, seenVersion: lab.version, body })).version
+    this.version = (await saveRevision(this.stores, { labId: lab.id, actorId, seenVersion: lab.version, body }, now)).version
   }
 
   async post(sections: readonly { id: string, dates: LabDates }[], actorId: string, now: number, more: { attempts?: number, lateRule?: LateRule } = {}): Promise<void> {

@@ -73,8 +73,9 @@ function tellLab(stage: Stage, lab: Told): void {
     const { id } = await course()
     const body = readyLab(lab.lab, supply())
     const came = await workshop.stores.read.selectFrom('lab').select('id').where('course_id', '=', id).where('title', '=', body.title).where('state', '=', 'draft').executeTakeFirst()
-    if (came) await run.rewrite(id, body)
-    else await run.write(id, body, await department.membershipId(id, teacher), now)
+    const author = await department.membershipId(id, teacher)
+    if (came) await run.rewrite(id, body, author, now)
+    else await run.write(id, body, author, now)
   })
   timeline.at(opensAt - 1.9 * day, async (now) => {
     const { id, sections } = await course()

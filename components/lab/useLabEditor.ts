@@ -41,6 +41,19 @@ export function useLabEditor(lab: Ref<EditedLab>) {
   }, { deep: true })
   onBeforeUnmount(() => clearTimeout(timer))
 
+  /** The version that somebody else saved meanwhile; null while nobody did. */
+  const newer = computed(() => {
+    const problem = failure.value === null ? null : readProblem(failure.value)
+    return problem?.code === 'changed_meanwhile' && typeof problem.facts.version === 'number' ? problem.facts.version : null
+  })
+
+  /** What one has typed in place of what the other saved: asked for in so many words, never by itself. */
+  async function keepOver(): Promise<boolean> {
+    if (newer.value === null) return false
+    version.value = newer.value
+    return keep()
+  }
+
   async function keep(): Promise<boolean> {
     if (!read.value.body) return false
     isKeeping.value = true
@@ -61,5 +74,5 @@ export function useLabEditor(lab: Ref<EditedLab>) {
     }
   }
 
-  return { draft, version, preview, problems, read, isKept, isKeeping, failure, keep }
+  return { draft, version, preview, problems, read, isKept, isKeeping, failure, newer, keep, keepOver }
 }

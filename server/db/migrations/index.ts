@@ -6,6 +6,7 @@ import { privateReasons } from './0004_private_reasons'
 import { filesOfPeople } from './0005_files_of_people'
 import { ownedReds } from './0006_owned_reds'
 import { accessLogRead } from './0007_access_log_read'
+import { lastChanges } from './0008_last_changes'
 
 /** Every migration, by name, in order. A test holds this list against the folder. */
 export const migrations: Record<string, Migration> = {
@@ -16,4 +17,5 @@ export const migrations: Record<string, Migration> = {
   '0005_files_of_people': filesOfPeople,
   '0006_owned_reds': ownedReds,
   '0007_access_log_read': accessLogRead,
+  '0008_last_changes': lastChanges,
 }

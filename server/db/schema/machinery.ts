@@ -56,6 +56,12 @@ export interface AccessLogTable {
   route: string
 }
 
+export interface LastChangeTable {
+  object_id: string
+  by_actor_id: string
+  at: number
+}
+
 export interface InstallationTable {
   key: string
   value_json: string

@@ -2,7 +2,7 @@ import type { SourceFileTable, UploadTable, SensorTable, SensorAccuracyTable, Re
 import type { TermTable, CourseTable, CourseListingTable, SectionTable, MembershipTable, TaSectionTable, ConflictOfInterestTable } from './department'
 import type { LabTable, LabRevisionTable, StepTable, StepEdgeTable, AcceptedTable, OwnedRedTable, PostingTable, AllowanceTable, StandingTable, HolderTable, HolderMemberTable, DrawTable, ShareTable } from './labs'
 import type { LedgerChainTable, LedgerEntryTable, PrivateBodyTable, WorkFileTable, LedgerAnchorTable } from './ledger'
-import type { CounterTable, RequestKeyTable, JobTable, OutboxTable, AccessLogTable, InstallationTable } from './machinery'
+import type { CounterTable, RequestKeyTable, JobTable, OutboxTable, AccessLogTable, LastChangeTable, InstallationTable } from './machinery'
 import type { DisputeTable, DisputeNoteTable, RulingTable, MarkingRunTable, MarkingRunItemTable } from './moderation'
 import type { PersonTable, CredentialTable, SessionTable, OneTimeTokenTable, ActorTable, DepartmentRoleTable } from './people'
 import type { ReferenceBuildTable, ConventionRevisionTable } from './reference'
@@ -68,5 +68,6 @@ export interface Database {
   job: JobTable
   outbox: OutboxTable
   access_log: AccessLogTable
+  last_change: LastChangeTable
   installation: InstallationTable
 }

@@ -5,6 +5,7 @@ import type { MarkTable } from '../../db/schema/work'
 import { once, type Once } from '../../db/queries/requestKeys'
 import type { Read, Stores, Trx } from '../../db/writer'
 import { newId } from '../ids'
+import { noteChange, refuseOlder } from '../lastChange'
 import { appendEntry, courseChain, digestOf, keepPrivateText } from '../ledger/appendEntry'
 import { evaluationsDigest, marksDigest, rulingDigest, type MarkFact } from '../ledger/coveredDigests'
 import type { Reference } from '../marking/reference'
@@ -97,6 +98,7 @@ async function store(trx: Trx, reference: Reference, input: RuleDispute, { rulin
   if (marks.length > 0) await trx.insertInto('mark').values(marks.map(mark => ({ ...mark.row, ...link }))).execute()
   const state = input.body.kind === 'fault' && level === 'first' ? 'appealed' as const : level === 'appeal' ? 'closed' as const : 'ruled' as const
   await trx.updateTable('dispute').set({ state, version: ground.version + 1, taken_by: null, taken_until: null }).where('id', '=', ground.id).execute()
+  await noteChange(trx, ground.id, input.ruler.actorId, now)
   await closeLikeDisputes(trx, ground, cases)
   await tell(trx, ground, rulingId, state, cases, now)
   return { rulingId, version: ground.version + 1, state, changed: marks.length }
@@ -108,7 +110,7 @@ async function assertMayRule(trx: Trx, ground: DisputeGround, input: RuleDispute
   const why = await reasonNotToRule(trx, ground, input.ruler)
   if (why) refuse(why)
   if (ground.takenBy !== null && ground.takenBy !== input.ruler.actorId && (ground.takenUntil ?? 0) > now) refuse('taken_by_another', { by: await actorName(trx, ground.takenBy) })
-  if (ground.version !== input.seenVersion) refuse('changed_meanwhile', { by: 'Somebody' })
+  if (ground.version !== input.seenVersion) await refuseOlder(trx, ground.id, ground.version)
 }
 
 async function changedMark(trx: Trx, ground: DisputeGround, pointsMilli: number, cause: 'ruling' | 'appeal', now: number): Promise<{ row: NewMark, before: number }> {

@@ -5,6 +5,7 @@ import type { Read, Stores, Trx } from '../../db/writer'
 import type { Observations } from '../../observations/chunks'
 import { doOnce, type Asked } from '../asked'
 import { newId } from '../ids'
+import { noteChange, refuseOlder } from '../lastChange'
 import { appendEntry, courseChain } from '../ledger/appendEntry'
 import { currentDraw, giveShares, insertDraw, type DrawnSupply } from '../shares/draws'
 import type { DrawnItem } from '../shares/loadedShare'
@@ -51,6 +52,7 @@ export async function postLab({ read, write }: Stores, observations: Observation
     const shares = await giveShares(trx, draw, students.map(row => row.id), now)
     const version = lab.lab.version + 1
     await trx.updateTable('lab').set({ state: 'posted', version }).where('id', '=', lab.lab.id).execute()
+    await noteChange(trx, lab.lab.id, input.actorId, now)
     await appendEntry(trx, {
       chain: courseChain(lab.lab.courseId), at: now, actor: input.actorId, action: 'lab.posted',
       facts: { labId: lab.lab.id, revisionId: draw.revisionId, drawId: draw.id, shares, lateRule: rule, attempts: input.posting.attempts, keep: input.posting.keep, postings: postings.map(({ id, sectionId, opensAt, dueAt }) => ({ id, sectionId, opensAt, dueAt })) },
@@ -84,7 +86,7 @@ function drawnItem(lab: PreparedLab, { versionId, leg, lowM, highM }: SupplyItem
 
 async function assertUnchanged(trx: Trx, { lab, hasDraw }: Prepared, seenVersion: number): Promise<void> {
   const present = await trx.selectFrom('lab').innerJoin('course', 'course.id', 'lab.course_id').select(['lab.version', 'course.convention_revision_id as convention']).where('lab.id', '=', lab.lab.id).executeTakeFirstOrThrow()
-  if (present.version !== seenVersion || present.version !== lab.lab.version || (!hasDraw && present.convention !== lab.conventionRevisionId)) refuse('changed_meanwhile', { version: present.version })
+  if (present.version !== seenVersion || present.version !== lab.lab.version || (!hasDraw && present.convention !== lab.conventionRevisionId)) await refuseOlder(trx, lab.lab.id, present.version)
 }
 
 async function assertSections(trx: Trx, courseId: string, dates: readonly ResolvedDates[]): Promise<void> {

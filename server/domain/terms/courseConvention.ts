@@ -9,6 +9,7 @@ import type { Read, Stores } from '../../db/writer'
 import { doOnce, type Asked } from '../asked'
 import { conventionBody, ensureConvention } from '../labs/conventions'
 import { renderInline } from '../labs/renderLabText'
+import { noteChange, refuseOlder } from '../lastChange'
 import { appendEntry, courseChain } from '../ledger/appendEntry'
 import { assertOpenTerm } from './assertOpenTerm'
 
@@ -38,7 +39,7 @@ export function chooseConvention({ write }: Stores, input: Asked & { courseId: s
     const course = await trx.selectFrom('course').select(['id', 'term_id', 'version', 'convention_revision_id as before']).where('id', '=', input.courseId).executeTakeFirst()
     if (!course) return refuse('not_found')
     await assertOpenTerm(trx, course.term_id)
-    if (course.version !== input.seenVersion) refuse('changed_meanwhile', { version: course.version })
+    if (course.version !== input.seenVersion) await refuseOlder(trx, course.id, course.version)
     const { choice } = input
     const chosen = choice.is === 'named' ? findConvention(choice.key) : { ...choice.convention, key: ownKey(course.id) }
     if (!chosen) return refuse('not_found')
@@ -46,6 +47,7 @@ export function chooseConvention({ write }: Stores, input: Asked & { courseId: s
     const { id } = await ensureConvention(trx, chosen, now)
     const version = course.version + 1
     await trx.updateTable('course').set({ convention_revision_id: id, version }).where('id', '=', course.id).execute()
+    await noteChange(trx, course.id, input.actorId, now)
     await appendEntry(trx, { chain: courseChain(course.id), at: now, actor: input.actorId, action: 'course.convention', facts: { courseId: course.id, before: course.before, after: id, key: chosen.key } })
     return { version }
   }))

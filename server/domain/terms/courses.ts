@@ -5,6 +5,7 @@ import type { Stores, Trx } from '../../db/writer'
 import { doOnce, type Asked } from '../asked'
 import { newId } from '../ids'
 import { ensureConvention } from '../labs/conventions'
+import { noteChange, refuseOlder } from '../lastChange'
 import { appendEntry, courseChain } from '../ledger/appendEntry'
 import { assertOpenTerm } from './assertOpenTerm'
 import { insertMembership } from './enrol'
@@ -51,11 +52,12 @@ export function editCourse({ write }: Stores, input: Asked & { courseId: string,
     const before = await trx.selectFrom('course').selectAll().where('id', '=', input.courseId).executeTakeFirst()
     if (!before) return refuse('not_found')
     await assertOpenTerm(trx, before.term_id)
-    if (before.version !== input.seenVersion) refuse('changed_meanwhile')
+    if (before.version !== input.seenVersion) await refuseOlder(trx, before.id, before.version)
     const alsoListedAs = await freeCodes(trx, { termId: before.term_id, courseId: before.id, ...input.course })
     const listed = await trx.selectFrom('course_listing').select('code').where('course_id', '=', before.id).orderBy('code').execute()
     const version = before.version + 1
     await trx.updateTable('course').set({ code: input.course.code, title: input.course.title, late_rule_json: JSON.stringify(input.course.lateRule), version }).where('id', '=', before.id).execute()
+    await noteChange(trx, before.id, input.actorId, now)
     await trx.deleteFrom('course_listing').where('course_id', '=', before.id).execute()
     await insertListings(trx, before.id, alsoListedAs)
     await appendEntry(trx, {

@@ -123,6 +123,14 @@ describe('objecting', () => {
 describe('ruling', () => {
   beforeEach(release)
 
+  it('of one who saw an older state is refused, and they are told who was first', async () => {
+    const { disputeId } = await object(1)
+    await takeDispute(stores, { disputeId, ruler: ruler('bo'), seenVersion: 1, giveBack: false }, later)
+    await takeDispute(stores, { disputeId, ruler: ruler('bo'), seenVersion: 2, giveBack: true }, later)
+    const refused = await rule(disputeId, ruler('ann'), { kind: 'uphold', reason: 'As asked.' }).catch((error: unknown) => error instanceof DomainError ? { code: error.code, by: error.facts.by, version: error.facts.version } : error)
+    expect(refused).toEqual({ code: 'changed_meanwhile', by: 'TA bo', version: 3 })
+  })
+
   it('keeps its reason where it can be erased: gone there, it is gone everywhere, and the ledger stays whole', async () => {
     const { disputeId } = await object(1)
     await rule(disputeId, ruler('ann'), { kind: 'change', pointsMilli: 1000, reason: 'Mira read the plot with care.' })

@@ -79,8 +79,8 @@ describe('a lab is written, checked and posted', () => {
 
   it('saves against the version that was seen, and refuses a stale one', async () => {
     const changed = { ...body(layers()), title: 'Rates of the morning' }
-    expect(await saveRevision(stores, { labId: lab.id, seenVersion: 1, body: changed })).toEqual({ version: 2 })
-    await expect(saveRevision(stores, { labId: lab.id, seenVersion: 1, body: changed })).rejects.toMatchObject({ code: 'changed_meanwhile' })
+    expect(await saveRevision(stores, { labId: lab.id, actorId: department.asked.actorId, seenVersion: 1, body: changed }, now)).toEqual({ version: 2 })
+    await expect(saveRevision(stores, { labId: lab.id, actorId: department.asked.actorId, seenVersion: 1, body: changed }, now)).rejects.toMatchObject({ code: 'changed_meanwhile', facts: { by: 'Ada Min', version: 2 } })
     expect((await describeLab(stores.read, observations, lab.id)).title).toBe('Rates of the morning')
   })
 
@@ -150,7 +150,7 @@ describe('a lab is written, checked and posted', () => {
 
   it('freezes the revision: neither the use case nor the database lets it change', async () => {
     await post(lab.id, 1)
-    await expect(saveRevision(stores, { labId: lab.id, seenVersion: 2, body: body(layers()) })).rejects.toMatchObject({ code: 'lab_not_draft' })
+    await expect(saveRevision(stores, { labId: lab.id, actorId: department.asked.actorId, seenVersion: 2, body: body(layers()) }, now)).rejects.toMatchObject({ code: 'lab_not_draft' })
     await expect(stores.write(trx => trx.updateTable('step').set({ points_milli: 1 }).where('lab_revision_id', '=', lab.revisionId).execute())).rejects.toThrow('frozen')
     await expect(stores.write(trx => trx.updateTable('lab_revision').set({ body_json: '{}' }).where('id', '=', lab.revisionId).execute())).rejects.toThrow('frozen')
   })

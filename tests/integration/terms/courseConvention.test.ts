@@ -30,6 +30,7 @@ describe('the convention of a course', () => {
     await choose(2, own({ constants: { ...closed1004.constants, g: 9.8 } }))
     expect(await at()).toMatchObject({ revisionNo: 2, convention: { constants: { g: 9.8 } } })
     await choose(3, { is: 'named', key: 'closed-1004' })
+    await expect(choose(2, own({}))).rejects.toMatchObject({ code: 'changed_meanwhile', facts: { by: 'Ada Min', version: 4 } })
     expect(await at()).toMatchObject({ version: 4, isOwn: false })
     const told = await db.read.selectFrom('ledger_entry').select('action').where('action', '=', 'course.convention').execute()
     expect(told).toHaveLength(3)

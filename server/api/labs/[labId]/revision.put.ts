@@ -13,5 +13,5 @@ export default defineApiHandler({
   body: labBody,
   reply: labSavedReply,
   guards: true,
-  handle: ({ params, body, seenVersion }) => saveRevision(useStores(), { labId: params.labId, seenVersion: seenVersion ?? refuse('version_missing'), body }),
+  handle: ({ params, body, seenVersion, acting, now }) => saveRevision(useStores(), { labId: params.labId, actorId: acting?.actorId ?? refuse('not_found'), seenVersion: seenVersion ?? refuse('version_missing'), body }, now),
 })
