@@ -27,7 +27,8 @@ export async function listLedger(read: Read, { chain, action, before }: { chain:
     head: head ? { seq: head.seq, digest: head.head.toString('hex') } : null,
     actions: actions.map(row => row.action),
     entries: entries.map((entry, at) => ({
-      seq: entry.seq, about: about[at] ?? [], at: new Date(entry.at).toISOString(), action: entry.action, by: names.get(entry.actor) ?? (entry.actor === 'system' ? 'The house itself' : entry.actor),
+      // what people do themselves needs no second mention of them
+      seq: entry.seq, about: (about[at] ?? []).filter(name => name !== names.get(entry.actor)), at: new Date(entry.at).toISOString(), action: entry.action, by: names.get(entry.actor) ?? (entry.actor === 'system' ? 'The house itself' : entry.actor),
       facts: entry.facts_json, digest: entry.digest.toString('hex'), hasPrivateText: entry.private_digest !== null,
     })),
     next: rows.length > entriesPerPage ? entries[entries.length - 1]!.seq : null,
