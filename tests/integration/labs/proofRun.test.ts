@@ -81,7 +81,7 @@ describe('the proof run', () => {
     await expect(post(labId)).rejects.toMatchObject({ code: 'proof_open', facts: { count: 1 } })
     await ownReds(stores, { ...department.asked, labId, keys: [red!.key], reason: 'The value of the day is what it is.' }, now)
     expect((await prove(labId)).reds[0]!.owned).toMatchObject({ reason: 'The value of the day is what it is.' })
-    await saveRevision(stores, { labId, seenVersion: 1, body: body(bookish, [{ ...own, title: 'Another title' }]) })
+    await saveRevision(stores, { labId, actorId: department.asked.actorId, seenVersion: 1, body: body(bookish, [{ ...own, title: 'Another title' }]) }, now)
     await expect(post(labId, 2)).rejects.toMatchObject({ code: 'proof_open' })
     const [again] = (await prove(labId)).reds
     await ownReds(stores, { ...department.asked, labId, keys: [again!.key], reason: 'As before.' }, now)
