@@ -40,7 +40,9 @@ export interface DraftStep extends DraftAsked {
   options: DraftOption[]
 }
 export interface DraftSupply { versionId: string, leg: string, lowM: string, highM: string }
-export interface LabDraft { title: string, text: string, steps: DraftStep[], supply: DraftSupply[] }
+/** What a lab carries beside what the editor's fields show: kept as it is. */
+export type DraftParts = Omit<LabBody, 'title' | 'text' | 'steps' | 'supply'>
+export interface LabDraft { title: string, text: string, steps: DraftStep[], supply: DraftSupply[], parts: DraftParts }
 
 export const emptySource = (): DraftSource => ({ from: '', column: '', read: 'layer', value: '', unit: '', name: '', key: '' })
 export const emptyAsked = (): DraftAsked => ({ quantity: '', variant: '', inputs: {}, unit: '', digits: '3', marks: '1', grantedAbsolute: '', grantedPercent: '', slipMarks: '', digitsMarks: '', nearWidths: '', nearMarks: '' })
@@ -58,11 +60,11 @@ export function emptyStep(key: string, kind: StepKind): DraftStep {
   }
 }
 
-export function draftOf(body: LabBody): LabDraft {
+export function draftOf({ title, text, steps, supply, ...parts }: LabBody): LabDraft {
   return {
-    title: body.title, text: body.text,
-    supply: body.supply.map(item => ({ versionId: item.versionId, leg: item.leg, lowM: String(item.lowM), highM: String(item.highM) })),
-    steps: body.steps.map(stepDraft),
+    title, text, parts,
+    supply: supply.map(item => ({ versionId: item.versionId, leg: item.leg, lowM: String(item.lowM), highM: String(item.highM) })),
+    steps: steps.map(stepDraft),
   }
 }
 

@@ -63,7 +63,7 @@ export interface ReadDraft { body: LabBody | null, problems: { path: string, mes
 /** Reads the fields into a body by the schema that the server uses; what cannot be read is named with its field. */
 export function readDraft(draft: LabDraft): ReadDraft {
   const read = labBody.safeParse({
-    title: draft.title, text: draft.text,
+    ...draft.parts, title: draft.title, text: draft.text,
     supply: draft.supply.map(item => ({ versionId: item.versionId, leg: item.leg, lowM: typedNumber(item.lowM), highM: typedNumber(item.highM) })),
     steps: draft.steps.map(stepBody),
   })

@@ -1,13 +1,12 @@
 import { z } from 'zod'
 import { askedOf } from './askedSteps'
+import { labParts, leg } from './labParts'
 import { labStep } from './steps'
 
 /**
  * A lab's revision as an author writes it: kept in `lab_revision.body_json`, checked by the editor's form, its route and its row alike.
  * Heights are meters above the flight's datum; points are thousandths of a mark.
  */
-
-export const leg = z.enum(['up', 'down', 'all'])
 
 export const supplyItem = z.object({ versionId: z.string().min(1), leg, lowM: z.number(), highM: z.number() })
   .refine(item => item.highM > item.lowM, { path: ['highM'], message: 'The layer needs a top above its base.' })
@@ -19,6 +18,7 @@ export const labBody = z.object({
   text: z.string().max(40_000).default(''),
   supply: z.array(supplyItem).max(500),
   steps: z.array(labStep).max(60),
+  ...labParts,
 }).superRefine((body, context) => {
   /** Keys of what is asked so far, and of the steps that are made of parts. */
   const asked = new Set<string>(), taken = new Set<string>()

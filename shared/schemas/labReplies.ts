@@ -1,5 +1,6 @@
 import { z } from 'zod'
-import { labBody, lateRule, leg } from './lab'
+import { labBody, lateRule } from './lab'
+import { leg } from './labParts'
 import { inputSource } from './steps'
 import { heightBar } from './marks'
 

@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto'
 import { z } from 'zod'
 import { drawAlgorithm, drawOrdinals } from '#shared/marking/draw'
-import { leg } from '#shared/schemas/lab'
+import { leg } from '#shared/schemas/labParts'
 import type { Read, Trx } from '../../db/writer'
 import { newId } from '../ids'
 import { digestOf } from '../ledger/appendEntry'

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import type { LabBody } from '../../../../../shared/schemas/lab'
+import { labBody, type LabBody } from '../../../../../shared/schemas/lab'
 import type { NumberStep } from '../../../../../shared/schemas/steps'
 import { rowsOfLeg } from '../../../../../server/domain/shares/legs'
 import { csvOf, servedText, serveFlight, serveRows as serveItem, type Flight } from '../../../../../server/domain/shares/servedData'
@@ -10,7 +10,7 @@ const rate: NumberStep = {
   key: 'rate', kind: 'number', title: 'Rate', text: '', pointsMilli: 3000, quantity: 'layer-lapse-rate', variant: null, unit: 'K/km', digits: 3, granted: {}, slipMilli: 0, digitsMilli: 0, near: null,
   inputs: { temperature: { from: 'share', column: 'air-temperature', read: 'layer' }, height: { from: 'share', column: 'height', read: 'layer' } },
 }
-const body: LabBody = { title: 'Rates', text: '', supply: [], steps: [rate] }
+const body: LabBody = labBody.parse({ title: 'Rates', supply: [], steps: [rate] })
 
 function flight(heights: number[], temperatures: number[], more: Partial<Flight> = {}): Flight {
   return {
