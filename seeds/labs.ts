@@ -1,18 +1,22 @@
-import { readFileSync } from 'node:fs'
-import { z } from 'zod'
-import { labBody, type LabBody, type SupplyItem } from '#shared/schemas/lab'
+import { readdirSync, readFileSync } from 'node:fs'
+import type { LabBody, SupplyItem } from '#shared/schemas/lab'
+import { readyLabs, type LibraryTexts } from '../server/domain/labs/library/readyLabs'
 
-/** The ready labs: a text in `content/labs/<key>.md`, its steps beside it. */
-export const readyLabs = ['morning-inversion', 'weighing-a-layer', 'heated-layer', 'lid-comes-off'] as const
-export type ReadyLab = (typeof readyLabs)[number]
+/** The ready labs that the demo's courses took. */
+export type ReadyLab = 'morning-inversion' | 'weighing-a-layer' | 'heated-layer' | 'lid-comes-off'
 
-const withoutSupply = z.object({ title: z.string(), steps: z.array(z.unknown()) })
-const read = (name: string) => readFileSync(new URL(`../content/labs/${name}`, import.meta.url), 'utf8')
+const folder = new URL('../content/labs/', import.meta.url)
+
+/** The texts of the library, by key. */
+export function libraryTexts(): LibraryTexts {
+  return new Map(readdirSync(folder).filter(name => name.endsWith('.md')).map(name => [name.replace(/\.md$/, ''), readFileSync(new URL(name, folder), 'utf8')]))
+}
 
 /** A ready lab with the flights and layers from which its shares are drawn. */
 export function readyLab(key: ReadyLab, supply: readonly SupplyItem[]): LabBody {
-  const { title, steps } = withoutSupply.parse(JSON.parse(read(`${key}.json`)))
-  return labBody.parse({ title, text: read(`${key}.md`), steps, supply })
+  const found = readyLabs(libraryTexts()).find(lab => lab.key === key)
+  if (!found) throw new Error(`The library has no lab ${key}.`)
+  return { ...found.body, supply: [...supply] }
 }
 
 /** Layers of a flight's way up, by their bounds in meters. */

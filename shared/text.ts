@@ -54,6 +54,7 @@ export const refusalWords: Record<RefusalCode, Words> = {
   too_many_stations: { title: 'Too many values', detail: f => `Column "${f.column ?? ''}" has more than ${f.limit ?? 200} different values. Choose the column that names the station.` },
   flight_too_long: { title: 'Too long for a flight', detail: f => `A flight has at most ${f.limit ?? 500000} rows. Import this file as a station record.` },
   convention_open: { title: 'The convention cannot be kept', detail: f => String(f.reason ?? 'cp − cv must be R.') },
+  lab_text_unreadable: { title: 'This text is no lab yet', detail: f => `Line ${f.line ?? 1}: ${f.reason ?? ''}` },
   lab_not_draft: plain('Not a draft', 'This lab is posted and does not change: marks refer to it. Copy it as a new draft.'),
   lab_closed: { title: 'The lab is closed', detail: f => `It closed on ${f.at ?? 'its closing day'}. Your text is kept in this browser; ask your instructor about an extension.` },
   lab_not_open: plain('Not open yet', 'The lab opens later.'),

@@ -65,6 +65,7 @@ export const policies = {
   // labs
   'lab:list': { scope: 'course', roles: everyone, hides: { student: ['drafts', 'reference'] } },
   'lab:write': { scope: 'course', roles: teachers, openTerm: true },
+  'lab:begin': { scope: 'course', roles: teachers },
   'lab:edit': { scope: 'course', roles: [...teachers, 'ta'] },
   'lab:flights': { scope: 'course', roles: [...teachers, 'ta'] },
   'lab:preview': { scope: 'course', roles: [...teachers, 'ta'] },
