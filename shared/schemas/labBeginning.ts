@@ -13,7 +13,7 @@ export type LabBeginning = z.infer<typeof labBeginning>
 export const labBeginningsReply = z.object({
   ready: z.array(z.object({
     key: z.string(), title: z.string(), kind: labKind.nullable(), minutes: z.number().nullable(), aims: z.array(z.string()), steps: z.number(), pointsMilli: z.number(),
-    goesOut: z.boolean(), hasPractice: z.boolean(), needs: z.array(z.string()), missing: z.array(z.string()), shares: z.number(),
+    goesOut: z.boolean(), hasPractice: z.boolean(), needs: z.array(z.string()), missing: z.array(z.string()), layers: z.number(),
   })),
   earlier: z.array(z.object({ labId: z.string(), title: z.string(), course: z.string(), term: z.string(), state: labState })),
   /** Flights that were looked at. */

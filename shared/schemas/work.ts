@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { lateRule } from './lab'
+import { fieldPlan } from './labParts'
 import { stepKey } from './steps'
 import { labStanding } from './marks'
 
@@ -81,7 +82,7 @@ export type WorkStep = z.infer<typeof workStep>
 /** Everything on a student's work page. No reference, no band, no other student. */
 export const work = z.object({
   share: z.object({ id: z.string(), no: z.number().int(), lowM: z.number(), highM: z.number(), leg: z.string(), dataSet: z.string() }),
-  lab: z.object({ id: z.string(), title: z.string(), revisionNo: z.number().int(), textHtml: z.string(), maxMilli: z.number().int() }),
+  lab: z.object({ id: z.string(), title: z.string(), revisionNo: z.number().int(), textHtml: z.string(), maxMilli: z.number().int(), aims: z.array(z.string()), fieldPlan: fieldPlan.nullable(), hasPractice: z.boolean() }),
   convention: z.object({ title: z.string(), constants: z.array(z.object({ name: z.string(), label: z.string(), value: z.number(), unit: z.string() })) }),
   opensAt: z.iso.datetime(), dueAt: z.iso.datetime(), isOwnDue: z.boolean(), closesAt: z.iso.datetime().nullable(), zone: z.string(), lateRule,
   attempts: z.number().int(), keep: z.enum(['last', 'best']), feedback: z.enum(['at_once', 'after_release']), isReleased: z.boolean(),

@@ -49,7 +49,7 @@ describe.skipIf(!chromiumPath)('the whole chain', () => {
   it('an instructor writes a lab on it, looks at every share, and posts it', async () => {
     const page = await house.as(house.people.withRole('instructor'))
     await go(page, `/c/${courseId}/labs`)
-    await page.getByRole('button', { name: 'Begin a lab' }).click()
+    await page.getByRole('link', { name: 'Begin a lab' }).click()
     await page.getByLabel('Title of the new lab').fill(title)
     await page.getByRole('button', { name: 'Begin the draft' }).click()
     await page.getByLabel('Title', { exact: true }).waitFor()

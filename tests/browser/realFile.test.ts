@@ -51,7 +51,7 @@ describeWithShared('a real file in the browser', () => {
     it('an instructor asks for the lapse rate of a layer of it', async () => {
       const page = await house.as(house.people.withRole('instructor'))
       await page.goto(`${house.server.url}/c/${course.id}/labs`)
-      await page.getByRole('button', { name: 'Begin a lab' }).click()
+      await page.getByRole('link', { name: 'Begin a lab' }).click()
       await page.getByLabel('Title of the new lab').fill(title)
       await page.getByRole('button', { name: 'Begin the draft' }).click()
       await page.getByLabel('Title', { exact: true }).waitFor()

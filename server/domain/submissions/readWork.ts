@@ -31,7 +31,7 @@ export async function readWork(read: Read, loadShare: (shareId: string) => Promi
   const numberOf = new Map(steps.map((step, at) => [step.key, at + 1]))
   return {
     share: { id: who.shareId, no: loaded.share.ordinal + 1, lowM: loaded.share.item.lowM, highM: loaded.share.item.highM, leg: loaded.share.item.leg, dataSet: `${dataSet.title}, version ${dataSet.no}` },
-    lab: { id: ground.labId, title: ground.labTitle, revisionNo: loaded.revision.no, textHtml: renderLabText(body.text), maxMilli: steps.reduce((sum, step) => sum + step.pointsMilli, 0) },
+    lab: { id: ground.labId, title: ground.labTitle, revisionNo: loaded.revision.no, textHtml: renderLabText(body.text), maxMilli: steps.reduce((sum, step) => sum + step.pointsMilli, 0), aims: body.aims, fieldPlan: body.fieldPlan, hasPractice: body.practice !== null },
     convention: { title: loaded.convention.title, constants: constantDefinitions.flatMap(({ name, label, unit }) => loaded.convention.constants[name] === undefined ? [] : [{ name, label, unit, value: loaded.convention.constants[name] }]) },
     opensAt: new Date(ground.opensAt).toISOString(), dueAt: new Date(personalDue(ground)).toISOString(), isOwnDue: personalDue(ground) > ground.dueAt, closesAt: closesAt === null ? null : new Date(closesAt).toISOString(),
     zone: ground.zone, lateRule: ground.lateRule, attempts: ground.attempts, keep: ground.keep, feedback: ground.feedback, isReleased: ground.releasedAt !== null,

@@ -47,7 +47,7 @@ async function bodyOf(read: Read, { courseId, memberships, texts, beginning }: B
 async function supplyOf(read: Read, observations: Observations, courseId: string, body: LabBody): Promise<LabBody['supply']> {
   if (body.conditions) {
     const { convention } = await conventionOfCourse(read, courseId)
-    const found = fillSupply(body, convention, await newestFlights(read, observations, courseId))
+    const found = await fillSupply(body, convention, await newestFlights(read, observations, courseId))
     if (found.length > 0) return found
   }
   const known = new Set((await listFlightVersions(read, courseId)).map(row => row.versionId))

@@ -60,13 +60,17 @@ export function faultsOf(body: LabBody, convention: Convention, { item, rows }: 
   })
 }
 
-/** Shares for a lab, from the first of these flights on, until there are as many as it wants: layers that meet its conditions and on which every step can be asked. */
-export function fillSupply(body: LabBody, convention: Convention, flights: readonly Flight[]): SupplyItem[] {
+/**
+ * Shares for a lab, from the first of these flights on, until there are as many as it wants: layers that meet its conditions and on which every
+ * step can be asked. Other requests get their turn between two layers.
+ */
+export async function fillSupply(body: LabBody, convention: Convention, flights: readonly Flight[]): Promise<SupplyItem[]> {
   const found: SupplyItem[] = []
   for (const flight of flights) {
     for (const layer of layersThatMeet(body, flight)) {
       if (found.length === body.conditions?.atMost) return found
       if (faultsOf(body, convention, layer).length === 0) found.push(layer.item)
+      await new Promise(setImmediate)
     }
   }
   return found

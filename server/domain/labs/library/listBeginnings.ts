@@ -5,8 +5,7 @@ import type { Read } from '../../../db/writer'
 import type { Observations } from '../../../observations/chunks'
 import type { ActorMembership } from '../../people/actor'
 import { neededQuantities } from '../../shares/servedData'
-import { conventionOfCourse } from '../conventions'
-import { fillSupply, missingColumns, newestFlights } from './fillSupply'
+import { layersThatMeet, missingColumns, newestFlights } from './fillSupply'
 import { readyLabs, type LibraryTexts } from './readyLabs'
 
 export interface ReadyLabRow {
@@ -22,20 +21,19 @@ export interface ReadyLabRow {
   /** Quantities that its data need; those of them that no flight of the course has. */
   needs: string[]
   missing: string[]
-  /** Shares that this course's flights give. */
-  shares: number
+  /** Layers of this course's flights that meet its conditions, as far as it would take them; each is tried step by step when the lab is taken. */
+  layers: number
 }
 
 /** What a lab can begin from in a course: the library, those first that its flights can supply, and the labs of other courses in which the same person writes. */
 export async function listBeginnings(read: Read, observations: Observations, input: { courseId: string, memberships: readonly ActorMembership[], texts: LibraryTexts }) {
-  const { convention } = await conventionOfCourse(read, input.courseId)
   const flights = await newestFlights(read, observations, input.courseId)
   const ready = readyLabs(input.texts).map(({ key, body }): ReadyLabRow => ({
     key, ...aboutLab(body), goesOut: body.fieldPlan !== null, hasPractice: body.practice !== null, needs: neededQuantities(body),
     missing: flights.length === 0 ? neededQuantities(body) : flights.map(flight => missingColumns(body, flight)).reduce((least, missing) => missing.length < least.length ? missing : least),
-    shares: fillSupply(body, convention, flights).length,
+    layers: Math.min(body.conditions?.atMost ?? 0, flights.reduce((sum, flight) => sum + layersThatMeet(body, flight).length, 0)),
   }))
-  return { ready: ready.sort((a, b) => Number(b.shares > 0) - Number(a.shares > 0)), earlier: await listEarlier(read, input), flights: flights.length }
+  return { ready: ready.sort((a, b) => Number(b.layers > 0) - Number(a.layers > 0)), earlier: await listEarlier(read, input), flights: flights.length }
 }
 
 const aboutLab = (body: LabBody) => ({
