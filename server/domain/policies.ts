@@ -74,6 +74,7 @@ export const policies = {
   'lab:release': { scope: 'course', roles: teachers },
   'lab:class': { scope: 'section', roles: staff },
   'lab:work': { scope: 'own', roles: ['student'], opened: true, hides: { student: ['reference', 'band', 'derived'] } },
+  'lab:practice': { scope: 'own', roles: ['student'], opened: true, hides: { student: ['own share', 'what is the same for every share'] } },
   'share:data': { scope: 'own', roles: everyone, opened: true, hides: { student: ['derived'] } },
   'share:redraw': { scope: 'course', roles: teachers, openTerm: true },
   'allowance:grant': { scope: 'course', roles: teachers, openTerm: true },

@@ -8,6 +8,7 @@ import { findQuantity } from '#shared/thermo/registry'
 import type { Convention } from '#shared/marking/types'
 import { isSameDimension } from '../shares/units'
 import { columnOf, type Flight } from '../shares/servedData'
+import { isFromFlight } from './practice/isFromFlight'
 import type { PreparedLab } from './prepareLab'
 
 /** What stops a lab from being asked, each with the field in which it stands. Empty where every step is bound and every flight has what the steps need. */
@@ -18,6 +19,7 @@ export function bindingProblems(lab: PreparedLab): FieldProblem[] {
     ...(body.supply.length === 0 ? [{ path: 'supply', message: 'Choose at least one flight and layer: shares are drawn from them.' }] : []),
     ...body.steps.flatMap((step, at) => problemsOfStep(body, step, lab.convention).map(problem => ({ path: `steps.${at}.${problem.path}`, message: problem.message }))),
     ...supplyProblems(lab),
+    ...practiceProblems(lab),
   ]
 }
 
@@ -104,6 +106,14 @@ function supplyProblems(lab: PreparedLab): FieldProblem[] {
       ...(item.lowM < 0 && flight.heightDatum !== 'sea level' && flight.heightDatum !== 'unknown' ? [{ path: `supply.${at}.lowM`, message: 'Below the ground.' }] : []),
     ]
   })
+}
+
+/** Readings for the practice are shown with their worked answers: they must be of a flight that is nobody's share. */
+function practiceProblems(lab: PreparedLab): FieldProblem[] {
+  const { practice, supply } = lab.revision.body
+  if (!practice) return []
+  const flights = new Set(supply.map(item => item.versionId).filter(versionId => lab.flights.has(versionId)))
+  return [...flights].filter(versionId => isFromFlight(practice, lab.flightOf(versionId).served)).map(versionId => ({ path: 'practice', message: `The readings for the practice are those of ${lab.flightOf(versionId).flight.title}, from which shares are drawn: their worked answers would give shares away.` }))
 }
 
 const isValue = (column: Flight['columns'][number]): boolean => column.role === 'value'

@@ -26,9 +26,14 @@ export function markedStep(step: AskedStep, no: number, ask: string, stored: Sto
     carriedBar: judgement.carriedBand ? heightBarOf(judgement.carriedBand, answer) : null,
     carriedNote: carriedNoteOf(question, judgement),
     slip: judgement.slip ? { key: judgement.slip.key, label: judgement.slip.label, sentence: judgement.slip.sentence } : null,
-    worked: { ...workedValue(step, judgement), reason: judgement.reason, lines: judgement.trace.map(line => ({ text: line.text, formulaHtml: texLine(line.formula), filledHtml: texLine(line.filled) })) },
+    worked: workedOf(step, judgement),
     notes: [...judgement.notes],
   }
+}
+
+/** The worked value of a step with the lines that lead to it, numbers put in. */
+export function workedOf(step: AskedStep, judgement: Judgement): MarkedStep['worked'] {
+  return { ...workedValue(step, judgement), reason: judgement.reason, lines: judgement.trace.map(line => ({ text: line.text, formulaHtml: texLine(line.formula), filledHtml: texLine(line.filled) })) }
 }
 
 /** A line of TeX; an empty one stays empty. */
