@@ -4,12 +4,12 @@ import { labBody } from '../../../shared/schemas/lab'
 import { defaultConvention } from '../../../shared/thermo/conventions'
 import { libraryTexts } from '../../../seeds/labs'
 import { ensureConvention } from '../../../server/domain/labs/conventions'
-import { checkLab } from '../../../server/domain/labs/checkLab'
 import { createLab } from '../../../server/domain/labs/createLab'
 import { takeLabText } from '../../../server/domain/labs/labFile/takeLabText'
 import { latestRevision } from '../../../server/domain/labs/latestRevision'
 import { beginLab } from '../../../server/domain/labs/library/beginLab'
 import { listBeginnings } from '../../../server/domain/labs/library/listBeginnings'
+import { proofRun } from '../../../server/domain/labs/proof/proofRun'
 import { postLab } from '../../../server/domain/labs/postLab'
 import type { ActorMembership } from '../../../server/domain/people/actor'
 import type { LabBeginning } from '../../../shared/schemas/labBeginning'
@@ -48,7 +48,7 @@ describe('a ready lab', () => {
     const body = await bodyOf(made.id)
     expect(made).toMatchObject({ shares: 5, left: 0 })
     expect(new Set(body.supply.map(item => item.versionId))).toEqual(new Set([cold]))
-    expect(await checkLab(stores.read, observations, made.id)).toMatchObject({ isReady: true, problems: [] })
+    expect(await proofRun(stores.read, observations, made.id)).toMatchObject({ isReady: true, problems: [], reds: [] })
 
     // From the list of labs: begin, take, then opening and due of each section, and post.
     let actions = 2
@@ -66,7 +66,7 @@ describe('a ready lab', () => {
   it('that no flight fits is taken all the same, without shares, and is not ready', async () => {
     const made = await begin({ from: 'library', key: 'water-in-the-air' })
     expect(made).toMatchObject({ shares: 0, left: 0 })
-    expect((await checkLab(stores.read, observations, made.id)).isReady).toBe(false)
+    expect((await proofRun(stores.read, observations, made.id)).isReady).toBe(false)
   })
 
   it('that does not exist is missing', async () => {

@@ -1,4 +1,5 @@
 import { checkBand } from '#shared/marking/proof'
+import { proveStep, type ProvedStep } from '#shared/marking/proofOfStep'
 import type { Convention } from '#shared/marking/types'
 import { askedSteps, isNumber } from '#shared/schemas/askedSteps'
 import type { LabBody, SupplyItem } from '#shared/schemas/lab'
@@ -50,15 +51,25 @@ export function layersThatMeet(body: LabBody, flight: Flight): { item: SupplyIte
   })
 }
 
-/** What keeps a layer from being a share: a step that cannot be asked on it, or whose accepted range would be too wide. Empty where nothing does. */
+/**
+ * What keeps a layer from being a share: a step that cannot be asked on it, whose accepted range would be too wide, on which an accepted way would lose
+ * or a slip would win. Empty where nothing does. What the proof run says of shares side by side is not in it.
+ */
 export function faultsOf(body: LabBody, convention: Convention, { item, rows }: { item: SupplyItem, rows: ServedRows }): string[] {
   const ground = { rows, convention, share: { item }, revision: { body } }
   return askedSteps(body).flatMap((step) => {
     const asked = askedQuestion(ground, step.key, {})
     if (!('question' in asked)) return [`${step.key}: ${asked.reason}`]
-    return isNumber(step) ? checkBand(asked.question).reasons.map(reason => `${step.key}: ${reason}`) : []
+    if (!isNumber(step)) return []
+    const { reasons } = checkBand(asked.question)
+    return [...reasons, ...reasons.length > 0 ? [] : losses(proveStep(asked.question))].map(reason => `${step.key}: ${reason}`)
   })
 }
+
+const losses = ({ ways, slips }: ProvedStep): string[] => [
+  ...ways.filter(way => !way.isInside).map(way => `${way.typed} by “${way.label}” would lose.`),
+  ...slips.filter(slip => !slip.isOutside && !slip.isQuiet).map(slip => `${slip.typed} would win, which is the slip “${slip.label}”.`),
+]
 
 /**
  * Shares for a lab, from the first of these flights on, until there are as many as it wants: layers that meet its conditions and on which every
