@@ -12,7 +12,7 @@ describe.skipIf(!chromiumPath || process.env.PAGES === 'states')('every page', (
   let rounds: PageRounds
   /** Pages that somebody could open and was not refused on. */
   const opened = new Set<string>()
-  /** What was already looked at, letter by letter: who gets the same sheet with the same places sees the same. */
+  /** Sheets and masts that were already looked at, letter by letter: a page of which both are known shows nothing new. */
   const looked = new Set<string>()
   /** Pages on which somebody was already seen to be refused: a refusal looks the same to all. */
   const refused = new Set<string>()
@@ -35,9 +35,9 @@ describe.skipIf(!chromiumPath || process.env.PAGES === 'states')('every page', (
         const isRefused = answer.text.includes('class="notice alarm"')
         if (isRefused && refused.has(file.pattern)) continue
         (isRefused ? refused : opened).add(file.pattern)
-        const sheet = [/<nav[\s\S]*?<\/nav>/, /<main[\s\S]*<\/main>/].map(part => part.exec(answer.text)?.[0] ?? '').join('')
-        if (looked.has(sheet)) continue
-        looked.add(sheet)
+        const parts = [/<nav[\s\S]*?<\/nav>/, /<main[\s\S]*<\/main>/].map(part => part.exec(answer.text)?.[0] ?? '')
+        if (parts.every(part => looked.has(part))) continue
+        for (const part of parts) looked.add(part)
         open.push({ name: file.pattern, path })
       }
     }
