@@ -37,8 +37,7 @@ if (wants('server') || wants('browser') || only === 'pages') {
   tools.DEMO_WORLD = demoWorld()
   if (wants('server')) suite('server', tools)
   if (wants('browser')) suite('browser', tools)
-  // every page as every role takes long: by `npm run pages`; here the states of pages, and the rest is counted as skipped
-  if (wants('browser') || only === 'pages') suite('pages', only === 'pages' ? tools : { ...tools, PAGES: 'states' })
+  if (wants('browser') || only === 'pages') suite('pages', tools)
   rmSync(tools.DEMO_WORLD, { recursive: true, force: true })
 }
 
