@@ -11,10 +11,10 @@ type Then = (faults: PageFaults, page: Page) => Promise<void>
 const refusal = '.notice.alarm, .wrong, [data-invalid] .formkit-messages, .formkit-message, .is-wrong .said'
 
 /** Fills fields by their label, presses a button, and waits until the page says what it refuses. */
-const refused = (fill: Readonly<Record<string, string>>, button: string | null): Then => async (faults, page) => {
+const refused = (fill: Readonly<Record<string, string>>, button: string | null, timeout = 8000): Then => async (faults, page) => {
   for (const [label, text] of Object.entries(fill)) await page.getByLabel(label, { exact: true }).first().fill(text)
   if (button !== null) await page.getByRole('button', { name: button, exact: true }).click()
-  await page.locator(refusal).filter({ hasText: /\S/ }).first().waitFor({ timeout: 8000 })
+  await page.locator(refusal).filter({ hasText: /\S/ }).first().waitFor({ timeout })
   await faults.settle()
   faults.begin() // a refusal answers 4xx, which a browser writes to its console
 }
@@ -95,6 +95,6 @@ describe.skipIf(!chromiumPath)('a page', () => {
   })
 
   it('would be seen where it refuses without a word', async () => {
-    await expect(rounds.look(await rounds.guest(null), [{ name: 'refused', path: '/reset', then: refused({}, null) }])).rejects.toThrow(/Timeout/)
+    await expect(rounds.look(await rounds.guest(null), [{ name: 'refused', path: '/reset', then: refused({}, null, 1500) }])).rejects.toThrow(/Timeout/)
   })
 })

@@ -2,11 +2,11 @@ import { refuse } from '#shared/errors'
 import { taughtVariant } from '#shared/marking/alternatives'
 import type { Alternative } from '#shared/marking/types'
 import type { HandbookConvention } from '#shared/schemas/handbook'
-import { constantDefinitions } from '#shared/thermo/constants'
+import { constantDefinitions, type ConstantDefinition } from '#shared/thermo/constants'
 import { defaultConvention, findConvention } from '#shared/thermo/conventions/index'
 import { findQuantity, quantities } from '#shared/thermo/registry'
 import { formatUnit } from '#shared/units/formatQuantity'
-import { constantWords } from './inWords'
+import { constantWords, grouped } from './inWords'
 
 const beyondWords = {
   compute: 'computed all the same, with its known error shown',
@@ -30,10 +30,14 @@ export function describeConvention(key: string): HandbookConvention {
   }
 }
 
+/** As it is spoken of: by its letters where these are its name (cp, Rv), else by the words before the first comma. */
+const shortName = ({ name, label }: ConstantDefinition): string => name.length <= 3 ? name : label.split(',')[0] ?? label
+
 function changesOf({ constants = {}, variants = {} }: Alternative): string {
   const numbers = Object.entries(constants).map(([name, value]) => {
-    const unit = constantDefinitions.find(one => one.name === name)?.unit ?? '1'
-    return `${name} ${value}${unit === '1' ? '' : ` ${formatUnit(unit)}`}`
+    const definition = constantDefinitions.find(one => one.name === name)
+    const unit = definition?.unit ?? '1'
+    return `${definition ? shortName(definition) : name} ${grouped(Number(value.toPrecision(7)))}${unit === '1' ? '' : ` ${formatUnit(unit)}`}`
   })
   const formulae = Object.entries(variants).map(([quantity, key]) => {
     const definition = findQuantity(quantity)

@@ -40,7 +40,7 @@ export function workedLines(steps: readonly TraceStep[]): { text: string, formul
 }
 
 /** Groups of three from five digits on, with U+202F: 2 501 000. */
-function grouped(value: number): string {
+export function grouped(value: number): string {
   const [whole = '', decimals] = String(value).replace('-', '−').split('.')
   return `${whole.length >= 5 ? whole.replace(/\B(?=(\d{3})+$)/g, '\u202F') : whole}${decimals === undefined ? '' : `.${decimals}`}`
 }

@@ -1,6 +1,7 @@
+import { scaleLinear } from 'd3-scale'
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { layerSide, profilePoints, profileScale, stepLevel } from '../../../components/plot/profileScale'
+import { layerSide, profilePoints, profileScale, stepLevel, ticksOf } from '../../../components/plot/profileScale'
 import { extentOf, nearestAt, pathOf, thinned, type Point } from '../../../components/plot/series'
 import { instantText, rowsWithin, seriesPoints, timeTicks, turnedWindow, usualGap } from '../../../components/plot/timeScale'
 
@@ -34,6 +35,12 @@ describe('a profile', () => {
       const drawn = profileScale({ width, height: 400, heights: rows.map(row => row[1]), main: [series(rows.map(row => row[0]))], side: { ...series(rows.map(() => 50)), unit: '%' } })
       return rows.every(([value, height]) => drawn.x(value) >= drawn.left - 0.5 && drawn.x(value) <= drawn.right + 0.5 && drawn.y(height) >= drawn.top - 0.5 && drawn.y(height) <= drawn.bottom + 0.5)
     }))
+  })
+})
+
+describe('ticks', () => {
+  it.each([[-2, 0, ['−2.0', '−1.5', '−1.0', '−0.5', '0.0']], [0, 40, ['0', '10', '20', '30', '40']]] as const)('from %d to %d never say the same twice', (from, to, texts) => {
+    expect(ticksOf(scaleLinear().domain([from, to]).range([0, 300]), 4).map(tick => tick.text)).toEqual(texts)
   })
 })
 

@@ -40,6 +40,8 @@ describe('the handbook', () => {
     const page = describeConvention(key)
     expect(page.constants.length).toBeGreaterThanOrEqual(7)
     expect(page.accepted.every(one => one.changes !== '')).toBe(true)
+    // in the reader's words: no name of the program's own, no digits beyond what anybody writes
+    expect(page.accepted.filter(one => /\b[a-z]+[A-Z]|\d\.\d{8}/.test(one.changes))).toEqual([])
   })
   it('refuses what there is not', () => {
     expect(() => describeQuantity('toString')).toThrow('not_found')
