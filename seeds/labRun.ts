@@ -90,6 +90,7 @@ export class LabRun {
     if (!await this.isThere(member)) return
     const shareId = await this.shareOf(member)
     const answers = await this.answers(member, shareId, story)
+    await this.save(member, shareId, Object.entries(answers), () => now)
     const key = createHash('sha256').update(`${this.name} ${member.key} ${now}`).digest('hex').slice(0, 32)
     const request = { key, route: `POST /api/shares/${shareId}/submissions`, bodySha256: createHash('sha256').update(JSON.stringify(answers)).digest() }
     await submitLab(this.stores, this.judging, { personId: member.personId, membershipId: member.membershipId, shareId, request, answers, claimedSentAt: null }, now)
@@ -99,8 +100,14 @@ export class LabRun {
   async draft(member: Member, steps: number, now: number): Promise<void> {
     const shareId = await this.shareOf(member)
     const answers = await this.answers(member, shareId, {})
-    for (const [at, [stepKey, typed]] of Object.entries(answers).slice(0, steps).entries()) {
-      if (typed !== '') await saveDraft(this.stores, { membershipId: member.membershipId, shareId, stepKey, typed, baseVersion: 0 }, now + at * 240_000)
-    }
+    await this.save(member, shareId, Object.entries(answers).slice(0, steps), at => now + at * 240_000)
+  }
+
+  /** What is typed stands in its field, as the work page keeps it: whoever has handed in finds it there again. */
+  private async save(member: Member, shareId: string, typedIn: readonly [string, string][], timeOf: (at: number) => number): Promise<void> {
+    const before = new Map((await this.stores.read.selectFrom('draft').select(['step_key', 'version']).where('share_id', '=', shareId).execute()).map(row => [row.step_key, row.version]))
+    await Promise.all(typedIn.map(async ([stepKey, typed], at) => {
+      if (typed !== '' || before.has(stepKey)) await saveDraft(this.stores, { membershipId: member.membershipId, shareId, stepKey, typed, baseVersion: before.get(stepKey) ?? 0 }, timeOf(at))
+    }))
   }
 }
