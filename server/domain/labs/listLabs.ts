@@ -46,7 +46,14 @@ async function listForStaff(read: Read, courseId: string): Promise<ListedLab[]> 
       students: Number(students.find(row => row.sectionId === posting.sectionId)?.count ?? 0),
       submitted: Number(submitted.find(row => row.labId === lab.id && row.sectionId === posting.sectionId)?.count ?? 0),
     })),
-  }))
+  })).toSorted(byDue)
+}
+
+/** What has no dates yet stands first, then the latest due: labs that came along from a term were all made in one moment. */
+function byDue(one: ListedLab, other: ListedLab): number {
+  const [due, otherDue] = [one, other].map(lab => lab.sections.length === 0 ? null : Math.max(...lab.sections.map(section => section.dueAt)))
+  if (due === null || otherDue === null) return Number(due !== null) - Number(otherDue !== null)
+  return (otherDue ?? 0) - (due ?? 0)
 }
 
 async function listForStudent(read: Read, courseId: string, membershipId: string, now: number): Promise<ListedLab[]> {
