@@ -33,10 +33,12 @@ async function places() {
   const judged = shares.filter(share => share.releasedAt !== null).at(-1)
   const lab = await read.selectFrom('lab').select('id').where('course_id', '=', course.id).where('state', '=', 'posted').orderBy('id', 'desc').limit(1).executeTakeFirstOrThrow()
   const flight = await read.selectFrom('data_set').select('id').where('kind', '=', 'flight').orderBy('id', 'desc').limit(1).executeTakeFirstOrThrow()
-  const dispute = await read.selectFrom('dispute').innerJoin('membership', 'membership.id', 'dispute.opened_by_membership_id').select('dispute.id')
-    .where('membership.course_id', '=', course.id).where('dispute.state', 'in', ['open', 'taken']).orderBy('dispute.id').limit(1).executeTakeFirstOrThrow()
+  const assistant = await people.visitor(people.withRole('ta'))
+  const { disputes } = await assistant.get<{ disputes: { id: string, state: string }[] }>(`/api/courses/${course.id}/disputes`)
+  const dispute = disputes.find(each => each.state === 'open' || each.state === 'taken')
   const work = shares.at(-1)
   if (!judged || !work) throw new Error(`${student.name} has handed in nothing that could be shown.`)
+  if (!dispute) throw new Error('No dispute waits for the TA.')
   return [
     { name: 'data', role: 'instructor', path: `${base}/data/${flight.id}` },
     { name: 'work', role: 'student', path: `${base}/work/${work.id}` },
@@ -56,6 +58,7 @@ for (const { name, role, path } of await places()) {
   await signInAs(page, server.url, person.email, person.password)
   const answer = await page.goto(server.url + path, { waitUntil: 'networkidle' })
   if (answer?.status() !== 200) throw new Error(`${path} answers ${answer?.status()} to a ${role}.`)
+  if (await page.locator('.notice.alarm').count() > 0) throw new Error(`${path} refuses a ${role}.`)
   await page.evaluate(() => document.fonts.ready.then(() => null))
   const file = join(folder, `${name}.png`)
   await page.screenshot({ path: file })
