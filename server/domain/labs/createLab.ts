@@ -7,14 +7,14 @@ import { digestOf } from '../ledger/appendEntry'
 import { conventionOfCourse } from './conventions'
 import { writeSteps } from './writeRevision'
 
-export interface CreateLab { courseId: string, body: LabBody, /** The lab of the same course that this one is a copy of. */ ancestorId?: string | null }
+export interface CreateLab { courseId: string, body: LabBody, /** The lab that this one is a copy of: of the same course, or of one of those in which the same person writes. */ ancestorId?: string | null, writesIn?: readonly string[] }
 
 /** A new lab, a draft with its first revision. Only staff see it until it is posted. */
 export function createLab({ write }: Stores, input: Asked & CreateLab, now: number): Promise<{ id: string, revisionId: string, version: number }> {
   return write(trx => doOnce(trx, input, async () => {
     const course = await trx.selectFrom('course').select('id').where('id', '=', input.courseId).executeTakeFirst()
     if (!course) return refuse('not_found')
-    if (input.ancestorId && !await trx.selectFrom('lab').select('id').where('id', '=', input.ancestorId).where('course_id', '=', course.id).executeTakeFirst()) return refuse('not_found')
+    if (input.ancestorId && !await trx.selectFrom('lab').select('id').where('id', '=', input.ancestorId).where('course_id', 'in', [course.id, ...input.writesIn ?? []]).executeTakeFirst()) return refuse('not_found')
     const { convention } = await conventionOfCourse(trx, course.id)
     const id = newId(now)
     const revisionId = newId(now)

@@ -24,7 +24,7 @@ export interface BeginLab { courseId: string, memberships: readonly ActorMembers
 export async function beginLab(stores: Stores, observations: Observations, input: Asked & BeginLab, now: number) {
   const { body, ancestorId } = await bodyOf(stores.read, input)
   const supply = await supplyOf(stores.read, observations, input.courseId, body)
-  const made = await createLab(stores, { actorId: input.actorId, once: input.once, courseId: input.courseId, body: { ...body, supply }, ancestorId }, now)
+  const made = await createLab(stores, { actorId: input.actorId, once: input.once, courseId: input.courseId, body: { ...body, supply }, ancestorId, writesIn: writesIn(input.memberships, input.courseId) }, now)
   const known = new Set(supply.map(item => item.versionId))
   return { ...made, shares: supply.length, left: body.supply.filter(item => !known.has(item.versionId)).length }
 }
