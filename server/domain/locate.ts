@@ -3,7 +3,7 @@ import type { Read } from '../db/writer'
 import type { Place } from './authorize'
 
 /** The names that a route's parameters may have; each says what kind of object it is. */
-export const placeParams = ['courseId', 'sectionId', 'labId', 'postingId', 'shareId', 'submissionId', 'receiptNo', 'disputeId', 'dataSetId', 'versionId', 'uploadId', 'jobId'] as const
+export const placeParams = ['courseId', 'sectionId', 'memberId', 'labId', 'postingId', 'shareId', 'submissionId', 'receiptNo', 'disputeId', 'dataSetId', 'versionId', 'uploadId', 'jobId'] as const
 export type PlaceParam = (typeof placeParams)[number]
 
 const nowhere: Place = { courseId: null, sectionIds: [], ownerIds: [], termState: null, openSectionIds: null, isDepartmentWide: false }
@@ -40,6 +40,12 @@ const finders: Record<PlaceParam, Finder> = {
     const row = await read.selectFrom('section').innerJoin('course', 'course.id', 'section.course_id').innerJoin('term', 'term.id', 'course.term_id')
       .select(['course.id as courseId', 'term.state as termState']).where('section.id', '=', id).executeTakeFirst()
     return row ? { ...nowhere, ...row, sectionIds: [id] } : null
+  },
+  /** A student in a course; staff are found by their roles. */
+  async memberId(read, id) {
+    const row = await read.selectFrom('membership').innerJoin('course', 'course.id', 'membership.course_id').innerJoin('term', 'term.id', 'course.term_id')
+      .select(['course.id as courseId', 'term.state as termState', 'membership.section_id as sectionId']).where('membership.id', '=', id).where('membership.role', '=', 'student').where('membership.state', '=', 'active').executeTakeFirst()
+    return row ? { ...nowhere, courseId: row.courseId, termState: row.termState, sectionIds: row.sectionId === null ? [] : [row.sectionId], ownerIds: [id] } : null
   },
   async labId(read, id, now) {
     const row = await read.selectFrom('lab').innerJoin('course', 'course.id', 'lab.course_id').innerJoin('term', 'term.id', 'course.term_id')

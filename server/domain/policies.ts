@@ -53,6 +53,9 @@ export const policies = {
   'course:chooseConvention': { scope: 'course', roles: ['lead'], openTerm: true },
   'course:open': { scope: 'course', roles: ['lead', 'admin'], openTerm: true },
   'course:people': { scope: 'course', roles: [...staff, 'admin'] },
+  'person:read': { scope: 'section', roles: staff },
+  'person:repair': { scope: 'course', roles: teachers, openTerm: true },
+  'person:acceptLate': { scope: 'section', roles: staff, openTerm: true },
   'course:roof': { scope: 'course', roles: [...everyone, 'admin', 'technician'] },
   // data
   'data:list': { scope: 'course', roles: [...teachers, 'ta', 'technician'] },

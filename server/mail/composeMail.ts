@@ -7,6 +7,7 @@ import { marksReleased } from './templates/marksReleased'
 import { passphraseChanged } from './templates/passphraseChanged'
 import { passphraseReset } from './templates/passphraseReset'
 import { receipt } from './templates/receipt'
+import { repair } from './templates/repair'
 
 export interface Links {
   /** Where people reach the house, without a slash at the end. */
@@ -30,6 +31,7 @@ const letters: Record<NoticeTemplate, (facts: unknown, links: Links) => Letter> 
   dispute_opened: (facts, links) => disputeOpened(noticeFacts.dispute_opened.parse(facts), linkTo(links)),
   dispute_ruled: (facts, links) => disputeRuled(noticeFacts.dispute_ruled.parse(facts), linkTo(links)),
   marks_released: (facts, links) => marksReleased(noticeFacts.marks_released.parse(facts), linkTo(links)),
+  repair: (facts, links) => repair(noticeFacts.repair.parse(facts), linkTo(links)),
   invitation: (facts, links) => invitation(linkTo(links)(`/invite/${links.tokenOf('invite', noticeFacts.invitation.parse(facts).tokenId)}`)),
   passphrase_reset: (facts, links) => passphraseReset(linkTo(links)(`/reset/${links.tokenOf('reset', noticeFacts.passphrase_reset.parse(facts).tokenId)}`)),
   passphrase_changed: (facts, links) => passphraseChanged(noticeFacts.passphrase_changed.parse(facts), linkTo(links)),

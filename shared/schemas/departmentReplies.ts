@@ -84,12 +84,10 @@ export type AccessPage = z.output<typeof accessPage>
 
 export const coursePeople = z.object({
   course: z.object({ code: z.string(), title: z.string(), alsoListedAs: z.array(z.string()), term: z.string(), zone: z.string() }),
-  mayGrant: z.boolean(),
   staff: z.array(z.object({ id: z.string(), name: z.string(), email: z.string(), role: courseRole, sections: z.array(z.string()) })),
   sections: z.array(z.object({
     id: z.string(), name: z.string(),
     students: z.array(z.object({ id: z.string(), name: z.string(), email: z.string(), accountState, notCounted: count })),
-    postings: z.array(z.object({ id: z.string(), title: z.string(), dueLocal: z.string() })),
   })),
   allowances: z.array(z.object({ membershipId: z.string(), postingId: z.string(), title: z.string(), dueLocal: z.string(), kind: z.string() })),
 })

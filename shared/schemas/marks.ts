@@ -113,9 +113,3 @@ export const marksTable = z.object({
   })),
 })
 export type MarksTable = z.infer<typeof marksTable>
-
-/** A course's marks: a student's own labs, or the staff's table of a section. */
-export const courseMarks = z.discriminatedUnion('kind', [
-  z.object({ kind: z.literal('own'), labs: z.array(myLabMarks) }),
-  z.object({ kind: z.literal('table'), table: marksTable }),
-])

@@ -13,6 +13,7 @@ export const noticeFacts = {
   dispute_opened: z.object({ course: label, lab: label, step: label.optional(), path: ownPath }),
   dispute_ruled: z.object({ course: label, lab: label, step: label.optional(), kind: z.enum(['uphold', 'change', 'accept', 'fault']).optional(), path: ownPath }),
   marks_released: z.object({ course: label, lab: label, path: ownPath }),
+  repair: z.object({ course: label, lab: label.nullable(), kind: z.enum(['extension', 'accommodation', 'excused', 'counted', 'not_counted', 'attempt', 'moved', 'lateness']), dueAt: z.int().nullable(), zone: z.string(), path: ownPath }),
   invitation: z.object({ tokenId: z.string() }),
   passphrase_reset: z.object({ tokenId: z.string() }),
   passphrase_changed: z.object({ at: z.int() }),

@@ -5,6 +5,7 @@ import type { Named } from './model'
 const placed: Record<string, { reaches: Named['reaches'], isOfLab: boolean }> = {
   courseId: { reaches: 'course', isOfLab: false },
   sectionId: { reaches: 'section', isOfLab: false },
+  memberId: { reaches: 'section', isOfLab: false },
   labId: { reaches: 'course', isOfLab: true },
   postingId: { reaches: 'section', isOfLab: true },
   shareId: { reaches: 'holder', isOfLab: true },

@@ -7,6 +7,7 @@ import { filesOfPeople } from './0005_files_of_people'
 import { ownedReds } from './0006_owned_reds'
 import { accessLogRead } from './0007_access_log_read'
 import { lastChanges } from './0008_last_changes'
+import { repairs } from './0009_repairs'
 
 /** Every migration, by name, in order. A test holds this list against the folder. */
 export const migrations: Record<string, Migration> = {
@@ -18,4 +19,5 @@ export const migrations: Record<string, Migration> = {
   '0006_owned_reds': ownedReds,
   '0007_access_log_read': accessLogRead,
   '0008_last_changes': lastChanges,
+  '0009_repairs': repairs,
 }

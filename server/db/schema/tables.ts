@@ -6,6 +6,7 @@ import type { CounterTable, RequestKeyTable, JobTable, OutboxTable, AccessLogTab
 import type { DisputeTable, DisputeNoteTable, RulingTable, MarkingRunTable, MarkingRunItemTable } from './moderation'
 import type { PersonTable, CredentialTable, SessionTable, OneTimeTokenTable, ActorTable, DepartmentRoleTable } from './people'
 import type { ReferenceBuildTable, ConventionRevisionTable } from './reference'
+import type { RepairTable } from './repairs'
 import type { DraftTable, SubmissionTable, AnswerTable, EvaluationTable, MarkTable } from './work'
 
 /** Every table by its name. A test holds these names and columns against the migrated schema. */
@@ -70,4 +71,5 @@ export interface Database {
   access_log: AccessLogTable
   last_change: LastChangeTable
   installation: InstallationTable
+  repair: RepairTable
 }

@@ -7,6 +7,7 @@ import { doOnce, type Asked } from '../asked'
 import { newId } from '../ids'
 import { noteChange, refuseOlder } from '../lastChange'
 import { appendEntry, courseChain } from '../ledger/appendEntry'
+import { applyAccommodations } from '../repairs/applyAccommodations'
 import { currentDraw, giveShares, insertDraw, type DrawnSupply } from '../shares/draws'
 import type { DrawnItem } from '../shares/loadedShare'
 import { sha256Hex } from '../shares/servedData'
@@ -53,6 +54,7 @@ export async function postLab({ read, write }: Stores, observations: Observation
     const version = lab.lab.version + 1
     await trx.updateTable('lab').set({ state: 'posted', version }).where('id', '=', lab.lab.id).execute()
     await noteChange(trx, lab.lab.id, input.actorId, now)
+    await applyAccommodations(trx, { membershipIds: students.map(row => row.id), actorId: input.actorId }, now)
     await appendEntry(trx, {
       chain: courseChain(lab.lab.courseId), at: now, actor: input.actorId, action: 'lab.posted',
       facts: { labId: lab.lab.id, revisionId: draw.revisionId, drawId: draw.id, shares, lateRule: rule, attempts: input.posting.attempts, keep: input.posting.keep, postings: postings.map(({ id, sectionId, opensAt, dueAt }) => ({ id, sectionId, opensAt, dueAt })) },

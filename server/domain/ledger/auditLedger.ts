@@ -5,7 +5,7 @@ import type { LedgerEntryTable } from '../../db/schema/ledger'
 import type { RulingTable } from '../../db/schema/moderation'
 import type { MarkTable } from '../../db/schema/work'
 import { entryDigest } from './appendEntry'
-import { answersDigest, evaluationDigest, evaluationsDigest, marksDigest, rulingDigest, rulingReasonDigest, submissionDigest, type ColumnDigests } from './coveredDigests'
+import { answersDigest, evaluationDigest, evaluationsDigest, marksDigest, repairDigest, rulingDigest, rulingReasonDigest, submissionDigest, type ColumnDigests } from './coveredDigests'
 import { readPrivateTexts } from './readPrivateTexts'
 
 /** Something that does not add up: where, and what. */
@@ -16,8 +16,8 @@ export interface AuditReport { chains: number, entries: number, marks: number, a
 const digests = z.record(z.string(), z.string())
 const markFact = z.object({ submission: z.string(), step: z.string(), version: z.number(), before: z.number().nullable(), after: z.number(), max: z.number() })
 const factsSchema = z.looseObject({
-  submission: z.string().optional(), ruling: z.string().optional(),
-  covers: z.object({ submission: digests.optional(), answers: digests.optional(), evaluations: digests.optional(), marks: digests.optional(), ruling: digests.optional() }).optional(),
+  submission: z.string().optional(), ruling: z.string().optional(), repair: z.string().optional(),
+  covers: z.object({ submission: digests.optional(), answers: digests.optional(), evaluations: digests.optional(), marks: digests.optional(), ruling: digests.optional(), repair: digests.optional() }).optional(),
   marks: z.array(markFact).optional(),
 })
 type Facts = z.infer<typeof factsSchema>
@@ -134,6 +134,10 @@ async function checkCovered(read: Read, entry: LedgerEntryTable, facts: Facts, c
   if (covers.ruling && facts.ruling) {
     const row = await read.selectFrom('ruling').selectAll().where('id', '=', facts.ruling).executeTakeFirst()
     compare('ruling', covers.ruling, row ? { ...rulingDigest(row), ...await coveredReason(read, row, covers.ruling) } : null)
+  }
+  if (covers.repair && facts.repair) {
+    const row = await read.selectFrom('repair').selectAll().where('id', '=', facts.repair).executeTakeFirst()
+    compare('repair', covers.repair, row ? repairDigest(row) : null)
   }
   return findings
 }

@@ -1,5 +1,6 @@
 import { createHash } from 'node:crypto'
 import type { RulingTable } from '../../db/schema/moderation'
+import type { RepairTable } from '../../db/schema/repairs'
 import type { AnswerTable, EvaluationTable, MarkTable, SubmissionTable } from '../../db/schema/work'
 import { digestOf } from './appendEntry'
 
@@ -33,12 +34,14 @@ const answerColumns = ['step_key', 'typed', 'reading', 'value_si', 'unit_ucum', 
 const evaluationColumns = ['id', 'step_key', 'reference_digest', 'convention_revision_id', 'data_set_version_id', 'lab_revision_id', 'inputs_json', 'carried_json', 'accepted_json', 'center_bits', 'low_bits', 'high_bits', 'parts_json', 'slips_json', 'trace_json', 'digest', 'outcome', 'refusal_code'] as const
 const markColumns = ['id', 'submission_id', 'step_key', 'version', 'points_milli', 'max_milli', 'evaluation_id', 'cause'] as const
 const rulingColumns = ['id', 'dispute_id', 'level', 'kind', 'reason_digest', 'by_actor_id', 'at'] as const
+const repairColumns = ['id', 'seq', 'membership_id', 'lab_id', 'kind', 'due_at', 'extra_days', 'submission_id', 'late_units', 'late_rule_json', 'reason_digest', 'by_actor_id', 'at'] as const
 
 export const submissionDigest = (row: Unlinked<SubmissionTable>): ColumnDigests => columnDigests([row], submissionColumns, each => each.id)
 export const answersDigest = (rows: readonly AnswerTable[]): ColumnDigests => columnDigests(rows, answerColumns, row => `${row.submission_id} ${row.step_key}`)
 export const evaluationsDigest = (rows: readonly EvaluationTable[]): ColumnDigests => columnDigests(rows, evaluationColumns, row => row.id)
 export const marksDigest = (rows: readonly Unlinked<MarkTable>[]): ColumnDigests => columnDigests(rows, markColumns, row => `${row.submission_id} ${row.step_key} ${row.version}`)
 export const rulingDigest = (row: Unlinked<RulingTable>): ColumnDigests => columnDigests([row], rulingColumns, each => each.id)
+export const repairDigest = (row: Unlinked<RepairTable>): ColumnDigests => columnDigests([row], repairColumns, each => each.id)
 /** Entries from before reasons could be erased cover the text itself. */
 export const rulingReasonDigest = (ruling: { id: string, reason: string }): ColumnDigests => columnDigests([ruling], ['reason'], each => each.id)
 

@@ -25,6 +25,7 @@ export async function classView(read: Read, postingId: string, now: number): Pro
   const students = await read.selectFrom('membership').leftJoin('person', 'person.id', 'membership.person_id')
     .select(eb => ['membership.id', 'membership.pseudonym', 'person.display_name',
       eb.selectFrom('allowance').select(inner => inner.fn.max('allowance.due_at').as('until')).whereRef('allowance.membership_id', '=', 'membership.id').where('allowance.posting_id', '=', postingId).as('allowedUntil'),
+      eb.selectFrom('repair').select(inner => inner.fn.countAll<number>().as('n')).where('repair.kind', '=', 'attempt').whereRef('repair.membership_id', '=', 'membership.id').where('repair.lab_id', '=', posting.lab_id).as('granted'),
       eb.selectFrom('standing').select('standing.kind').whereRef('standing.membership_id', '=', 'membership.id').where('standing.lab_id', '=', posting.lab_id).orderBy('standing.seq', 'desc').limit(1).as('standing')])
     .where('membership.section_id', '=', posting.section_id).where('membership.role', '=', 'student').where('membership.state', '=', 'active').orderBy('membership.id').execute()
   const shareOf = await sharesOfMembers(read, posting.lab_id, students.map(student => student.id))
@@ -35,7 +36,7 @@ export async function classView(read: Read, postingId: string, now: number): Pro
     const terms = { dueAt: posting.due_at, allowedUntil: student.allowedUntil, zone: posting.zone, lateRule: rule }
     const closesAt = closingOf(terms)
     const standing = standingOf({ isWithdrawn: posting.state === 'withdrawn', standing: student.standing, hasSubmission: made.length > 0, releasedAt: posting.released_at, dueAt: personalDue(terms), closesAt, now })
-    return { membershipId: student.id, name: student.display_name ?? student.pseudonym, standing, submissionId: counts?.submissionId ?? null, totalMilli: counts?.totalMilli ?? null, lateDays: counts?.lateDays ?? null, claimedSentAt: claimOf(made, counts), maySubmit: made.length < posting.attempts && (made.length === 0 || posting.released_at === null) && (closesAt === null || now <= closesAt) }
+    return { membershipId: student.id, name: student.display_name ?? student.pseudonym, standing, submissionId: counts?.submissionId ?? null, totalMilli: counts?.totalMilli ?? null, lateDays: counts?.lateDays ?? null, claimedSentAt: claimOf(made, counts), maySubmit: made.length < posting.attempts + (student.granted ?? 0) && (made.length === 0 || posting.released_at === null) && (closesAt === null || now <= closesAt) }
   })
   const counted = people.filter(person => person.submissionId !== null && person.standing !== 'excused' && person.standing !== 'not_counted')
   const stored = await currentSteps(read, people.flatMap(person => person.submissionId ?? []))
@@ -55,7 +56,7 @@ export async function classView(read: Read, postingId: string, now: number): Pro
 
 /** A late submission's claim to have been sent earlier, for staff to look at; the server's receipt decides. */
 function claimOf(made: readonly StoredAttempt[], counts: LabTotal | null): string | null {
-  const claimed = counts !== null && counts.lateDays > 0 ? made.find(attempt => attempt.submissionId === counts.submissionId)?.claimedSentAt ?? null : null
+  const claimed = counts !== null && counts.lateDays > 0 ? made.find(attempt => attempt.submissionId === counts.submissionId && !attempt.isAccepted)?.claimedSentAt ?? null : null
   return claimed === null ? null : new Date(claimed).toISOString()
 }
 

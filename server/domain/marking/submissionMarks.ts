@@ -21,7 +21,7 @@ export async function submissionMarks(read: Read, who: { isStaff: boolean, membe
     .innerJoin('holder_member', 'holder_member.holder_id', 'share.holder_id').innerJoin('membership', 'membership.id', 'holder_member.membership_id')
     .innerJoin('lab_revision', 'lab_revision.id', 'submission.lab_revision_id')
     .leftJoin('posting', join => join.onRef('posting.lab_id', '=', 'share.lab_id').onRef('posting.section_id', '=', 'membership.section_id'))
-    .select(['submission.id', 'submission.share_id', 'submission.receipt_no', 'submission.attempt', 'submission.received_at', 'submission.due_at_applied', 'submission.late_units', 'submission.late_rule_json',
+    .select(['submission.id', 'submission.share_id', 'submission.receipt_no', 'submission.attempt', 'submission.received_at', 'submission.due_at_applied',
       'lab.id as labId', 'lab.title', 'lab_revision.no as revisionNo', 'lab_revision.body_json', 'share.ordinal', 'share.draw_id', 'membership.id as membershipId',
       'posting.released_at', 'posting.feedback', 'posting.zone', 'posting.keep'])
     .where('submission.id', '=', submissionId).execute()
@@ -39,11 +39,12 @@ export async function submissionMarks(read: Read, who: { isStaff: boolean, membe
     .select(['reference_build.version', 'convention_revision.convention_key', 'convention_revision.no']).where('evaluation.submission_id', '=', submissionId).limit(1).executeTakeFirst()
   if (!own || !build) throw new Error(`Submission ${submissionId} has no marks.`)
   const total = totalOfAttempt(own)
-  const rule = lateRule.parse(JSON.parse(submission.late_rule_json))
+  // As staff accepted it, where they did.
+  const rule = lateRule.parse(JSON.parse(own.lateRuleJson))
   return {
     submissionId, labId: submission.labId, labTitle: submission.title, revisionNo: submission.revisionNo, receiptNo: submission.receipt_no, attempt: submission.attempt,
     counts: labTotal(made, submission.keep ?? 'best')?.submissionId === submissionId,
-    submittedAt: new Date(submission.received_at).toISOString(), zone: submission.zone ?? 'UTC', lateDays: submission.late_units, lateWords: lateWords(rule, submission.late_units),
+    submittedAt: new Date(submission.received_at).toISOString(), zone: submission.zone ?? 'UTC', lateDays: own.lateUnits, lateWords: own.isAccepted ? `${lateWords(rule, own.lateUnits)}, as staff accepted it` : lateWords(rule, own.lateUnits),
     releasedAt: submission.released_at === null ? null : new Date(submission.released_at).toISOString(),
     isWhole, objectUntil: submission.released_at === null || submission.zone === null ? null : new Date(objectUntil(submission.released_at, submission.zone)).toISOString(),
     earnedMilli: total.earnedMilli, maxMilli: total.maxMilli, totalMilli: total.totalMilli,

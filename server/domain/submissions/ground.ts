@@ -35,6 +35,7 @@ export interface Ground {
   dueAt: number | null
   zone: string | null
   lateRuleJson: string | null
+  /** The posting's, and what was granted to this share's holders. */
   attempts: number | null
   keep: 'last' | 'best' | null
   feedback: 'at_once' | 'after_release' | null
@@ -62,6 +63,8 @@ const groundOfShare = keptQuery((db, given: { shareId: string, membershipId: str
     eb.selectFrom('lab_revision').select('lab_revision.id').whereRef('lab_revision.lab_id', '=', 'lab.id').where('lab_revision.frozen_at', 'is not', null).orderBy('lab_revision.no', 'desc').limit(1).as('newestRevisionId'),
     eb.selectFrom('allowance').innerJoin('holder_member as holding', 'holding.membership_id', 'allowance.membership_id').select(inner => inner.fn.max('allowance.due_at').as('until'))
       .whereRef('allowance.posting_id', '=', 'posting.id').whereRef('holding.holder_id', '=', 'share.holder_id').as('allowedUntil'),
+    eb.selectFrom('repair').innerJoin('holder_member as granted', 'granted.membership_id', 'repair.membership_id').select(inner => inner.fn.countAll<number>().as('n'))
+      .where('repair.kind', '=', 'attempt').whereRef('repair.lab_id', '=', 'share.lab_id').whereRef('granted.holder_id', '=', 'share.holder_id').as('attemptsGranted'),
     eb.selectFrom('submission').select(inner => inner.fn.max('submission.attempt').as('made')).whereRef('submission.share_id', '=', 'share.id').as('attemptsMade'),
   ])
   .where('share.id', '=', given.shareId))
@@ -74,7 +77,8 @@ export async function readGround(db: Read, shareId: string, membershipId: string
   const accepted = await acceptedInLab(db, { labId: row.labId })
   // A posted lab keeps the convention that its shares were checked by, whatever its course teaches since.
   const { conventionRevisionId } = (await getDraw(db, row.drawId)).supply
-  return { ...row, conventionRevisionId, newestRedraw: row.newestRedraw ?? row.redraw, attemptsMade: row.attemptsMade ?? 0, acceptedIds: accepted.map(each => each.id) }
+  const { attemptsGranted, ...rest } = row
+  return { ...rest, attempts: row.attempts === null ? null : row.attempts + (attemptsGranted ?? 0), conventionRevisionId, newestRedraw: row.newestRedraw ?? row.redraw, attemptsMade: row.attemptsMade ?? 0, acceptedIds: accepted.map(each => each.id) }
 }
 
 /** True when a judgement made on one ground holds on the other. How many attempts were made is no part of it: it is counted anew. */

@@ -5,7 +5,7 @@ import { wallTimeAt } from './wallClock'
 
 /** Who is in a course, by section, for its staff. A TA sees the students of the sections they have; staff are seen by all staff. */
 export async function listCoursePeople(read: Read, { courseId, acting }: { courseId: string, acting: Acting }, now: number) {
-  const course = await read.selectFrom('course').innerJoin('term', 'term.id', 'course.term_id').select(['course.code', 'course.title', 'term.name as term', 'term.zone', 'term.state']).where('course.id', '=', courseId).executeTakeFirst()
+  const course = await read.selectFrom('course').innerJoin('term', 'term.id', 'course.term_id').select(['course.code', 'course.title', 'term.name as term', 'term.zone']).where('course.id', '=', courseId).executeTakeFirst()
   if (!course) return refuse('not_found')
   const [listings, allSections, members, taSections] = await Promise.all([
     read.selectFrom('course_listing').select('code').where('course_id', '=', courseId).orderBy('code').execute(),
@@ -17,11 +17,9 @@ export async function listCoursePeople(read: Read, { courseId, acting }: { cours
   ])
   const sections = acting.role === 'ta' ? allSections.filter(section => acting.sectionIds.includes(section.id)) : allSections
   const sectionIds = sections.map(section => section.id)
-  const [postings, notCounted, allowances] = sectionIds.length === 0
-    ? [[], [], []]
+  const [notCounted, allowances] = sectionIds.length === 0
+    ? [[], []]
     : await Promise.all([
-        read.selectFrom('posting').innerJoin('lab', 'lab.id', 'posting.lab_id').select(['posting.id', 'posting.section_id as sectionId', 'lab.title', 'posting.due_local as dueLocal', 'posting.zone', 'posting.due_at as dueAt'])
-          .where('posting.section_id', 'in', sectionIds).where('posting.state', '=', 'posted').orderBy('posting.due_at').execute(),
         read.selectFrom('standing as s').innerJoin('membership', 'membership.id', 's.membership_id').select(count => ['s.membership_id as id', count.fn.countAll<number>().as('n')])
           .where('membership.course_id', '=', courseId).where('s.kind', '=', 'not_counted')
           .where(where => where.not(where.exists(where.selectFrom('standing as later').select('later.id').whereRef('later.membership_id', '=', 's.membership_id').whereRef('later.lab_id', '=', 's.lab_id').whereRef('later.seq', '>', 's.seq'))))
@@ -33,14 +31,12 @@ export async function listCoursePeople(read: Read, { courseId, acting }: { cours
   const nameOf = (member: { name: string | null, pseudonym: string }) => member.name ?? member.pseudonym
   return {
     course: { code: course.code, title: course.title, alsoListedAs: listings.map(row => row.code), term: course.term, zone: course.zone },
-    mayGrant: (acting.role === 'lead' || acting.role === 'instructor') && course.state !== 'closed',
     staff: members.filter(member => member.role !== 'student').map(member => ({ id: member.id, name: nameOf(member), email: member.email ?? '', role: member.role, sections: taSections.filter(row => row.id === member.id).map(row => row.name) })),
     sections: sections.map(section => ({
       ...section,
       students: members.filter(member => member.sectionId === section.id).map(member => ({
         id: member.id, name: nameOf(member), email: member.email ?? '', accountState: member.accountState ?? 'erased' as const, notCounted: notCounted.find(row => row.id === member.id)?.n ?? 0,
       })),
-      postings: postings.filter(posting => posting.sectionId === section.id).map(({ id, title, dueLocal }) => ({ id, title, dueLocal })),
     })),
     allowances: allowances.map(({ membershipId, postingId, title, dueAt, kind, zone }) => ({ membershipId, postingId, title, dueLocal: wallTimeAt(dueAt, zone), kind })),
   }

@@ -4,6 +4,7 @@ import type { Stores, Trx } from '../../db/writer'
 import { doOnce, type Asked } from '../asked'
 import { newId } from '../ids'
 import { appendEntry, courseChain } from '../ledger/appendEntry'
+import { applyAccommodations } from '../repairs/applyAccommodations'
 import { ensureShares } from '../shares/ensureShares'
 import { assertOpenTerm } from './assertOpenTerm'
 import { assertSection, replaceTaSections } from './enrol'
@@ -29,6 +30,7 @@ export async function moveStudent(trx: Trx, { membershipId, sectionId, actorId }
   await trx.updateTable('membership').set({ section_id: sectionId, version: member.version + 1 }).where('id', '=', member.id).execute()
   await ensureShares(trx, member.id, now) // of labs that only the new section has; a share once given stays
   const moved = await keepLaterDues(trx, { membershipId: member.id, from, to: sectionId, actorId }, now)
+  await applyAccommodations(trx, { membershipIds: [member.id], actorId }, now)
   await appendEntry(trx, {
     chain: courseChain(member.course_id), at: now, actor: actorId, action: 'membership.moved',
     facts: { membershipId: member.id, before: { sectionId: from }, after: { sectionId }, keptDue: moved.keptDue.map(({ labId, dueAt }) => ({ labId, dueAt })) },

@@ -2,6 +2,7 @@ import { nextNumber } from '../../db/queries/counters'
 import type { Trx } from '../../db/writer'
 import { newId } from '../ids'
 import { appendEntry, courseChain } from '../ledger/appendEntry'
+import { applyAccommodations } from '../repairs/applyAccommodations'
 import { movedByDays } from './wallClock'
 
 /** What a late start meant: labs that are over and do not count until staff decide, and labs that run and got a personal due. */
@@ -35,6 +36,8 @@ export async function settleLateAdd(trx: Trx, { membershipId, courseId, sectionI
     await trx.insertInto('allowance').values({ id: newId(now), posting_id: posting.id, membership_id: membershipId, due_at: dueAt, reason: 'late_add', by_actor_id: actorId, seq: await nextNumber(trx, 'allowance') }).execute()
     late.personalDue.push({ labId: posting.labId, title: posting.title, dueAt })
   }
+  // Whoever comes back keeps the accommodation that they had.
+  await applyAccommodations(trx, { membershipIds: [membershipId], actorId }, now)
   if (late.notCounted.length + late.personalDue.length > 0) {
     await appendEntry(trx, {
       chain: courseChain(courseId), at: now, actor: actorId, action: 'membership.late_add',

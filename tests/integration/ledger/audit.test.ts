@@ -1,5 +1,6 @@
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import { auditLedger } from '../../../server/domain/ledger/auditLedger'
+import { repairMember } from '../../../server/domain/repairs/repairMember'
 import type { Judging } from '../../../server/domain/submissions/submitLab'
 import { openTemporary } from '../../fixtures/openTemporary'
 import { referenceIn } from '../../fixtures/reference'
@@ -44,6 +45,13 @@ describe('audit', () => {
   ])('names the column %s when it was changed', async (column, text) => {
     tamper(text)
     expect(await findings()).toContain(`${column} was changed`)
+  })
+
+  it.each(['extra_days = 9', 'at = at + 1'])('names a repair of which %s was set behind its back', async (change) => {
+    await repairMember(stores, { actorId: 'm-lead', once: null, courseId: 'course-1', memberId: 'm-0', body: { kind: 'accommodation', extraDays: 2 } }, onTime)
+    expect(await findings()).toBe('')
+    tamper(`update repair set ${change}`)
+    expect(await findings()).toBe(`repair.${change.split(' ')[0]} was changed`)
   })
 
   it('says what the ledger adds up to where the mark in force is another', async () => {

@@ -1,8 +1,8 @@
 import { z } from 'zod'
 import { refuse } from '#shared/errors'
-import { courseMarks } from '#shared/schemas/marks'
+import { courseMarks } from '#shared/schemas/courseMarks'
 import { marksTable } from '../../../domain/marking/marksTable'
-import { myMarks } from '../../../domain/marking/myMarks'
+import { myCourseMarks } from '../../../domain/marking/myCourseMarks'
 import { defineApiHandler } from '../../../utils/defineApiHandler'
 import { useStores } from '../../../utils/useStores'
 
@@ -15,7 +15,7 @@ export default defineApiHandler({
   handle: async ({ acting, params, query, now }) => {
     if (!acting) return refuse('not_found')
     const { read } = useStores()
-    if (acting.role === 'student') return { kind: 'own' as const, labs: await myMarks(read, { courseId: params.courseId, membershipId: acting.actorId }, now) }
+    if (acting.role === 'student') return { kind: 'own' as const, ...await myCourseMarks(read, { courseId: params.courseId, membershipId: acting.actorId }, now) }
     const allowedSectionIds = acting.role === 'ta' ? acting.sectionIds : null
     return { kind: 'table' as const, table: await marksTable(read, { courseId: params.courseId, sectionId: query.section ?? null, allowedSectionIds }, now) }
   },

@@ -1,9 +1,9 @@
 import { z } from 'zod'
 import { refuse } from '#shared/errors'
 import { coursePeople } from '#shared/schemas/departmentReplies'
-import { listCoursePeople } from '../../../domain/terms/listCoursePeople'
-import { defineApiHandler } from '../../../utils/defineApiHandler'
-import { useStores } from '../../../utils/useStores'
+import { listCoursePeople } from '../../../../domain/terms/listCoursePeople'
+import { defineApiHandler } from '../../../../utils/defineApiHandler'
+import { useStores } from '../../../../utils/useStores'
 
 export default defineApiHandler({
   action: 'course:people',
