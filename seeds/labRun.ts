@@ -85,15 +85,15 @@ export class LabRun {
     return answers
   }
 
-  /** Hands in; nothing where somebody has left the course by then. */
-  async submit(member: Member, story: Story, now: number): Promise<void> {
+  /** Hands in; nothing where somebody has left the course by then. `claimedSentAt` where the line was dead and the device says when it was sent. */
+  async submit(member: Member, story: Story, now: number, claimedSentAt: number | null = null): Promise<void> {
     if (!await this.isThere(member)) return
     const shareId = await this.shareOf(member)
     const answers = await this.answers(member, shareId, story)
     await this.save(member, shareId, Object.entries(answers), () => now)
     const key = createHash('sha256').update(`${this.name} ${member.key} ${now}`).digest('hex').slice(0, 32)
     const request = { key, route: `POST /api/shares/${shareId}/submissions`, bodySha256: createHash('sha256').update(JSON.stringify(answers)).digest() }
-    await submitLab(this.stores, this.judging, { personId: member.personId, membershipId: member.membershipId, shareId, request, answers, claimedSentAt: null }, now)
+    await submitLab(this.stores, this.judging, { personId: member.personId, membershipId: member.membershipId, shareId, request, answers, claimedSentAt }, now)
   }
 
   /** Saves the first steps as somebody would who is in the middle of it. */
