@@ -15,6 +15,7 @@ import { describeMember } from '../../../server/domain/repairs/describeMember'
 import { repairMember } from '../../../server/domain/repairs/repairMember'
 import { readWork } from '../../../server/domain/submissions/readWork'
 import type { Judging } from '../../../server/domain/submissions/submitLab'
+import { composeMail } from '../../../server/mail/composeMail'
 import { openTemporary } from '../../fixtures/openTemporary'
 import { referenceIn } from '../../fixtures/reference'
 import { handIn, rightAnswers } from '../../fixtures/submitting'
@@ -225,6 +226,10 @@ describe('what was done', () => {
     expect((await mine()).repairs).toMatchObject([{ kind: 'accommodation', extraDays: 4, reason: null, by: 'Lena Ruiz' }, { kind: 'extension', labTitle: 'The layer above the roof', reason, by: 'Lena Ruiz' }])
     const mails = await stores.read.selectFrom('outbox').select(['template', 'to_membership_id', 'facts_json']).execute()
     expect(mails.map(mail => [mail.template, mail.to_membership_id])).toEqual([['repair', 'm-0'], ['repair', 'm-0']])
+    const letters = mails.map(mail => composeMail('repair', JSON.parse(mail.facts_json), { publicUrl: 'https://labs.example.edu', tokenOf: () => '' }))
+    expect(letters.map(letter => letter.subject)).toEqual(['A later due time: The layer above the roof', 'Your due times in AS 240'])
+    expect(letters[0]?.text).toMatch(/18 Oct(ober)? 2026|Oct(ober)? 18/)
+    expect(letters[0]?.text).toContain('https://labs.example.edu/c/course-1/marks')
     const entries = await stores.read.selectFrom('ledger_entry').select(['action', 'facts_json']).execute()
     expect(entries.map(entry => entry.action)).toEqual(['allowance.granted', 'accommodation.set'])
     expect(JSON.stringify([mails, entries])).not.toContain('secret')
