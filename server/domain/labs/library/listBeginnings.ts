@@ -4,7 +4,7 @@ import type { LabKind } from '#shared/schemas/labParts'
 import type { Read } from '../../../db/writer'
 import type { Observations } from '../../../observations/chunks'
 import type { ActorMembership } from '../../people/actor'
-import { neededQuantities } from '../../shares/servedData'
+import { neededQuantities, type Flight } from '../../shares/servedData'
 import { layersThatMeet, missingColumns, newestFlights } from './fillSupply'
 import { readyLabs, type LibraryTexts } from './readyLabs'
 
@@ -31,9 +31,19 @@ export async function listBeginnings(read: Read, observations: Observations, inp
   const ready = readyLabs(input.texts).map(({ key, body }): ReadyLabRow => ({
     key, ...aboutLab(body), goesOut: body.fieldPlan !== null, hasPractice: body.practice !== null, needs: neededQuantities(body),
     missing: flights.length === 0 ? neededQuantities(body) : flights.map(flight => missingColumns(body, flight)).reduce((least, missing) => missing.length < least.length ? missing : least),
-    layers: Math.min(body.conditions?.atMost ?? 0, flights.reduce((sum, flight) => sum + layersThatMeet(body, flight).length, 0)),
+    layers: layersOf(body, flights),
   }))
   return { ready: ready.sort((a, b) => Number(b.layers > 0) - Number(a.layers > 0)), earlier: await listEarlier(read, input), flights: flights.length }
+}
+
+function layersOf(body: LabBody, flights: readonly Flight[]): number {
+  const most = body.conditions?.atMost ?? 0
+  let found = 0
+  for (const flight of flights) {
+    if (found >= most) break
+    found += layersThatMeet(body, flight).length
+  }
+  return Math.min(found, most)
 }
 
 const aboutLab = (body: LabBody) => ({

@@ -71,6 +71,10 @@ describe('a lab as text', () => {
   })
 })
 
+it('a revision from before labs had such parts is read as one without them', () => {
+  expect(labBody.parse({ title: 'Old', text: 'Text.', supply: [], steps: [] })).toEqual({ title: 'Old', text: 'Text.', supply: [], steps: [], kind: null, minutes: null, aims: [], outcomes: [], fieldPlan: null, guide: '', conditions: null, practice: null })
+})
+
 describe('a hostile text', () => {
   const quickly = (file: string) => {
     const started = performance.now()
