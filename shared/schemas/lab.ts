@@ -1,7 +1,10 @@
 import { z } from 'zod'
-import { askedOf } from './askedSteps'
+import { askedOf, askedSteps } from './askedSteps'
 import { labParts, leg } from './labParts'
 import { labStep } from './steps'
+
+/** Every entry is asked, judged and proved by itself on every share. */
+const mostEntries = 200
 
 /**
  * A lab's revision as an author writes it: kept in `lab_revision.body_json`, checked by the editor's form, its route and its row alike.
@@ -20,6 +23,8 @@ export const labBody = z.object({
   steps: z.array(labStep).max(60),
   ...labParts,
 }).superRefine((body, context) => {
+  const entries = askedSteps(body).length
+  if (entries > mostEntries) context.addIssue({ code: 'custom', path: ['steps'], message: `A lab asks at most ${mostEntries} entries, and this one asks ${entries}: a table asks one in each of its cells.` })
   /** Keys of what is asked so far, and of the steps that are made of parts. */
   const asked = new Set<string>(), taken = new Set<string>()
   body.steps.forEach((step, at) => {

@@ -89,6 +89,8 @@ export const tableStep = z.object({
   key: blockKey, kind: z.literal('table'), ...titled,
   rows: z.number().int().min(1).max(24),
   columns: z.array(z.object({ key: partKey, title: z.string().trim().min(1).max(60), pointsMilli, ...asked })).min(1).max(6),
+}).superRefine((step, context) => {
+  if (new Set(step.columns.map(column => column.key)).size !== step.columns.length) context.addIssue({ code: 'custom', path: ['columns'], message: 'Two columns have the same key.' })
 })
 export type TableStep = z.infer<typeof tableStep>
 

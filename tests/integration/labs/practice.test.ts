@@ -1,5 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { labBody } from '../../../shared/schemas/lab'
+import { labBody, type LabBody } from '../../../shared/schemas/lab'
 import { closed1004 } from '../../../shared/thermo/conventions/closed1004'
 import { libraryTexts } from '../../../seeds/labs'
 import { bindingProblems } from '../../../server/domain/labs/bindingProblems'
@@ -28,6 +28,12 @@ const ready = readyLabs(libraryTexts())
 const inversion = ready.find(lab => lab.key === 'morning-inversion')!.body
 const later = now + 3_600_000
 const load = (shareId: string) => loadShare(stores.read, observations, shareId)
+/** The share as of another lab: a practice takes nothing of a share but its lab and convention. */
+const loadAs = (body: LabBody) => async (shareId: string) => {
+  const loaded = await load(shareId)
+  return { ...loaded, revision: { ...loaded.revision, body } }
+}
+const attemptIn = (body: LabBody, stepKey: string, typed: Record<string, string>) => tryPractice(stores.read, loadAs(body), who, { stepKey, typed }, later)
 const attempt = (stepKey: string, typed: Record<string, string>) => tryPractice(stores.read, load, who, { stepKey, typed }, later)
 
 beforeAll(async () => {
@@ -91,6 +97,34 @@ describe('a practice', () => {
     expect(keys('wet-bulb-outdoors')).not.toContain('fan')
   })
 
+  it('works no value of the student’s own: what was typed in earlier steps, also as an own reading, is carried nowhere', async () => {
+    const outdoors = ready.find(lab => lab.key === 'wet-bulb-outdoors')!.body
+    const vapor = { vapor: '12.3 hPa' }
+    const plain = await attemptIn(outdoors, 'vapor', vapor)
+    expect(plain.worked?.lines.length).toBeGreaterThan(0)
+    expect(await attemptIn(outdoors, 'vapor', { ...vapor, dry: '31.7 °C', humidity: '43 %' })).toEqual(plain)
+    // at the reference pressure the temperature is the potential temperature: 400 K would follow from the 400 K typed before it
+    const twice = labBody.parse({ ...inversion, steps: [
+      { key: 'first', kind: 'number', title: 'A', pointsMilli: 1, quantity: 'potential-temperature', unit: 'K', inputs: { pressure: { from: 'share', column: 'pressure', read: 'lowest' }, temperature: { from: 'share', column: 'air-temperature', read: 'lowest' } } },
+      { key: 'second', kind: 'number', title: 'B', pointsMilli: 1, quantity: 'temperature-from-potential-temperature', unit: 'K', digits: 5, inputs: { pressure: { from: 'text', value: 1000, unit: 'hPa' }, potentialTemperature: { from: 'step', key: 'first' } } },
+    ] })
+    expect(await attemptIn(twice, 'second', { first: '400.0 K', second: '400.0 K' })).toMatchObject({ judged: 'above' })
+  })
+
+  it('holds back what rests on a step that is held back, whose value its working would print', async () => {
+    await expect(attempt('parcel', { parcel: '10 °C' })).rejects.toMatchObject({ code: 'not_found' })
+    expect(practicedSteps(inversion).map(step => step.key)).toEqual(['rate-ends', 'rate-fit', 'fit-error', 'theta-base', 'theta-top'])
+  })
+
+  it('holds back what rests on the bounds of the layer alone, which are no data', async () => {
+    const bound = (read: string) => ({ from: 'share', column: 'height', read })
+    const ratio = (key: string, low: string, high: string) => ({ key, kind: 'number', title: key, pointsMilli: 1, quantity: 'lapse-rate-of-two-readings', unit: 'K/km', inputs: {
+      lowHeight: bound(low), highHeight: bound(high), lowTemperature: { from: 'text', value: 12, unit: 'Cel' }, highTemperature: { from: 'text', value: 11, unit: 'Cel' } } })
+    const body = labBody.parse({ ...inversion, steps: [ratio('by-bounds', 'lowBound', 'highBound'), ratio('by-rows', 'lowest', 'highest')] })
+    expect(practicedSteps(body).map(step => step.key)).toEqual(['by-rows'])
+    await expect(attemptIn(body, 'by-bounds', { 'by-bounds': '10 K/km' })).rejects.toMatchObject({ code: 'not_found' })
+  })
+
   it('keeps nothing and marks nothing', async () => {
     const before = await stores.read.selectFrom('draft').selectAll().execute()
     await attempt('rate-fit', { 'rate-fit': '-30 K/km' })
@@ -100,11 +134,7 @@ describe('a practice', () => {
 
   it('is another’s where the share is another’s, and is not there in a lab without one', async () => {
     await expect(readPractice(stores.read, load, { ...who, membershipId: department.members.second }, later)).rejects.toMatchObject({ code: 'not_found' })
-    const bare = async (shareId: string) => {
-      const loaded = await load(shareId)
-      return { ...loaded, revision: { ...loaded.revision, body: { ...loaded.revision.body, practice: null } } }
-    }
-    await expect(readPractice(stores.read, bare, who, later)).rejects.toMatchObject({ code: 'not_found' })
+    await expect(readPractice(stores.read, loadAs({ ...inversion, practice: null }), who, later)).rejects.toMatchObject({ code: 'not_found' })
   })
 
   it('on readings of a flight that shares are drawn from stops the posting', async () => {

@@ -34,4 +34,16 @@ describe('what a lab asks', () => {
     expect(() => of(choice(true, true))).toThrow('One option is right here')
     expect(() => of({ ...choice(true, true), isSeveral: true })).not.toThrow()
   })
+  it('refuses a table with two columns of one key, whose cells would be one', () => {
+    const twice = { ...table, columns: table.columns.map(column => ({ ...column, key: 'a', inputs: {} })) }
+    expect(labBody.safeParse({ title: 'T', supply: [], steps: [twice] }).error?.issues.map(issue => [issue.path.join('.'), issue.message])).toContainEqual(['steps.0.columns', 'Two columns have the same key.'])
+    expect(() => of({ ...twice, columns: twice.columns.map((column, at) => ({ ...column, key: `a${at}` })) })).not.toThrow()
+  })
+  it('is at most 200 entries, cells of tables and parts of fits counted', () => {
+    const [column] = table.columns
+    const cells = (key: string, rows: number, columns: number) => ({ ...table, key, rows, columns: Array.from({ length: columns }, (_, at) => ({ ...column, key: `c${at}` })) })
+    const full = [cells('one', 24, 5), cells('two', 13, 6), fit]
+    expect(askedSteps(of(...full))).toHaveLength(200)
+    expect(labBody.safeParse({ title: 'T', supply: [], steps: [...full, cells('three', 1, 1)] }).error?.issues).toMatchObject([{ path: ['steps'], message: expect.stringContaining('at most 200 entries, and this one asks 201') }])
+  })
 })

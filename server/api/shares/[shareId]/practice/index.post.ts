@@ -4,6 +4,7 @@ import { practiceTry, triedStep } from '#shared/schemas/practice'
 import { tryPractice } from '../../../../domain/labs/practice/tryPractice'
 import { defineApiHandler } from '../../../../utils/defineApiHandler'
 import { loadShareHere } from '../../../../utils/useJudging'
+import { useComputingLimits } from '../../../../utils/useLimits'
 import { useStores } from '../../../../utils/useStores'
 
 export default defineApiHandler({
@@ -12,5 +13,8 @@ export default defineApiHandler({
   params: z.object({ shareId: z.string() }),
   body: practiceTry,
   reply: triedStep,
-  handle: ({ acting, params, body, now }) => tryPractice(useStores().read, loadShareHere, { membershipId: acting?.actorId ?? refuse('not_found'), shareId: params.shareId }, body, now),
+  handle: async ({ actor, acting, params, body, now }) => {
+    await useComputingLimits().compute((actor ?? refuse('not_signed_in')).personId)
+    return tryPractice(useStores().read, loadShareHere, { membershipId: acting?.actorId ?? refuse('not_found'), shareId: params.shareId }, body, now)
+  },
 })
