@@ -74,7 +74,7 @@ export const refusalWords: Record<RefusalCode, Words> = {
   dispute_exists: plain('Already in dispute', 'This step has an open dispute.'),
   dispute_closed: plain('The dispute is closed', 'It has been ruled on.'),
   dispute_window_over: plain('Too late to object', 'The time for objections is over. Speak to your instructor.'),
-  own_work: plain('Your own work', 'Nobody rules on their own work or on marks they gave by hand where they are the only TA.'),
+  own_work: plain('Your own work', 'Nobody rules on their own work, puts right their own case or that of somebody with whom they declared a conflict of interest, or rules on marks they gave by hand where they are the only TA.'),
   taken_by_another: { title: 'Taken', detail: f => `${f.by ?? 'Another TA'} has it.` },
   already_ruled: { title: 'Already ruled', detail: f => `${f.by ?? 'Another TA'} ruled on it${f.at ? ` at ${f.at}` : ''}. Your text is kept below.` },
   goes_to_instructor: plain('For the instructor', 'This one is the instructor’s to rule on.'),

@@ -19,8 +19,13 @@ export const repairBody = z.discriminatedUnion('kind', [
 ])
 export type RepairBody = z.infer<typeof repairBody>
 
-/** `claim`: the late rule counts from the device's own time; `work`: late work is accepted where the rule keeps it and gives nothing. */
-export const lateWorkBody = z.object({ submissionId: id, accepts: z.enum(['claim', 'work']), reason: repairReason })
+/**
+ * `due`: the student's due moved since the work came, and the late rule counts from it; `claim`: it counts from the device's own time;
+ * `work`: late work is accepted where the rule keeps it and gives nothing.
+ */
+export const lateWorkWay = z.enum(['due', 'claim', 'work'])
+export type LateWorkWay = z.infer<typeof lateWorkWay>
+export const lateWorkBody = z.object({ submissionId: id, accepts: lateWorkWay, reason: repairReason })
 export type LateWorkBody = z.infer<typeof lateWorkBody>
 
 /** Sentences for whoever did it: what it came to, and what they may not have expected. */
@@ -44,8 +49,8 @@ export type SoFar = z.infer<typeof soFar>
 
 export const memberAttempt = z.object({
   submissionId: z.string(), attempt: z.number().int(), receiptNo: z.string(), at: instant, lateDays: z.number().int(), claimedSentAt: instant.nullable(), isCounting: z.boolean(),
-  /** What staff can accept of it; null where there is nothing to accept. */
-  accepts: z.enum(['claim', 'work']).nullable(), isAccepted: z.boolean(), totalMilli: z.number().int(),
+  /** The grounds on which staff can accept it; none where there is nothing to accept. */
+  accepts: z.array(lateWorkWay), isAccepted: z.boolean(), totalMilli: z.number().int(),
 })
 export const memberLab = z.object({
   labId: z.string(), title: z.string(), zone: z.string(), sectionDueAt: instant, dueAt: instant, dueLocal: z.string(), dueFrom: dueSource, opensAt: instant, closesAt: instant.nullable(),

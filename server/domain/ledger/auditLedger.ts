@@ -27,13 +27,14 @@ type MarkFact = z.infer<typeof markFact>
  * Proves that the marks that are shown are what the ledger adds up to.
  *
  * Each chain is walked link by link; every row that an entry covers is digested again, column by column; the last `after` of
- * each step must be the mark in force; every mark must stand in an entry. Anchors, the heads that receipts and mails carry,
+ * each step must be the mark in force; every mark and every repair must stand in an entry. Anchors, the heads that receipts and mails carry,
  * show what a chain alone cannot: that its end was cut off, or that all of it was written anew.
  */
 export async function auditLedger(read: Read, anchors: readonly Anchor[] = []): Promise<AuditReport> {
   const findings: AuditFinding[] = []
   const chains = await read.selectFrom('ledger_chain').selectAll().orderBy('id').execute()
   const told = new Map<string, MarkFact>()
+  const repairs = new Map<string, string>()
   let entries = 0
   const digestAt = new Map<string, string>()
   for (const chain of chains) {
@@ -45,6 +46,7 @@ export async function auditLedger(read: Read, anchors: readonly Anchor[] = []): 
       findings.push(...checkLink(entry, prev))
       const facts = factsOf(entry, findings)
       for (const mark of facts?.marks ?? []) tellMark(told, mark, entry, findings)
+      if (facts?.repair !== undefined && facts.covers?.repair) repairs.set(`${entry.chain_id} ${entry.seq}`, facts.repair)
       if (facts?.covers) findings.push(...await checkCovered(read, entry, facts, facts.covers))
       digestAt.set(`${entry.chain_id} ${entry.seq}`, entry.digest.toString('hex'))
       prev = entry.digest
@@ -54,6 +56,7 @@ export async function auditLedger(read: Read, anchors: readonly Anchor[] = []): 
     else if (!chain.head.equals(prev)) findings.push({ where: `${chain.id} ${seq}`, what: 'ledger_chain.head is not the digest of the last entry' })
   }
   const marks = await checkMarks(read, told, findings)
+  await checkRepairs(read, repairs, findings)
   await checkEvaluations(read, findings)
   await checkPrivateTexts(read, findings)
   for (const anchor of anchors) {
@@ -175,6 +178,12 @@ async function checkMarks(read: Read, told: ReadonlyMap<string, MarkFact>, findi
   }
   for (const key of told.keys()) if (!seen.has(key)) findings.push({ where: key, what: 'the ledger tells of a mark that is not there' })
   return current.length
+}
+
+/** Every repair is the one that its entry names and covers: a row that was put in behind the product gives days, attempts or due times that nobody gave. */
+async function checkRepairs(read: Read, told: ReadonlyMap<string, string>, findings: AuditFinding[]): Promise<void> {
+  const rows = await read.selectFrom('repair').select(['id', 'ledger_chain', 'ledger_seq']).execute()
+  for (const row of rows) if (told.get(`${row.ledger_chain} ${row.ledger_seq}`) !== row.id) findings.push({ where: `repair ${row.id}`, what: 'the repair is not the one that its entry of the ledger names' })
 }
 
 async function checkEvaluations(read: Read, findings: AuditFinding[]): Promise<void> {

@@ -1,7 +1,7 @@
 import { refuse } from '#shared/errors'
 import { soFarOf } from '#shared/marking/soFar'
 import { lateRule } from '#shared/schemas/lab'
-import type { DueSource, MemberLab, MemberPage } from '#shared/schemas/repairs'
+import { lateWorkWay, type DueSource, type MemberLab, type MemberPage } from '#shared/schemas/repairs'
 import type { Read } from '../../db/writer'
 import { attemptsOfShares } from '../marking/attemptsOf'
 import { labTotal, totalOfAttempt } from '../marking/labTotal'
@@ -9,7 +9,7 @@ import type { Acting } from '../people/actor'
 import { personalDue } from '../submissions/lateness'
 import { workList } from '../submissions/workList'
 import { wallTimeAt } from '../terms/wallClock'
-import { acceptedAs } from './acceptLateWork'
+import { acceptedAs } from './acceptedAs'
 import { accommodationsOf } from './applyAccommodations'
 import { repairsOf } from './repairsOf'
 import { studentOf, type Student } from './studentOf'
@@ -55,9 +55,9 @@ async function labsOf(read: Read, student: Student, now: number): Promise<Member
       attempts: entry.attempts, granted: entry.attempts - posting.attempts, standing: entry.standing, releasedAt: posting.released_at === null ? null : new Date(posting.released_at).toISOString(),
       maxMilli: entry.maxMilli, totalMilli: counts?.totalMilli ?? null,
       made: made.map((attempt) => {
-        const late = { receivedAt: attempt.receivedAt, dueAt: dueApplied.get(attempt.submissionId) ?? dueAt, lateUnits: attempt.lateUnits, claimedSentAt: attempt.claimedSentAt }
+        const late = { receivedAt: attempt.receivedAt, dueAt: dueApplied.get(attempt.submissionId) ?? dueAt, presentDueAt: dueAt, lateUnits: attempt.lateUnits, claimedSentAt: attempt.claimedSentAt }
         const rule = lateRule.parse(JSON.parse(attempt.lateRuleJson))
-        const accepts = (['claim', 'work'] as const).find(way => !attempt.isAccepted && acceptedAs(way, late, rule, entry.zone) !== null) ?? null
+        const accepts = lateWorkWay.options.filter(way => !attempt.isAccepted && acceptedAs(way, late, rule, entry.zone) !== null)
         return {
           submissionId: attempt.submissionId, attempt: attempt.attempt, receiptNo: attempt.receiptNo, at: new Date(attempt.receivedAt).toISOString(), lateDays: attempt.lateUnits,
           claimedSentAt: attempt.claimedSentAt === null ? null : new Date(attempt.claimedSentAt).toISOString(), isCounting: counts?.submissionId === attempt.submissionId, accepts, isAccepted: attempt.isAccepted, totalMilli: totalOfAttempt(attempt).totalMilli,

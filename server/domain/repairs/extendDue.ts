@@ -1,13 +1,19 @@
 import { refuse } from '#shared/errors'
+import { lateRule } from '#shared/schemas/lab'
 import { nextNumber } from '../../db/queries/counters'
 import type { Trx } from '../../db/writer'
 import { newId } from '../ids'
 import { endOfMinute, resolveWallTime, tellShift } from '../terms/wallClock'
+import { acceptedAs } from './acceptedAs'
+import { lateWorkOf } from './lateWorkOf'
 import { labOfStudent, type Student } from './studentOf'
 import { writeRepair } from './writeRepair'
 
-/** Gives a student a later due time for one lab. It never takes time away: the latest of section, extension and accommodation counts. */
-export async function extendDue(trx: Trx, student: Student, input: { actorId: string, labId: string, dueLocal: string, reason: string }, now: number): Promise<{ dueAt: number, told: string | null }> {
+/**
+ * Gives a student a later due time for one lab. It never takes time away: the latest of section, extension and accommodation counts.
+ * Work that is in already keeps the lateness decided at receipt until staff count it from the new due: whoever extends is told so.
+ */
+export async function extendDue(trx: Trx, student: Student, input: { actorId: string, labId: string, dueLocal: string, reason: string }, now: number): Promise<{ dueAt: number, told: string[] }> {
   const lab = await labOfStudent(trx, student, input.labId)
   const due = resolveWallTime(input.dueLocal, lab.zone)
   const dueAt = endOfMinute(due.at)
@@ -17,5 +23,7 @@ export async function extendDue(trx: Trx, student: Student, input: { actorId: st
     student, effect: { kind: 'extension', lab_id: lab.labId, due_at: dueAt }, labTitle: lab.title, reason: input.reason, actorId: input.actorId, action: 'allowance.granted',
     facts: { postingId: lab.postingId, labId: lab.labId, dueAt }, zone: lab.zone,
   }, now)
-  return { dueAt, told: tellShift(due, input.dueLocal) }
+  const shift = tellShift(due, input.dueLocal)
+  const keepsLateness = (await lateWorkOf(trx, student.membershipId, { labId: lab.labId })).some(late => !late.isAccepted && acceptedAs('due', late, lateRule.parse(JSON.parse(late.lateRuleJson)), late.zone) !== null)
+  return { dueAt, told: [...shift === null ? [] : [shift], ...keepsLateness ? ['Work that is in already keeps its lateness until you count it from the new due, under Late work on the student’s page.'] : []] }
 }

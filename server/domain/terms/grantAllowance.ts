@@ -11,6 +11,7 @@ export function grantAllowance({ write }: Stores, input: Asked & { postingId: st
     if (!posting) return refuse('not_found')
     const member = await trx.selectFrom('membership').select('id').where('id', '=', input.membershipId).where('course_id', '=', posting.courseId).where('section_id', '=', posting.sectionId).where('state', '=', 'active').executeTakeFirst()
     if (!member) return refuse('invalid', {}, [{ path: 'membershipId', message: 'Not a student of this section.' }])
-    return extendDue(trx, await studentOf(trx, posting.courseId, member.id), { actorId: input.actorId, labId: posting.labId, dueLocal: input.dueLocal, reason: input.reason }, now)
+    const { dueAt, told } = await extendDue(trx, await studentOf(trx, posting.courseId, member.id), { actorId: input.actorId, labId: posting.labId, dueLocal: input.dueLocal, reason: input.reason }, now)
+    return { dueAt, told: told.length === 0 ? null : told.join(' ') }
   }))
 }

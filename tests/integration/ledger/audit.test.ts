@@ -54,6 +54,16 @@ describe('audit', () => {
     expect(await findings()).toBe(`repair.${change.split(' ')[0]} was changed`)
   })
 
+  it.each([
+    ['another repair', 'ledger_seq', -1],
+    ['no repair', '1', 99],
+  ])('names a repair that was put in behind its back under an entry that names %s', async (_names, entry, seq) => {
+    await repairMember(stores, { actorId: 'm-lead', once: null, courseId: 'course-1', memberId: 'm-0', body: { kind: 'accommodation', extraDays: 2 } }, onTime)
+    expect(await findings()).toBe('')
+    tamper(`insert into repair select 'planted', ${seq}, 'm-1', lab_id, kind, due_at, 60, submission_id, late_units, late_rule_json, reason_digest, by_actor_id, at, ledger_chain, ${entry} from repair`)
+    expect((await auditLedger(stores.read)).findings).toEqual([{ where: 'repair planted', what: 'the repair is not the one that its entry of the ledger names' }])
+  })
+
   it('says what the ledger adds up to where the mark in force is another', async () => {
     tamper('update mark set points_milli = 1 where step_key = \'theta\'')
     expect(await findings()).toMatch(/mark\.points_milli is 1 of 1000 .* the ledger adds up to 1000 of 1000/)

@@ -1,7 +1,7 @@
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import { DomainError } from '#shared/errors'
 import type { LateRule } from '#shared/schemas/lab'
-import type { RepairBody } from '#shared/schemas/repairs'
+import type { LateWorkWay, RepairBody } from '#shared/schemas/repairs'
 import type { OpenDatabase } from '../../../server/db/open'
 import { auditLedger } from '../../../server/domain/ledger/auditLedger'
 import { classView } from '../../../server/domain/marking/classView'
@@ -43,7 +43,7 @@ async function make(given: Partial<Parameters<typeof workingCourse>[1]> = {}) {
 }
 const asked = { actorId: 'm-lead', once: null }
 const repair = (body: RepairBody, at = wednesday, memberId = 'm-0') => repairMember(stores, { ...asked, courseId: 'course-1', memberId, body }, at)
-const accept = (submissionId: string, accepts: 'claim' | 'work', at = later) => acceptLateWork(stores, { ...asked, courseId: 'course-1', memberId: 'm-0', body: { submissionId, accepts, reason: 'The line of the halls was down' } }, at)
+const accept = (submissionId: string, accepts: LateWorkWay, at = later) => acceptLateWork(stores, { ...asked, courseId: 'course-1', memberId: 'm-0', body: { submissionId, accepts, reason: 'The line of the halls was down' } }, at)
 const submit = (key: string, at: number, given: { answers?: Record<string, string>, claimedSentAt?: number } = {}) => handIn(stores, judging, course, { no: 0, key, at, ...given })
 const lead: Acting = { actorId: 'm-lead', role: 'lead', courseId: 'course-1', sectionIds: [] }
 const page = async (at = later) => describeMember(stores.read, { courseId: 'course-1', memberId: 'm-0', acting: lead }, at)
@@ -176,9 +176,9 @@ describe('late work', () => {
   it('K6: sent offline 23:50, arrived 00:10: late by rule, a claim for staff, and one act accepts it', async () => {
     await make({ times: due2359 })
     const { submissionId } = await submit('key-00000001', arrived, { claimedSentAt: claimed })
-    expect((await lab()).made[0]).toMatchObject({ lateDays: 1, claimedSentAt: new Date(claimed).toISOString(), accepts: 'claim', totalMilli: 5400 })
+    expect((await lab()).made[0]).toMatchObject({ lateDays: 1, claimedSentAt: new Date(claimed).toISOString(), accepts: ['claim'], totalMilli: 5400 })
     expect(await accept(submissionId, 'claim')).toEqual({ told: ['The work counts as in time.'] })
-    expect((await lab()).made[0]).toMatchObject({ lateDays: 0, accepts: null, isAccepted: true, totalMilli: 6000 })
+    expect((await lab()).made[0]).toMatchObject({ lateDays: 0, accepts: [], isAccepted: true, totalMilli: 6000 })
     await release()
     expect(await submissionMarks(stores.read, { isStaff: false, membershipId: 'm-0' }, submissionId)).toMatchObject({ lateDays: 0, totalMilli: 6000, lateWords: 'on time, as staff accepted it' })
     expect((await classView(stores.read, 'posting-1', later)).people[0]).toMatchObject({ lateDays: 0, claimedSentAt: null })
@@ -200,10 +200,45 @@ describe('late work', () => {
   it('under the rule "none" work is kept, earns nothing, and counts once staff accept it', async () => {
     await make({ lateRule: { kind: 'none' } })
     const { submissionId } = await submit('key-00000001', Date.parse('2026-10-19T15:00:00Z'))
-    expect((await lab()).made[0]).toMatchObject({ accepts: 'work', totalMilli: 0 })
+    expect((await lab()).made[0]).toMatchObject({ accepts: ['work'], totalMilli: 0 })
     expect(await codeOf(accept(submissionId, 'claim'))).toBe('invalid')
     await accept(submissionId, 'work')
     expect((await lab()).made[0]).toMatchObject({ lateDays: 3, totalMilli: 6000 })
+  })
+
+  it('an extension that comes after the work moves nothing by itself, says so, and repairs it by one act', async () => {
+    await make()
+    const { submissionId } = await submit('key-00000001', Date.parse('2026-10-19T15:00:00Z'))
+    expect((await lab()).made[0]).toMatchObject({ lateDays: 3, accepts: [], totalMilli: 4200 })
+    expect(await codeOf(accept(submissionId, 'due'))).toBe('invalid')
+    const { told } = await repair({ kind: 'extension', labId: 'lab-1', dueLocal: '2026-10-18T17:00', reason }, later)
+    expect(told).toEqual([expect.stringContaining('keeps its lateness')])
+    expect((await lab()).made[0]).toMatchObject({ lateDays: 3, accepts: ['due'], totalMilli: 4200 })
+    expect(await accept(submissionId, 'due')).toEqual({ told: ['The work counts as 1 day late.'] })
+    expect((await lab()).made[0]).toMatchObject({ lateDays: 1, accepts: [], isAccepted: true, totalMilli: 5400 })
+    expect((await repair({ kind: 'extension', labId: 'lab-1', dueLocal: '2026-10-18T18:00', reason }, later)).told).toEqual([])
+    expect((await auditLedger(stores.read)).findings).toEqual([])
+  })
+
+  it('a claim counts from a due that moved since, and staff may take the new due without it', async () => {
+    await make()
+    const sent = Date.parse('2026-10-18T15:00:00Z')
+    const first = await submit('key-00000001', Date.parse('2026-10-19T15:00:00Z'), { claimedSentAt: sent })
+    const second = await submit('key-00000002', Date.parse('2026-10-19T15:00:00Z'), { claimedSentAt: sent })
+    await repair({ kind: 'extension', labId: 'lab-1', dueLocal: '2026-10-18T17:00', reason }, later)
+    expect((await lab()).made.map(one => one.accepts)).toEqual([['due', 'claim'], ['due', 'claim']])
+    expect(await accept(first.submissionId, 'claim')).toEqual({ told: ['The work counts as in time.'] })
+    expect(await accept(second.submissionId, 'due')).toEqual({ told: ['The work counts as 1 day late.'] })
+  })
+
+  it('under the rule "none" a due that moved past the work makes it count; one that does not reach it changes nothing', async () => {
+    await make({ lateRule: { kind: 'none' } })
+    const { submissionId } = await submit('key-00000001', Date.parse('2026-10-19T15:00:00Z'))
+    await repair({ kind: 'extension', labId: 'lab-1', dueLocal: '2026-10-18T17:00', reason }, later)
+    expect(await codeOf(accept(submissionId, 'due'))).toBe('invalid')
+    await repair({ kind: 'extension', labId: 'lab-1', dueLocal: '2026-10-19T17:00', reason }, later)
+    expect(await accept(submissionId, 'due')).toEqual({ told: ['The work counts as in time.'] })
+    expect((await lab()).made[0]).toMatchObject({ lateDays: 0, totalMilli: 6000 })
   })
 
   it('of somebody else, or in time, is not accepted here, nor by whoever declared a conflict', async () => {
@@ -215,6 +250,39 @@ describe('late work', () => {
     expect(await codeOf(accept(other.submissionId, 'claim'))).toBe('not_found')
     await stores.write(trx => trx.insertInto('conflict_of_interest').values({ membership_id: 'm-lead', other_id: 'm-0' }).execute())
     expect(await codeOf(accept(own.submissionId, 'claim'))).toBe('own_work')
+  })
+})
+
+describe('a repair of whichever kind', () => {
+  const kinds: RepairBody[] = [
+    { kind: 'extension', labId: 'lab-1', dueLocal: '2026-10-18T17:00', reason }, { kind: 'accommodation', extraDays: 2 }, { kind: 'excused', labId: 'lab-1', reason },
+    { kind: 'attempt', labId: 'lab-1', reason }, { kind: 'section', sectionId: 'section-b', reason },
+  ]
+  const nothingDone = async () => {
+    for (const table of ['repair', 'allowance', 'ledger_entry', 'outbox'] as const) expect(await stores.read.selectFrom(table).selectAll().execute()).toEqual([])
+    expect(await stores.read.selectFrom('membership').select('section_id').where('id', '=', 'm-0').executeTakeFirst()).toEqual({ section_id: 'section-a' })
+  }
+  beforeEach(async () => {
+    await make()
+    await stores.write(trx => trx.insertInto('section').values({ id: 'section-b', course_id: 'course-1', name: 'B' }).execute())
+  })
+
+  it.each(kinds)('$kind is not given by whoever declared a conflict of interest, and nothing of it stays', async (body) => {
+    await stores.write(trx => trx.insertInto('conflict_of_interest').values({ membership_id: 'm-lead', other_id: 'm-0' }).execute())
+    expect(await codeOf(repair(body))).toBe('own_work')
+    await nothingDone()
+    expect(await codeOf(repair(body, wednesday, 'm-1'))).toBe('done')
+  })
+
+  it.each(kinds)('$kind is given by nobody to themselves, in a role of the department either', async (body) => {
+    await stores.write(async (trx) => {
+      await trx.insertInto('actor').values({ id: 'r-admin', kind: 'department_role' }).execute()
+      await trx.insertInto('department_role').values({ id: 'r-admin', person_id: 'p-0', pseudonym: 'admin', role: 'admin', scope_json: null, until_at: null, state: 'active', created_at: wednesday }).execute()
+    })
+    const by = (actorId: string, memberId: string) => codeOf(repairMember(stores, { actorId, once: null, courseId: 'course-1', memberId, body }, wednesday))
+    expect([await by('r-admin', 'm-0'), await by('m-0', 'm-0')]).toEqual(['own_work', 'own_work'])
+    await nothingDone()
+    expect(await by('r-admin', 'm-1')).toBe('done')
   })
 })
 

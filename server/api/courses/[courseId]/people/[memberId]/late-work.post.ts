@@ -7,7 +7,7 @@ import { useStores } from '../../../../../utils/useStores'
 
 export default defineApiHandler({
   action: 'person:acceptLate',
-  summary: 'Accept late work: the device’s own time, or the work itself where the rule gives it nothing',
+  summary: 'Accept late work: from a due that moved since, the device’s own time, or the work itself where the rule gives it nothing',
   params: z.object({ courseId: z.string(), memberId: z.string() }),
   body: lateWorkBody,
   reply: repairTold,
