@@ -6,6 +6,15 @@ export type QuantityInput = ListedQuantity['inputs'][number]
 export type ListedFlight = z.output<typeof flightListReply>['flights'][number]
 export type EditedLab = z.output<typeof labEditReply>
 
+/** What a number can be bound to, and what is wrong so far: the same for a step and for a column of a table. */
+export interface BindingGround {
+  quantities: readonly ListedQuantity[]
+  columns: readonly { quantity: string, label: string }[]
+  constants: readonly string[]
+  earlier: readonly { key: string, title: string }[]
+  problems: readonly { path: string, message: string }[]
+}
+
 /** How a value is read from a share, as an author reads it. */
 export const readingWords: Record<string, string> = {
   layer: 'every row of the layer',
