@@ -14,7 +14,7 @@ export const refusalCodes = [
   'file_empty', 'file_header_only', 'file_binary', 'file_wrong_delimiter', 'file_line_too_long', 'file_not_gzip', 'file_cut', 'file_quote_open', 'file_too_many_columns', 'file_too_large_unpacked', 'no_time_column', 'no_height_column',
   'column_missing', 'zone_unknown', 'nothing_taken', 'import_cancelled', 'import_running', 'import_failed', 'too_many_stations', 'flight_too_long',
   // labs
-  'convention_open', 'lab_text_unreadable', 'lab_not_draft', 'lab_closed', 'lab_not_open', 'lab_withdrawn', 'share_degenerate', 'binding_invalid', 'band_too_wide', 'proof_open', 'no_share', 'dates_invalid', 'not_released', 'already_released',
+  'convention_open', 'lab_text_unreadable', 'lab_not_draft', 'lab_closed', 'lab_not_open', 'lab_withdrawn', 'share_degenerate', 'binding_invalid', 'band_too_wide', 'proof_open', 'no_practice', 'no_share', 'dates_invalid', 'not_released', 'already_released',
   'nothing_to_submit', 'attempts_used', 'marks_shown', 'wrong_dimension',
   // moderation
   'dispute_exists', 'dispute_closed', 'dispute_window_over', 'own_work', 'taken_by_another', 'already_ruled', 'goes_to_instructor', 'points_out_of_range',

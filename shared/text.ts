@@ -61,6 +61,7 @@ export const refusalWords: Record<RefusalCode, Words> = {
   lab_withdrawn: plain('The lab was withdrawn', 'Your instructor withdrew it. What you typed is kept.'),
   share_degenerate: { title: 'A share cannot be asked', detail: f => `Share ${f.share ?? ''}, step ${f.step ?? ''}: ${f.reason ?? ''}` },
   binding_invalid: { title: 'A step is not bound', detail: f => `Step ${f.step ?? ''}: ${f.reason ?? ''}` },
+  no_practice: { title: 'No practice here', detail: () => 'This lab comes without a practice: work your own data.' },
   proof_open: { title: 'The proof run is not settled', detail: f => `${f.count ?? 'Some'} of its findings are neither settled nor owned by anybody. The first: ${f.first ?? ''}` },
   band_too_wide: { title: 'The accepted range is too wide', detail: f => `Share ${f.share ?? ''}, step ${f.step ?? ''}: ${f.reason ?? ''}` },
   no_share: plain('No data for you yet', 'No share was drawn for you. Tell your instructor.'),

@@ -22,7 +22,7 @@ export interface DraftAsked {
 export interface DraftColumn extends DraftAsked { key: string, title: string }
 export interface DraftOption { key: string, text: string, isRight: boolean, why: string }
 /** One of the numbers of a fit; it is not asked where it has no marks. */
-export interface DraftFitPart { marks: string, digits: string, grantedAbsolute: string, slipMarks: string }
+export interface DraftFitPart { marks: string, digits: string, grantedAbsolute: string, grantedPercent: string, slipMarks: string }
 export interface DraftDivision { division: string, unit: string }
 
 export interface DraftStep extends DraftAsked {
@@ -46,7 +46,7 @@ export interface LabDraft { title: string, text: string, steps: DraftStep[], sup
 
 export const emptySource = (): DraftSource => ({ from: '', column: '', read: 'layer', value: '', unit: '', name: '', key: '' })
 export const emptyAsked = (): DraftAsked => ({ quantity: '', variant: '', inputs: {}, unit: '', digits: '3', marks: '1', grantedAbsolute: '', grantedPercent: '', slipMarks: '', digitsMarks: '', nearWidths: '', nearMarks: '' })
-const emptyPart = (marks: string): DraftFitPart => ({ marks, digits: '3', grantedAbsolute: '', slipMarks: '' })
+const emptyPart = (marks: string): DraftFitPart => ({ marks, digits: '3', grantedAbsolute: '', grantedPercent: '', slipMarks: '' })
 const fromLayer = (column: string): DraftSource => ({ ...emptySource(), from: 'share', column, read: 'layer' })
 
 /** A new step of a kind, with what it nearly always has. */
@@ -91,7 +91,7 @@ function askedDraft(step: Asked): DraftAsked {
   }
 }
 
-const partDraft = (part: FitStep['parts']['slope'] | null): DraftFitPart => part ? { marks: marks(part.pointsMilli), digits: String(part.digits), grantedAbsolute: text(part.granted.absolute), slipMarks: some(part.slipMilli) } : emptyPart('')
+const partDraft = (part: FitStep['parts']['slope'] | null): DraftFitPart => part ? { marks: marks(part.pointsMilli), digits: String(part.digits), grantedAbsolute: text(part.granted.absolute), grantedPercent: part.granted.relative === undefined ? '' : String(percent(part.granted.relative)), slipMarks: some(part.slipMilli) } : emptyPart('')
 const sourcesDraft = (inputs: Readonly<Record<string, InputSource>>): Record<string, DraftSource> => Object.fromEntries(Object.entries(inputs).map(([name, source]) => [name, sourceDraft(source)]))
 const marks = (milli: number): string => String(milli / 1000)
 const some = (milli: number): string => milli === 0 ? '' : marks(milli)

@@ -10912,6 +10912,10 @@ function makeBand(definition, question, inputs2, center, unit, carried = {}) {
     const spread = name === "result" ? { below: half2, above: half2 } : carriedSpread(definition, question, inputs2, center, name, half2);
     if (spread.below > 0 || spread.above > 0) parts.push(part("reading", name === "result" ? "half a division of the axis" : `half a division of the axis (${labelOf(definition, name)})`, spread.below, spread.above));
   }
+  for (const [name, half2] of Object.entries(question.ownRead ?? {})) {
+    const spread = carriedSpread(definition, question, inputs2, center, name, half2);
+    if (spread.below > 0 || spread.above > 0) parts.push(part("carried", `digits of your own reading (${labelOf(definition, name)})`, spread.below, spread.above));
+  }
   if (question.accuracy) {
     parts.push(part("reading", "accuracy of the station’s sensor", question.accuracy.stationSi, question.accuracy.stationSi));
     parts.push(part("reading", "accuracy of your own instrument", question.accuracy.ownSi, question.accuracy.ownSi));
@@ -11140,7 +11144,7 @@ function judgedValue(definition, question, answer, unit, center, carried, base) 
   if (acceptedBy === "carried") notes.push(carriedWords);
   const digits = hasDigits(definition, question, answer, center, unit);
   if (isAccepted && !digits && (question.digitsMilli ?? 0) > 0) notes.push(`Right, with fewer digits than asked: ${showMilli(question.digitsMilli ?? 0, 2)} of the marks are for them.`);
-  const nearMiss = !isAccepted && slip2 === null && question.near !== void 0 && answer.reading === "ok" && isWithinWidths(band, near, question.near.widths);
+  const nearMiss = !isAccepted && slip2 === null && question.near !== void 0 && answer.reading === "ok" && [band, ...carriedBand ? [carriedBand] : []].some((one2) => isWithinWidths(one2, near, question.near?.widths ?? 1));
   if (nearMiss && (question.near?.milli ?? 0) > 0) notes.push(`A near miss: within ${question.near?.widths} half-widths of the reference.`);
   return {
     ...base,

@@ -8,7 +8,7 @@ const statusOf: Partial<Record<RefusalCode, number>> = {
   not_found: 404,
   changed_meanwhile: 412, version_missing: 428,
   already_exists: 409, already_ruled: 409, dispute_exists: 409, taken_by_another: 409, plan_changed: 409, already_released: 409, import_running: 409, lab_not_draft: 409,
-  lab_closed: 409, lab_not_open: 409, lab_withdrawn: 409, term_closed: 409, dispute_closed: 409, dispute_window_over: 409, attempts_used: 409, marks_shown: 409, not_released: 409, last_lead: 409, last_admin: 409, import_cancelled: 409,
+  lab_closed: 409, lab_not_open: 409, lab_withdrawn: 409, term_closed: 409, dispute_closed: 409, dispute_window_over: 409, attempts_used: 409, marks_shown: 409, not_released: 409, no_practice: 409, proof_open: 409, last_lead: 409, last_admin: 409, import_cancelled: 409,
   too_large: 413, file_too_large_unpacked: 413, wrong_content_type: 415, too_many_requests: 429, busy: 503, no_room: 507, read_only: 503, failed: 500,
   request_key_missing: 400,
 }

@@ -42,6 +42,10 @@ export function makeBand(definition: QuantityDefinition, question: StepQuestion,
     const spread = name === 'result' ? { below: half, above: half } : carriedSpread(definition, question, inputs, center, name, half)
     if (spread.below > 0 || spread.above > 0) parts.push(part('reading', name === 'result' ? 'half a division of the axis' : `half a division of the axis (${labelOf(definition, name)})`, spread.below, spread.above))
   }
+  for (const [name, half] of Object.entries(question.ownRead ?? {})) {
+    const spread = carriedSpread(definition, question, inputs, center, name, half)
+    if (spread.below > 0 || spread.above > 0) parts.push(part('carried', `digits of your own reading (${labelOf(definition, name)})`, spread.below, spread.above))
+  }
   if (question.accuracy) {
     parts.push(part('reading', 'accuracy of the station’s sensor', question.accuracy.stationSi, question.accuracy.stationSi))
     parts.push(part('reading', 'accuracy of your own instrument', question.accuracy.ownSi, question.accuracy.ownSi))

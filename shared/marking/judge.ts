@@ -84,7 +84,7 @@ function judgedValue(definition: QuantityDefinition, question: StepQuestion, ans
   if (acceptedBy === 'carried') notes.push(carriedWords)
   const digits = hasDigits(definition, question, answer, center, unit)
   if (isAccepted && !digits && (question.digitsMilli ?? 0) > 0) notes.push(`Right, with fewer digits than asked: ${showMilli(question.digitsMilli ?? 0, 2)} of the marks are for them.`)
-  const nearMiss = !isAccepted && slip === null && question.near !== undefined && answer.reading === 'ok' && isWithinWidths(band, near, question.near.widths)
+  const nearMiss = !isAccepted && slip === null && question.near !== undefined && answer.reading === 'ok' && [band, ...(carriedBand ? [carriedBand] : [])].some(one => isWithinWidths(one, near, question.near?.widths ?? 1))
   if (nearMiss && (question.near?.milli ?? 0) > 0) notes.push(`A near miss: within ${question.near?.widths} half-widths of the reference.`)
   return {
     ...base,

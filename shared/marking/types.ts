@@ -48,6 +48,8 @@ export interface StepQuestion {
   readOff?: Readonly<Record<string, number>>
   /** Where the student read an instrument of their own: what either may be off, SI. */
   accuracy?: { stationSi: number, ownSi: number }
+  /** Half a unit of what the student read on an instrument of their own and goes on from, SI, by input: it is in no data, so its digits are all there is. */
+  ownRead?: Readonly<Record<string, number>>
   /** In place of a quantity: options of which one or several are right. `quantity` then is `choice`. */
   choice?: { options: readonly { key: string, label: string }[], right: readonly string[], why: readonly string[] }
   /** What rulings have added: a slip that counts as right here, an interval, or a variant. */

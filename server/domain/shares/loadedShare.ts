@@ -9,6 +9,8 @@ export interface ServedColumn {
   quantity: string
   unit: string
   decimals: number | null
+  /** Not shown to students: what they read on an instrument of their own is compared with it. */
+  isWithheld?: true
   /** As printed; an empty text is a missing value. */
   texts: readonly string[]
   /** The printed digits as numbers in `unit`; NaN-free: null is a missing value. */

@@ -34,13 +34,14 @@ export function askedQuestion(loaded: ShareGround, stepKey: string, earlier: Ear
   if (!('inputs' in resolved)) return resolved
   const own = ownReadings(step, definition.inputs, earlier, loaded.revision.body)
   const carried = carriedInputs(step, definition.inputs.filter(input => own[input.name] === undefined), earlier)
+  const ownRead = Object.fromEntries(Object.entries(own).flatMap(([name, read]) => read.halfUnitSi > 0 ? [[name, read.halfUnitSi]] : []))
   const readOff = Object.fromEntries(Object.entries(step.divisions).map(([name, { division, unit }]) => [name, siWidth(division, unit) / 2]))
   return {
     question: {
-      quantity: step.quantity, ...(step.variant === null ? {} : { variant: step.variant }), inputs: { ...resolved.inputs, ...own }, convention: loaded.convention,
+      quantity: step.quantity, ...(step.variant === null ? {} : { variant: step.variant }), inputs: { ...resolved.inputs, ...Object.fromEntries(Object.entries(own).map(([name, read]) => [name, read.valueSi])) }, convention: loaded.convention,
       granted: grantedSi(step), digits: step.digits, unit: step.unit, maxMilli: step.pointsMilli, slipMilli: step.slipMilli,
       ...(step.digitsMilli > 0 ? { digitsMilli: step.digitsMilli } : {}), ...(step.near ? { near: step.near } : {}),
-      ...(Object.keys(readOff).length > 0 ? { readOff } : {}),
+      ...(Object.keys(readOff).length > 0 ? { readOff } : {}), ...(Object.keys(ownRead).length > 0 ? { ownRead } : {}),
       ...(step.accuracy ? { accuracy: { stationSi: siWidth(step.accuracy.station, step.unit), ownSi: siWidth(step.accuracy.own, step.unit) } } : {}),
       ...(Object.keys(carried).length > 0 ? { carried } : {}),
     },
@@ -72,12 +73,12 @@ function choiceQuestion(step: Extract<AskedStep, { kind: 'choice' }>, convention
 }
 
 /** Inputs that the student read on an instrument of their own: what they read stands in place of the station's value, where it can be. */
-function ownReadings(step: AskedNumber, inputs: readonly InputDefinition[], earlier: EarlierReadings, body: LoadedShare['revision']['body']): Record<string, number> {
+function ownReadings(step: AskedNumber, inputs: readonly InputDefinition[], earlier: EarlierReadings, body: LoadedShare['revision']['body']): Record<string, { valueSi: number, halfUnitSi: number }> {
   const readings = new Set(body.steps.flatMap(entry => entry.kind === 'reading' ? [entry.key] : []))
   return Object.fromEntries(inputs.flatMap((input) => {
     const source = step.inputs[input.name]
     const carried = source?.from === 'step' && readings.has(source.key) ? carriedFrom(input, earlier[source.key]) : null
-    return carried && 'valueSi' in carried ? [[input.name, carried.valueSi]] : []
+    return carried && 'valueSi' in carried ? [[input.name, carried]] : []
   }))
 }
 

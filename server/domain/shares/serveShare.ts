@@ -5,7 +5,7 @@ import { formatUnit } from '#shared/units/formatQuantity'
 import { asksOf, constantWords, datumWords } from '../labs/askOf'
 import { legWords } from './legs'
 import type { ServedRows } from './loadedShare'
-import { csvOf, serveRows, type Flight, type ServedFlight } from './servedData'
+import { csvOf, serveRows, shownColumns, type Flight, type ServedFlight } from './servedData'
 
 /** What a lab's shares are served with: the same for every share of it. */
 export interface Serving { body: LabBody, convention: Convention }
@@ -36,7 +36,7 @@ function headOf({ body, convention }: Serving, flight: Flight, item: Pick<Supply
     `Use the ${used} of ${rows.count} rows with use = 1. Rows with use = 0 lie outside the layer or the leg, or a value that a step needs is missing or flagged. An empty cell is a missing value.`,
     ...askedSteps(body).map((step, at) => `Step ${at + 1}, ${step.title}: ${asks[step.key] ?? ''}`),
     `Constants (${convention.title}): ${Object.entries(convention.constants).flatMap(([name, value]) => constantWords(name, value) ?? []).join('; ')}`,
-    `Columns: ${rows.columns.map(column => `${column.name} in ${formatUnit(column.unit)}`).join('; ')}`,
+    `Columns: ${shownColumns(rows).map(column => `${column.name} in ${formatUnit(column.unit)}`).join('; ')}`,
     'Times are UTC. The worked value is computed from the digits in this file.',
     '',
   ]

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto'
-import { askedNumbers } from '#shared/schemas/askedSteps'
+import { askedNumbers, type AskedNumber } from '#shared/schemas/askedSteps'
 import type { LabBody, SupplyItem } from '#shared/schemas/lab'
 import { rowsOfLeg } from './legs'
 import type { ServedColumn, ServedRows } from './loadedShare'
@@ -60,6 +60,15 @@ export function columnOf<Column extends { quantity: string }>(rows: { columns: r
   return rows.columns.find(column => column.quantity === quantity)
 }
 
+/** The columns that a student gets. What only own readings are compared with stays with the reference, or the readings would stand in the data. */
+export const shownColumns = <Column extends { isWithheld?: true }>(rows: { columns: readonly Column[] }): Column[] => rows.columns.filter(column => !column.isWithheld)
+
+function isWithheld(quantity: string, body: LabBody): boolean {
+  const takes = (step: AskedNumber) => Object.values(step.inputs).some(source => source.from === 'share' && source.column === quantity)
+  const steps = askedNumbers(body)
+  return quantity !== 'height' && steps.some(step => step.kind === 'reading' && takes(step)) && !steps.some(step => step.kind !== 'reading' && takes(step))
+}
+
 /** A flight with the digits in which it is served: the same for every share that is drawn from it. */
 export interface ServedFlight {
   columns: readonly ServedColumn[]
@@ -73,7 +82,7 @@ export interface ServedFlight {
 
 export function serveFlight(flight: Flight, body: LabBody): ServedFlight {
   const needed = neededQuantities(body)
-  const columns = flight.columns.filter(column => isServed(column, body, needed)).map(column => serveColumn(column, flight.rowCount))
+  const columns = flight.columns.filter(column => isServed(column, body, needed)).map(column => ({ ...serveColumn(column, flight.rowCount), ...(isWithheld(column.quantity, body) ? { isWithheld: true as const } : {}) }))
   const height = columnOf({ columns }, 'height')
   const neededColumns = needed.flatMap(quantity => columnOf({ columns }, quantity) ?? [])
   const flags = flight.columns.filter(column => neededColumns.some(needs => needs.name === column.name)).map(column => column.flags)
@@ -108,9 +117,9 @@ function instantText(at: number | undefined): string {
 export function csvOf(head: readonly string[], rows: ServedRows): string {
   const comments = head.flatMap(line => line.split(/[\r\n]+/)).map(line => `# ${line}`.trimEnd())
   const hasTimes = rows.times.some(time => time !== '')
-  const names = ['row', ...(hasTimes ? ['time_utc'] : []), ...rows.columns.map(column => `${column.name} [${column.unit}]`), 'use']
+  const names = ['row', ...(hasTimes ? ['time_utc'] : []), ...shownColumns(rows).map(column => `${column.name} [${column.unit}]`), 'use']
   const lines = Array.from({ length: rows.count }, (_, row) => [
-    String(row + 1), ...(hasTimes ? [rows.times[row] ?? ''] : []), ...rows.columns.map(column => column.texts[row] ?? ''), rows.use[row] ? '1' : '0',
+    String(row + 1), ...(hasTimes ? [rows.times[row] ?? ''] : []), ...shownColumns(rows).map(column => column.texts[row] ?? ''), rows.use[row] ? '1' : '0',
   ].join(','))
   return [...comments, names.map(nameCell).join(','), ...lines, ''].join('\n')
 }

@@ -6,6 +6,7 @@ import type { Read } from '../../db/writer'
 import { tableRow } from '../labs/rowsOfLayer'
 import { renderInline, renderLabText } from '../labs/renderLabText'
 import type { LoadedShare } from '../shares/loadedShare'
+import { shownColumns } from '../shares/servedData'
 import { postedGround, readGround } from './ground'
 import { listSubmissions } from './listSubmissions'
 import { closingOf, personalDue } from './lateness'
@@ -40,7 +41,7 @@ export async function readWork(read: Read, loadShare: (shareId: string) => Promi
       ...(step.kind === 'choice' ? { unit: '1', digits: 1, options: step.options.map(({ key, text }) => ({ key, html: renderInline(text) })), isSeveral: step.isSeveral } : { unit: step.unit, digits: step.digits, options: [], isSeveral: false }),
       from: [...new Set(Object.values(step.kind === 'choice' ? {} : step.inputs).flatMap(source => source.from === 'step' ? numberOf.get(source.key) ?? [] : []))].sort((a, b) => a - b),
     })),
-    rows: { times: [...loaded.rows.times], use: [...loaded.rows.use], columns: loaded.rows.columns.map(column => ({ name: column.name, quantity: column.quantity, unit: column.unit, texts: [...column.texts] })) },
+    rows: { times: [...loaded.rows.times], use: [...loaded.rows.use], columns: shownColumns(loaded.rows).map(column => ({ name: column.name, quantity: column.quantity, unit: column.unit, texts: [...column.texts] })) },
     drafts,
     made,
     stopped: stoppedBy(ground, now), now: new Date(now).toISOString(),

@@ -19,6 +19,9 @@ describe('the calculator of a student', () => {
     const during = Date.parse('2026-10-14T20:00:00Z')
     expect(await isAskedNow(db.read, student, asked, during)).toBe(true)
     expect(await isAskedNow(db.read, student, 'no-such-quantity', during)).toBe(false)
+    // and what would give it away: the line through the same rows
+    for (const key of ['fitted-temperature-at-zero-height', 'lapse-rate-of-two-readings', 'lapse-rate-binned-least-squares']) expect(await isAskedNow(db.read, student, key, during), key).toBe(true)
+    expect(await isAskedNow(db.read, student, 'density', during)).toBe(false)
     expect(await isAskedNow(db.read, student, asked, Date.parse('2026-10-01T00:00:00Z'))).toBe(false)
     expect(await isAskedNow(db.read, { memberships: [{ ...student.memberships[0]!, role: 'ta' }] }, asked, during)).toBe(false)
     await db.write(trx => trx.updateTable('posting').set({ released_at: during }).execute())

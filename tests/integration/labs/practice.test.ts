@@ -134,7 +134,7 @@ describe('a practice', () => {
 
   it('is another’s where the share is another’s, and is not there in a lab without one', async () => {
     await expect(readPractice(stores.read, load, { ...who, membershipId: department.members.second }, later)).rejects.toMatchObject({ code: 'not_found' })
-    await expect(readPractice(stores.read, loadAs({ ...inversion, practice: null }), who, later)).rejects.toMatchObject({ code: 'not_found' })
+    await expect(readPractice(stores.read, loadAs({ ...inversion, practice: null }), who, later)).rejects.toMatchObject({ code: 'no_practice' })
   })
 
   it('on readings of a flight that shares are drawn from stops the posting', async () => {

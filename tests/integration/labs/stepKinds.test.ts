@@ -1,4 +1,5 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
+import { askedNumbers } from '../../../shared/schemas/askedSteps'
 import { labBody, type LabBody } from '../../../shared/schemas/lab'
 import { defaultConvention } from '../../../shared/thermo/conventions'
 import { bindingProblems } from '../../../server/domain/labs/bindingProblems'
@@ -7,10 +8,13 @@ import { ensureConvention } from '../../../server/domain/labs/conventions'
 import { createLab } from '../../../server/domain/labs/createLab'
 import { postLab } from '../../../server/domain/labs/postLab'
 import { prepareLab } from '../../../server/domain/labs/prepareLab'
+import { readTyped } from '../../../server/domain/marking/readTyped'
 import { recheckMarks } from '../../../server/domain/marking/recheckMarks'
 import type { Reference } from '../../../server/domain/marking/reference'
 import { submissionMarks } from '../../../server/domain/marking/submissionMarks'
 import { loadShare } from '../../../server/domain/shares/loadShare'
+import { questionFor } from '../../../server/domain/shares/questionFor'
+import { servedJson } from '../../../server/domain/shares/servedShare'
 import { readWork } from '../../../server/domain/submissions/readWork'
 import { submitLab } from '../../../server/domain/submissions/submitLab'
 import { openObservations, type Observations } from '../../../server/observations/chunks'
@@ -102,6 +106,28 @@ describe('a lab of every kind of step', () => {
     const why = marks.steps.find(step => step.key === 'why')
     expect(why?.worked).toMatchObject({ value: 'The layer is stable.' })
     expect(why?.worked.lines[0]?.text).toContain('Its rate is less than the dry one.')
+  })
+
+  it('goes on from a reading within its digits: 61 typed for 61.3 takes nothing from what follows', async () => {
+    const made = await createLab(stores, { ...department.asked, courseId: department.courseId, body: body([steps[3], { ...steps[4], digits: 4 }]) }, now)
+    const lab = await prepareLab(stores.read, observations, made.id)
+    const { rows } = lab.serve(lab.items[0]!)
+    const ground = { rows, convention: lab.convention, share: { item: lab.items[0]! }, revision: { body: lab.revision.body } }
+    const read = readTyped(askedNumbers(lab.revision.body)[0]!, '12.7 C')
+    const question = questionFor(ground, 'theta-own', { own: read })
+    expect(reference.judgeStep(question, readTyped(askedNumbers(lab.revision.body)[1]!, '')).band?.parts.map(part => part.label)).toContain('digits of your own reading (air temperature)')
+    const exact = (12.74 + 273.15) * (1000 / 950) ** (287 / 1004) // from what stood on the dial
+    expect(reference.judgeStep(question, readTyped(askedNumbers(lab.revision.body)[1]!, `${exact.toFixed(2)} K`)).isAccepted).toBe(true)
+  })
+
+  it('keeps from students what only their own readings are compared with', async () => {
+    const readingOnly = await createLab(stores, { ...department.asked, courseId: department.courseId, body: body([steps[3]]) }, now)
+    const lab = await prepareLab(stores.read, observations, readingOnly.id)
+    const served = lab.serve(lab.items[0]!)
+    expect(served.csv).not.toContain('temperature_c')
+    expect(served.head.join()).not.toContain('temperature_c')
+    expect(served.rows.columns.map(column => column.name)).toContain('temperature_c') // which the reference still has
+    expect(servedJson(served.rows, lab.items[0]!, 'ground').columns.map(column => column.name)).toEqual(['height_m', 'pressure_hpa'])
   })
 
   it('is judged again to the same marks', async () => {

@@ -14,7 +14,7 @@ export async function openPractice(read: Read, loadShare: (shareId: string) => P
   postedGround(await readGround(read, who.shareId, who.membershipId), now)
   const { revision: { body }, convention } = await loadShare(who.shareId)
   const { practice } = body
-  if (!practice) return refuse('not_found')
+  if (!practice) return refuse('no_practice')
   const rows = serveRows(serveFlight(practiceFlight(practice), body), practice)
   const ground: ShareGround = { rows, convention, share: { item: { lowM: practice.lowM, highM: practice.highM } }, revision: { body } }
   const asks = asksOf(body, convention, { item: practice, heightDatum: 'ground', rows })

@@ -59,7 +59,7 @@ function typedBy(player: PlayerKey, step: AskedStep, question: StepQuestion): st
     case 'notebook': return `${inUnit(value, definition, unit)} ${unitWords(question, definition, unit)}`
     case 'early': return typedAsAsked(definition, question, unit, value)
     case 'swapped': return typedAsAsked(definition, question, unit, exchanged(judgement) ?? value)
-    case 'plot': return typedAsAsked(definition, { ...question, digits: definition.kind === 'temperature' ? 2 : 2 }, unit, value)
+    case 'plot': return typedAsAsked(definition, { ...question, digits: 2 }, unit, value)
   }
 }
 

@@ -79,7 +79,7 @@ describe('a hostile text', () => {
   const quickly = (file: string) => {
     const started = performance.now()
     const read = readLabFile(file)
-    expect(performance.now() - started).toBeLessThan(3000)
+    expect(performance.now() - started).toBeLessThan(15_000)
     return read
   }
 
