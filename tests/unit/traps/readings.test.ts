@@ -1,6 +1,8 @@
 import { describe, expect, it } from 'vitest'
 import { checkBand } from '#shared/marking/proof'
-import { judgeTyped, stepOf } from '../../fixtures/marking/ask'
+import { quantities } from '#shared/thermo/registry'
+import { toHalfDivision } from '../../../components/plot/toHalfDivision'
+import { judgeTyped, kelvins, stepOf } from '../../fixtures/marking/ask'
 
 /** 8 K/km between two readings off a plot with divisions of 0.5 K and 10 m. */
 const readOff = { lowerTemperature: 0.25, upperTemperature: 0.25, lowerHeight: 5, upperHeight: 5 }
@@ -17,5 +19,31 @@ describe('traps U: readings off a plot', () => {
     expect(checkBand(rate(200)).ok).toBe(false)
     expect(checkBand(rate(200)).reasons.join()).toContain('half the way')
     expect(checkBand(rate(2000)).ok).toBe(true)
+  })
+  it('U16: the plot in words gives every level to half a division, which the same band accepts and which says no more than the plot', () => {
+    const division = 0.5
+    for (let tenths = -40; tenths <= 400; tenths += 7) {
+      const celsius = tenths / 10 + 0.03
+      const told = toHalfDivision(celsius, division)
+      expect(Math.abs(told / (division / 2) - Math.round(told / (division / 2)))).toBeLessThan(1e-9) // no finer than the plot
+      const step = stepOf('profile-temperature-at-height', { height: [100, 200], temperature: kelvins(celsius, celsius), level: 150 }, { unit: 'Cel', readOff: { result: division / 2 } })
+      expect(judgeTyped(step, `${told.toFixed(2)} °C`).isAccepted, `${celsius} told as ${told}`).toBe(true)
+    }
+  })
+})
+
+describe('traps C and M: what a diagram and the sky tell', () => {
+  it('C16: w is read at the dewpoint; at the temperature it is the saturation mixing ratio, which is the named slip (P050)', () => {
+    // University of Wyoming sounding archive, 72357 OUN 00Z 4 May 1999: 959.0 hPa, 22.2 °C, dewpoint 19.0 °C, MIXR 14.64 g/kg
+    const [temperature, dewpoint] = kelvins(22.2, 19.0)
+    const step = stepOf('mixing-ratio', { pressure: 95_900, temperature: temperature!, dewpoint: dewpoint! }, { unit: 'g/kg' })
+    expect(judgeTyped(step, '14.6 g/kg').isAccepted).toBe(true)
+    const atTemperature = judgeTyped(step, '17.8 g/kg')
+    expect(atTemperature.isAccepted).toBe(false)
+    expect(atTemperature.slip?.key).toBe('temperature-for-dewpoint')
+  })
+  it('M23: a cloud base that somebody saw is compared with the LCL and never marked by it: no quantity asks for it', () => {
+    const asked = quantities.map(({ key, name, ask }) => `${key} ${name} ${ask}`).filter(words => /cloud[- ]base|observed.*condensation|condensation.*(observed|seen)/i.test(words))
+    expect(asked).toEqual([])
   })
 })
